@@ -1,0 +1,150 @@
+import type { Judgement, PlotSeries, Verdict } from '@/lib/sheet/types';
+import type { BoundComponent, SketchSpec } from '@/standards/types';
+
+/**
+ * Everything that an acceptance report says, frozen when the report is issued. Figures are stored results, already rounded to the
+ * text that is shown: neither the template nor the page computes. All lengths of results are shown in mm, readings in the unit typed.
+ */
+export interface ReportModel {
+  schemaVersion: 1;
+  language: 'en';
+  paper: 'A4' | 'Letter';
+  document: {
+    number: string;
+    revision: number;
+    state: 'draft' | 'issued' | 'signed' | 'signed-with-remarks' | 'refused' | 'superseded';
+    issuedAt: string | null;
+    issuedBy: string | null;
+    checkedBy: string | null;
+    programVersion: string;
+  };
+  letterhead: { name: string; addressLines: string[]; contact: string | null };
+  machine: {
+    manufacturer: string;
+    model: string;
+    serialNumber: string;
+    year: number | null;
+    control: string | null;
+    hours: string | null;
+    kind: string;
+    sizeClass: string | null;
+    site: string | null;
+    components: { id: string; what: string }[];
+  };
+  customer: { name: string; engineer: string | null; order: string | null };
+  job: {
+    reference: string;
+    purpose: string;
+    scope: string | null;
+    from: string;
+    to: string | null;
+    codes: string[];
+    decisionRule: string;
+    people: { name: string; role: string }[];
+  };
+  conditions: {
+    place: string | null;
+    lines: { label: string; value: string }[];
+    temperatures: { at: string; air: string | null; machine: string | null }[];
+    airRange: string | null;
+  };
+  instruments: {
+    number: string;
+    name: string;
+    resolution: string | null;
+    certificate: string | null;
+    calibrated: string | null;
+    due: string | null;
+    uncertainty: string | null;
+    /** Set where it was used after its due date: who allowed it and why. */
+    override: string | null;
+  }[];
+  headline: string;
+  counts: { asFound: Counts; asLeft: Counts };
+  summary: SummaryRow[];
+  notInPlan: { title: string; reason: string }[];
+  blocks: TestBlock[];
+  remarks: { no: number; sheetOrder: number | null; text: string; owner: string | null; due: string | null; closed: string | null }[];
+  signatures: SignatureBlock[];
+  statement: string;
+}
+
+export interface Counts {
+  planned: number;
+  within: number;
+  out: number;
+  undecided: number;
+  forInformation: number;
+  leftOut: number;
+  notMeasured: number;
+  judged: number;
+}
+
+export interface SummaryRow {
+  order: number;
+  title: string;
+  component: string;
+  /** mm as shown, sign included; null: not measured in that state. */
+  asFound: string | null;
+  asFoundVerdict: Verdict | null;
+  asLeft: string | null;
+  asLeftVerdict: Verdict | null;
+  /** as left = as found, nothing was done. */
+  linked: boolean;
+  toleranceMm: string | null;
+  leftOut: string | null;
+  remarkNo: number | null;
+}
+
+export interface TestBlock {
+  order: number;
+  /** Own id and where the test comes from: `AX-1a · ISO 13041-1:2020`. */
+  reference: string;
+  title: string;
+  component: BoundComponent;
+  componentWords: string;
+  sketch: SketchSpec;
+  toleranceWords: string;
+  toleranceSource: string;
+  directionWords: string | null;
+  judgedFigure: string;
+  instruments: string[];
+  cautions: string[];
+  passes: PassBlock[];
+  leftOut: { reason: string; text: string | null } | null;
+  remark: string | null;
+}
+
+export interface PassBlock {
+  kind: 'as-found' | 'adjusting' | 'as-left';
+  kindWords: string;
+  takenAt: string | null;
+  by: string | null;
+  temperature: string | null;
+  /** as left = as found: no table of its own. */
+  linkedWords: string | null;
+  setUp: { label: string; value: string }[];
+  tables: { title: string | null; columns: string[]; rows: { label: string; cells: string[] }[] }[];
+  resultMm: string | null;
+  resultUm: string | null;
+  resultWords: string | null;
+  judgement: Judgement | null;
+  plot: PlotSeries | null;
+  /** Further figures of the method, `slope 25.0 µm/m`. */
+  figures: { label: string; value: string }[];
+  corrections: { field: string; was: string; now: string; by: string; at: string; reason: string | null }[];
+}
+
+export interface SignatureBlock {
+  role: 'inspector' | 'reviewer' | 'customer';
+  roleWords: string;
+  name: string;
+  function: string | null;
+  company: string | null;
+  signedAt: string | null;
+  outcome: string | null;
+  reason: string | null;
+  typed: string | null;
+  /** Strokes of a drawn signature as SVG path data in a box of 600 × 200. */
+  strokes: string[] | null;
+}
