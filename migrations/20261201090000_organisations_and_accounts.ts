@@ -202,7 +202,15 @@ export async function up(knex: Knex): Promise<void> {
 }
 
 export async function down(knex: Knex): Promise<void> {
-  await dropTables(knex, ['invitations', 'memberships', 'customers', 'throttles', 'access_tokens', 'accounts', 'organisations']);
+  await dropTables(knex, [
+    'invitations',
+    'memberships',
+    'customers',
+    'throttles',
+    'access_tokens',
+    'accounts',
+    'organisations',
+  ]);
   await knex.raw(`
     drop function if exists account_by_email, account_memberships, account_session, account_create, account_set_password,
       account_end_sessions, access_token_create, access_token_find, access_token_use, throttle_take, throttle_clear,

@@ -40,7 +40,9 @@ export async function up(knex: Knex): Promise<void> {
       check (until_date is null or until_date > from_date)`,
     customerReads: 'customer_id = (select app_customer())',
   });
-  await knex.raw('create unique index machine_owners_current on machine_owners (organisation_id, machine_id) where until_date is null');
+  await knex.raw(
+    'create unique index machine_owners_current on machine_owners (organisation_id, machine_id) where until_date is null',
+  );
   await knex.raw('create index machine_owners_customer on machine_owners (organisation_id, customer_id)');
 
   await replaceReadPolicy(knex, 'machines', ownedByCustomer('machines.id'));

@@ -3,7 +3,8 @@ import { createTenantTable, dropTables, replaceReadPolicy } from '@/db/tenant-ta
 
 /** What has left the office: a draft or a checked report is nobody's business outside. */
 const out = `state in ('issued', 'signed', 'signed-with-remarks', 'refused', 'superseded')`;
-const jobSeen = (column: string) => `exists (select 1 from jobs j where j.organisation_id = (select app_organisation()) and j.id = ${column})`;
+const jobSeen = (column: string) =>
+  `exists (select 1 from jobs j where j.organisation_id = (select app_organisation()) and j.id = ${column})`;
 const reportSeen = `exists (select 1 from reports r where r.organisation_id = (select app_organisation()) and r.id = report_id)`;
 
 export async function up(knex: Knex): Promise<void> {

@@ -1,0 +1,73 @@
+import type { NextAuthOptions } from 'next-auth';
+import CredentialsProvider from 'next-auth/providers/credentials';
+import { appDb } from '@/db/client';
+import { accountByEmail, accountMemberships, clearAttempts, takeAttempt } from '@/db/queries/accounts';
+import { passwordMatches } from '@/lib/auth/password';
+import { env } from '@/lib/env';
+
+declare module 'next-auth' {
+  interface User {
+    organisationId: string;
+    sessionVersion: number;
+  }
+}
+declare module 'next-auth/jwt' {
+  interface JWT {
+    organisationId?: string;
+    sessionVersion?: number;
+  }
+}
+
+/** Five quick failures, then one attempt every 20 seconds: slowed down, never locked out for good. */
+const attempts = { capacity: 5, refillPerSecond: 1 / 20 };
+
+/**
+ * Sign-in by e-mail and password. The session is a signed cookie (the library's credentials need that); its version is compared with
+ * the database's at every request, so that disabling somebody or ending sessions holds from the next request on.
+ */
+export const authOptions = (): NextAuthOptions => ({
+  secret: env.NEXTAUTH_SECRET,
+  session: { strategy: 'jwt', maxAge: 12 * 3600, updateAge: 1800 },
+  pages: { signIn: '/sign-in', error: '/sign-in' },
+  providers: [
+    CredentialsProvider({
+      credentials: { email: { type: 'email' }, password: { type: 'password' } },
+      async authorize(credentials) {
+        const email = credentials?.email?.trim().toLowerCase() ?? '';
+        const password = credentials?.password ?? '';
+        if (email.length > 320 || password.length > 1000) return null;
+        const bucket = `sign-in:${email}`;
+        const waitSeconds = await takeAttempt(appDb(), bucket, attempts.capacity, attempts.refillPerSecond);
+        if (waitSeconds > 0) throw new Error(`wait:${Math.ceil(waitSeconds)}`);
+        const account = await accountByEmail(appDb(), email);
+        if (!(await passwordMatches(account?.passwordHash, password)) || !account || account.disabled) return null;
+        const [first] = await accountMemberships(appDb(), account.id);
+        if (!first) return null;
+        await clearAttempts(appDb(), bucket);
+        return {
+          id: account.id,
+          email,
+          name: account.name,
+          organisationId: first.organisationId,
+          sessionVersion: account.sessionVersion,
+        };
+      },
+    }),
+  ],
+  callbacks: {
+    async jwt({ token, user, trigger, session }) {
+      if (user) {
+        token.sub = user.id;
+        token.organisationId = user.organisationId;
+        token.sessionVersion = user.sessionVersion;
+      }
+      // Changing the organisation: only to one in which the account is a member.
+      if (trigger === 'update' && token.sub && typeof session?.organisationId === 'string') {
+        const wanted = session.organisationId;
+        const mine = await accountMemberships(appDb(), token.sub);
+        if (mine.some((membership) => membership.organisationId === wanted)) token.organisationId = wanted;
+      }
+      return token;
+    },
+  },
+});
