@@ -1,0 +1,20 @@
+import { convert } from '@/lib/units/convert';
+import { formatDecimal } from '@/lib/units/format';
+
+/** A decimal string as a coordinate. Only drawings turn figures into numbers; nothing computed from this is ever shown as a figure. */
+export function coordinate(text: string): number {
+  const value = text.trim() === '' ? Number.NaN : Number(text);
+  if (!Number.isFinite(value)) throw new Error(`Not a figure that can be drawn: ${text}`);
+  return value;
+}
+
+/** µm as mm with no figure lost and with at least `places` decimals, so that limit and deviation stand in the same resolution. */
+export function micrometresAsMm(valueUm: string, places: number, signed = false): string {
+  const mm = convert(valueUm, 'µm', 'mm');
+  return formatDecimal(mm, { decimals: Math.max(decimalsOf(mm), places), signed });
+}
+
+/** Decimals of a figure as it is shown. */
+export function decimalsOf(shown: string): number {
+  return shown.match(/[.,](\d+)/)?.[1]?.length ?? 0;
+}
