@@ -19,7 +19,9 @@ export async function up(knex: Knex): Promise<void> {
       model jsonb not null,
       model_sha256 text not null,
       pdf_state text not null default 'waiting' check (pdf_state in ('waiting', 'ready', 'failed')),
+      -- As issued, and the same with the customer's signature.
       pdf_file_id uuid,
+      signed_pdf_file_id uuid,
       pdf_error_id text,
       issued_by uuid,
       issued_at timestamptz not null,
@@ -29,7 +31,8 @@ export async function up(knex: Knex): Promise<void> {
       created_at timestamptz not null default now(),
       unique (organisation_id, number, revision),
       foreign key (organisation_id, job_id) references jobs (organisation_id, id),
-      foreign key (organisation_id, pdf_file_id) references files (organisation_id, id)`,
+      foreign key (organisation_id, pdf_file_id) references files (organisation_id, id),
+      foreign key (organisation_id, signed_pdf_file_id) references files (organisation_id, id)`,
     customerReads: `${out} and ${jobSeen('job_id')}`,
     grants: 'select, insert, update',
   });
@@ -152,7 +155,7 @@ export async function up(knex: Knex): Promise<void> {
   await replaceReadPolicy(
     knex,
     'files',
-    `kind = 'report' and exists (select 1 from reports r where r.organisation_id = (select app_organisation()) and r.pdf_file_id = files.id)`,
+    `kind = 'report' and exists (select 1 from reports r where r.organisation_id = (select app_organisation()) and files.id in (r.pdf_file_id, r.signed_pdf_file_id))`,
   );
 
   await knex.raw(`
@@ -168,13 +171,15 @@ export async function up(knex: Knex): Promise<void> {
          or new.issued_by is distinct from old.issued_by then
         raise exception 'an issued report does not change' using errcode = 'WM001';
       end if;
-      if old.pdf_file_id is not null and new.pdf_file_id is distinct from old.pdf_file_id then
+      if (old.pdf_file_id is not null and new.pdf_file_id is distinct from old.pdf_file_id)
+         or (old.signed_pdf_file_id is not null and new.signed_pdf_file_id is distinct from old.signed_pdf_file_id) then
         raise exception 'the document of a report does not change' using errcode = 'WM001';
       end if;
       if old.state in ('signed', 'signed-with-remarks', 'refused') and new.state not in (old.state, 'superseded') then
         raise exception 'a signed report keeps its outcome' using errcode = 'WM001';
       end if;
-      if not app_is_staff() and (new.pdf_state <> old.pdf_state or new.supersedes is distinct from old.supersedes) then
+      if not app_is_staff() and (new.pdf_file_id is distinct from old.pdf_file_id
+         or new.signed_pdf_file_id is distinct from old.signed_pdf_file_id or new.supersedes is distinct from old.supersedes) then
         raise exception 'only the outcome is the signer''s to set' using errcode = 'WM001';
       end if;
       return new;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { units } from '@/lib/units/unit';
+import { UNITS } from '@/lib/units/unit';
 import { id } from './common';
 
 /**
@@ -13,7 +13,7 @@ export const readingOperation = z.strictObject({
   baseVersion: z.int().min(0),
   /** As typed; empty clears the field. */
   text: z.string().max(60, 'Longer than 60 characters.'),
-  unit: z.enum(units).nullable(),
+  unit: z.enum(UNITS).nullable(),
   source: z.enum(['typed', 'keypad', 'paste', 'device', 'planned']),
   deviceTime: z.iso.datetime({ offset: true }),
   seq: z.int().min(0),
