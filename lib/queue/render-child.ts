@@ -1,0 +1,32 @@
+import { renderReportPdf } from '@/templates/report/render';
+
+export type RenderRequest = { id: number; model: unknown };
+export type RenderAnswer =
+  | { kind: 'ready' }
+  | { kind: 'done'; id: number; pdf: Uint8Array; rssBytes: number }
+  | { kind: 'failed'; id: number; message: string; rssBytes: number };
+
+/**
+ * The process that draws reports, apart from web server and queue, because drawing stops the event loop for its
+ * whole length. Drawing needs no database and no settings: the model goes in, the bytes come out.
+ */
+function answer(message: RenderAnswer): void {
+  process.send?.(message);
+}
+
+process.on('message', async ({ id, model }: RenderRequest) => {
+  try {
+    const pdf = await renderReportPdf(model as Parameters<typeof renderReportPdf>[0]);
+    answer({ kind: 'done', id, pdf, rssBytes: process.memoryUsage.rss() });
+  } catch (error) {
+    const message = error instanceof Error ? (error.stack ?? error.message) : String(error);
+    answer({ kind: 'failed', id, message, rssBytes: process.memoryUsage.rss() });
+  }
+});
+
+// Without its worker this process has no purpose, however the worker ended.
+process.on('disconnect', () => process.exit(0));
+// A Ctrl-C reaches the whole group; the worker finishes the drawing in hand and then closes the channel.
+process.on('SIGINT', () => undefined);
+
+answer({ kind: 'ready' });
