@@ -59,8 +59,8 @@ export type AppliesTo =
   | { kind: 'cross-axis-and-spindle' }
   /** Y and X of the same turret. */
   | { kind: 'y-and-x' }
-  /** A Z-like axis alone. */
-  | { kind: 'longitudinal-axis'; plane: Plane }
+  /** A Z-like axis alone, one sheet in each of the planes. */
+  | { kind: 'longitudinal-axis'; planes: Plane[] }
   /** Main and sub-spindle facing each other. */
   | { kind: 'main-and-sub-spindle' }
   /** A turret or tool post with every work spindle it can reach. */
@@ -83,7 +83,12 @@ export type Layout =
       sag: boolean;
     }
   /** Straightness: one reading at each position. */
-  | { kind: 'profile'; positionsMm: DecimalText[]; localLengthMm?: DecimalText; reference: 'minimum-zone' | 'least-squares' | 'end-points' }
+  | {
+      kind: 'profile';
+      positionsMm: DecimalText[];
+      localLengthMm?: DecimalText;
+      reference: 'minimum-zone' | 'least-squares' | 'end-points';
+    }
   /** Squareness by a square, turned over: reference arm and measured arm, twice. */
   | { kind: 'square-reversed'; referencePositionsMm: DecimalText[]; measuredPositionsMm: DecimalText[] }
   /** Coaxiality: sections swept at four angles. */
@@ -113,9 +118,9 @@ export interface SizeClassTable {
 }
 
 export interface ToleranceRule {
-  /** By size class of the machine, by a length (measuring length or travel), or one figure for all. */
-  by: 'size-class' | 'length' | 'all';
-  /** size-class: index 0..2 is class 1..3; all: one entry; length: steps. */
+  /** By size class of the machine, by the travel of the axis, or one figure for all. */
+  by: 'size-class' | 'travel' | 'all';
+  /** size-class: index 0..2 is class 1..3; all: one entry; travel: steps. */
   byClassUm?: [DecimalText, DecimalText, DecimalText];
   allUm?: DecimalText;
   steps?: ToleranceStep[];
@@ -174,7 +179,7 @@ export interface TestDefinition {
   /** Number in that edition, only where it is known. */
   testNumber?: string;
   title: string;
-  /** Title with the component put in: `{axis}`, `{spindle}`, `{reference}`, `{turret}`, `{plane}`. */
+  /** Title with the component put in: `{axis}`, `{spindle}`, `{reference}`, `{turret}`, `{plane}`; spindles and turrets in words (`sub-spindle S2`). */
   boundTitle: string;
   /** Steps in our own words, in the order in which they are done. */
   procedure: string[];
@@ -183,7 +188,12 @@ export interface TestDefinition {
   layout: Layout;
   tolerance: ToleranceRule | null;
   direction: Direction;
-  resolution: { valueUm: DecimalText; rule: 'half-even' | 'half-away-from-zero' };
+  /** `byForm`: where a pass can be taken in several forms, the forms that resolve differently. */
+  resolution: {
+    valueUm: DecimalText;
+    rule: 'half-even' | 'half-away-from-zero';
+    byForm?: Record<string, DecimalText>;
+  };
   /** Kinds of instrument, in the register's words. */
   instruments: string[];
   cautions: CautionId[];
@@ -211,6 +221,8 @@ export interface PlannedTolerance {
   /** Scaled at judging time with the length really measured. */
   perLength?: { baseLengthMm: DecimalText; minimumUm: DecimalText; maximumUm?: DecimalText };
   local?: { toleranceUm: DecimalText; lengthMm: DecimalText; provenance: Provenance };
+  /** What a coaxiality tolerance counts: the offset of the axes (default) or the total indicator reading. */
+  basis?: 'offset' | 'total-indicator-reading';
   /** `size class 2 (bar diameter 32 mm: over 25 up to 63)` and the like. */
   foundBy: string;
   provenance: Provenance;

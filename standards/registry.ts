@@ -1,0 +1,53 @@
+import { definitions as commonPractice } from './common-practice/definitions';
+import * as commonPracticeSource from './common-practice/source';
+import { definitions as geometric } from './iso-13041-1-2020/definitions';
+import * as geometricSource from './iso-13041-1-2020/source';
+import { definitions as testPiece } from './iso-13041-6-2009/definitions';
+import * as testPieceSource from './iso-13041-6-2009/source';
+import type { Provenance, TestDefinition } from './types';
+
+export interface TestCode {
+  code: string;
+  /** '' where there is none. */
+  edition: string;
+  subject: string;
+  source: Provenance;
+}
+
+const all: TestDefinition[] = [...geometric, ...commonPractice, ...testPiece];
+
+/** Every version of every definition: old ones stay, because stored sheets are judged by the one that they were made with. */
+export function allDefinitions(): readonly TestDefinition[] {
+  return all;
+}
+
+/** Definitions that a new plan uses: the newest version of each id within its code and edition. */
+export function currentDefinitions(): TestDefinition[] {
+  return all.filter(
+    (candidate) => !all.some((other) => sameTest(other, candidate) && other.version > candidate.version),
+  );
+}
+
+export function findDefinition(id: string, code: string, edition: string, version: number): TestDefinition | null {
+  return (
+    all.find((one) => one.id === id && one.code === code && one.edition === edition && one.version === version) ?? null
+  );
+}
+
+export function codes(): TestCode[] {
+  return [geometricSource, commonPracticeSource, testPieceSource].map(({ code, edition, subject, source }) => ({
+    code,
+    edition,
+    subject,
+    source,
+  }));
+}
+
+/** `ISO 13041-1:2020`, `common practice`. */
+export function codeTitle(code: string, edition: string): string {
+  return edition === '' ? code : `${code}:${edition}`;
+}
+
+function sameTest(a: TestDefinition, b: TestDefinition): boolean {
+  return a.id === b.id && a.code === b.code && a.edition === b.edition;
+}
