@@ -48,13 +48,28 @@ async function ensureRole(
   }
 }
 
+/** Signs in as the administrator; through the server's own database while ours is still missing. */
+async function connectAdmin({ adminUrl }: RoleSettings): Promise<pg.Client> {
+  for (const url of [adminUrl, databaseUrl(adminUrl, 'postgres')]) {
+    const admin = new pg.Client({ connectionString: url });
+    try {
+      await admin.connect();
+      return admin;
+    } catch (error) {
+      await admin.end().catch(() => undefined);
+      // 3D000: there is no such database yet.
+      if ((error as { code?: string }).code !== '3D000') throw error;
+    }
+  }
+  throw new Error('The server has neither the named database nor one called postgres.');
+}
+
 /**
  * Makes the owner role, the application's role and the database where they are missing. Safe to repeat, and safe
  * against a second installation doing the same on the same server (an advisory lock makes them wait for each other).
  */
 export async function createRoles(settings: RoleSettings): Promise<void> {
-  const admin = new pg.Client({ connectionString: settings.adminUrl });
-  await admin.connect();
+  const admin = await connectAdmin(settings);
   try {
     await admin.query("select pg_advisory_lock(hashtext('witnessmark roles'))");
     const me = await admin.query<{ rolsuper: boolean; rolcreatedb: boolean }>(

@@ -22,7 +22,21 @@ const settings = z
 const ownerUrl = urlFor(settings.adminUrl, ownerRole, settings.ownerPassword, settings.database);
 const appUrl = urlFor(settings.adminUrl, appRole, settings.appPassword, settings.database);
 
-await createRoles(settings);
+/** Failures that lie in the address given to us and not in the program; answered with exit code 3 and one sentence. */
+const sentences: Record<string, string> = {
+  ECONNREFUSED: 'The database server named by DATABASE_URL does not answer.',
+  ENOTFOUND: 'The host named by DATABASE_URL is not known.',
+  '28P01': 'The database server refuses the role and password of DATABASE_URL.',
+  '28000': 'The database server refuses the role of DATABASE_URL.',
+  '42501': 'The role of DATABASE_URL may not make roles or databases; give it CREATEROLE and CREATEDB.',
+};
+
+await createRoles(settings).catch((error: { code?: string }) => {
+  const sentence = sentences[error.code ?? ''];
+  if (!sentence) throw error;
+  process.stderr.write(`${sentence}\n`);
+  process.exit(3);
+});
 await installQueue(ownerUrl);
 await migrate(ownerUrl);
 process.stdout.write(`${JSON.stringify({ ownerUrl, appUrl })}\n`);

@@ -27,9 +27,10 @@ export function runStep(name, command, args, { logFolder, ...options }) {
     child.once('exit', (code, killedBy) => {
       running.delete(child.pid);
       const output = readFileSync(logFile, 'utf8');
-      if (code === 0) resolve(output);
-      else
-        reject(new Error(`${name} failed (${killedBy ?? code}):\n${output.trim().split('\n').slice(-40).join('\n')}`));
+      if (code === 0) return resolve(output);
+      const lines = output.trim().split('\n');
+      const error = new Error(`${name} failed (${killedBy ?? code}):\n${lines.slice(-40).join('\n')}`);
+      reject(Object.assign(error, { exitCode: code, lastLine: lines.at(-1) }));
     });
   });
 }

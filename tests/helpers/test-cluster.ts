@@ -1,4 +1,4 @@
-import { type ChildProcess, execFile, fork } from 'node:child_process';
+import { execFile, fork } from 'node:child_process';
 import { randomBytes } from 'node:crypto';
 import { once } from 'node:events';
 import path from 'node:path';
@@ -11,6 +11,21 @@ export type TestCluster = { adminUrl: string; ownerPassword: string; appPassword
 
 const variable = 'TEST_CLUSTER';
 
+/** Starts a throw-away cluster that nobody else uses; it also ends when this process ends. */
+export async function startSeparateCluster(): Promise<{ adminUrl: string; stop: () => Promise<void> }> {
+  const child = fork(path.join(root, 'db/server/test-cluster.mjs'), { detached: true, execArgv: [] });
+  const [message] = (await once(child, 'message')) as [{ adminUrl?: string; error?: string }];
+  if (!message.adminUrl) throw new Error(message.error);
+  return {
+    adminUrl: message.adminUrl,
+    stop: async () => {
+      const exited = once(child, 'exit');
+      child.disconnect();
+      await exited;
+    },
+  };
+}
+
 /**
  * The throw-away cluster of this test run: the one whose address stands in `TEST_CLUSTER_URL`, or one started here,
  * which `stop` removes again. The answer is left in the environment, where the processes of the tests find it.
@@ -18,14 +33,8 @@ const variable = 'TEST_CLUSTER';
 export async function startTestCluster(): Promise<{ cluster: TestCluster; stop: () => Promise<void> }> {
   const known = process.env[variable];
   if (known) return { cluster: JSON.parse(known) as TestCluster, stop: async () => undefined };
-  let child: ChildProcess | undefined;
-  let adminUrl = process.env.TEST_CLUSTER_URL;
-  if (!adminUrl) {
-    child = fork(path.join(root, 'db/server/test-cluster.mjs'), { detached: true });
-    const [message] = (await once(child, 'message')) as [{ adminUrl?: string; error?: string }];
-    if (!message.adminUrl) throw new Error(message.error);
-    adminUrl = message.adminUrl;
-  }
+  const given = process.env.TEST_CLUSTER_URL;
+  const { adminUrl, stop } = given ? { adminUrl: given, stop: async () => undefined } : await startSeparateCluster();
   const password = () => randomBytes(18).toString('base64url');
   const cluster = { adminUrl, ownerPassword: password(), appPassword: password() };
   process.env[variable] = JSON.stringify(cluster);
@@ -33,10 +42,7 @@ export async function startTestCluster(): Promise<{ cluster: TestCluster; stop: 
     cluster,
     stop: async () => {
       delete process.env[variable];
-      if (!child) return;
-      const exited = once(child, 'exit');
-      child.disconnect();
-      await exited;
+      await stop();
     },
   };
 }
