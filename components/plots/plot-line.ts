@@ -13,6 +13,7 @@ import {
   readingsBySeries,
   styleOf,
 } from '@/components/plots/plot-frame';
+import { plotLegend } from '@/components/plots/plot-legend';
 import type { PlotSeries } from '@/lib/sheet/types';
 
 interface Axes {
@@ -31,25 +32,20 @@ const MARKED_READINGS = 60;
 export function linePlot(series: PlotSeries, options: PlotOptions): DrawingItem[] {
   const groups = readingsBySeries(series);
   const all = groups.flatMap((group) => group.readings);
-  const axes = axesOf(series, all, options, groups.length > 1);
+  const names = groups.map((group) => group.name);
+  const axes = axesOf(series, all, options, plotLegend(names, 0, options.widthPx).heightPx);
   const items = [...grid(axes, series), ...bottomLabels(axes, series, all)];
   if (series.fit) items.push(fitLine(axes, series.fit));
   groups.forEach((group, index) => {
     items.push(...readingLine(axes, group.readings, index));
   });
   if (options.toleranceUm !== null) items.push(...bracket(axes, all, options.toleranceUm));
-  if (groups.length > 1)
-    items.push(
-      ...legend(
-        axes,
-        groups.map((group) => group.name ?? ''),
-      ),
-    );
+  items.push(...plotLegend(names, 2, options.widthPx).items);
   return items;
 }
 
 /** y reaches so far that the tolerance stands beside the readings, but never so far that these become a flat line. */
-export function axesOf(series: PlotSeries, readings: Reading[], options: PlotOptions, named: boolean): Axes {
+export function axesOf(series: PlotSeries, readings: Reading[], options: PlotOptions, legendPx: number): Axes {
   const fitY = series.fit ? [coordinate(series.fit.y1), coordinate(series.fit.y2)] : [];
   const [low, high] = extentOf([...readings.map((reading) => reading.y), ...fitY]);
   const span = high - low || 1;
@@ -61,7 +57,7 @@ export function axesOf(series: PlotSeries, readings: Reading[], options: PlotOpt
   const labels = y.ticks(4).map(String);
   const left = Math.max(...labels.map((label) => wordWidth(label, LABEL_PX, true)), 12) + 8;
   const right = options.widthPx - (options.toleranceUm === null ? 16 : 34);
-  const top = named ? 46 : 26;
+  const top = 26 + legendPx;
   const bottom = options.heightPx - 42;
   const [from, to] = extentOf(readings.map((reading) => reading.x));
   const x = scaleLinear()
@@ -166,27 +162,4 @@ function bracket(axes: Axes, readings: Reading[], toleranceUm: string): DrawingI
     end,
     text(axes.right + 32, 12, words, { sizePx: LABEL_PX, anchor: 'end', mono: true }),
   ];
-}
-
-function legend(axes: Axes, names: string[]): DrawingItem[] {
-  const items: DrawingItem[] = [];
-  let x = axes.left;
-  names.forEach((name, index) => {
-    const style = styleOf(index);
-    const width = wordWidth(name, LABEL_PX);
-    if (x + 28 + width > axes.right + 34) return;
-    items.push(
-      polyline(
-        [
-          [x, 27],
-          [x + 22, 27],
-        ],
-        { stroke: 'blue', widthPx: 2, dash: style.dash },
-      ),
-      ...marker(style.marker, [x + 11, 27]),
-    );
-    items.push(text(x + 28, 31.5, name, { sizePx: LABEL_PX, ink: 'ink2' }));
-    x += 28 + width + 16;
-  });
-  return items;
 }

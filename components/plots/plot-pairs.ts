@@ -10,6 +10,7 @@ import {
   readingsBySeries,
   styleOf,
 } from '@/components/plots/plot-frame';
+import { plotLegend } from '@/components/plots/plot-legend';
 import type { PlotSeries } from '@/lib/sheet/types';
 
 /**
@@ -25,8 +26,12 @@ export function pairsPlot(series: PlotSeries, options: PlotOptions): DrawingItem
     .nice(4);
   const labels = y.ticks(4);
   const left = Math.max(...labels.map((value) => wordWidth(String(value), LABEL_PX, true)), 12) + 12;
-  const named = groups.filter((group) => group.name !== null).length > 1;
-  const [top, bottom, right] = [named ? 46 : 26, options.heightPx - 42, options.widthPx - 16];
+  const legend = plotLegend(
+    groups.map((group) => group.name),
+    2,
+    options.widthPx,
+  );
+  const [top, bottom, right] = [26 + legend.heightPx, options.heightPx - 42, options.widthPx - 16];
   y.range([bottom, top]);
   const places = [...new Set(all.map((reading) => reading.x))].sort((a, b) => a - b);
   const step = (right - left) / places.length;
@@ -76,27 +81,6 @@ export function pairsPlot(series: PlotSeries, options: PlotOptions): DrawingItem
     items.push(polyline(points, { stroke: 'blue', widthPx: 1, dash: style.dash ?? [1, 3] }));
     items.push(...points.flatMap((point) => marker(style.marker, point)));
   });
-  if (named)
-    items.push(
-      ...legend(
-        left,
-        right,
-        groups.map((group) => group.name ?? ''),
-      ),
-    );
+  items.push(...legend.items);
   return items;
-}
-
-function legend(left: number, right: number, names: string[]): DrawingItem[] {
-  let x = left;
-  return names.flatMap((name, index) => {
-    const width = wordWidth(name, LABEL_PX);
-    if (x + 18 + width > right + 16) return [];
-    const entry = [
-      ...marker(styleOf(index).marker, [x + 6, 27]),
-      text(x + 18, 31.5, name, { sizePx: LABEL_PX, ink: 'ink2' as const }),
-    ];
-    x += 18 + width + 16;
-    return entry;
-  });
 }

@@ -1,5 +1,5 @@
 import type { DrawingItem } from '@/components/plots/drawing';
-import { circle, onCircle, polyline, text, wordWidth } from '@/components/plots/drawing-parts';
+import { circle, onCircle, polyline, text } from '@/components/plots/drawing-parts';
 import { coordinate } from '@/components/plots/number';
 import {
   extentOf,
@@ -11,6 +11,7 @@ import {
   readingsBySeries,
   styleOf,
 } from '@/components/plots/plot-frame';
+import { plotLegend } from '@/components/plots/plot-legend';
 import type { PlotSeries } from '@/lib/sheet/types';
 
 /** The smallest reading lies at this part of the radius: far enough out to be seen as a circle. */
@@ -23,8 +24,12 @@ const INNER = 0.5;
 export function polarPlot(series: PlotSeries, options: PlotOptions): DrawingItem[] {
   const groups = readingsBySeries(series);
   const all = groups.flatMap((group) => group.readings);
-  const named = groups.filter((group) => group.name !== null).length > 1;
-  const top = named ? 40 : 18;
+  const legend = plotLegend(
+    groups.map((group) => group.name),
+    2,
+    options.widthPx,
+  );
+  const top = 18 + legend.heightPx;
   const radius = Math.max(20, Math.min(options.widthPx / 2 - 44, (options.heightPx - top - 24) / 2 - 4));
   const centre = [options.widthPx / 2, top + 10 + radius] as const;
   const [low, high] = extentOf(all.map((reading) => reading.y));
@@ -53,13 +58,7 @@ export function polarPlot(series: PlotSeries, options: PlotOptions): DrawingItem
       }),
     );
   }
-  if (named)
-    items.push(
-      ...legend(
-        groups.map((group) => group.name ?? ''),
-        options.widthPx,
-      ),
-    );
+  items.push(...legend.items);
   return items;
 }
 
@@ -87,18 +86,4 @@ function angleNames([cx, cy]: readonly [number, number], radius: number): Drawin
     text(cx - radius - 8, cy + 4.5, '180°', { ...style, anchor: 'end' }),
     text(cx, cy + radius + 17, '270°', { ...style, anchor: 'middle' }),
   ];
-}
-
-function legend(names: string[], widthPx: number): DrawingItem[] {
-  let x = 2;
-  return names.flatMap((name, index) => {
-    const width = wordWidth(name, LABEL_PX);
-    if (x + 18 + width > widthPx) return [];
-    const entry = [
-      ...marker(styleOf(index).marker, [x + 6, 27]),
-      text(x + 18, 31.5, name, { sizePx: LABEL_PX, ink: 'ink2' as const }),
-    ];
-    x += 18 + width + 14;
-    return entry;
-  });
 }

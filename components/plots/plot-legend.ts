@@ -1,0 +1,35 @@
+import type { DrawingItem } from '@/components/plots/drawing';
+import { polyline, text, wordWidth } from '@/components/plots/drawing-parts';
+import { LABEL_PX, marker, styleOf } from '@/components/plots/plot-frame';
+
+const ROW_PX = 18;
+const SAMPLE_PX = 22;
+
+/** Names of the series of a plot with their dash and marker, in as many rows as it takes, below the unit. */
+export function plotLegend(
+  names: (string | null)[],
+  left: number,
+  right: number,
+): { items: DrawingItem[]; heightPx: number } {
+  if (names.length < 2) return { items: [], heightPx: 0 };
+  const items: DrawingItem[] = [];
+  let [x, y] = [left, 28];
+  names.forEach((name, index) => {
+    const width = SAMPLE_PX + 6 + wordWidth(name ?? '', LABEL_PX);
+    if (x > left && x + width > right) [x, y] = [left, y + ROW_PX];
+    const { dash, marker: kind } = styleOf(index);
+    items.push(
+      polyline(
+        [
+          [x, y],
+          [x + SAMPLE_PX, y],
+        ],
+        { stroke: 'blue', dash },
+      ),
+      ...marker(kind, [x + SAMPLE_PX / 2, y]),
+    );
+    items.push(text(x + SAMPLE_PX + 6, y + 4.5, name ?? '', { sizePx: LABEL_PX, ink: 'ink2' }));
+    x += width + 14;
+  });
+  return { items, heightPx: y - 28 + ROW_PX + 2 };
+}
