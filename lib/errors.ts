@@ -31,3 +31,11 @@ export const invalid = (errors: FieldError[]) =>
 
 export const conflict = (detail: string, extra: Record<string, unknown> = {}) =>
   new DomainError(409, 'Not possible now', detail, [], extra);
+
+/** Thrown where an update found another version than the one that was changed. */
+export const changedMeanwhile = () =>
+  new DomainError(
+    412,
+    'Changed meanwhile',
+    'Somebody else has changed this since you opened it. Look at it again; what you typed is still here.',
+  );

@@ -28,7 +28,8 @@ export interface RouteAnswer {
 }
 
 interface RouteSpec<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> {
-  action: Action;
+  /** One of these is enough. */
+  action: Action | readonly Action[];
   params?: P;
   query?: Q;
   body?: B;
@@ -61,11 +62,12 @@ export function route<
           'You are not signed in, or your session has ended. What you typed stays here.',
         );
       refuseForeignOrigin(request);
-      if (!can(viewer.roles, spec.action)) {
+      const actions = [spec.action].flat() as Action[];
+      if (!actions.some((action) => can(viewer.roles, action))) {
         throw new DomainError(
           403,
           'Not allowed',
-          `Your role does not include this: ${permissions[spec.action].means}.`,
+          `Your role does not include this: ${permissions[actions[0]!].means}.`,
         );
       }
       const params = spec.params ? parseOr422(spec.params, await context.params) : (undefined as z.output<P>);
@@ -141,11 +143,3 @@ function readIfMatch(request: Request): number {
     throw new DomainError(412, 'Changed meanwhile', 'If-Match holds no version of this resource.');
   return version;
 }
-
-/** To be thrown by a handler whose update found another version. */
-export const changedMeanwhile = () =>
-  new DomainError(
-    412,
-    'Changed meanwhile',
-    'Somebody else has changed this since you opened it. Look at it again; what you typed is still here.',
-  );

@@ -1,0 +1,143 @@
+import type { Db } from '@/db/client';
+import { newId } from '@/lib/id';
+import { parseNumber } from '@/lib/units/parse-number';
+import type { Unit } from '@/lib/units/unit';
+import type { CellDefault } from '@/standards/types';
+import { own } from './jobs';
+
+export type PassKind = 'as-found' | 'adjusting' | 'as-left';
+
+export interface PassRow {
+  id: string;
+  sheetId: string;
+  kind: PassKind;
+  number: number;
+  linkedTo: string | null;
+  takenAt: Date | null;
+  takenBy: string | null;
+  temperature: string | null;
+  temperatureText: string | null;
+  version: number;
+}
+
+export const passColumns = {
+  id: 'passes.id',
+  sheetId: 'passes.sheet_id',
+  kind: 'passes.kind',
+  number: 'passes.number',
+  linkedTo: 'passes.linked_to',
+  takenAt: 'passes.taken_at',
+  takenBy: 'passes.taken_by',
+  temperature: 'passes.temperature',
+  temperatureText: 'passes.temperature_text',
+  version: 'passes.version',
+};
+
+export const listPasses = (db: Db, sheetIds: string[]): Promise<PassRow[]> =>
+  db('passes').whereIn('sheet_id', sheetIds).orderBy('created_at').orderBy('id').select(passColumns);
+
+export const findPass = (db: Db, id: string): Promise<PassRow | undefined> =>
+  db('passes').where({ id }).first(passColumns);
+
+/** The figure in the unit that applied when it was typed; null for a choice or for what cannot be read. */
+export function figureOf(text: string, unit: Unit | null): { value: string | null; unit: Unit | null } {
+  if (unit === null || text.trim() === '') return { value: null, unit };
+  const parsed = parseNumber(text, { defaultUnit: unit });
+  return parsed.ok ? { value: parsed.value, unit: parsed.unit } : { value: null, unit };
+}
+
+export async function insertPass(
+  db: Db,
+  pass: {
+    sheetId: string;
+    kind: PassKind;
+    number: number;
+    linkedTo: string | null;
+    setUp: Record<string, CellDefault>;
+    takenAt?: Date | null;
+    takenBy?: string | null;
+  },
+): Promise<string> {
+  const id = newId();
+  await db('passes').insert({
+    organisation_id: own(db),
+    id,
+    sheet_id: pass.sheetId,
+    kind: pass.kind,
+    number: pass.number,
+    linked_to: pass.linkedTo,
+    taken_at: pass.takenAt ?? null,
+    taken_by: pass.takenBy ?? null,
+  });
+  const cells = Object.entries(pass.setUp);
+  if (cells.length > 0) {
+    await db('readings').insert(
+      cells.map(([pointer, cell]) => ({
+        organisation_id: own(db),
+        id: newId(),
+        pass_id: id,
+        pointer,
+        text: cell.text,
+        ...figureOf(cell.text, cell.unit),
+        source: 'planned',
+        version: 1,
+      })),
+    );
+  }
+  return id;
+}
+
+export interface ReadingRow {
+  passId: string;
+  pointer: string;
+  text: string;
+  unit: Unit | null;
+  version: number;
+  source: string;
+  updatedAt: Date;
+}
+
+export const listReadings = (db: Db, passIds: string[]): Promise<ReadingRow[]> =>
+  db('readings').whereIn('pass_id', passIds).select({
+    passId: 'pass_id',
+    pointer: 'pointer',
+    text: 'text',
+    unit: 'unit',
+    version: 'version',
+    source: 'source',
+    updatedAt: 'updated_at',
+  });
+
+export interface PassInstrument {
+  passId: string;
+  instrumentId: string;
+  overrideReason: string | null;
+  overrideBy: string | null;
+}
+
+export const listPassInstruments = (db: Db, passIds: string[]): Promise<PassInstrument[]> =>
+  db('pass_instruments').whereIn('pass_id', passIds).orderBy('id').select({
+    passId: 'pass_id',
+    instrumentId: 'instrument_id',
+    overrideReason: 'override_reason',
+    overrideBy: 'override_by',
+  });
+
+export async function replacePassInstruments(
+  db: Db,
+  passId: string,
+  instruments: Omit<PassInstrument, 'passId'>[],
+): Promise<void> {
+  await db('pass_instruments').where({ pass_id: passId }).delete();
+  if (instruments.length === 0) return;
+  await db('pass_instruments').insert(
+    instruments.map((used) => ({
+      organisation_id: own(db),
+      id: newId(),
+      pass_id: passId,
+      instrument_id: used.instrumentId,
+      override_reason: used.overrideReason,
+      override_by: used.overrideBy,
+    })),
+  );
+}
