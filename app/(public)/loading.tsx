@@ -1,0 +1,1 @@
+export { Loading as default } from '@/components/layout/loading';

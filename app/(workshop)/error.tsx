@@ -1,0 +1,7 @@
+'use client';
+
+import { WentWrong } from '@/components/layout/went-wrong';
+
+export default function WorkshopError({ error, reset }: { error: Error & { digest?: string }; reset: () => void }) {
+  return <WentWrong error={error} retry={reset} />;
+}
