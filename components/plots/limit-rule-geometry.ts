@@ -3,7 +3,7 @@ import { arrowHead, hatching, type Point, polyline, text, wordWidth } from '@/co
 import { allowedSign, type RuleScale, ruleScale } from '@/components/plots/limit-rule-scale';
 import { coordinate, decimalsOf, micrometresAsMm } from '@/components/plots/number';
 import { MARK_INK } from '@/components/plots/verdict-ink';
-import { limitRuleWords } from '@/lib/reporting/words';
+import { limitRuleWords } from '@/lib/reporting/drawing-text';
 import type { Verdict } from '@/lib/sheet/types';
 import type { Direction } from '@/standards/types';
 

@@ -3,7 +3,7 @@ import type { PlotOptions } from '@/components/plots/plot-frame';
 import { linePlot } from '@/components/plots/plot-line';
 import { pairsPlot } from '@/components/plots/plot-pairs';
 import { polarPlot } from '@/components/plots/plot-polar';
-import { plotWords } from '@/lib/reporting/words';
+import { plotWords } from '@/lib/reporting/drawing-text';
 import type { PlotSeries } from '@/lib/sheet/types';
 
 const PLOTS: Record<PlotSeries['kind'], (series: PlotSeries, options: PlotOptions) => DrawingItem[]> = {

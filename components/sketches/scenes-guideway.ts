@@ -1,6 +1,6 @@
 import type { Scene } from '@/components/sketches/scene';
 import { holder, indicator, motion } from '@/components/sketches/sketch-parts';
-import { SKETCH_WORDS } from '@/lib/reporting/sketch-words';
+import { SKETCH_WORDS } from '@/lib/reporting/words';
 
 /** Two motions against a square: the reference arm lies along one axis, the measured arm along the other. */
 export const squareTwoMotions: Scene = (pen, _spec, component) => {

@@ -10,7 +10,7 @@ import {
   turretWithHole,
 } from '@/components/sketches/sketch-parts';
 import type { SketchPen } from '@/components/sketches/sketch-pen';
-import { SKETCH_WORDS } from '@/lib/reporting/sketch-words';
+import { SKETCH_WORDS } from '@/lib/reporting/words';
 
 const TOP = AXIS_Y - 10;
 

@@ -11,7 +11,7 @@ import {
 import { toolHoleHeights, toolHoleSweep, twoCollarPiece, twoSpindlesSweep } from '@/components/sketches/scenes-work';
 import { planeSign } from '@/components/sketches/sketch-parts';
 import { SCENE_BOX, SketchPen } from '@/components/sketches/sketch-pen';
-import { signWords, sketchWords } from '@/lib/reporting/sketch-words';
+import { signWords, sketchWords } from '@/lib/reporting/drawing-text';
 import type { BoundComponent, SketchSpec } from '@/standards/types';
 
 const SCENES: Record<SketchSpec['scene'], Scene> = {

@@ -1,6 +1,7 @@
 import type { Point } from '@/components/plots/drawing-parts';
 import type { SketchPen } from '@/components/sketches/sketch-pen';
-import { angleWords, SKETCH_WORDS } from '@/lib/reporting/sketch-words';
+import { angleWords } from '@/lib/reporting/drawing-text';
+import { SKETCH_WORDS } from '@/lib/reporting/words';
 import type { Plane } from '@/standards/types';
 
 const BLUE = { stroke: 'blue' as const };

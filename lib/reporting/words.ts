@@ -1,9 +1,10 @@
+import type { ReportModel } from '@/lib/reporting/report-model';
 import type { PlotSeries, Verdict } from '@/lib/sheet/types';
-import type { Direction } from '@/standards/types';
+import type { Direction, SketchSpec } from '@/standards/types';
 
 /**
- * The one dictionary of the report's words, English. Templates and drawings take every word from here, so that another language is
- * another file of the same shape.
+ * The one dictionary of the report's words and of the words in drawings, English. Templates and drawings take every word from here,
+ * so that another language is another file of the same shape. Sentences with figures in them: report-text.ts, drawing-text.ts.
  */
 
 export const VERDICT_WORDS: Record<Verdict | 'disturbed' | 'not-measured' | 'left-out', string> = {
@@ -32,41 +33,177 @@ export const DIRECTION_WORDS: Record<Direction, string> = {
   'tailstock-high': 'tailstock higher only',
 };
 
-/** What a limit rule says, for somebody who cannot see it. */
-export function limitRuleWords(rule: {
-  shown: string | null;
-  toleranceUm: string | null;
-  direction: Direction;
-  verdict: Verdict | null;
-  expandedUncertaintyUm?: string | null;
-  guardUm?: string | null;
-}): string {
-  const parts = [
-    rule.shown === null ? 'Limit rule, nothing measured yet' : `Deviation ${rule.shown} mm`,
-    rule.toleranceUm === null
-      ? 'no tolerance given'
-      : `tolerance ${rule.toleranceUm} µm, ${DIRECTION_WORDS[rule.direction]}`,
-  ];
-  if (rule.expandedUncertaintyUm) parts.push(`expanded uncertainty ${rule.expandedUncertaintyUm} µm`);
-  if (rule.guardUm) parts.push(`guard ${rule.guardUm} µm`);
-  if (rule.verdict) parts.push(VERDICT_WORDS[rule.verdict]);
-  return parts.join(', ');
-}
+export const SKETCH_WORDS = {
+  setUp: 'Set-up',
+  plungerIn: '+ in',
+  plungerInCounts: 'pushing the plunger in counts positive',
+  slowTurn: 'one slow turn',
+  squareTurned: 'then square turned over',
+  sameTarget: 'same target from both sides',
+  collars: ['D1', 'D2'],
+  parts: { spindle: 'spindle', axis: 'axis', reference: 'against', turret: 'turret', plane: 'plane' },
+} as const;
 
-const PLOT_KINDS: Record<PlotSeries['kind'], string> = {
+/** What each scene shows, for somebody who cannot see it. */
+export const SCENE_WORDS: Record<SketchSpec['scene'], string> = {
+  'spindle-nose': 'indicator on the centring diameter of the spindle nose',
+  'spindle-bore-mandrel': 'indicator on a mandrel in the spindle bore',
+  'mandrel-along-motion': 'indicator moved along a mandrel in the spindle',
+  'disc-across-motion': 'indicator moved across a disc on the spindle',
+  'square-two-motions': 'indicators on both arms of a square',
+  'straightedge-along-motion': 'indicator moved along a straightedge',
+  'two-spindles-sweep': 'indicator carried by one spindle, swept round a mandrel in the other',
+  'tool-hole-sweep': 'indicator carried by the spindle, swept round the tool hole',
+  'tool-hole-heights': 'heights of a mandrel in the spindle and of one in the tool hole compared',
+  'slide-approach': 'slide brought to the same target from both sides, indicator fixed',
+  'two-collar-piece': 'test piece with two collars, turned and measured',
+};
+
+export const PLOT_WORDS: Record<PlotSeries['kind'], string> = {
   line: 'Readings along a length',
   polar: 'Readings round a turn',
   pairs: 'Readings of pairs of approaches',
 };
 
-/** What a plot shows, for somebody who cannot see it. */
-export function plotWords(series: PlotSeries, toleranceUm: string | null): string {
-  const names = [...new Set(series.points.flatMap((point) => (point.series ? [point.series] : [])))];
-  const parts = [
-    `${PLOT_KINDS[series.kind]}: ${series.points.length} readings, ${series.yLabel} over ${series.xLabel}`,
-  ];
-  if (names.length) parts.push(names.join(', '));
-  if (series.fit) parts.push('fitted line dashed');
-  if (toleranceUm !== null) parts.push(`tolerance ${toleranceUm} µm`);
-  return parts.join('; ');
-}
+export const STATE_WORDS: Record<ReportModel['document']['state'], string> = {
+  draft: 'draft',
+  issued: 'issued',
+  signed: 'signed',
+  'signed-with-remarks': 'signed with remarks',
+  refused: 'refused',
+  superseded: 'superseded',
+};
+
+export const REPORT_WORDS = {
+  title: 'Acceptance report',
+  revision: 'revision',
+  revisionShort: 'r',
+  page: 'page',
+  of: 'of',
+  draft: 'draft',
+  draftMark: 'DRAFT',
+  none: '–',
+  notRecorded: 'not recorded',
+  program: 'made with Witnessmark',
+  machine: {
+    heading: 'Machine and job',
+    maker: 'Maker',
+    model: 'Model',
+    year: 'Year',
+    customer: 'Customer',
+    serial: 'Serial number',
+    kind: 'Kind',
+    control: 'Control',
+    hours: 'Operating hours',
+    sizeClass: 'Size class',
+    site: 'Site',
+    makeUp: 'Make-up',
+    engineer: 'Customer’s engineer',
+    order: 'Order',
+    reference: 'Job',
+    purpose: 'Purpose',
+    scope: 'Scope',
+    codes: 'Test codes',
+    decisionRule: 'Decision rule',
+    people: 'People',
+    checkedBy: 'Checked by',
+    issuedBy: 'Issued by',
+  },
+  decisionRule: 'Decision rule',
+  air: 'Air',
+  conditions: {
+    heading: 'Conditions',
+    place: 'Place',
+    airRange: 'Air, range',
+    time: 'Time',
+    air: 'Air',
+    machine: 'Machine',
+  },
+  instruments: {
+    heading: 'Instruments',
+    number: 'No.',
+    name: 'Instrument',
+    resolution: 'Resolution',
+    certificate: 'Certificate',
+    calibrated: 'Calibrated',
+    due: 'Due',
+    uncertainty: 'Uncertainty',
+    override: 'Used after its due date',
+  },
+  summary: {
+    heading: 'Summary',
+    number: 'No.',
+    test: 'Test',
+    asFound: 'as found',
+    asLeft: 'as left',
+    tolerance: 'T, mm',
+    verdict: 'Verdict',
+    remark: 'remark',
+    linkedSign: '=',
+    linkedNote: '= : as left is as found; nothing was done.',
+    asFoundOut: 'A mark before the figure as found: not within tolerance.',
+  },
+  counts: {
+    heading: 'Counts',
+    planned: 'planned',
+    judged: 'judged',
+    within: 'within tolerance',
+    out: 'out of tolerance',
+    undecided: 'undecided',
+    forInformation: 'for information',
+    leftOut: 'left out',
+    notMeasured: 'not measured',
+  },
+  notInPlan: { heading: 'Not in the plan', test: 'Test', reason: 'Reason' },
+  block: {
+    setUp: 'Set-up',
+    result: 'Result',
+    judged: 'Judged',
+    tolerance: 'Tolerance',
+    source: 'Source',
+    direction: 'Direction',
+    instruments: 'Instruments',
+    figures: 'Figures',
+    local: 'Local',
+    limit: 'limit',
+    margin: 'to the limit',
+    over: 'over',
+    remark: 'Remark',
+    leftOut: 'Left out',
+    corrected: 'Corrected readings',
+    reading: 'Reading',
+    was: 'was',
+    now: 'now',
+    by: 'by',
+    at: 'at',
+    reason: 'reason',
+    noResult: 'no result',
+  },
+  remarks: {
+    heading: 'Remarks and points',
+    number: 'No.',
+    test: 'Test',
+    text: 'Remark',
+    owner: 'Who',
+    due: 'Due',
+    closed: 'Closed',
+    open: 'open',
+  },
+  signatures: { heading: 'Signatures', unsigned: 'not signed yet', drawn: 'drawn by hand', reason: 'Reason' },
+  statement: 'Statement',
+  monthNames: [
+    'January',
+    'February',
+    'March',
+    'April',
+    'May',
+    'June',
+    'July',
+    'August',
+    'September',
+    'October',
+    'November',
+    'December',
+  ],
+  to: 'to',
+} as const;

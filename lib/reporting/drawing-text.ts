@@ -1,0 +1,59 @@
+import { DIRECTION_WORDS, PLOT_WORDS, SCENE_WORDS, SKETCH_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import type { PlotSeries, Verdict } from '@/lib/sheet/types';
+import type { BoundComponent, Direction, SketchSpec } from '@/standards/types';
+
+/** `0° 180°`; more than four: the first, the last and how many. */
+export function angleWords(anglesDeg: readonly string[] | undefined): string {
+  if (!anglesDeg?.length) return SKETCH_WORDS.slowTurn;
+  if (anglesDeg.length <= 4) return anglesDeg.map((deg) => `${deg}°`).join(' ');
+  return `${anglesDeg[0]}° to ${anglesDeg.at(-1)}°, ${anglesDeg.length} places`;
+}
+
+/** What a set-up sketch shows, for somebody who cannot see it. */
+export function sketchWords(spec: SketchSpec, component: BoundComponent): string {
+  const parts = [`${SKETCH_WORDS.setUp}: ${SCENE_WORDS[spec.scene]}`];
+  const ids = { ...component, plane: spec.plane ?? component.plane };
+  for (const part of ['spindle', 'axis', 'reference', 'turret', 'plane'] as const) {
+    if (ids[part]) parts.push(`${SKETCH_WORDS.parts[part]} ${ids[part]}`);
+  }
+  if (spec.anglesDeg?.length) parts.push(angleWords(spec.anglesDeg));
+  parts.push(SKETCH_WORDS.plungerInCounts);
+  if (spec.positiveMeans) parts.push(`positive: ${spec.positiveMeans}`);
+  return parts.join(', ');
+}
+
+/** The meaning of the sign as it stands under the sketch. */
+export const signWords = (positiveMeans: string) => `+ : ${positiveMeans}`;
+
+/** What a limit rule says, for somebody who cannot see it. */
+export function limitRuleWords(rule: {
+  shown: string | null;
+  toleranceUm: string | null;
+  direction: Direction;
+  verdict: Verdict | null;
+  expandedUncertaintyUm?: string | null;
+  guardUm?: string | null;
+}): string {
+  const parts = [
+    rule.shown === null ? 'Limit rule, nothing measured yet' : `Deviation ${rule.shown} mm`,
+    rule.toleranceUm === null
+      ? 'no tolerance given'
+      : `tolerance ${rule.toleranceUm} µm, ${DIRECTION_WORDS[rule.direction]}`,
+  ];
+  if (rule.expandedUncertaintyUm) parts.push(`expanded uncertainty ${rule.expandedUncertaintyUm} µm`);
+  if (rule.guardUm) parts.push(`guard ${rule.guardUm} µm`);
+  if (rule.verdict) parts.push(VERDICT_WORDS[rule.verdict]);
+  return parts.join(', ');
+}
+
+/** What a plot shows, for somebody who cannot see it. */
+export function plotWords(series: PlotSeries, toleranceUm: string | null): string {
+  const names = [...new Set(series.points.flatMap((point) => (point.series ? [point.series] : [])))];
+  const parts = [
+    `${PLOT_WORDS[series.kind]}: ${series.points.length} readings, ${series.yLabel} over ${series.xLabel}`,
+  ];
+  if (names.length) parts.push(names.join(', '));
+  if (series.fit) parts.push('fitted line dashed');
+  if (toleranceUm !== null) parts.push(`tolerance ${toleranceUm} µm`);
+  return parts.join('; ');
+}
