@@ -4,8 +4,8 @@ import { createServer } from 'node:net';
 import pg from 'pg';
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import { urlFor } from '@/db/server/create-roles';
+import { startSeparateCluster } from '@/db/server/throw-away-cluster';
 import { freePort, Installation } from '@/tests/helpers/installation';
-import { startSeparateCluster } from '@/tests/helpers/test-cluster';
 
 let installation: Installation;
 beforeAll(async () => {

@@ -1,4 +1,5 @@
-import { prepareDatabase, startTestCluster } from './test-cluster';
+import { prepareDatabase } from '@/db/server/throw-away-cluster';
+import { startTestCluster } from './test-cluster';
 
 /** Name of the database that is migrated once and cloned for every file of tests. */
 const template = 'witnessmark_template';
