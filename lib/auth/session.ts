@@ -1,5 +1,4 @@
-import 'server-only';
-import { cookies, headers } from 'next/headers';
+import { headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { getToken } from 'next-auth/jwt';
 import { cache } from 'react';
@@ -8,10 +7,20 @@ import { accountSession } from '@/db/queries/accounts';
 import type { Viewer } from '@/lib/auth/viewer';
 import { env } from '@/lib/env';
 
+type TokenRequest = Parameters<typeof getToken>[0]['req'];
+
+const cookiesIn = (headers: Headers): Record<string, string> =>
+  Object.fromEntries(
+    (headers.get('cookie') ?? '')
+      .split(/;\s*/)
+      .filter((pair) => pair.includes('='))
+      .map((pair) => [pair.slice(0, pair.indexOf('=')), pair.slice(pair.indexOf('=') + 1)]),
+  );
+
 /** Who is asking: read from the signed cookie and checked against the database at each request. */
-export const currentViewer = cache(async (): Promise<Viewer | null> => {
+export async function viewerOf(headers: Headers): Promise<Viewer | null> {
   const token = await getToken({
-    req: { cookies: await cookies(), headers: await headers() } as unknown as Parameters<typeof getToken>[0]['req'],
+    req: { cookies: cookiesIn(headers), headers } as unknown as TokenRequest,
     secret: env.NEXTAUTH_SECRET,
   });
   if (!token?.sub || !token.organisationId) return null;
@@ -32,7 +41,10 @@ export const currentViewer = cache(async (): Promise<Viewer | null> => {
     timeZone: session.timeZone,
     setUpDone: session.setUpDone,
   };
-});
+}
+
+/** For pages, where the request is not at hand: asked once a request, however many components want to know. */
+export const currentViewer = cache(async (): Promise<Viewer | null> => viewerOf(await headers()));
 
 /** For pages: nobody signed in goes to the sign-in page. */
 export async function requireViewer(): Promise<Viewer> {

@@ -1,14 +1,14 @@
-import 'server-only';
 import { createHash } from 'node:crypto';
 import type { Knex } from 'knex';
 import { z } from 'zod';
 import { inScope } from '@/db/client';
 import { findIdempotentAnswer, keepIdempotentAnswer } from '@/db/queries/idempotency';
 import { type Action, can, permissions } from '@/lib/auth/permissions';
-import { currentViewer, scopeOf } from '@/lib/auth/session';
+import { scopeOf, viewerOf } from '@/lib/auth/session';
 import type { Viewer } from '@/lib/auth/viewer';
 import { DomainError } from '@/lib/errors';
 import { parseOr422, problemResponse } from './problem';
+import { parseJson, readBody, refuseForeignOrigin } from './read-request';
 
 export interface RouteContext<P, Q, B> {
   viewer: Viewer;
@@ -41,7 +41,6 @@ interface RouteSpec<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodTyp
 }
 
 const none = z.unknown();
-const maxBodyBytes = 2_000_000;
 
 /**
  * One shape for every handler: who is it → does the request fit → may they → one transaction in which only their organisation's rows
@@ -54,7 +53,7 @@ export function route<
 >(spec: RouteSpec<P, Q, B>) {
   return async (request: Request, context: { params: Promise<Record<string, string>> }): Promise<Response> => {
     try {
-      const viewer = await currentViewer();
+      const viewer = await viewerOf(request.headers);
       if (!viewer)
         throw new DomainError(
           401,
@@ -100,7 +99,8 @@ export function route<
   };
 }
 
-function respond(answer: RouteAnswer): Response {
+/** The answer as JSON, never kept by a cache in between. */
+export function respond(answer: RouteAnswer): Response {
   const headers: Record<string, string> = { 'cache-control': 'no-store', ...answer.headers };
   if (answer.version !== undefined) headers.etag = `"${answer.version}"`;
   if (answer.body === undefined || answer.body === null)
@@ -109,30 +109,6 @@ function respond(answer: RouteAnswer): Response {
     status: answer.status ?? 200,
     headers: { 'content-type': 'application/json', ...headers },
   });
-}
-
-/** A page of another site must not act with our cookie: browsers name the origin of every request that changes something. */
-function refuseForeignOrigin(request: Request): void {
-  if (request.method === 'GET' || request.method === 'HEAD') return;
-  const origin = request.headers.get('origin');
-  const host = request.headers.get('x-forwarded-host') ?? request.headers.get('host');
-  if (origin && new URL(origin).host !== host)
-    throw new DomainError(403, 'Not allowed', 'This request came from another site.');
-}
-
-async function readBody(request: Request): Promise<string> {
-  const text = await request.text();
-  if (text.length > maxBodyBytes)
-    throw new DomainError(422, 'Too much at once', 'The request is larger than 2 MB. Send it in parts.');
-  return text;
-}
-
-function parseJson(text: string): unknown {
-  try {
-    return JSON.parse(text);
-  } catch {
-    throw new DomainError(400, 'Cannot be read', 'The request is not valid JSON.');
-  }
 }
 
 function readIfMatch(request: Request): number {
