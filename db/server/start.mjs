@@ -7,6 +7,7 @@ import { readDatabaseUrl } from './existing-server.mjs';
 import { startLocalPostgres } from './local-postgres.mjs';
 import { takeLock, withLock } from './lock.mjs';
 import { ensurePackages } from './node-packages.mjs';
+import { requireNode } from './node-version.mjs';
 import { PlainError } from './plain-error.mjs';
 import { isFree } from './ports.mjs';
 import { identity, isAlive, processesOfRun, signal, stopProcesses } from './processes.mjs';
@@ -200,11 +201,7 @@ function announce({ url, host, demo, data }) {
   process.stdout.write(`${lines.join('\n')}\n`);
 }
 
-const [major, minor] = process.versions.node.split('.').map(Number);
-if (major < 20 || (major === 20 && minor < 11)) {
-  process.stderr.write(`Witnessmark needs Node 20.11 or later; this is ${process.versions.node}.\n`);
-  process.exit(1);
-}
+requireNode();
 start().catch((error) => {
   process.stderr.write(`${error instanceof PlainError ? error.message : error.stack}\n`);
   process.exit(1);
