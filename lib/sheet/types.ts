@@ -1,10 +1,12 @@
-import type { EvaluationInput, EvaluationResult } from '@/lib/evaluation';
+import type { EvaluationInput, MeasuredResult } from '@/lib/evaluation';
 import type { Unit } from '@/lib/units/unit';
 import type { DecimalText, Direction, PlannedTolerance } from '@/standards/types';
 
 /**
  * A sheet's fields are addressed by the JSON pointer of the place that they fill in the evaluation's input
  * (`/readings/180/3`). The same pointer names the field on the screen, in the operation log, in the database and in the report.
+ * One exception: `/form` of a tool hole's sheet says which of its forms was taken; it goes into no input. A row that is left out
+ * (gap, incomplete) closes up in the input, so rows after it stand one place earlier there.
  */
 export type CellPointer = string;
 
@@ -35,6 +37,7 @@ export interface FieldTable {
   rows: { label: string; cells: (FieldTableCell | null)[] }[];
 }
 
+/** `derived`: a figure worked out from the row for the reader (a mean, a difference), '' while it cannot be. */
 export type FieldTableCell = { field: Field } | { derived: string };
 
 export interface SheetFields {
@@ -88,15 +91,24 @@ export interface PlotSeries {
 export type SheetOutcome =
   | { state: 'empty'; filled: 0; total: number; problems: CellProblem[] }
   /** Some readings, not enough for the method, or a field that cannot be read. `reason` in plain words. */
-  | { state: 'not-yet'; filled: number; total: number; reason: string; problems: CellProblem[]; plot: PlotSeries | null }
+  | {
+      state: 'not-yet';
+      filled: number;
+      total: number;
+      reason: string;
+      problems: CellProblem[];
+      plot: PlotSeries | null;
+    }
   | {
       /** partial: evaluated from the stations that are complete. */
       state: 'partial' | 'complete';
       filled: number;
       total: number;
       problems: CellProblem[];
+      /** partial: what the result rests on, `by 4 of 5 positions`; null when complete. */
+      basedOn: string | null;
       input: EvaluationInput;
-      result: EvaluationResult;
+      result: MeasuredResult;
       judgement: Judgement;
       displayed: DisplayedResult;
       /** In words: `concave`, `free end leans toward the tool`; null where the sign says nothing. */
@@ -110,4 +122,6 @@ export interface SheetRules {
   tolerance: PlannedTolerance | null;
   direction: Direction;
   decisionRule: 'simple' | 'guarded';
+  /** Standard uncertainty of the result, µm. Guarded without it: nothing can be accepted or refused, the verdict is `undecided`. */
+  standardUncertaintyUm?: DecimalText | null;
 }

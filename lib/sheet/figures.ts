@@ -1,0 +1,148 @@
+import type { MeasuredResult, ResultOf } from '@/lib/evaluation';
+import { formatDecimal } from '@/lib/units/format';
+import { Fraction } from '@/lib/units/fraction';
+import { round } from '@/lib/units/round';
+import type { Judgement, SheetOutcome } from './types';
+
+export interface Figure {
+  label: string;
+  value: string;
+}
+
+/** Further figures of the method for sheet and report, rounded once for the reader, in words. Empty while there is no result. */
+export function figures(outcome: SheetOutcome): Figure[] {
+  if (outcome.state !== 'partial' && outcome.state !== 'complete') return [];
+  const { result, judgement, input } = outcome;
+  const own = figuresOf(result, judgement, input);
+  const local = judgement.local;
+  if (!local) return own;
+  return [
+    ...own,
+    {
+      label: `largest over any ${local.lengthMm} mm`,
+      value: `${um(local.deviationUm)} (limit ${um(local.toleranceUm, '0.1')})`,
+    },
+  ];
+}
+
+function figuresOf(result: MeasuredResult, judgement: Judgement, input: unknown): Figure[] {
+  switch (result.method) {
+    case 'run-out':
+      return runOutFigures(result, judgement);
+    case 'parallelism':
+      return [
+        { label: 'slope', value: slope(result.fitSlope) },
+        { label: 'last less first mean', value: um(result.difference) },
+        { label: 'range of the means', value: um(result.range) },
+      ];
+    case 'squareness-to-axis':
+      return [{ label: 'slope of the means', value: slope(result.fitSlope) }];
+    case 'squareness':
+      return [
+        { label: 'squareness', value: slope(result.squareness) },
+        ...(result.squareError === undefined
+          ? []
+          : [{ label: "the square's own error", value: slope(result.squareError) }]),
+      ];
+    case 'straightness':
+      return [{ label: 'slope of the reference line', value: slope(result.slope) }];
+    case 'coaxiality':
+      return coaxialityFigures(result, sectionPositions(input));
+    case 'centre-height':
+      return centreHeightFigures(result, radiiOf(input));
+    case 'lost-motion':
+      return lostMotionFigures(result);
+    case 'two-collar':
+      return [
+        { label: 'slope', value: slope(result.slope) },
+        { label: 'difference of the diameters', value: um(result.diameterDifference) },
+      ];
+    default:
+      return [];
+  }
+}
+
+function runOutFigures(result: ResultOf<'run-out'>, judgement: Judgement): Figure[] {
+  const { perInsertion, eccentricity, phase, spread } = result;
+  const list: Figure[] = [];
+  if (eccentricity !== undefined && phase !== undefined)
+    list.push({ label: 'eccentricity', value: `${um(eccentricity)} at ${shown(phase, '1')}°` });
+  if (perInsertion.length === 1) return list;
+  const totals = perInsertion.map(({ totalIndicatorReading }) => shown(totalIndicatorReading, '0.1')).join(', ');
+  const wide = judgement.toleranceUm !== null && times(spread, 4).compare(Fraction.from(judgement.toleranceUm)) > 0;
+  return [
+    { label: 'total readings', value: `${totals} µm` },
+    {
+      label: 'spread of the insertions',
+      value: `${um(spread)}${wide ? ', more than a quarter of the tolerance' : ''}`,
+    },
+    ...list,
+  ];
+}
+
+function coaxialityFigures(result: ResultOf<'coaxiality'>, positions: string[]): Figure[] {
+  const sections = result.sections.map(({ ex, ey, offset, closure }, k) => ({
+    label: `section at ${positions[k]} mm`,
+    value: `offset ${um(offset)}, ex ${um(ex)}, ey ${um(ey)}, closure ${um(closure)}`,
+  }));
+  if (result.tilt === undefined || result.tiltX === undefined || result.tiltY === undefined) return sections;
+  const tilt = `${slope(result.tilt)} (x ${slope(result.tiltX)}, y ${slope(result.tiltY)})`;
+  return [...sections, { label: 'tilt between the sections', value: tilt }];
+}
+
+function centreHeightFigures(result: ResultOf<'centre-height'>, radii: string[]): Figure[] {
+  const effects = (result.diameterEffects ?? []).map((effect, k) => ({
+    label: `effect on the diameter at r ${radii[k]} mm`,
+    value: um(effect, '0.01'),
+  }));
+  return [
+    ...(result.ex === undefined ? [] : [{ label: 'offset in X (for information)', value: um(result.ex) }]),
+    ...effects,
+  ];
+}
+
+function lostMotionFigures(result: ResultOf<'lost-motion'>): Figure[] {
+  const feeds = [
+    ['cutting feed', result.cuttingFeed],
+    ['rapid', result.rapid],
+  ] as const;
+  const summary = feeds.flatMap(([label, feed]) =>
+    feed ? [{ label: `lost motion, ${label}`, value: lostMotionWords(feed.lostMotion) }] : [],
+  );
+  const places = result.places.map(({ feed, place, mean, spread }) => ({
+    label: `${feed === 'rapid' ? 'rapid' : 'cutting feed'}, ${place ?? ''}`,
+    value: `mean difference ${um(mean)}, spread ${um(spread)}`,
+  }));
+  return [...summary, ...places];
+}
+
+function lostMotionWords(lostMotion: string): string {
+  const amount = um(lostMotion);
+  if (!/[1-9]/.test(amount)) return amount;
+  return `${amount}, ${Fraction.from(lostMotion).sign() > 0 ? 'play not compensated' : 'compensated too much'}`;
+}
+
+function sectionPositions(input: unknown): string[] {
+  const { sections } = input as { sections: { position: string }[] };
+  return sections.map(({ position }) => position);
+}
+
+function radiiOf(input: unknown): string[] {
+  return (input as { radii?: string[] }).radii ?? [];
+}
+
+function shown(value: string, resolution: string): string {
+  return formatDecimal(round(value, resolution, 'half-even'));
+}
+
+function um(value: string, resolution = '0.1'): string {
+  return `${shown(value, resolution)} µm`;
+}
+
+function slope(value: string): string {
+  return `${shown(value, '0.1')} µm/m`;
+}
+
+function times(value: string, factor: number): Fraction {
+  return Fraction.from(value).times(Fraction.of(factor));
+}

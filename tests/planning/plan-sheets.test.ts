@@ -1,0 +1,142 @@
+import { describe, expect, it } from 'vitest';
+import { choosePlan, groupProposals } from '@/lib/planning/choose';
+import { withContractTolerance } from '@/lib/planning/contract-tolerance';
+import { planSheets } from '@/lib/planning/plan-sheets';
+import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
+import { allDefinitions } from '@/standards/registry';
+import type { PlannedSheet } from '@/standards/types';
+import { workedSheets } from './data/worked-job';
+import { workedMachine } from './data/worked-machine';
+
+const plan = planSheets(workedMachine, allDefinitions());
+const byKey = (key: string): PlannedSheet => {
+  const found = plan.find((sheet) => sheet.key === key);
+  if (!found) throw new Error(`no sheet ${key}`);
+  return found;
+};
+
+describe('plan of the worked machine', () => {
+  it('holds all 17 sheets of the worked job, in its order', () => {
+    const wanted = workedSheets.map(({ key }) => key);
+    expect(wanted).toHaveLength(17);
+    expect(plan.map(({ key }) => key).filter((key) => wanted.includes(key))).toEqual(wanted);
+  });
+
+  it.each(workedSheets)('$key: component, what it rests on, direction', (worked) => {
+    const { component, dependsOn, direction } = byKey(worked.key);
+    expect({ component, dependsOn, direction }).toEqual({
+      component: worked.component,
+      dependsOn: worked.dependsOn,
+      direction: worked.direction,
+    });
+  });
+
+  it.each(workedSheets.filter(({ tolerance }) => tolerance.kind === 'shop'))(
+    '$key: tolerance by the sizes',
+    (worked) => {
+      const { tolerance } = byKey(worked.key);
+      expect(tolerance?.baseUm).toBe(worked.tolerance.base);
+      expect(tolerance?.perLength?.baseLengthMm ?? null).toBe(worked.tolerance.baseLength);
+      expect(tolerance?.perLength?.minimumUm ?? null).toBe(worked.tolerance.minimum);
+      const local = tolerance?.local && { value: tolerance.local.toleranceUm, length: tolerance.local.lengthMm };
+      expect(local ?? null).toEqual(worked.tolerance.local);
+      expect(tolerance?.foundBy).not.toBe('');
+    },
+  );
+
+  it('says how a tolerance was found', () => {
+    expect(byKey('SP-1a:S1').tolerance?.foundBy).toBe('size class 2 (nominal bar diameter 32 mm: over 25 up to 63)');
+    expect(byKey('AX-5:Z1:ZX').tolerance?.foundBy).toBe('travel of Z1 500 mm: up to 500');
+    expect(byKey('PO-B:X1').tolerance).toBeNull();
+  });
+
+  it('names components in plain words', () => {
+    expect(byKey('AX-2:X2:S2').title).toBe('X2 motion square to the axis of sub-spindle S2');
+    expect(byKey('SS-1:S2:S1').title).toBe('Main spindle S1 and sub-spindle S2: coaxiality');
+    expect(byKey('AX-5:Z1:YZ').title).toBe('Straightness of the Z1 motion, in YZ');
+  });
+
+  it('proposes what the worked job set up', () => {
+    const { setUp } = byKey('AX-5:Z1:ZX');
+    expect(Object.keys(setUp)).toHaveLength(11);
+    expect(setUp['/points/10/position']).toEqual({ text: '500', unit: 'mm' });
+    expect(byKey('TU-3:T1:S1').setUp['/radii/2']?.text).toBe('16');
+    expect(byKey('AX-4:Y1:X1').setUp['/first/measuredArm/points/2/position']?.text).toBe('70');
+  });
+
+  it('measures against the sub-spindle only after the sub-spindle itself', () => {
+    const place = (key: string) => plan.findIndex((sheet) => sheet.key === key);
+    expect(place('SS-3a:S2')).toBeLessThan(place('SS-1:S2:S1'));
+    expect(place('SS-1:S2:S1')).toBeLessThan(place('AX-2:X2:S2'));
+    expect(place('TU-3:T2:S1')).toBeLessThan(place('TU-3:T2:S2'));
+  });
+});
+
+describe.each(startingMakeUps)('plan of a $kind', ({ kind, makeUp }) => {
+  const sheets = planSheets(makeUp, allDefinitions());
+
+  it('has distinct keys, in working order', () => {
+    expect(new Set(sheets.map(({ key }) => key)).size).toBe(sheets.length);
+    const steps = sheets.map(({ workingStep }) => workingStep);
+    expect(steps).toEqual([...steps].sort((a, b) => a - b));
+  });
+
+  it('names only components that the machine has', () => {
+    const known = new Set([
+      'bed',
+      ...makeUp.linearAxes.map(({ id }) => id),
+      ...makeUp.spindles.map(({ id }) => id),
+      ...makeUp.turrets.map(({ id }) => id),
+    ]);
+    for (const { dependsOn, title } of sheets) {
+      for (const id of [...dependsOn.components, ...dependsOn.moved, ...dependsOn.positioned])
+        expect(known).toContain(id);
+      expect(title).not.toMatch(/[{}]|undefined/);
+    }
+  });
+
+  it('finds a tolerance wherever the catalogue has one', () => {
+    for (const { key, tolerance } of sheets) expect(tolerance === null, key).toBe(key.startsWith('PO-B'));
+  });
+
+  it('is the same every time, and has what this kind of machine needs', () => {
+    expect(planSheets(makeUp, allDefinitions())).toEqual(sheets);
+    const ids = new Set(sheets.map(({ definition }) => definition.id));
+    const always = ['SP-1a', 'SP-2a', 'SP-2b', 'AX-1a', 'AX-1b', 'AX-2', 'AX-5', 'TU-3', 'PO-B', 'WP-1'];
+    for (const id of always) expect(ids, kind).toContain(id);
+    const hasSub = makeUp.spindles.some(({ type }) => type === 'sub');
+    for (const id of ['SS-1', 'SS-3a', 'SS-3b', 'SS-3c']) expect(ids.has(id), `${kind} ${id}`).toBe(hasSub);
+    expect(ids.has('AX-4')).toBe(makeUp.linearAxes.some(({ letter }) => letter === 'Y'));
+  });
+});
+
+describe('choosing', () => {
+  it('keeps every proposal, measured or left out with its reason', () => {
+    const chosen = choosePlan(plan, {
+      'AX-5:Z1:YZ': { kind: 'leave-out', reason: 'not-agreed', text: 'by letter of the customer' },
+    });
+    expect(chosen.measured).toHaveLength(plan.length - 1);
+    expect(chosen.leftOut.map(({ sheet, reason }) => [sheet.key, reason])).toEqual([['AX-5:Z1:YZ', 'not-agreed']]);
+    expect(groupProposals(plan).flatMap(({ sheets }) => sheets)).toEqual(plan);
+    expect(groupProposals(plan).every(({ title }) => title !== 'Other tests')).toBe(true);
+  });
+
+  it('takes a tolerance from the contract', () => {
+    const { tolerance } = withContractTolerance(byKey('PO-B:X1'), { baseUm: '5', text: 'order 7714, item 6a' });
+    expect(tolerance).toEqual({
+      baseUm: '5',
+      foundBy: 'contract',
+      provenance: { kind: 'contract', text: 'order 7714, item 6a' },
+    });
+    const scaled = withContractTolerance(byKey('AX-5:Z1:ZX'), {
+      baseUm: '8',
+      text: 'item 2',
+      perLength: { baseLengthMm: '500', minimumUm: '4' },
+      local: { toleranceUm: '4', lengthMm: '200' },
+    });
+    expect(scaled.tolerance?.local?.provenance).toEqual({ kind: 'contract', text: 'item 2' });
+    expect(withContractTolerance(byKey('SS-1:S2:S1'), { baseUm: '10', text: 'item 3' }).tolerance?.basis).toBe(
+      'offset',
+    );
+  });
+});
