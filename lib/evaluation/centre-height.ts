@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { type Dec, plain } from '@/lib/units/decimal';
 import { Fraction } from '@/lib/units/fraction';
-import { decimalText, nonNegativeDecimal, positiveDecimal } from './decimal-text';
+import { decimalText, nonNegativeDecimal, positiveDecimal, tooFew } from './decimal-text';
 import { refuse } from './evaluation-error';
 import { surfaceSign, sweepReadings, sweptCentre, sweptSurface } from './sweep';
 
@@ -15,7 +15,7 @@ export const centreHeightInput = z.strictObject({
   surface: sweptSurface.optional(),
   sag: nonNegativeDecimal.optional(),
   up: decimalText.optional(),
-  radii: z.array(positiveDecimal).optional(),
+  radii: z.array(positiveDecimal).min(1, tooFew(1, 'radius')).optional(),
 });
 
 type Input = z.output<typeof centreHeightInput>;

@@ -2,17 +2,29 @@ import { z } from 'zod';
 import { conformity, conformityInput } from '@/lib/conformity/judge';
 import { correction, correctionInput } from '@/lib/correction/correction';
 import { uncertainty, uncertaintyInput } from '@/lib/uncertainty/uncertainty';
+import { angularDeviation, angularDeviationInput } from './angular-deviation';
+import { axialRunOut, axialRunOutInput } from './axial-run-out';
+import { axisOfRotation, axisOfRotationInput } from './axis-of-rotation';
 import { centreHeight, centreHeightInput } from './centre-height';
+import { circular, circularInput } from './circular';
 import { coaxiality, coaxialityInput } from './coaxiality';
+import { diameterConsistency, diameterConsistencyInput } from './diameter-consistency';
+import { drift, driftInput } from './drift';
 import { EvaluationError, pointerOf } from './evaluation-error';
+import { flatness, flatnessInput } from './flatness';
+import { indexing, indexingInput } from './indexing';
 import { lostMotion, lostMotionInput } from './lost-motion';
 import { parallelism, parallelismInput } from './parallelism';
+import { positioning, positioningInput } from './positioning';
 import { referenceShift, referenceShiftInput } from './reference-shift';
 import { rounding, roundingInput } from './rounding';
+import { roundness, roundnessInput } from './roundness';
 import { runOut, runOutInput } from './run-out';
 import { squareness, squarenessInput } from './squareness';
 import { squarenessToAxis, squarenessToAxisInput } from './squareness-to-axis';
 import { straightness, straightnessInput } from './straightness';
+import { straightnessFromAngles, straightnessFromAnglesInput } from './straightness-from-angles';
+import { straightnessReversal, straightnessReversalInput } from './straightness-reversal';
 import { tolerance, toleranceInput } from './tolerance';
 import { twoCollar, twoCollarInput } from './two-collar';
 
@@ -38,6 +50,18 @@ export const evaluationInput = z.discriminatedUnion('method', [
   lostMotionInput,
   referenceShiftInput,
   twoCollarInput,
+  angularDeviationInput,
+  axialRunOutInput,
+  axisOfRotationInput,
+  circularInput,
+  diameterConsistencyInput,
+  driftInput,
+  flatnessInput,
+  indexingInput,
+  positioningInput,
+  roundnessInput,
+  straightnessFromAnglesInput,
+  straightnessReversalInput,
   uncertaintyInput,
   conformityInput,
   roundingInput,
@@ -105,6 +129,30 @@ function calculate(input: z.output<typeof evaluationInput>) {
       return referenceShift(input);
     case 'two-collar':
       return twoCollar(input);
+    case 'angular-deviation':
+      return angularDeviation(input);
+    case 'axial-run-out':
+      return axialRunOut(input);
+    case 'axis-of-rotation':
+      return axisOfRotation(input);
+    case 'circular':
+      return circular(input);
+    case 'diameter-consistency':
+      return diameterConsistency(input);
+    case 'drift':
+      return drift(input);
+    case 'flatness':
+      return flatness(input);
+    case 'indexing':
+      return indexing(input);
+    case 'positioning':
+      return positioning(input);
+    case 'roundness':
+      return roundness(input);
+    case 'straightness-from-angles':
+      return straightnessFromAngles(input);
+    case 'straightness-reversal':
+      return straightnessReversal(input);
     case 'uncertainty':
       return uncertainty(input);
     case 'conformity':

@@ -75,7 +75,8 @@ function firstHarmonic(input: z.output<typeof runOutInput>, i: number): Harmonic
     1,
   );
   if (!fit) return refuse(path, tooFew(3, 'different angles'));
-  return { a: fit[1]!, b: fit[2]! };
+  const [, a, b] = fit.coefficients;
+  return { a: a!.toDec(), b: b!.toDec() };
 }
 
 function polarTexts(harmonic: Harmonic): { eccentricity: string; phase: string } {
