@@ -6,20 +6,22 @@ import { clearCluster, createCluster, postgresReaches, spawnServer, superuser, w
 import { ensurePostgres } from './debian.mjs';
 import { PlainError } from './plain-error.mjs';
 import { freePort } from './ports.mjs';
-import { identity, isAlive } from './processes.mjs';
+import { identity, isAlive, processesOfRun, stopProcesses } from './processes.mjs';
 
 /**
  * A throw-away PostgreSQL cluster on a free loopback port. Started as a child process with a channel: it sends
  * `{ adminUrl }` when it is ready (or `{ error }`) and removes itself when the channel closes, however that happens.
  */
 const prefix = 'witnessmark-test-';
+const swept = /^witnessmark-(test|installation)-/;
 
 /** Leftovers of test runs that were killed so hard that not even this process could tidy up. */
 async function sweep(parent) {
-  for (const name of readdirSync(parent).filter((entry) => entry.startsWith(prefix))) {
+  for (const name of readdirSync(parent).filter((entry) => swept.test(entry))) {
     const folder = path.join(parent, name);
     try {
       if (isAlive(JSON.parse(readFileSync(path.join(folder, 'owner.json'), 'utf8')))) continue;
+      await stopProcesses(() => processesOfRun(folder), [['SIGKILL', 5_000]]);
       await clearCluster(path.join(folder, 'postgres'));
       rmSync(folder, { recursive: true, force: true });
     } catch {

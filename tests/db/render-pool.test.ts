@@ -1,7 +1,7 @@
-import { randomBytes } from 'node:crypto';
+import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
-import { afterEach, expect, test } from 'vitest';
+import { afterAll, afterEach, expect, test } from 'vitest';
 import { defaultRenderLimits, RenderPool } from '@/lib/queue/render-pool';
 
 const childModule = path.join(import.meta.dirname, '../helpers/obedient-render-child.ts');
@@ -10,7 +10,8 @@ const limits = { ...defaultRenderLimits, renderTimeoutMs: 700 };
 let pool: RenderPool;
 afterEach(() => pool.close());
 
-const trace = () => path.join(tmpdir(), `witnessmark-${randomBytes(8).toString('hex')}`);
+const traces = mkdtempSync(path.join(tmpdir(), 'witnessmark-render-'));
+afterAll(() => rmSync(traces, { recursive: true }));
 
 async function processThatDraws(model: object = { act: 'answer' }): Promise<number> {
   return Number((await pool.render(model)).toString().split(' ')[0]);
@@ -41,7 +42,7 @@ test('replaces the process when it holds too much memory', async () => {
 test.each(['hang', 'crash', 'fail'])('tries once more in a fresh process when the first does %s', async (act) => {
   pool = new RenderPool(childModule, limits);
   const former = await processThatDraws();
-  expect(await processThatDraws({ act, once: trace() })).not.toBe(former);
+  expect(await processThatDraws({ act, once: path.join(traces, act) })).not.toBe(former);
 });
 
 test.each([

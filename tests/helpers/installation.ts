@@ -1,9 +1,10 @@
 import { type ChildProcess, fork } from 'node:child_process';
 import { once } from 'node:events';
-import { mkdtempSync, readdirSync, readFileSync, readlinkSync, realpathSync, rmSync } from 'node:fs';
+import { mkdtempSync, readdirSync, readFileSync, readlinkSync, realpathSync, rmSync, writeFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
+import { identity } from '@/db/server/processes.mjs';
 
 const root = path.join(import.meta.dirname, '../..');
 
@@ -42,7 +43,10 @@ export class Installation {
   constructor(
     readonly port: number,
     private readonly env: Record<string, string> = {},
-  ) {}
+  ) {
+    // A later run tidies up after this one by it, should this one be killed.
+    writeFileSync(this.inside('owner.json'), JSON.stringify(identity(process.pid)));
+  }
 
   get url(): string {
     return `http://localhost:${this.port}`;
