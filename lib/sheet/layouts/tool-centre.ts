@@ -26,7 +26,7 @@ const forms = [
 ];
 
 function fields(layout: ToolCentre, cells: Cells): SheetFields {
-  const bySweep = chosen(cells, '/form', layout.form) === 'sweep';
+  const bySweep = chosen(cells, '/form', layout.form) !== 'heights';
   const radii = rowsToOffer(cells, (k) => [radius(k)], MAX_RADII);
   const table: FieldTable = bySweep
     ? oneRow(SWEEP_ANGLES.map((angle) => [`${angle}°`, readingField(sweepAt(angle), `spindle at ${angle}°`)]))
