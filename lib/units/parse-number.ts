@@ -24,7 +24,7 @@ const INVISIBLE = /(?![\t-\r\u0085])[\p{Cc}\p{Cf}]/gu;
 // Line and column breaks separate values: they count as a space, so that two pasted values never melt into one.
 const SPACE = /[\s\u0085]/g;
 const GROUP_SPACE = /(?<=\d)[\u00a0\u2007\u2009\u202f](?=\d)/;
-const GROUPED = /^(\d{1,3})((?:[\u00a0\u2007\u2009\u202f]\d{3})+)(?=$|[^\d\u00a0\u2007\u2009\u202f])/;
+const GROUPED = /^(\d{1,3})((?:[\u00a0\u2007\u2009\u202f]\d{3})+)(?![\u00a0\u2007\u2009\u202f]?\d)/;
 const SHAPE = /^([+-]?) *([\d.,]*)(.*)$/s;
 
 /**
