@@ -19,7 +19,9 @@ export interface LimitRuleInput {
   /** The deviation as it is printed, mm. */
   shown: string | null;
   expandedUncertaintyUm?: string | null;
+  /** Guarded acceptance: g, or the limit T − g itself. */
   guardUm?: string | null;
+  limitUm?: string | null;
   widthPx: number;
   /** Without figures, for a row of a table. */
   compact?: boolean;
@@ -41,7 +43,7 @@ export function limitRule(input: LimitRuleInput): Drawing {
   const items: DrawingItem[] = [];
   if (scale.oneSided) items.push(forbiddenSide(scale));
   if (value !== null && breadthUm > 0) items.push(...band(scale, value, breadthUm, ink, wash));
-  items.push(polyline(ruleLine(scale, input.guardUm), { widthPx: 2 }), ...ticks(scale));
+  items.push(polyline(ruleLine(scale, input), { widthPx: 2 }), ...ticks(scale));
   if (value !== null) items.push(...scribe(scale, value, ink));
   if (!input.compact) items.push(...figures(scale, input, value, ink));
   return { widthPx: input.widthPx, heightPx: scale.heightPx, description: limitRuleWords(input), items };
@@ -79,15 +81,13 @@ function band(scale: RuleScale, value: number, breadthUm: number, ink: Ink, wash
 }
 
 /** The rule as one line, with the notches cut into it; guarded acceptance has a second, shallower notch at T − g. */
-function ruleLine(scale: RuleScale, guardUm: string | null | undefined): Point[] {
+function ruleLine(scale: RuleScale, input: LimitRuleInput): Point[] {
   const deep = scale.heightPx < 30 ? 5 : 12;
   const cuts = scale.notches.map((tenth) => ({ x: scale.x(tenth * scale.tenthUm), depth: deep }));
-  const guard = guardUm ? coordinate(guardUm) : 0;
-  if (guard > 0 && guard < 10 * scale.tenthUm) {
-    for (const tenth of scale.notches) {
-      const at = Math.sign(tenth) * (10 * scale.tenthUm - guard);
-      cuts.push({ x: scale.x(at), depth: deep / 2 });
-    }
+  const toleranceUm = 10 * scale.tenthUm;
+  const limitUm = input.limitUm ? coordinate(input.limitUm) : toleranceUm - coordinate(input.guardUm ?? '0');
+  if (limitUm > 0 && limitUm < toleranceUm) {
+    for (const tenth of scale.notches) cuts.push({ x: scale.x(Math.sign(tenth) * limitUm), depth: deep / 2 });
   }
   cuts.sort((a, b) => a.x - b.x);
   const points: Point[] = [[scale.left, scale.baseY]];

@@ -1,0 +1,89 @@
+import type { DrawingItem, Ink } from '@/components/plots/drawing';
+import type { TextStyle } from '@/templates/report/theme';
+
+/** What is put on paper: positions in pt from the upper left corner of what holds it, y down. */
+export type Op =
+  /** `y` is the base line. */
+  | { op: 'text'; x: number; y: number; text: string; style: TextStyle }
+  | { op: 'line'; x1: number; y1: number; x2: number; y2: number; ink: Ink; widthPt: number; dash?: number[] }
+  | {
+      op: 'box';
+      x: number;
+      y: number;
+      widthPt: number;
+      heightPt: number;
+      ink: Ink;
+      fill?: Ink;
+      lineWidthPt: number;
+      radiusPt?: number;
+    }
+  /** A drawing's own items, scaled. */
+  | { op: 'drawing'; x: number; y: number; scale: number; items: readonly DrawingItem[] }
+  | { op: 'turned'; x: number; y: number; deg: number; text: string; style: TextStyle }
+  | { op: 'group'; x: number; y: number; ops: readonly Op[] };
+
+/** A piece of a page that is never split. */
+export interface Slab {
+  heightPt: number;
+  ops: readonly Op[];
+}
+
+/** What flows over the pages, in order. */
+export type FlowItem =
+  /** `keepWithNext`: never the last thing on a page. `bookmark`: an entry of the document's outline. */
+  | { kind: 'slab'; slab: Slab; keepWithNext?: boolean; bookmark?: string }
+  /** Rows that may be split between rows; the header is repeated; never a single row alone on a page. */
+  | { kind: 'rows'; header: Slab | null; rows: readonly Slab[]; keepWithNext?: boolean }
+  /** Vanishes at the head of a page. */
+  | { kind: 'space'; heightPt: number }
+  /** Kept on one page where that does not leave more than a part of a page empty. */
+  | { kind: 'together'; items: readonly FlowItem[] };
+
+export const slabItem = (slab: Slab, more: { keepWithNext?: boolean; bookmark?: string } = {}): FlowItem => ({
+  kind: 'slab',
+  slab,
+  ...more,
+});
+
+export const space = (heightPt: number): FlowItem => ({ kind: 'space', heightPt });
+
+export const moved = (slab: Slab, x: number, y: number): Op => ({ op: 'group', x, y, ops: slab.ops });
+
+/** Slabs below each other. */
+export function stack(slabs: readonly Slab[], gapPt = 0): Slab {
+  let y = 0;
+  const ops: Op[] = [];
+  slabs.forEach((slab, index) => {
+    if (index) y += gapPt;
+    ops.push(moved(slab, 0, y));
+    y += slab.heightPt;
+  });
+  return { heightPt: y, ops };
+}
+
+/** Slabs beside each other, heads aligned. */
+export function beside(placed: readonly { slab: Slab; x: number }[]): Slab {
+  return {
+    heightPt: Math.max(0, ...placed.map(({ slab }) => slab.heightPt)),
+    ops: placed.map(({ slab, x }) => moved(slab, x, 0)),
+  };
+}
+
+export function ruleLine(widthPt: number, ink: Ink = 'ink', lineWidthPt = 1): Slab {
+  return {
+    heightPt: lineWidthPt,
+    ops: [{ op: 'line', x1: 0, y1: 0.5, x2: widthPt, y2: 0.5, ink, widthPt: lineWidthPt }],
+  };
+}
+
+/** Height of items on one page, without the spaces at the ends. */
+export function heightOf(items: readonly FlowItem[]): number {
+  return items.reduce((sum, item) => sum + itemHeight(item), 0);
+}
+
+function itemHeight(item: FlowItem): number {
+  if (item.kind === 'slab') return item.slab.heightPt;
+  if (item.kind === 'space') return item.heightPt;
+  if (item.kind === 'together') return heightOf(item.items);
+  return (item.header?.heightPt ?? 0) + item.rows.reduce((sum, row) => sum + row.heightPt, 0);
+}

@@ -1,0 +1,66 @@
+import type { MarkKind } from '@/components/plots/verdict-ink';
+import { verdictMark } from '@/components/plots/verdict-mark-geometry';
+import type { ReportModel, SummaryRow } from '@/lib/reporting/report-model';
+import { REPORT_WORDS, SHORT_VERDICT_WORDS } from '@/lib/reporting/words';
+import { drawingSlab } from '@/templates/report/flow/drawing-slab';
+import { type FlowItem, moved, type Slab, slabItem, space } from '@/templates/report/flow/ops';
+import { heading, type Kit, markedWords } from '@/templates/report/flow/parts';
+import { type Column, type TableCell, table, tableWidth } from '@/templates/report/flow/table';
+import { TYPE } from '@/templates/report/theme';
+
+/** One row a planned test: as found, as left, tolerance, verdict as a mark and a word. */
+export function summary(kit: Kit, model: ReportModel): FlowItem[] {
+  const words = REPORT_WORDS.summary;
+  const fixed: Column[] = [
+    { head: words.asFound, widthPt: 66, align: 'decimal', style: TYPE.figure },
+    { head: words.asLeft, widthPt: 52, align: 'decimal', style: TYPE.figure },
+    { head: words.tolerance, widthPt: 42, align: 'decimal', style: TYPE.figure },
+    { head: words.verdict, widthPt: 112 },
+  ];
+  const number: Column = { head: words.number, widthPt: 24, style: TYPE.figure };
+  const test: Column = { head: words.test, widthPt: 0 };
+  test.widthPt = kit.widthPt - tableWidth([number, test, ...fixed]);
+  const columns = [number, test, ...fixed];
+  const decimals = Math.max(0, ...model.summary.map((row) => row.asFound?.match(/[.,](\d+)/)?.[1]?.length ?? 0));
+  const rows = model.summary.map((row): TableCell[] => [
+    String(row.order),
+    titleOf(row),
+    asFoundCell(kit, row, fixed[0] as Column, decimals),
+    row.asLeft === null ? REPORT_WORDS.none : row.linked ? `${words.linkedSign} ${row.asLeft}` : row.asLeft,
+    row.toleranceMm ?? REPORT_WORDS.none,
+    verdictCell(kit, row, fixed[3] as Column),
+  ]);
+  const notes = [
+    model.summary.some((row) => row.linked) ? words.linkedNote : '',
+    model.summary.some((row) => row.asFoundVerdict && !FINE.includes(row.asFoundVerdict)) ? words.asFoundOut : '',
+  ].filter((note) => note !== '');
+  const note = notes.length ? [space(5), slabItem(kit.type.paragraph(notes.join(' '), TYPE.small, kit.widthPt))] : [];
+  return [...heading(kit, words.heading), table(kit.type, columns, rows), ...note];
+}
+
+const FINE: readonly MarkKind[] = ['within-tolerance', 'for-information'];
+
+/** The component after the title, unless the title names it. */
+function titleOf(row: SummaryRow): string {
+  return row.component === '' || row.title.includes(row.component) ? row.title : `${row.title}, ${row.component}`;
+}
+
+/** A figure as found, with the mark before it where it was not within tolerance. */
+function asFoundCell(kit: Kit, row: SummaryRow, column: Column, decimals: number): TableCell {
+  const verdict = row.asFoundVerdict;
+  if (row.asFound === null || !verdict || FINE.includes(verdict)) return row.asFound ?? REPORT_WORDS.none;
+  const mark = drawingSlab(kit.type, verdictMark(verdict), 20);
+  const own = row.asFound.match(/[.,](\d+)/)?.[1]?.length ?? 0;
+  const right = column.widthPt - 6 - (decimals - own) * kit.type.width('0', TYPE.figure);
+  const figure = kit.type.line(row.asFound, TYPE.figure, right, 'end');
+  return { heightPt: figure.heightPt, ops: [moved(mark, 0, 0), ...figure.ops] } satisfies Slab;
+}
+
+function verdictCell(kit: Kit, row: SummaryRow, column: Column): Slab {
+  const kind: MarkKind = row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? 'not-measured');
+  const parts = [
+    row.leftOut ? `${SHORT_VERDICT_WORDS['left-out']}: ${row.leftOut}` : SHORT_VERDICT_WORDS[kind],
+    row.remarkNo === null ? '' : `${REPORT_WORDS.summary.remark} ${row.remarkNo}`,
+  ];
+  return markedWords(kit, kind, parts.filter((part) => part !== '').join(', '), TYPE.strong, column.widthPt - 6);
+}
