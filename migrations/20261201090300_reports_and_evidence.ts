@@ -16,7 +16,8 @@ export async function up(knex: Knex): Promise<void> {
       revision integer not null default 1,
       state text not null check (state in ('checked', 'issued', 'signed', 'signed-with-remarks', 'refused', 'superseded')),
       -- Frozen when it is issued; a trigger keeps it so.
-      model jsonb not null,
+      -- Kept as text, so that its hash can be recomputed from what is stored.
+      model json not null,
       model_sha256 text not null,
       pdf_state text not null default 'waiting' check (pdf_state in ('waiting', 'ready', 'failed')),
       -- As issued, and the same with the customer's signature.
@@ -166,7 +167,7 @@ export async function up(knex: Knex): Promise<void> {
 
     create function reports_are_frozen() returns trigger language plpgsql as $$
     begin
-      if new.model is distinct from old.model or new.model_sha256 <> old.model_sha256 or new.number <> old.number
+      if new.model::text <> old.model::text or new.model_sha256 <> old.model_sha256 or new.number <> old.number
          or new.revision <> old.revision or new.job_id <> old.job_id or new.issued_at <> old.issued_at
          or new.issued_by is distinct from old.issued_by then
         raise exception 'an issued report does not change' using errcode = 'WM001';

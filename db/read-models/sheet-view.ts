@@ -25,8 +25,12 @@ export interface InstrumentChoice {
   resolution: string | null;
   resolutionUnit: string | null;
   certificate: string | null;
+  calibratedOn: string | null;
   /** Last valid day of the newest certificate; null: none is registered. */
   dueOn: string | null;
+  expandedUncertainty: string | null;
+  uncertaintyUnit: string | null;
+  coverageFactor: string | null;
 }
 
 export interface SheetView {
@@ -71,7 +75,15 @@ export const listInstrumentChoices = (db: Db): Promise<InstrumentChoice[]> =>
       db('calibrations')
         .distinctOn('instrument_id')
         .orderBy([{ column: 'instrument_id' }, { column: 'due_on', order: 'desc' }])
-        .select('instrument_id', 'certificate', 'due_on')
+        .select(
+          'instrument_id',
+          'certificate',
+          'calibrated_on',
+          'due_on',
+          'expanded_uncertainty',
+          'uncertainty_unit',
+          'coverage_factor',
+        )
         .as('newest'),
       'newest.instrument_id',
       'instruments.id',
@@ -86,7 +98,11 @@ export const listInstrumentChoices = (db: Db): Promise<InstrumentChoice[]> =>
       resolution: 'instruments.resolution',
       resolutionUnit: 'instruments.resolution_unit',
       certificate: 'newest.certificate',
+      calibratedOn: 'newest.calibrated_on',
       dueOn: 'newest.due_on',
+      expandedUncertainty: 'newest.expanded_uncertainty',
+      uncertaintyUnit: 'newest.uncertainty_unit',
+      coverageFactor: 'newest.coverage_factor',
     });
 
 export const machineHead = (db: Db, id: string): Promise<SheetView['machine'] | undefined> =>

@@ -22,6 +22,8 @@ export interface RouteContext<P, Q, B> {
 export interface RouteAnswer {
   status?: number;
   body?: unknown;
+  /** Instead of a body: bytes as they are. */
+  raw?: { bytes: Uint8Array; contentType: string };
   /** Entity tag of the answer's resource. */
   version?: number;
   headers?: Record<string, string>;
@@ -103,6 +105,13 @@ export function route<
 export function respond(answer: RouteAnswer): Response {
   const headers: Record<string, string> = { 'cache-control': 'no-store', ...answer.headers };
   if (answer.version !== undefined) headers.etag = `"${answer.version}"`;
+  if (answer.raw) {
+    const body = new Uint8Array(answer.raw.bytes);
+    return new Response(body, {
+      status: answer.status ?? 200,
+      headers: { 'content-type': answer.raw.contentType, ...headers },
+    });
+  }
   if (answer.body === undefined || answer.body === null)
     return new Response(null, { status: answer.status ?? 204, headers });
   return new Response(JSON.stringify(answer.body), {

@@ -64,7 +64,14 @@ export interface ReportModel {
   summary: SummaryRow[];
   notInPlan: { title: string; reason: string }[];
   blocks: TestBlock[];
-  remarks: { no: number; sheetOrder: number | null; text: string; owner: string | null; due: string | null; closed: string | null }[];
+  remarks: {
+    no: number;
+    sheetOrder: number | null;
+    text: string;
+    owner: string | null;
+    due: string | null;
+    closed: string | null;
+  }[];
   signatures: SignatureBlock[];
   statement: string;
 }

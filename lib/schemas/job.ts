@@ -40,11 +40,20 @@ export const jobForm = z
     place: optionalText('The place', 200),
     hours: optionalText('Hours run', 20),
     people: z
-      .array(z.object({ membershipId: id.nullish(), name: line('The name', 120), role: z.enum(['inspector', 'reviewer', 'customer']) }))
+      .array(
+        z.object({
+          membershipId: id.nullish(),
+          name: line('The name', 120),
+          role: z.enum(['inspector', 'reviewer', 'customer']),
+        }),
+      )
       .max(20)
       .default([]),
   })
-  .refine((job) => !job.endsOn || job.endsOn >= job.startsOn, { path: ['endsOn'], error: 'The last day lies before the first.' });
+  .refine((job) => !job.endsOn || job.endsOn >= job.startsOn, {
+    path: ['endsOn'],
+    error: 'The last day lies before the first.',
+  });
 export type JobForm = z.output<typeof jobForm>;
 
 /** What stood around the measurement; every line prints. */
@@ -58,8 +67,15 @@ export const conditionsForm = z.object({
 export type Conditions = z.output<typeof conditionsForm>;
 
 export const temperatureForm = z
-  .object({ measuredAt: z.iso.datetime({ offset: true, error: 'Give date and time.' }), air: z.string().trim(), machine: z.string().trim() })
-  .refine((row) => row.air !== '' || row.machine !== '', { path: ['air'], error: 'Give the air or the machine temperature.' });
+  .object({
+    measuredAt: z.iso.datetime({ offset: true, error: 'Give date and time.' }),
+    air: z.string().trim(),
+    machine: z.string().trim(),
+  })
+  .refine((row) => row.air !== '' || row.machine !== '', {
+    path: ['air'],
+    error: 'Give the air or the machine temperature.',
+  });
 
 /** The plan: which proposals are taken, why the others are not, and contract tolerances. */
 export const planForm = z.object({

@@ -9,7 +9,10 @@ import { id } from './common';
 export const readingOperation = z.strictObject({
   opId: id,
   passId: id,
-  cellId: z.string().regex(/^(\/[^/]{1,40}){1,8}$/, 'This is no field of a sheet.').max(200),
+  cellId: z
+    .string()
+    .regex(/^(\/[^/]{1,40}){1,8}$/, 'This is no field of a sheet.')
+    .max(200),
   baseVersion: z.int().min(0),
   /** As typed; empty clears the field. */
   text: z.string().max(60, 'Longer than 60 characters.'),

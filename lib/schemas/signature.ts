@@ -19,7 +19,10 @@ export const intentTexts: Record<Outcome, string> = {
 };
 
 /** Strokes of a drawn signature: SVG path data in a box of 600 × 200. */
-const stroke = z.string().regex(/^[ML0-9 .,-]+$/, 'This is no stroke.').max(20_000);
+const stroke = z
+  .string()
+  .regex(/^[ML0-9 .,-]+$/, 'This is no stroke.')
+  .max(20_000);
 
 export const signatureForm = z
   .object({
@@ -60,7 +63,11 @@ export const signatureForm = z
       context.addIssue({ code: 'custom', path: ['typed'], message: 'Draw your signature or type your name.' });
     }
     if (form.intentText !== intentTexts[form.outcome]) {
-      context.addIssue({ code: 'custom', path: ['intentText'], message: 'The sentence shown is not the one that is signed. Load the page again.' });
+      context.addIssue({
+        code: 'custom',
+        path: ['intentText'],
+        message: 'The sentence shown is not the one that is signed. Load the page again.',
+      });
     }
   });
 export type SignatureForm = z.output<typeof signatureForm>;

@@ -5,10 +5,10 @@ import { findPass, listPasses, listReadings, type PassRow } from '@/db/queries/p
 import { keepResult } from '@/db/queries/results';
 import { lockSheet, type SheetRow } from '@/db/queries/sheets';
 import { notFound } from '@/lib/errors';
+import { definitionOf } from '@/lib/planning/definition-of';
 import type { OperationAnswer, ReadingOperation } from '@/lib/schemas/operation';
 import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import type { Cells, SheetOutcome, SheetRules } from '@/lib/sheet/types';
-import { findDefinition } from '@/standards/registry';
 
 export interface KeptReadings {
   results: OperationAnswer[];
@@ -33,8 +33,7 @@ export async function judgePass(
 ): Promise<SheetOutcome> {
   const readings = await listReadings(db, [passId]);
   const cells: Cells = Object.fromEntries(readings.map((row) => [row.pointer, { text: row.text, unit: row.unit }]));
-  const { id, code, edition, version } = sheet.definition;
-  const outcome = judgeSheet(rulesOf(sheet, decisionRule), findDefinition(id, code, edition, version), cells);
+  const outcome = judgeSheet(rulesOf(sheet, decisionRule), definitionOf(sheet.definition), cells);
   await keepResult(db, passId, outcome);
   return outcome;
 }

@@ -4,7 +4,8 @@ import { listSheets } from '@/db/queries/sheets';
 import { passViews } from '@/db/read-models/sheet-view';
 import type { Viewer } from '@/lib/auth/viewer';
 import { notFound } from '@/lib/errors';
-import { sheetState } from './sheet-state';
+import { sheetState } from '@/lib/reporting/sheet-state';
+
 import { startPass } from './start-pass';
 
 /** Links as left to as found on each of the sheets whose readings as found are complete and that have nothing newer. */
@@ -20,7 +21,12 @@ export async function linkAsLeft(db: Db, viewer: Viewer, jobId: string, sheetIds
   for (const sheet of sheets) {
     const mine = passes.filter((pass) => pass.sheetId === sheet.id);
     const found = mine.find((pass) => pass.kind === 'as-found');
-    if (!found || sheetState(sheet, mine).state !== 'found' || mine.some((pass) => pass.kind !== 'as-found')) continue;
+    if (
+      !found ||
+      sheetState({ ...sheet, passes: mine }).state !== 'found' ||
+      mine.some((pass) => pass.kind !== 'as-found')
+    )
+      continue;
     await startPass(db, sheet.id, { kind: 'as-left', linkTo: found.id }, viewer);
     linked += 1;
   }

@@ -4,9 +4,9 @@ import { insertPass, listPasses, listReadings, type PassRow } from '@/db/queries
 import { listResults } from '@/db/queries/results';
 import { lockSheet, type SheetRow } from '@/db/queries/sheets';
 import { conflict, notFound } from '@/lib/errors';
+import { definitionOf } from '@/lib/planning/definition-of';
 import { sheetFields } from '@/lib/sheet/sheet-fields';
 import type { Cells } from '@/lib/sheet/types';
-import { findDefinition } from '@/standards/registry';
 import type { CellDefault } from '@/standards/types';
 import { closedBecause } from './keep-readings';
 
@@ -38,8 +38,7 @@ export async function startPass(
 async function carriedSetUp(db: Db, sheet: SheetRow, passId: string): Promise<Record<string, CellDefault>> {
   const readings = await listReadings(db, [passId]);
   const cells: Cells = Object.fromEntries(readings.map((row) => [row.pointer, { text: row.text, unit: row.unit }]));
-  const { id, code, edition, version } = sheet.definition;
-  const fields = sheetFields(findDefinition(id, code, edition, version), cells);
+  const fields = sheetFields(definitionOf(sheet.definition), cells);
   const taken = new Set(fields.order);
   return Object.fromEntries(Object.entries(cells).filter(([pointer, cell]) => !taken.has(pointer) && cell.text !== ''));
 }

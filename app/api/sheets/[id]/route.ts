@@ -3,10 +3,10 @@ import { findSheet, updateSheet } from '@/db/queries/sheets';
 import { sheetView } from '@/db/read-models/sheet-view';
 import { changedMeanwhile, conflict, notFound } from '@/lib/errors';
 import { route } from '@/lib/http/route';
+import { sheetState } from '@/lib/reporting/sheet-state';
 import { idParams } from '@/lib/schemas/common';
 import { sheetChange } from '@/lib/schemas/job';
 import { closedBecause } from '@/lib/services/keep-readings';
-import { sheetState } from '@/lib/services/sheet-state';
 
 export const GET = route({
   action: 'job.read',
@@ -15,7 +15,7 @@ export const GET = route({
     const view = await sheetView(trx, params.id);
     if (!view) throw notFound('sheet');
     const { sheet } = view;
-    const state = sheetState(sheet, view.passes);
+    const state = sheetState({ ...sheet, passes: view.passes });
     return {
       version: sheet.version,
       body: {
@@ -25,7 +25,7 @@ export const GET = route({
         component: sheet.component,
         tolerance: sheet.tolerance,
         passes: view.passes,
-        result: state.final,
+        result: state.final?.result ?? null,
         // Corrections, and what they disturb, are recorded from a later version on: nothing can be disturbed yet.
         disturbedBy: [],
         sheet,

@@ -1,0 +1,7 @@
+import type { RequestOrigin } from '@/lib/services/issue-report';
+
+/** From where a request came, for the evidence; what is not known is said so, never left empty. */
+export const requestOrigin = (request: Request): RequestOrigin => ({
+  ip: request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() || 'not recorded',
+  userAgent: request.headers.get('user-agent') || 'not recorded',
+});

@@ -1,0 +1,220 @@
+import { componentName, componentWords } from '@/lib/planning/component-words';
+import { decisionRules, leftOutReasons, purposes } from '@/lib/schemas/job';
+import { machineKinds } from '@/lib/schemas/make-up';
+import { convert } from '@/lib/units/convert';
+import { Dec } from '@/lib/units/decimal';
+import { formatDecimal } from '@/lib/units/format';
+import { countVerdicts } from './count-verdicts';
+import { formatTime } from './format-time';
+import type { CellChangeText } from './pass-block';
+import {
+  conditionLabels,
+  criterionWords,
+  headlineWords,
+  roleWords,
+  signedOutcomeWords,
+  statementWords,
+} from './record-words';
+import type { ReportModel, SignatureBlock, SummaryRow } from './report-model';
+import { sheetState } from './sheet-state';
+import type { StoredInstrument, StoredJob } from './stored-job';
+import { editionWords, testBlock } from './test-block';
+
+export interface ReportInput {
+  stored: StoredJob;
+  changes: CellChangeText[];
+  machine: {
+    manufacturer: string;
+    model: string;
+    serialNumber: string;
+    year: number | null;
+    control: string | null;
+    site: string | null;
+  };
+  customerName: string;
+  organisation: {
+    name: string;
+    addressLines: string[];
+    contact: string | null;
+    timeZone: string;
+    paper: 'A4' | 'Letter';
+  };
+  document: ReportModel['document'];
+  inspector: { name: string; function: string | null } | null;
+  reviewer: { name: string; function: string | null; at: string } | null;
+  remarks: ReportModel['remarks'];
+}
+
+/** A stored job as the document that the customer signs. Pure; every figure is a stored result or a reading as typed. */
+export function buildReportModel(input: ReportInput): ReportModel {
+  const { stored, machine, organisation } = input;
+  const { job } = stored;
+  const states = stored.sheets.map((sheet) => sheetState(sheet));
+  const counts = { asFound: countVerdicts(states, 'asFound'), asLeft: countVerdicts(states, 'asLeft') };
+  const outRemarked = stored.sheets.filter(
+    (sheet, index) => states[index]?.verdict === 'out-of-tolerance' && sheet.remark,
+  ).length;
+  const context = { timeZone: organisation.timeZone, changes: input.changes };
+  return {
+    schemaVersion: 1,
+    language: 'en',
+    paper: organisation.paper,
+    document: input.document,
+    letterhead: { name: organisation.name, addressLines: organisation.addressLines, contact: organisation.contact },
+    machine: {
+      ...machine,
+      hours: job.hours,
+      kind: machineKinds[job.makeUp.kind],
+      sizeClass: `${criterionWords[job.makeUp.sizeClass.criterion]} ${formatDecimal(job.makeUp.sizeClass.valueMm)} mm`,
+      components: componentList(stored),
+    },
+    customer: { name: input.customerName, engineer: job.customerEngineer, order: job.customerOrder },
+    job: {
+      reference: job.reference,
+      purpose: purposes[job.purpose],
+      scope: job.scope,
+      from: job.startsOn,
+      to: job.endsOn,
+      codes: [...new Set(stored.sheets.map((sheet) => editionWords(sheet.definition)))],
+      decisionRule: decisionRules[job.decisionRule],
+      people: stored.people.map((person) => ({ name: person.name, role: person.role })),
+    },
+    conditions: conditions(stored, organisation.timeZone),
+    instruments: usedInstruments(stored),
+    headline: headlineWords(counts.asLeft, outRemarked),
+    counts,
+    summary: stored.sheets.map((sheet, index): SummaryRow => {
+      const state = states[index]!;
+      const tolerance = (state.final?.result?.outcome.judgement.toleranceUm ?? sheet.tolerance?.baseUm) || null;
+      return {
+        order: sheet.position,
+        title: sheet.title,
+        component: componentWords(sheet.component, job.makeUp),
+        asFound: state.asFound?.result ? formatDecimal(state.asFound.result.displayedMm) : null,
+        asFoundVerdict: state.asFound?.result?.verdict ?? null,
+        asLeft: state.asLeft?.result ? formatDecimal(state.asLeft.result.displayedMm) : null,
+        asLeftVerdict: state.asLeft?.result?.verdict ?? null,
+        linked: state.linked,
+        toleranceMm: tolerance && toleranceText(tolerance),
+        leftOut: sheet.leftOutReason ? leftOutReasons[sheet.leftOutReason] : null,
+        remarkNo: input.remarks.find((remark) => remark.sheetOrder === sheet.position)?.no ?? null,
+      };
+    }),
+    notInPlan: stored.exclusions.map((entry) => ({
+      title: entry.title,
+      reason: entry.text ? `${leftOutReasons[entry.reason]}: ${entry.text}` : leftOutReasons[entry.reason],
+    })),
+    blocks: stored.sheets.map((sheet) => testBlock(sheet, stored, context)),
+    remarks: input.remarks,
+    signatures: signatures(input),
+    statement: statementWords,
+  };
+}
+
+/** At most four decimals in mm, cut off downward, so that a scaled tolerance never looks wider than it is. */
+function toleranceText(um: string): string {
+  const mm = new Dec(convert(um, 'µm', 'mm'));
+  return formatDecimal(mm.toDecimalPlaces(4, Dec.ROUND_DOWN).toString());
+}
+
+function componentList({ job: { makeUp } }: StoredJob): ReportModel['machine']['components'] {
+  const programmed = { radius: 'programmed on radius', diameter: 'programmed on diameter' } as const;
+  return [
+    ...makeUp.spindles.map((spindle) => ({
+      id: spindle.id,
+      what: `${componentName(spindle.id, makeUp)}, channel ${spindle.channel}`,
+    })),
+    ...makeUp.turrets.map((turret) => ({
+      id: turret.id,
+      what: `${componentName(turret.id, makeUp)}, ${turret.stations} stations, ${turret.axes.join(' ')}, channel ${turret.channel}`,
+    })),
+    ...makeUp.linearAxes.map((axis) => ({
+      id: axis.id,
+      what: `axis ${axis.id}, travel ${formatDecimal(axis.travelMm)} mm, ${programmed[axis.programmedOn]}`,
+    })),
+  ];
+}
+
+function conditions(stored: StoredJob, timeZone: string): ReportModel['conditions'] {
+  const airs = stored.temperatures.flatMap((row) => (row.air === null ? [] : [new Dec(row.air)]));
+  const lines = (Object.keys(conditionLabels) as (keyof typeof conditionLabels)[]).flatMap((key) => {
+    const value = stored.job.conditions[key];
+    return value ? [{ label: conditionLabels[key], value }] : [];
+  });
+  return {
+    place: stored.job.place,
+    lines,
+    temperatures: stored.temperatures.map((row) => ({
+      at: formatTime(row.measuredAt, timeZone),
+      air: row.air && formatDecimal(row.air),
+      machine: row.machine && formatDecimal(row.machine),
+    })),
+    airRange:
+      airs.length > 0
+        ? `air ${formatDecimal(Dec.min(...airs).toString())} to ${formatDecimal(Dec.max(...airs).toString())} °C`
+        : null,
+  };
+}
+
+function usedInstruments(stored: StoredJob): ReportModel['instruments'] {
+  const uses = stored.sheets
+    .filter((sheet) => !sheet.leftOutReason)
+    .flatMap((sheet) =>
+      sheet.passes.flatMap((pass) => pass.instruments.map((used) => ({ ...used, position: sheet.position }))),
+    );
+  return stored.instruments
+    .filter((instrument) => uses.some((use) => use.instrumentId === instrument.id))
+    .map((instrument) => {
+      const overrides = uses.filter((use) => use.instrumentId === instrument.id && use.overrideReason);
+      return {
+        number: instrument.number,
+        name: instrument.name,
+        resolution:
+          instrument.resolution && `${formatDecimal(instrument.resolution)} ${instrument.resolutionUnit ?? ''}`.trim(),
+        certificate: instrument.certificate,
+        calibrated: instrument.calibratedOn,
+        due: instrument.dueOn,
+        uncertainty: uncertaintyWords(instrument),
+        override:
+          overrides
+            .map(
+              (use) =>
+                `test ${use.position}: used after its due date, allowed by ${use.overrideBy}: ${use.overrideReason}`,
+            )
+            .join('; ') || null,
+      };
+    });
+}
+
+function uncertaintyWords(instrument: StoredInstrument): string | null {
+  if (!instrument.expandedUncertainty) return null;
+  const factor = instrument.coverageFactor ? `, k = ${formatDecimal(instrument.coverageFactor)}` : '';
+  return `U = ${formatDecimal(instrument.expandedUncertainty)} ${instrument.uncertaintyUnit ?? ''}${factor}`;
+}
+
+function signatures({ inspector, reviewer, organisation }: ReportInput): SignatureBlock[] {
+  const block = (
+    role: SignatureBlock['role'],
+    person: { name: string; function: string | null } | null,
+    signed: { at: string | null; outcome: string | null },
+  ): SignatureBlock => ({
+    role,
+    roleWords: roleWords[role],
+    name: person?.name ?? '',
+    function: person?.function ?? null,
+    company: role === 'customer' ? null : organisation.name,
+    signedAt: signed.at,
+    outcome: signed.outcome,
+    reason: null,
+    typed: person && signed.at ? person.name : null,
+    strokes: null,
+  });
+  return [
+    block('inspector', inspector, {
+      at: reviewer?.at ?? null,
+      outcome: inspector && reviewer ? signedOutcomeWords.measured! : null,
+    }),
+    block('reviewer', reviewer, { at: reviewer?.at ?? null, outcome: reviewer ? signedOutcomeWords.checked! : null }),
+    block('customer', null, { at: null, outcome: null }),
+  ];
+}

@@ -1,0 +1,120 @@
+import { isOverdue } from '@/lib/schemas/instrument-state';
+import { Dec } from '@/lib/units/decimal';
+import { sheetState } from './sheet-state';
+import type { StoredInstrument, StoredJob, StoredPass, StoredSheet } from './stored-job';
+
+export interface CheckFinding {
+  kind:
+    | 'no-plan'
+    | 'not-measured'
+    | 'no-as-left'
+    | 'out-of-tolerance'
+    | 'undecided'
+    | 'no-instrument'
+    | 'instrument-overdue'
+    | 'instrument-overdue-allowed'
+    | 'no-temperature'
+    | 'temperature-far-off'
+    | 'tolerance-unconfirmed'
+    | 'no-conditions';
+  /** blocks: the report cannot be issued; confirm: the reviewer says that it is seen; note: prints, nothing to do. */
+  weight: 'blocks' | 'confirm' | 'note';
+  sheetId: string | null;
+  position: number | null;
+  text: string;
+}
+
+/** More than this off 20 °C gets a remark: common practice. */
+const farOffKelvin = 5;
+
+/** What the reviewer must see before a report goes out, in working order. Pure: the same findings on the page and in the route. */
+export function checkFindings(stored: StoredJob): CheckFinding[] {
+  if (stored.sheets.length === 0) {
+    return [{ kind: 'no-plan', weight: 'blocks', sheetId: null, position: null, text: 'The plan has not been made.' }];
+  }
+  const findings = stored.sheets.flatMap((sheet) => sheetFindings(sheet, stored.instruments));
+  return [...findings, ...conditionFindings(stored)];
+}
+
+function sheetFindings(sheet: StoredSheet, instruments: StoredInstrument[]): CheckFinding[] {
+  const state = sheetState(sheet);
+  const found: CheckFinding[] = [];
+  const add = (kind: CheckFinding['kind'], weight: CheckFinding['weight'], text: string) =>
+    found.push({ kind, weight, sheetId: sheet.id, position: sheet.position, text });
+  if (state.state === 'left-out') return [];
+  if (!state.final) {
+    add('not-measured', 'blocks', 'Not measured. Measure it, or leave it out with a reason.');
+    return found;
+  }
+  if (!state.asLeft) add('no-as-left', 'blocks', 'No readings as left. Measure again, or declare as left = as found.');
+  if (state.verdict === 'out-of-tolerance')
+    add('out-of-tolerance', 'confirm', `Out of tolerance: ${state.final.result?.displayedMm} mm.`);
+  if (state.verdict === 'undecided') add('undecided', 'confirm', `Undecided: ${state.final.result?.displayedMm} mm.`);
+  for (const pass of judgedPasses(sheet)) found.push(...instrumentFindings(sheet, pass, instruments));
+  return found;
+}
+
+const judgedPasses = (sheet: StoredSheet) =>
+  sheet.passes.filter((pass) => pass.linkedTo === null && pass.kind !== 'adjusting' && pass.result);
+
+const passWords: Record<StoredPass['kind'], string> = {
+  'as-found': 'As found',
+  adjusting: 'Adjusting',
+  'as-left': 'As left',
+};
+
+function instrumentFindings(sheet: StoredSheet, pass: StoredPass, instruments: StoredInstrument[]): CheckFinding[] {
+  const at = { sheetId: sheet.id, position: sheet.position };
+  const when = passWords[pass.kind];
+  if (pass.instruments.length === 0) {
+    return [{ kind: 'no-instrument', weight: 'blocks', ...at, text: `${when}: no instrument is named.` }];
+  }
+  const measuredOn = pass.takenAt?.toISOString().slice(0, 10) ?? '';
+  return pass.instruments.flatMap((used): CheckFinding[] => {
+    const instrument = instruments.find((candidate) => candidate.id === used.instrumentId);
+    if (!instrument || !isOverdue(instrument.dueOn, measuredOn)) return [];
+    const since = `${instrument.number} was due on ${instrument.dueOn ?? 'no date (no certificate)'}, used on ${measuredOn}`;
+    return used.overrideReason
+      ? [
+          {
+            kind: 'instrument-overdue-allowed',
+            weight: 'note',
+            ...at,
+            text: `${when}: ${since}; allowed by ${used.overrideBy}: ${used.overrideReason}`,
+          },
+        ]
+      : [
+          {
+            kind: 'instrument-overdue',
+            weight: 'blocks',
+            ...at,
+            text: `${when}: ${since}. Say why it may stand, or measure again.`,
+          },
+        ];
+  });
+}
+
+function conditionFindings(stored: StoredJob): CheckFinding[] {
+  const found: CheckFinding[] = [];
+  const add = (kind: CheckFinding['kind'], weight: CheckFinding['weight'], text: string) =>
+    found.push({ kind, weight, sheetId: null, position: null, text });
+  const airs = stored.temperatures.map((row) => row.air).filter((air) => air !== null);
+  if (airs.length === 0) add('no-temperature', 'confirm', 'No air temperature is recorded.');
+  else if (airs.some((air) => new Dec(air).minus(20).abs().gt(farOffKelvin))) {
+    add('temperature-far-off', 'confirm', `The air was more than ${farOffKelvin} K away from 20 °C.`);
+  }
+  if (!stored.job.conditions.warmUp) add('no-conditions', 'confirm', 'The warm-up is not described.');
+  const unconfirmed = stored.sheets.filter(
+    (sheet) => !sheet.leftOutReason && sheet.tolerance?.provenance.kind === 'from-memory',
+  ).length;
+  if (unconfirmed > 0) {
+    add(
+      'tolerance-unconfirmed',
+      'note',
+      unconfirmed === 1
+        ? '1 tolerance is from memory, to be confirmed against your own copy; it says so on the report.'
+        : `${unconfirmed} tolerances are from memory, to be confirmed against your own copy; each says so on the report.`,
+    );
+  }
+  return found;
+}

@@ -1,0 +1,25 @@
+import type { Verdict } from '@/lib/sheet/types';
+import type { Counts } from './report-model';
+import type { SheetState } from './sheet-state';
+
+/** planned = within + out + undecided + for information + left out + not measured; judged = within + out + undecided. */
+export function countVerdicts(states: SheetState[], which: 'asFound' | 'asLeft'): Counts {
+  const verdicts: (Verdict | 'left-out' | 'not-measured')[] = states.map((state) => {
+    if (state.state === 'left-out') return 'left-out';
+    return state[which]?.result?.verdict ?? 'not-measured';
+  });
+  const count = (wanted: (typeof verdicts)[number]) => verdicts.filter((verdict) => verdict === wanted).length;
+  const within = count('within-tolerance');
+  const out = count('out-of-tolerance');
+  const undecided = count('undecided');
+  return {
+    planned: states.length,
+    within,
+    out,
+    undecided,
+    forInformation: count('for-information'),
+    leftOut: count('left-out'),
+    notMeasured: count('not-measured'),
+    judged: within + out + undecided,
+  };
+}

@@ -1,0 +1,113 @@
+import { figures } from '@/lib/sheet/figures';
+import { sheetFields } from '@/lib/sheet/sheet-fields';
+import type { Field, FieldTableCell } from '@/lib/sheet/types';
+import { convert, convertible } from '@/lib/units/convert';
+import { formatDecimal } from '@/lib/units/format';
+import { parseNumber } from '@/lib/units/parse-number';
+import type { TestDefinition } from '@/standards/types';
+import { formatTime } from './format-time';
+import { linkedWords, passKindWords } from './record-words';
+import type { PassBlock } from './report-model';
+import type { StoredPass } from './stored-job';
+
+export interface CellChangeText {
+  passId: string;
+  pointer: string;
+  text: string;
+  by: string;
+  at: Date;
+  reason: string | null;
+}
+
+interface PassContext {
+  definition: TestDefinition;
+  timeZone: string;
+  changes: CellChangeText[];
+}
+
+/** A set of readings as it prints: every figure that was typed, in the column's unit, and what it came to. */
+export function passBlock(pass: StoredPass, context: PassContext): PassBlock {
+  const { definition, timeZone } = context;
+  const outcome = pass.result?.outcome ?? null;
+  const fields = sheetFields(definition, pass.cells);
+  const shown = (field: Field) => shownText(pass.cells[field.pointer]?.text ?? '', field);
+  return {
+    kind: pass.kind,
+    kindWords: passKindWords(pass),
+    takenAt: pass.takenAt && formatTime(pass.takenAt, timeZone),
+    by: pass.takenBy,
+    temperature: pass.temperature && `${formatDecimal(pass.temperature)} °C`,
+    linkedWords: pass.linkedTo ? linkedWords : null,
+    setUp: pass.linkedTo
+      ? []
+      : fields.setUp
+          .filter((field) => shown(field) !== '')
+          .map((field) => ({ label: field.label, value: field.unit ? `${shown(field)} ${field.unit}` : shown(field) })),
+    tables: pass.linkedTo
+      ? []
+      : fields.tables
+          .map((table) => ({
+            title: table.title,
+            columns: table.columns.map((column) => (column.unit ? `${column.label}, ${column.unit}` : column.label)),
+            rows: table.rows
+              .map((row) => ({ label: row.label, cells: row.cells.map((cell) => cellText(cell, shown)) }))
+              .filter((row) => row.cells.some((text) => text !== '')),
+          }))
+          .filter((table) => table.rows.length > 0),
+    resultMm: outcome && formatDecimal(outcome.displayed.textMm),
+    resultUm: outcome && formatDecimal(outcome.displayed.textUm),
+    resultWords: outcome?.directionWords ?? null,
+    judgement: outcome?.judgement ?? null,
+    plot: pass.linkedTo ? null : (outcome?.plot ?? null),
+    figures: outcome && !pass.linkedTo ? figures(outcome) : [],
+    corrections: pass.linkedTo ? [] : corrections(pass, fieldLabels(fields), context),
+  };
+}
+
+const cellText = (cell: FieldTableCell | null, shown: (field: Field) => string): string => {
+  if (cell === null) return '';
+  return 'field' in cell ? shown(cell.field) : cell.derived;
+};
+
+/** What was typed, as a figure in the column's unit; what cannot be read prints as it was typed. */
+function shownText(text: string, field: Field): string {
+  if (text.trim() === '') return '';
+  if (field.role === 'choice') return field.options?.find((option) => option.value === text)?.label ?? text;
+  if (field.unit === null) return text;
+  const parsed = parseNumber(text, { defaultUnit: field.unit });
+  if (!parsed.ok) return text;
+  const unit = parsed.unit ?? field.unit;
+  if (!convertible(unit, field.unit)) return text;
+  return formatDecimal(convert(parsed.value, unit, field.unit));
+}
+
+const fieldLabels = (fields: ReturnType<typeof sheetFields>): Map<string, string> => {
+  const labels = new Map(fields.setUp.map((field) => [field.pointer, field.label]));
+  for (const table of fields.tables) {
+    for (const row of table.rows) {
+      for (const cell of row.cells) if (cell && 'field' in cell) labels.set(cell.field.pointer, cell.field.label);
+    }
+  }
+  return labels;
+};
+
+/** Readings that stood differently before: both texts print, oldest first. */
+function corrections(pass: StoredPass, labels: Map<string, string>, context: PassContext): PassBlock['corrections'] {
+  const last = new Map<string, string>();
+  const found: PassBlock['corrections'] = [];
+  for (const change of context.changes.filter((entry) => entry.passId === pass.id)) {
+    const was = last.get(change.pointer);
+    if (was !== undefined && was !== '' && was !== change.text) {
+      found.push({
+        field: labels.get(change.pointer) ?? change.pointer,
+        was,
+        now: change.text,
+        by: change.by,
+        at: formatTime(change.at, context.timeZone),
+        reason: change.reason,
+      });
+    }
+    last.set(change.pointer, change.text);
+  }
+  return found;
+}
