@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process';
 import { closeSync, mkdirSync, openSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
+import { PlainError } from './plain-error.mjs';
 import { signal } from './processes.mjs';
 
 const running = new Set();
@@ -29,7 +30,7 @@ export function runStep(name, command, args, { logFolder, ...options }) {
       const output = readFileSync(logFile, 'utf8');
       if (code === 0) return resolve(output);
       const lines = output.trim().split('\n');
-      const error = new Error(`${name} failed (${killedBy ?? code}):\n${lines.slice(-40).join('\n')}`);
+      const error = new PlainError(`${name} failed (${killedBy ?? code}):\n${lines.slice(-40).join('\n')}`);
       reject(Object.assign(error, { exitCode: code, lastLine: lines.at(-1) }));
     });
   });
