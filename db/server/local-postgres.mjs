@@ -16,25 +16,34 @@ import { ensurePostgres } from './debian.mjs';
 import { PlainError } from './plain-error.mjs';
 import { freePort, isFree } from './ports.mjs';
 
-/** Where the data are: in the data folder, or under /var/lib when the user that runs PostgreSQL cannot get there. */
-function chooseDirectory(data) {
-  if (postgresReaches(data.folder)) return data.inside('postgres');
+/**
+ * Where the data are: in the data folder, so that both can be moved together, or under /var/lib when the user that
+ * runs PostgreSQL cannot get there; only that second place is remembered.
+ */
+function chooseDirectory(data, remembered) {
+  if (remembered) return remembered;
+  const inside = data.inside('postgres');
+  if (postgresReaches(data.folder)) return inside;
+  if (hasCluster(inside)) {
+    throw new PlainError(`The user postgres cannot reach the data in ${inside}; make the folders above it passable.`);
+  }
   const name = `${path.basename(path.dirname(data.folder))}-${randomBytes(4).toString('hex')}`;
   const home = path.join('/var/lib/witnessmark', name);
   mkdirSync(home, { recursive: true, mode: 0o755 });
   return path.join(home, 'postgres');
 }
 
-/** The remembered place and port of the cluster; the port is chosen anew when somebody else has taken it. */
+/** The place and port of the cluster; the port is chosen anew when somebody else has taken it. */
 async function remember(data) {
   const file = data.inside('cluster.json');
   const known = existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')) : {};
-  const directory = known.directory ?? chooseDirectory(data);
-  writeWhole(file, JSON.stringify({ ...known, directory }));
+  const directory = chooseDirectory(data, known.directory);
+  const place = directory === data.inside('postgres') ? {} : { directory };
+  writeWhole(file, JSON.stringify({ ...known, ...place }));
   // Its own server may still hold the port from an earlier life.
   if (hasCluster(directory)) await clearCluster(directory);
   const port = known.port && (await isFree(known.port)) ? known.port : await freePort();
-  writeWhole(file, JSON.stringify({ directory, port }));
+  writeWhole(file, JSON.stringify({ ...place, port }));
   return { directory, port };
 }
 
