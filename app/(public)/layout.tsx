@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { Brand } from '@/components/layout/brand';
+import { version } from '@/lib/version';
 
 /** Pages that need no session. */
 export default function PublicLayout({ children }: { children: ReactNode }) {
@@ -11,7 +12,7 @@ export default function PublicLayout({ children }: { children: ReactNode }) {
       <main id="main" className="flex-1">
         {children}
       </main>
-      <footer className="mt-10 text-sm text-ink2">Witnessmark {process.env.NEXT_PUBLIC_VERSION}</footer>
+      <footer className="mt-10 text-sm text-ink2">Witnessmark {version}</footer>
     </div>
   );
 }

@@ -1,9 +1,10 @@
+import { version } from '@/lib/version';
 import { Keys } from './keys';
 
 export function Footer() {
   return (
     <footer data-print="no" className="mt-auto flex flex-wrap items-center gap-x-5 px-7 py-4 text-sm text-ink2">
-      <span>Witnessmark {process.env.NEXT_PUBLIC_VERSION}</span>
+      <span>Witnessmark {version}</span>
       <Keys />
     </footer>
   );

@@ -1,0 +1,23 @@
+import type { Metadata } from 'next';
+import { notFound } from 'next/navigation';
+import { OrganisationForm } from '@/components/organisation/organisation-form';
+import { PageTitle } from '@/components/ui/page-title';
+import { inScope } from '@/db/client';
+import { ownOrganisation } from '@/db/queries/organisations';
+import { can } from '@/lib/auth/permissions';
+import { requireViewer, scopeOf } from '@/lib/auth/session';
+import { timeZones } from '@/lib/time-zones';
+
+export const metadata: Metadata = { title: 'Letterhead and defaults' };
+
+export default async function SettingsPage() {
+  const viewer = await requireViewer();
+  if (!can(viewer.roles, 'organisation.change')) notFound();
+  const organisation = await inScope(scopeOf(viewer), ownOrganisation);
+  return (
+    <>
+      <PageTitle note="Every report that is issued from now on carries it">Letterhead and defaults</PageTitle>
+      <OrganisationForm organisation={organisation} timeZones={timeZones()} />
+    </>
+  );
+}
