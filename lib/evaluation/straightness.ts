@@ -57,7 +57,13 @@ export function straightness(input: z.output<typeof straightnessInput>) {
 
 type WholeNumbers = { values: readonly bigint[]; unit: bigint };
 
-function localPart(x: WholeNumbers, y: WholeNumbers, length: bigint, type: LineType, whole: Fraction) {
+function localPart(
+  x: WholeNumbers,
+  y: WholeNumbers,
+  length: bigint,
+  type: LineType,
+  whole: Fraction,
+): { local: string; localAt?: string } {
   const order = risingOrder(x.values);
   const profile = { x: order.map((i) => x.values[i]!), y: order.map((i) => y.values[i]!) };
   const at = (index: number) => Fraction.of(profile.x[index]!, x.unit).toText();
