@@ -3,6 +3,7 @@ import { findJob, type JobRow } from '@/db/queries/jobs';
 import { listPasses, listPassInstruments, listReadings, type PassInstrument, type PassRow } from '@/db/queries/passes';
 import { listResults, type ResultRow } from '@/db/queries/results';
 import { findSheet, type SheetRow } from '@/db/queries/sheets';
+import type { CalibrationFacts } from '@/lib/schemas/instrument-state';
 import type { Unit } from '@/lib/units/unit';
 
 export interface VersionedCell {
@@ -25,12 +26,10 @@ export interface InstrumentChoice {
   resolution: string | null;
   resolutionUnit: string | null;
   certificate: string | null;
-  calibratedOn: string | null;
   /** Last valid day of the newest certificate; null: none is registered. */
   dueOn: string | null;
-  expandedUncertainty: string | null;
-  uncertaintyUnit: string | null;
-  coverageFactor: string | null;
+  /** All certificates, newest first: which of them held depends on the day of measuring. */
+  calibrations: CalibrationFacts[];
 }
 
 export interface SheetView {
@@ -68,42 +67,35 @@ export async function passViews(db: Db, sheetIds: string[]): Promise<PassView[]>
   return [...views.values()];
 }
 
-/** The register, each instrument with its newest certificate. */
-export const listInstrumentChoices = (db: Db): Promise<InstrumentChoice[]> =>
-  db('instruments')
-    .leftJoin(
-      db('calibrations')
-        .distinctOn('instrument_id')
-        .orderBy([{ column: 'instrument_id' }, { column: 'due_on', order: 'desc' }])
-        .select(
-          'instrument_id',
-          'certificate',
-          'calibrated_on',
-          'due_on',
-          'expanded_uncertainty',
-          'uncertainty_unit',
-          'coverage_factor',
-        )
-        .as('newest'),
-      'newest.instrument_id',
-      'instruments.id',
-    )
-    .whereNull('instruments.retired_at')
-    .orderBy('instruments.number')
+/** The register, each instrument with its certificates. */
+export async function listInstrumentChoices(db: Db): Promise<InstrumentChoice[]> {
+  const instruments: Omit<InstrumentChoice, 'certificate' | 'dueOn' | 'calibrations'>[] = await db('instruments')
+    .whereNull('retired_at')
+    .orderBy('number')
     .select({
-      id: 'instruments.id',
-      number: 'instruments.number',
-      name: 'instruments.name',
-      kind: 'instruments.kind',
-      resolution: 'instruments.resolution',
-      resolutionUnit: 'instruments.resolution_unit',
-      certificate: 'newest.certificate',
-      calibratedOn: 'newest.calibrated_on',
-      dueOn: 'newest.due_on',
-      expandedUncertainty: 'newest.expanded_uncertainty',
-      uncertaintyUnit: 'newest.uncertainty_unit',
-      coverageFactor: 'newest.coverage_factor',
+      id: 'id',
+      number: 'number',
+      name: 'name',
+      kind: 'kind',
+      resolution: 'resolution',
+      resolutionUnit: 'resolution_unit',
     });
+  const calibrations: (CalibrationFacts & { instrumentId: string })[] = await db('calibrations')
+    .orderBy('due_on', 'desc')
+    .select({
+      instrumentId: 'instrument_id',
+      certificate: 'certificate',
+      calibratedOn: 'calibrated_on',
+      dueOn: 'due_on',
+      expandedUncertainty: 'expanded_uncertainty',
+      uncertaintyUnit: 'uncertainty_unit',
+      coverageFactor: 'coverage_factor',
+    });
+  return instruments.map((instrument) => {
+    const own = calibrations.filter((calibration) => calibration.instrumentId === instrument.id);
+    return { ...instrument, certificate: own[0]?.certificate ?? null, dueOn: own[0]?.dueOn ?? null, calibrations: own };
+  });
+}
 
 export const machineHead = (db: Db, id: string): Promise<SheetView['machine'] | undefined> =>
   db('machines')

@@ -20,6 +20,9 @@ import { reportAnsweredMail } from '@/templates/email/report-answered';
 import { reportIssuedMail } from '@/templates/email/report-issued';
 import { renderPdf } from './render-pool';
 
+/** Nobody is told about a report of last year because its document is drawn again. */
+const newsDays = 7;
+
 /**
  * Draws the PDF of a report, stores it and tells those whom it concerns; once for the document as issued, once more with the
  * customer's answer. Repeating it changes nothing: a document that is there stays.
@@ -66,6 +69,11 @@ async function renderOne(
     });
     await keepReportPdf(trx, report.id, kind, fileId);
     if (kind === 'signed' && report.state !== 'refused') await setJobState(trx, report.jobId, 'closed');
+    if (
+      Date.now() - (kind === 'signed' ? (report.signedAt ?? report.issuedAt) : report.issuedAt).getTime() >
+      newsDays * 86_400_000
+    )
+      return;
     const url = `${env.NEXTAUTH_URL}/reports/${report.id}`;
     const mail = kind === 'signed' ? reportAnsweredMail(model, url) : reportIssuedMail(model, url);
     for (const person of await mailRecipients(trx, report.jobId, kind === 'signed' ? 'office' : 'customer')) {

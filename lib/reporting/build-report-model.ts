@@ -1,11 +1,12 @@
 import { componentName, componentWords } from '@/lib/planning/component-words';
+import { type CalibrationFacts, calibrationOn } from '@/lib/schemas/instrument-state';
 import { decisionRules, leftOutReasons, purposes } from '@/lib/schemas/job';
 import { machineKinds } from '@/lib/schemas/make-up';
 import { convert } from '@/lib/units/convert';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
 import { countVerdicts } from './count-verdicts';
-import { formatTime } from './format-time';
+import { formatDay, formatTime } from './format-time';
 import type { CellChangeText } from './pass-block';
 import {
   conditionLabels,
@@ -17,7 +18,7 @@ import {
 } from './record-words';
 import type { ReportModel, SignatureBlock, SummaryRow } from './report-model';
 import { sheetState } from './sheet-state';
-import type { StoredInstrument, StoredJob } from './stored-job';
+import type { StoredJob } from './stored-job';
 import { editionWords, testBlock } from './test-block';
 
 export interface ReportInput {
@@ -80,7 +81,7 @@ export function buildReportModel(input: ReportInput): ReportModel {
       people: stored.people.map((person) => ({ name: person.name, role: person.role })),
     },
     conditions: conditions(stored, organisation.timeZone),
-    instruments: usedInstruments(stored),
+    instruments: usedInstruments(stored, organisation.timeZone),
     headline: headlineWords(counts.asLeft, outRemarked),
     counts,
     summary: stored.sheets.map((sheet, index): SummaryRow => {
@@ -156,40 +157,49 @@ function conditions(stored: StoredJob, timeZone: string): ReportModel['condition
   };
 }
 
-function usedInstruments(stored: StoredJob): ReportModel['instruments'] {
+/** Each instrument once, with the certificate that held on the day when it was first used on this job. */
+function usedInstruments(stored: StoredJob, timeZone: string): ReportModel['instruments'] {
   const uses = stored.sheets
     .filter((sheet) => !sheet.leftOutReason)
     .flatMap((sheet) =>
-      sheet.passes.flatMap((pass) => pass.instruments.map((used) => ({ ...used, position: sheet.position }))),
+      sheet.passes.flatMap((pass) =>
+        pass.instruments.map((used) => ({
+          ...used,
+          position: sheet.position,
+          day: pass.takenAt ? formatDay(pass.takenAt, timeZone) : stored.job.startsOn,
+        })),
+      ),
     );
-  return stored.instruments
-    .filter((instrument) => uses.some((use) => use.instrumentId === instrument.id))
-    .map((instrument) => {
-      const overrides = uses.filter((use) => use.instrumentId === instrument.id && use.overrideReason);
-      return {
-        number: instrument.number,
-        name: instrument.name,
-        resolution:
-          instrument.resolution && `${formatDecimal(instrument.resolution)} ${instrument.resolutionUnit ?? ''}`.trim(),
-        certificate: instrument.certificate,
-        calibrated: instrument.calibratedOn,
-        due: instrument.dueOn,
-        uncertainty: uncertaintyWords(instrument),
-        override:
-          overrides
-            .map(
-              (use) =>
-                `test ${use.position}: used after its due date, allowed by ${use.overrideBy}: ${use.overrideReason}`,
-            )
-            .join('; ') || null,
-      };
-    });
+  return stored.instruments.flatMap((instrument) => {
+    const mine = uses.filter((use) => use.instrumentId === instrument.id);
+    const firstDay = mine.map((use) => use.day).sort()[0];
+    if (!firstDay) return [];
+    const held = calibrationOn(instrument.calibrations, firstDay);
+    const overrides = mine.filter((use) => use.overrideReason);
+    return {
+      number: instrument.number,
+      name: instrument.name,
+      resolution:
+        instrument.resolution && `${formatDecimal(instrument.resolution)} ${instrument.resolutionUnit ?? ''}`.trim(),
+      certificate: held?.certificate ?? null,
+      calibrated: held?.calibratedOn ?? null,
+      due: held?.dueOn ?? null,
+      uncertainty: held && uncertaintyWords(held),
+      override:
+        overrides
+          .map(
+            (use) =>
+              `test ${use.position}: used after its due date, allowed by ${use.overrideBy}: ${use.overrideReason}`,
+          )
+          .join('; ') || null,
+    };
+  });
 }
 
-function uncertaintyWords(instrument: StoredInstrument): string | null {
-  if (!instrument.expandedUncertainty) return null;
-  const factor = instrument.coverageFactor ? `, k = ${formatDecimal(instrument.coverageFactor)}` : '';
-  return `U = ${formatDecimal(instrument.expandedUncertainty)} ${instrument.uncertaintyUnit ?? ''}${factor}`;
+function uncertaintyWords(held: CalibrationFacts): string | null {
+  if (!held.expandedUncertainty) return null;
+  const factor = held.coverageFactor ? `, k = ${formatDecimal(held.coverageFactor)}` : '';
+  return `U = ${formatDecimal(held.expandedUncertainty)} ${held.uncertaintyUnit ?? ''}${factor}`;
 }
 
 function signatures({ inspector, reviewer, organisation }: ReportInput): SignatureBlock[] {

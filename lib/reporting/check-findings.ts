@@ -1,5 +1,6 @@
-import { isOverdue } from '@/lib/schemas/instrument-state';
+import { calibrationOn, isOverdue } from '@/lib/schemas/instrument-state';
 import { Dec } from '@/lib/units/decimal';
+import { formatDay } from './format-time';
 import { sheetState } from './sheet-state';
 import type { StoredInstrument, StoredJob, StoredPass, StoredSheet } from './stored-job';
 
@@ -28,15 +29,15 @@ export interface CheckFinding {
 const farOffKelvin = 5;
 
 /** What the reviewer must see before a report goes out, in working order. Pure: the same findings on the page and in the route. */
-export function checkFindings(stored: StoredJob): CheckFinding[] {
+export function checkFindings(stored: StoredJob, timeZone: string): CheckFinding[] {
   if (stored.sheets.length === 0) {
     return [{ kind: 'no-plan', weight: 'blocks', sheetId: null, position: null, text: 'The plan has not been made.' }];
   }
-  const findings = stored.sheets.flatMap((sheet) => sheetFindings(sheet, stored.instruments));
+  const findings = stored.sheets.flatMap((sheet) => sheetFindings(sheet, stored.instruments, timeZone));
   return [...findings, ...conditionFindings(stored)];
 }
 
-function sheetFindings(sheet: StoredSheet, instruments: StoredInstrument[]): CheckFinding[] {
+function sheetFindings(sheet: StoredSheet, instruments: StoredInstrument[], timeZone: string): CheckFinding[] {
   const state = sheetState(sheet);
   const found: CheckFinding[] = [];
   const add = (kind: CheckFinding['kind'], weight: CheckFinding['weight'], text: string) =>
@@ -50,7 +51,7 @@ function sheetFindings(sheet: StoredSheet, instruments: StoredInstrument[]): Che
   if (state.verdict === 'out-of-tolerance')
     add('out-of-tolerance', 'confirm', `Out of tolerance: ${state.final.result?.displayedMm} mm.`);
   if (state.verdict === 'undecided') add('undecided', 'confirm', `Undecided: ${state.final.result?.displayedMm} mm.`);
-  for (const pass of judgedPasses(sheet)) found.push(...instrumentFindings(sheet, pass, instruments));
+  for (const pass of judgedPasses(sheet)) found.push(...instrumentFindings(sheet, pass, instruments, timeZone));
   return found;
 }
 
@@ -63,17 +64,24 @@ const passWords: Record<StoredPass['kind'], string> = {
   'as-left': 'As left',
 };
 
-function instrumentFindings(sheet: StoredSheet, pass: StoredPass, instruments: StoredInstrument[]): CheckFinding[] {
+function instrumentFindings(
+  sheet: StoredSheet,
+  pass: StoredPass,
+  instruments: StoredInstrument[],
+  timeZone: string,
+): CheckFinding[] {
   const at = { sheetId: sheet.id, position: sheet.position };
   const when = passWords[pass.kind];
   if (pass.instruments.length === 0) {
     return [{ kind: 'no-instrument', weight: 'blocks', ...at, text: `${when}: no instrument is named.` }];
   }
-  const measuredOn = pass.takenAt?.toISOString().slice(0, 10) ?? '';
+  const measuredOn = pass.takenAt ? formatDay(pass.takenAt, timeZone) : '';
   return pass.instruments.flatMap((used): CheckFinding[] => {
     const instrument = instruments.find((candidate) => candidate.id === used.instrumentId);
-    if (!instrument || !isOverdue(instrument.dueOn, measuredOn)) return [];
-    const since = `${instrument.number} was due on ${instrument.dueOn ?? 'no date (no certificate)'}, used on ${measuredOn}`;
+    if (!instrument) return [];
+    const held = calibrationOn(instrument.calibrations, measuredOn);
+    if (!isOverdue(held?.dueOn ?? null, measuredOn)) return [];
+    const since = `${instrument.number} was due on ${held?.dueOn ?? 'no date (no certificate)'}, used on ${measuredOn}`;
     return used.overrideReason
       ? [
           {

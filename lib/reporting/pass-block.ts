@@ -4,6 +4,7 @@ import type { Field, FieldTableCell } from '@/lib/sheet/types';
 import { convert, convertible } from '@/lib/units/convert';
 import { formatDecimal } from '@/lib/units/format';
 import { parseNumber } from '@/lib/units/parse-number';
+import type { Unit } from '@/lib/units/unit';
 import type { TestDefinition } from '@/standards/types';
 import { formatTime } from './format-time';
 import { linkedWords, passKindWords } from './record-words';
@@ -30,7 +31,7 @@ export function passBlock(pass: StoredPass, context: PassContext): PassBlock {
   const { definition, timeZone } = context;
   const outcome = pass.result?.outcome ?? null;
   const fields = sheetFields(definition, pass.cells);
-  const shown = (field: Field) => shownText(pass.cells[field.pointer]?.text ?? '', field);
+  const shown = (field: Field) => shownText(pass.cells[field.pointer], field);
   return {
     kind: pass.kind,
     kindWords: passKindWords(pass),
@@ -70,11 +71,12 @@ const cellText = (cell: FieldTableCell | null, shown: (field: Field) => string):
 };
 
 /** What was typed, as a figure in the column's unit; what cannot be read prints as it was typed. */
-function shownText(text: string, field: Field): string {
+function shownText(cell: { text: string; unit: Unit | null } | undefined, field: Field): string {
+  const text = cell?.text ?? '';
   if (text.trim() === '') return '';
   if (field.role === 'choice') return field.options?.find((option) => option.value === text)?.label ?? text;
   if (field.unit === null) return text;
-  const parsed = parseNumber(text, { defaultUnit: field.unit });
+  const parsed = parseNumber(text, { defaultUnit: cell?.unit ?? field.unit });
   if (!parsed.ok) return text;
   const unit = parsed.unit ?? field.unit;
   if (!convertible(unit, field.unit)) return text;

@@ -14,18 +14,21 @@ export const linkedWords = 'As left = as found: nothing was done, the readings a
 const plural = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`;
 
 /** The one sentence that the customer reads first. */
-export function headlineWords(counts: Counts, outRemarked: number): string {
-  if (counts.judged === 0 && counts.planned === 0) return 'No test is planned yet.';
+export function headlineWords(counts: Counts, outRemarked: number, outAccepted = 0): string {
+  if (counts.planned === 0) return 'No test is planned yet.';
   const parts = [`${counts.within} of ${plural(counts.judged, 'judged test', 'judged tests')} within tolerance`];
-  if (counts.out > 0)
-    parts.push(
-      `${counts.out} out of tolerance${outRemarked > 0 ? `, ${outRemarked === counts.out ? 'with' : `${outRemarked} with`} remark` : ''}`,
-    );
+  if (counts.out > 0) parts.push(outWords(counts.out, outRemarked, outAccepted));
   if (counts.undecided > 0) parts.push(`${counts.undecided} undecided`);
   if (counts.forInformation > 0) parts.push(`${counts.forInformation} for information`);
   if (counts.leftOut > 0) parts.push(`${counts.leftOut} left out`);
   if (counts.notMeasured > 0) parts.push(`${counts.notMeasured} not measured`);
   return `${parts.join('; ')}.`;
+}
+
+function outWords(out: number, remarked: number, accepted: number): string {
+  const all = (count: number) => (count === out ? '' : `${count} `);
+  if (accepted > 0) return `${out} out of tolerance, ${all(accepted)}accepted with remark`;
+  return `${out} out of tolerance${remarked > 0 ? `, ${all(remarked)}with remark` : ''}`;
 }
 
 export const conditionLabels = {

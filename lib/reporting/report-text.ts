@@ -1,12 +1,15 @@
 import { REPORT_WORDS } from '@/lib/reporting/words';
 
 const DATE = /^(\d{4})-(\d{2})-(\d{2})$/;
+const DAY_AND_TIME = /^(\d{4}-\d{2}-\d{2})[ T](\d{2}:\d{2})(?: ([A-Za-z_/+\-0-9]+))?$/;
 const INSTANT = /^(\d{4}-\d{2}-\d{2})T(\d{2}:\d{2})(?::\d{2}(?:\.\d+)?)?(Z|[+-]\d{2}:?\d{2})$/;
 
 /** `2026-03-12` as `12 March 2026`; a moment with its time and zone as typed; anything else unchanged. Never converted to another zone. */
 export function longDate(text: string): string {
   const date = DATE.exec(text);
   if (date) return `${Number(date[3])} ${REPORT_WORDS.monthNames[Number(date[2]) - 1] ?? date[2]} ${date[1]}`;
+  const local = DAY_AND_TIME.exec(text);
+  if (local) return [`${longDate(local[1] ?? '')}, ${local[2]}`, local[3] ?? ''].join(' ').trimEnd();
   const instant = INSTANT.exec(text);
   if (!instant) return text;
   const zone = instant[3] === 'Z' ? 'UTC' : `UTC${instant[3]?.replace('-', '−')}`;

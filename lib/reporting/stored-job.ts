@@ -1,3 +1,4 @@
+import type { CalibrationFacts } from '@/lib/schemas/instrument-state';
 import type { LeftOutReason, Purpose } from '@/lib/schemas/job';
 import type { MakeUp } from '@/lib/schemas/make-up';
 import type { SheetOutcome, Verdict } from '@/lib/sheet/types';
@@ -70,10 +71,5 @@ export interface StoredInstrument {
   name: string;
   resolution: string | null;
   resolutionUnit: string | null;
-  certificate: string | null;
-  calibratedOn: string | null;
-  dueOn: string | null;
-  expandedUncertainty: string | null;
-  uncertaintyUnit: string | null;
-  coverageFactor: string | null;
+  calibrations: CalibrationFacts[];
 }

@@ -1,4 +1,4 @@
-import { signedOutcomeWords } from './record-words';
+import { headlineWords, signedOutcomeWords } from './record-words';
 import type { ReportModel } from './report-model';
 
 export interface CustomerSignature {
@@ -19,8 +19,15 @@ const states = { accept: 'signed', 'accept-with-remarks': 'signed-with-remarks',
 
 /** The issued document with the customer's answer on it; nothing else differs from what was shown. */
 export function withSignature(model: ReportModel, signature: CustomerSignature): ReportModel {
+  const remarkNo = (order: number) => signature.remarks.find((remark) => remark.sheetOrder === order)?.no ?? null;
+  const accepted = model.summary.filter(
+    (row) => row.asLeftVerdict === 'out-of-tolerance' && remarkNo(row.order) !== null,
+  ).length;
   return {
     ...model,
+    headline:
+      accepted > 0 && signature.outcome !== 'refuse' ? headlineWords(model.counts.asLeft, 0, accepted) : model.headline,
+    summary: model.summary.map((row) => ({ ...row, remarkNo: row.remarkNo ?? remarkNo(row.order) })),
     document: { ...model.document, state: states[signature.outcome] },
     remarks: [...model.remarks, ...signature.remarks],
     signatures: model.signatures.map((block) =>

@@ -110,11 +110,10 @@ export const REPORT_WORDS = {
     issuedBy: 'Issued by',
   },
   decisionRule: 'Decision rule',
-  air: 'Air',
   conditions: {
     heading: 'Conditions',
     place: 'Place',
-    airRange: 'Air, range',
+    airRange: 'Temperature',
     time: 'Time',
     air: 'Air',
     machine: 'Machine',
@@ -128,7 +127,6 @@ export const REPORT_WORDS = {
     calibrated: 'Calibrated',
     due: 'Due',
     uncertainty: 'Uncertainty',
-    override: 'Used after its due date',
   },
   summary: {
     heading: 'Summary',
@@ -141,7 +139,7 @@ export const REPORT_WORDS = {
     remark: 'remark',
     linkedSign: '=',
     linkedNote: '= : as left is as found; nothing was done.',
-    asFoundOut: 'A mark before the figure as found: not within tolerance.',
+    asFoundOut: 'A mark before a figure as found: it was not within tolerance.',
   },
   counts: {
     heading: 'Counts',

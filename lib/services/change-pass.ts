@@ -7,7 +7,8 @@ import { lockSheet } from '@/db/queries/sheets';
 import { type InstrumentChoice, listInstrumentChoices } from '@/db/read-models/sheet-view';
 import type { Viewer } from '@/lib/auth/viewer';
 import { changedMeanwhile, conflict, type FieldError, invalid, notFound } from '@/lib/errors';
-import { isOverdue } from '@/lib/schemas/instrument-state';
+import { formatDay } from '@/lib/reporting/format-time';
+import { calibrationOn, isOverdue } from '@/lib/schemas/instrument-state';
 import type { passChange } from '@/lib/schemas/job';
 import { parseNumber } from '@/lib/units/parse-number';
 import { closedBecause } from './keep-readings';
@@ -31,7 +32,8 @@ export async function changePass(
   if (change.takenAt !== undefined) columns.taken_at = change.takenAt;
   if (change.temperature !== undefined) Object.assign(columns, temperatureColumns(change.temperature));
   if (change.instruments !== undefined) {
-    const measuredOn = (change.takenAt ?? pass.takenAt?.toISOString() ?? new Date().toISOString()).slice(0, 10);
+    const takenAt = change.takenAt ? new Date(change.takenAt) : (pass.takenAt ?? new Date());
+    const measuredOn = formatDay(takenAt, viewer.timeZone);
     await checkInstruments(db, change.instruments, measuredOn);
     await replacePassInstruments(db, ids.passId, change.instruments);
     for (const used of change.instruments.filter((entry) => entry.overrideReason)) {
@@ -66,12 +68,13 @@ async function checkInstruments(
   const errors: FieldError[] = [];
   used.forEach((entry, index) => {
     const instrument = register.get(entry.instrumentId);
+    const dueOn = calibrationOn(instrument?.calibrations ?? [], measuredOn)?.dueOn ?? null;
     if (!instrument)
       errors.push({ pointer: `/instruments/${index}`, detail: 'This instrument is not in the register.' });
-    else if (isOverdue(instrument.dueOn, measuredOn) && !(entry.overrideReason && entry.overrideBy)) {
+    else if (isOverdue(dueOn, measuredOn) && !(entry.overrideReason && entry.overrideBy)) {
       errors.push({
         pointer: `/instruments/${index}/overrideReason`,
-        detail: `${instrument.number} was due on ${instrument.dueOn ?? '(no certificate)'}: say why it may be used all the same, and who allows it.`,
+        detail: `${instrument.number} was due on ${dueOn ?? '(no certificate)'}: say why it may be used all the same, and who allows it.`,
       });
     }
   });

@@ -32,6 +32,7 @@ export async function issueReport(
   jobId: string,
   confirmed: boolean,
   origin: RequestOrigin,
+  issuedAt: Date = new Date(),
 ): Promise<{ id: string; number: string; revision: number }> {
   const job = await lockJob(trx, jobId);
   if (!job) throw notFound('job');
@@ -40,7 +41,7 @@ export async function issueReport(
   }
   const source = await reportSource(trx, jobId);
   if (!source) throw notFound('job');
-  const findings = checkFindings(source.board);
+  const findings = checkFindings(source.board, source.organisation.timeZone);
   const stops = findings.filter(
     (finding) => finding.weight === 'blocks' || (finding.weight === 'confirm' && !confirmed),
   );
@@ -52,7 +53,6 @@ export async function issueReport(
     throw new DomainError(422, 'The report cannot go out yet', errors[0]?.detail ?? '', errors);
   }
   const earlier = await latestReport(trx, jobId);
-  const issuedAt = new Date();
   const number = earlier?.number ?? (await nextReportNumber(trx, source.organisation.code, issuedAt.getUTCFullYear()));
   const revision = (earlier?.revision ?? 0) + 1;
   const model = buildReport(source, { number, revision, at: issuedAt, by: viewer });

@@ -5,14 +5,14 @@ import { conflict, DomainError, type FieldError, notFound } from '@/lib/errors';
 import { withContractTolerance } from '@/lib/planning/contract-tolerance';
 import { planSheets } from '@/lib/planning/plan-sheets';
 import type { PlanForm } from '@/lib/schemas/job';
-import { allDefinitions } from '@/standards/registry';
+import { currentDefinitions } from '@/standards/registry';
 import type { PlannedSheet } from '@/standards/types';
 
 /** Every test that fits the job's machine, in working order. */
 export const proposalsFor = (job: Pick<JobRow, 'makeUp' | 'codes'>): PlannedSheet[] =>
   planSheets(
     job.makeUp,
-    allDefinitions().filter((definition) =>
+    currentDefinitions().filter((definition) =>
       job.codes.some((entry) => entry.code === definition.code && entry.edition === definition.edition),
     ),
   );

@@ -20,15 +20,15 @@ export async function signReport(
   reportId: string,
   form: SignatureForm,
   origin: RequestOrigin,
+  signedAt: Date = new Date(),
 ): Promise<{ state: (typeof states)[Outcome] }> {
   const report = await lockReport(trx, reportId);
-  if (!report || report.state !== 'issued') {
+  if (report?.state !== 'issued') {
     const seen = report ?? (await findReport(trx, reportId));
     if (!seen) throw notFound('report');
     throw conflict('This report has its answer already, or has been replaced.', { report: `/reports/${reportId}` });
   }
   const onTablet = viewer.customerId === null;
-  const signedAt = new Date();
   const state = states[form.outcome];
   await insertSignature(trx, reportId, {
     role: 'customer',

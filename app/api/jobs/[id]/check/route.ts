@@ -7,9 +7,9 @@ import { idParams } from '@/lib/schemas/common';
 export const GET = route({
   action: 'job.read',
   params: idParams,
-  async handle({ trx, params }) {
+  async handle({ trx, viewer, params }) {
     const board = await jobBoard(trx, params.id);
     if (!board) throw notFound('job');
-    return { body: { findings: checkFindings(board) }, version: board.job.version };
+    return { body: { findings: checkFindings(board, viewer.timeZone) }, version: board.job.version };
   },
 });
