@@ -1,7 +1,7 @@
 import type { Drawing, DrawingItem, Ink } from '@/components/plots/drawing';
 import { arrowHead, hatching, type Point, polyline, text, wordWidth } from '@/components/plots/drawing-parts';
 import { allowedSign, type RuleScale, ruleScale } from '@/components/plots/limit-rule-scale';
-import { coordinate, decimalsOf, micrometresAsMm } from '@/components/plots/number';
+import { coordinate, decimalsOf, micrometresAsMm, shortLimit } from '@/components/plots/number';
 import { MARK_INK } from '@/components/plots/verdict-ink';
 import { limitRuleWords } from '@/lib/reporting/drawing-text';
 import type { Verdict } from '@/lib/sheet/types';
@@ -46,7 +46,12 @@ export function limitRule(input: LimitRuleInput): Drawing {
   items.push(polyline(ruleLine(scale, input), { widthPx: 2 }), ...ticks(scale));
   if (value !== null) items.push(...scribe(scale, value, ink));
   if (!input.compact) items.push(...figures(scale, input, value, ink));
-  return { widthPx: input.widthPx, heightPx: scale.heightPx, description: limitRuleWords(input), items };
+  return {
+    widthPx: input.widthPx,
+    heightPx: scale.heightPx,
+    description: limitRuleWords({ ...input, toleranceUm: input.toleranceUm && shortLimit(input.toleranceUm) }),
+    items,
+  };
 }
 
 function forbiddenSide(scale: RuleScale): DrawingItem {
@@ -161,7 +166,8 @@ function figures(scale: RuleScale, input: LimitRuleInput, value: number | null, 
   if (input.toleranceUm === null) return items;
   const places = input.shown ? decimalsOf(input.shown) : 0;
   for (const tenth of scale.notches) {
-    const signed = tenth < 0 ? `-${input.toleranceUm}` : input.toleranceUm;
+    const limitUm = shortLimit(input.toleranceUm);
+    const signed = tenth < 0 ? `-${limitUm}` : limitUm;
     const words = `T ${micrometresAsMm(signed, places, scale.bothWays)}`;
     const x = keepInside(scale.x(tenth * scale.tenthUm), wordWidth(words, LABEL_PX, true), input.widthPx);
     items.push(text(x, labelY, words, { ...label, ink: 'ink' }));

@@ -8,6 +8,16 @@ export function coordinate(text: string): number {
   return value;
 }
 
+/**
+ * A limit as it is written beside a drawing: at most a tenth of a micrometre, cut off and never rounded up, so that it never looks
+ * wider than it is.
+ */
+export function shortLimit(limitUm: string): string {
+  const parts = /^(-?\d+)\.(\d)\d*$/.exec(limitUm);
+  if (!parts) return limitUm;
+  return parts[2] === '0' ? (parts[1] ?? '') : `${parts[1]}.${parts[2]}`;
+}
+
 /** µm as mm with no figure lost and with at least `places` decimals, so that limit and deviation stand in the same resolution. */
 export function micrometresAsMm(valueUm: string, places: number, signed = false): string {
   const mm = convert(valueUm, 'µm', 'mm');

@@ -1,4 +1,5 @@
 import type { Drawing, DrawingItem } from '@/components/plots/drawing';
+import { shortLimit } from '@/components/plots/number';
 import type { PlotOptions } from '@/components/plots/plot-frame';
 import { linePlot } from '@/components/plots/plot-line';
 import { pairsPlot } from '@/components/plots/plot-pairs';
@@ -19,5 +20,10 @@ const PLOTS: Record<PlotSeries['kind'], (series: PlotSeries, options: PlotOption
 export function plotDrawing(series: PlotSeries, options: PlotOptions): Drawing {
   const { widthPx, heightPx } = options;
   const items = series.points.length ? PLOTS[series.kind](series, options) : [];
-  return { widthPx, heightPx, description: plotWords(series, options.toleranceUm), items };
+  return {
+    widthPx,
+    heightPx,
+    description: plotWords(series, options.toleranceUm && shortLimit(options.toleranceUm)),
+    items,
+  };
 }

@@ -2,7 +2,7 @@ import { type ScaleLinear, scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
 import type { DrawingItem } from '@/components/plots/drawing';
 import { arrowHead, polyline, text, wordWidth } from '@/components/plots/drawing-parts';
-import { coordinate } from '@/components/plots/number';
+import { coordinate, shortLimit } from '@/components/plots/number';
 import {
   extentOf,
   figure,
@@ -149,7 +149,7 @@ function bracket(axes: Axes, readings: Reading[], toleranceUm: string): DrawingI
       bar,
     );
   const end = head < top - 0.5 ? arrowHead([x, foot], [x, top], 7, bar) : cap(top);
-  const words = `T ${figure(toleranceUm)}`;
+  const words = `T ${figure(shortLimit(toleranceUm))}`;
   return [
     polyline(
       [

@@ -1,6 +1,6 @@
 import type { DrawingItem } from '@/components/plots/drawing';
 import { circle, onCircle, polyline, text } from '@/components/plots/drawing-parts';
-import { coordinate } from '@/components/plots/number';
+import { coordinate, shortLimit } from '@/components/plots/number';
 import {
   extentOf,
   figure,
@@ -29,7 +29,7 @@ export function polarPlot(series: PlotSeries, options: PlotOptions): DrawingItem
     2,
     options.widthPx,
   );
-  const top = 18 + legend.heightPx;
+  const top = 18 + legend.heightPx + (legend.heightPx ? 10 : 0);
   const radius = Math.max(20, Math.min(options.widthPx / 2 - 44, (options.heightPx - top - 24) / 2 - 4));
   const centre = [options.widthPx / 2, top + 10 + radius] as const;
   const [low, high] = extentOf(all.map((reading) => reading.y));
@@ -51,7 +51,7 @@ export function polarPlot(series: PlotSeries, options: PlotOptions): DrawingItem
   });
   if (options.toleranceUm !== null) {
     items.push(
-      text(options.widthPx - 2, 12, `T ${figure(options.toleranceUm)}`, {
+      text(options.widthPx - 2, 12, `T ${figure(shortLimit(options.toleranceUm))}`, {
         sizePx: LABEL_PX,
         anchor: 'end',
         mono: true,

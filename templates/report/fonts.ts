@@ -1,7 +1,9 @@
+import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { dirname, join } from 'node:path';
 import { Font } from '@react-pdf/renderer';
 import type { FaceName } from '@/templates/report/theme';
+import { unpackWoff } from '@/templates/report/unpack-woff';
 
 /** What drawing needs of a font object of the PDF library. */
 export interface FontFile {
@@ -51,7 +53,7 @@ async function load(): Promise<Fonts> {
   const entries = await Promise.all(
     (Object.keys(FILES) as (keyof Fonts)[]).map(async (face) => {
       const fontFamily = `Report ${face}`;
-      Font.register({ family: fontFamily, src: FILES[face]() });
+      Font.register({ family: fontFamily, src: sourceOf(await readFile(FILES[face]())) });
       await Font.load({ fontFamily });
       const font = Font.getFont({ fontFamily })?.data as unknown as FontFile | null;
       if (!font) throw new Error(`Font not loaded: ${FILES[face]()}`);
@@ -61,6 +63,11 @@ async function load(): Promise<Fonts> {
     }),
   );
   return Object.fromEntries(entries) as Fonts;
+}
+
+function sourceOf(file: Buffer): string {
+  const plain = file.toString('latin1', 0, 4) === 'wOFF' ? unpackWoff(file) : file;
+  return `data:font/ttf;base64,${plain.toString('base64')}`;
 }
 
 /**

@@ -13,24 +13,34 @@ export interface Column {
 /** A cell: words, a figure, or something drawn. */
 export type TableCell = string | Slab;
 
-const PAD_PT = { x: 3, y: 3.5 };
+const PAD_X_PT = 3;
+/** Room above and below a row: tables to read down a column of figures are set closer. */
+const PAD_Y_PT = { open: 3.5, close: 1.25 };
+
+export type Density = keyof typeof PAD_Y_PT;
+const HEAD_PAD_PT = 3.5;
 const GAP_PT = 8;
 /** A row of more lines than this is set as several, so that none is ever higher than a page. */
 const LINES_PER_ROW = 40;
 
 /** A table whose rows may go over several pages; every page has the header. */
-export function table(type: Typesetter, columns: readonly Column[], rows: readonly TableCell[][]): FlowItem {
-  return { kind: 'rows', header: headerRow(type, columns), rows: tableRows(type, columns, rows) };
+export function table(
+  type: Typesetter,
+  columns: readonly Column[],
+  rows: readonly TableCell[][],
+  density: Density = 'open',
+): FlowItem {
+  return { kind: 'rows', header: headerRow(type, columns), rows: tableRows(type, columns, rows, density) };
 }
 
 export function headerRow(type: Typesetter, columns: readonly Column[]): Slab {
   const places = lefts(columns);
   const lines = columns.map((column) => type.lines(column.head, TYPE.columnHead, inner(column)));
   const count = Math.max(1, ...lines.map((cell) => cell.length));
-  const height = count * TYPE.columnHead.leadPt + 2 * PAD_PT.y - 2;
+  const height = count * TYPE.columnHead.leadPt + 2 * HEAD_PAD_PT - 2;
   const ops = columns.flatMap((column, index) => {
     const cell = lines[index] ?? [];
-    const top = (count - cell.length) * TYPE.columnHead.leadPt + PAD_PT.y - 1;
+    const top = (count - cell.length) * TYPE.columnHead.leadPt + HEAD_PAD_PT - 1;
     return cell.map((line, row) => {
       const slab = aligned(type, line, TYPE.columnHead, column, places[index] ?? 0);
       return moved(slab, 0, top + row * TYPE.columnHead.leadPt);
@@ -39,19 +49,26 @@ export function headerRow(type: Typesetter, columns: readonly Column[]): Slab {
   return { heightPt: height, ops: [...ops, underline(columns, height - 0.5, 'ink', 1)] };
 }
 
-export function tableRows(type: Typesetter, columns: readonly Column[], rows: readonly TableCell[][]): Slab[] {
+export function tableRows(
+  type: Typesetter,
+  columns: readonly Column[],
+  rows: readonly TableCell[][],
+  density: Density = 'open',
+): Slab[] {
   const decimals = columns.map((column, index) =>
     column.align === 'decimal' ? mostDecimals(rows.map((row) => row[index] ?? '')) : 0,
   );
-  return rows.flatMap((row) => rowSlabs(type, columns, row, decimals));
+  const set = { decimals, padPt: PAD_Y_PT[density] };
+  return rows.flatMap((row) => rowSlabs(type, columns, row, set));
 }
 
-function rowSlabs(
-  type: Typesetter,
-  columns: readonly Column[],
-  row: readonly TableCell[],
-  decimals: readonly number[],
-): Slab[] {
+/** What the rows of one table share. */
+interface RowSet {
+  decimals: readonly number[];
+  padPt: number;
+}
+
+function rowSlabs(type: Typesetter, columns: readonly Column[], row: readonly TableCell[], set: RowSet): Slab[] {
   const cells = columns.map((column, index) => {
     const cell = row[index] ?? '';
     return typeof cell === 'string' ? type.lines(cell, column.style ?? TYPE.body, inner(column)) : cell;
@@ -60,7 +77,7 @@ function rowSlabs(
   const slabs: Slab[] = [];
   for (let from = 0; from < most; from += LINES_PER_ROW) {
     const part = cells.map((cell) => (Array.isArray(cell) ? cell.slice(from, from + LINES_PER_ROW) : from ? [] : cell));
-    slabs.push(rowSlab(type, columns, part, decimals, from + LINES_PER_ROW >= most));
+    slabs.push(rowSlab(type, columns, part, set, from + LINES_PER_ROW >= most));
   }
   return slabs;
 }
@@ -69,7 +86,7 @@ function rowSlab(
   type: Typesetter,
   columns: readonly Column[],
   cells: readonly (string[] | Slab)[],
-  decimals: readonly number[],
+  set: RowSet,
   closed: boolean,
 ): Slab {
   const places = lefts(columns);
@@ -79,26 +96,26 @@ function rowSlab(
     const cell = cells[index] ?? [];
     const left = places[index] ?? 0;
     if (!Array.isArray(cell)) {
-      ops.push(moved(cell, left + PAD_PT.x, PAD_PT.y));
+      ops.push(moved(cell, left + PAD_X_PT, set.padPt));
       height = Math.max(height, cell.heightPt);
       return;
     }
     const style = column.style ?? TYPE.body;
     cell.forEach((line, lineNo) => {
-      const slab = aligned(type, line, style, column, left, decimals[index]);
-      ops.push(moved(slab, 0, PAD_PT.y + lineNo * style.leadPt));
+      const slab = aligned(type, line, style, column, left, set.decimals[index]);
+      ops.push(moved(slab, 0, set.padPt + lineNo * style.leadPt));
     });
     height = Math.max(height, cell.length * style.leadPt);
   });
-  const whole = height + 2 * PAD_PT.y;
+  const whole = height + 2 * set.padPt;
   return { heightPt: whole, ops: closed ? [...ops, underline(columns, whole - 0.25, 'hair', 0.75)] : ops };
 }
 
 /** One line in its column. Figures with a decimal mark leave room for the decimals that others in the column have more. */
 function aligned(type: Typesetter, line: string, style: TextStyle, column: Column, left: number, decimals = 0): Slab {
-  if (column.align !== 'right' && column.align !== 'decimal') return type.line(line, style, left + PAD_PT.x);
+  if (column.align !== 'right' && column.align !== 'decimal') return type.line(line, style, left + PAD_X_PT);
   const short = column.align === 'decimal' && isFigure(line) ? missingWidth(type, line, style, decimals) : 0;
-  return type.line(line, style, left + column.widthPt - PAD_PT.x - short, 'end');
+  return type.line(line, style, left + column.widthPt - PAD_X_PT - short, 'end');
 }
 
 const isFigure = (text: string) => /^[=+−-]?\s?\d+(?:[.,]\d+)?$/.test(text);
@@ -127,10 +144,10 @@ export function naturalWidth(
   const widths = cells.map(
     (cell) => type.width(cell, column.style) + (isFigure(cell) ? missingWidth(type, cell, column.style, decimals) : 0),
   );
-  return Math.max(type.width(column.head, TYPE.columnHead), ...widths, 12) + 2 * PAD_PT.x + 0.5;
+  return Math.max(type.width(column.head, TYPE.columnHead), ...widths, 12) + 2 * PAD_X_PT + 0.5;
 }
 
-const inner = (column: Column) => column.widthPt - 2 * PAD_PT.x;
+const inner = (column: Column) => column.widthPt - 2 * PAD_X_PT;
 
 function lefts(columns: readonly Column[]): number[] {
   let x = 0;

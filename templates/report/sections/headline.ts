@@ -13,7 +13,7 @@ export function headline(kit: Kit, model: ReportModel): FlowItem[] {
     `${sentence(job.purpose)}, ${dateSpan(job.from, job.to)}.`,
     job.codes.length ? `${job.codes.join(', ')}.` : '',
     `${REPORT_WORDS.decisionRule}: ${job.decisionRule}.`,
-    conditions.airRange ? `${REPORT_WORDS.air} ${conditions.airRange}.` : '',
+    conditions.airRange ? `${sentence(conditions.airRange)}.` : '',
   ];
   const restsOn = rests
     .filter((part) => part !== '')

@@ -1,5 +1,5 @@
 import type { ReportModel } from '@/lib/reporting/report-model';
-import { longDate } from '@/lib/reporting/report-text';
+import { sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { type FlowItem, space } from '@/templates/report/flow/ops';
 import { flowingText, heading, type Kit } from '@/templates/report/flow/parts';
@@ -11,16 +11,16 @@ export function instruments(kit: Kit, model: ReportModel): FlowItem[] {
   if (!model.instruments.length) return [];
   const words = REPORT_WORDS.instruments;
   const fixed: Column[] = [
-    { head: words.resolution, widthPt: 56, style: TYPE.figure },
-    { head: words.uncertainty, widthPt: 60, style: TYPE.figure },
-    { head: words.certificate, widthPt: 60, style: TYPE.figure },
-    { head: words.calibrated, widthPt: 72 },
-    { head: words.due, widthPt: 72 },
+    { head: words.resolution, widthPt: 46, style: TYPE.figure },
+    { head: words.uncertainty, widthPt: 90, style: TYPE.figure },
+    { head: words.certificate, widthPt: 56, style: TYPE.figure },
+    { head: words.calibrated, widthPt: 58, style: TYPE.figure },
+    { head: words.due, widthPt: 58, style: TYPE.figure },
   ];
   const number: Column = { head: words.number, widthPt: 40, style: TYPE.figure };
   const name: Column = { head: words.name, widthPt: 0 };
   name.widthPt = kit.widthPt - tableWidth([number, name, ...fixed]);
-  const show = (text: string | null) => (text ? longDate(text) : REPORT_WORDS.none);
+  const show = (text: string | null) => text ?? REPORT_WORDS.none;
   const rows = model.instruments.map((i) => [
     i.number,
     i.name,
@@ -30,9 +30,7 @@ export function instruments(kit: Kit, model: ReportModel): FlowItem[] {
     show(i.calibrated),
     show(i.due),
   ]);
-  const overrides = model.instruments.flatMap((i) =>
-    i.override ? [`${i.number}: ${words.override}. ${i.override}`] : [],
-  );
+  const overrides = model.instruments.flatMap((i) => (i.override ? [`${i.number}: ${sentence(i.override)}.`] : []));
   return [
     ...heading(kit, words.heading),
     table(kit.type, [number, name, ...fixed], rows),

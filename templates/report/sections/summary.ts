@@ -57,7 +57,9 @@ function asFoundCell(kit: Kit, row: SummaryRow, column: Column, decimals: number
 }
 
 function verdictCell(kit: Kit, row: SummaryRow, column: Column): Slab {
-  const kind: MarkKind = row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? 'not-measured');
+  // What was only measured as found counts as it was found.
+  const kind: MarkKind =
+    row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? row.asFoundVerdict ?? 'not-measured');
   const parts = [
     row.leftOut ? `${SHORT_VERDICT_WORDS['left-out']}: ${row.leftOut}` : SHORT_VERDICT_WORDS[kind],
     row.remarkNo === null ? '' : `${REPORT_WORDS.summary.remark} ${row.remarkNo}`,

@@ -1,0 +1,79 @@
+import type { PassBlock } from '@/lib/reporting/report-model';
+import { type FlowItem, moved, type Slab, slabItem, space, stack } from '@/templates/report/flow/ops';
+import type { Kit } from '@/templates/report/flow/parts';
+import { type Column, headerRow, naturalWidth, table, tableRows, tableWidth } from '@/templates/report/flow/table';
+import { TYPE } from '@/templates/report/theme';
+
+type ReadingTable = PassBlock['tables'][number];
+
+const ROW_LABEL = { ...TYPE.figureQuiet, sizePt: 8 };
+const READING = { ...TYPE.figure, sizePt: 8 };
+const TITLE = TYPE.small;
+const GAP_PT = 18;
+/** A longer table of few columns is set in pieces beside each other. */
+const ROWS_BESIDE = 14;
+
+/** The readings of a pass in a width: tables too wide are cut between columns, long narrow ones set in pieces beside each other. */
+export function passTables(kit: Kit, pass: PassBlock, widthPt: number): FlowItem[] {
+  return pass.tables.flatMap((readings, index) => [
+    ...(index ? [space(6)] : []),
+    ...(readings.title ? [slabItem(kit.type.paragraph(readings.title, TITLE, widthPt), { keepWithNext: true })] : []),
+    ...cutToWidth(kit, readings, widthPt).flatMap((part, partNo) => [
+      ...(partNo ? [space(6)] : []),
+      oneTable(kit, part, widthPt),
+    ]),
+  ]);
+}
+
+/** Width that the readings of a pass would like to have. */
+export function passWidth(kit: Kit, pass: PassBlock): number {
+  return Math.max(0, ...pass.tables.map((readings) => tableWidth(columnsOf(kit, readings))));
+}
+
+function oneTable(kit: Kit, readings: ReadingTable, widthPt: number): FlowItem {
+  const columns = columnsOf(kit, readings);
+  const cells = readings.rows.map((row) => [row.label, ...row.cells]);
+  const own = tableWidth(columns);
+  const beside = Math.floor((widthPt + GAP_PT) / (own + GAP_PT));
+  if (cells.length <= ROWS_BESIDE || beside < 2) return table(kit.type, columns, cells, 'close');
+  const deep = Math.ceil(cells.length / Math.min(beside, Math.ceil(cells.length / ROWS_BESIDE)));
+  const rows = tableRows(kit.type, columns, cells, 'close');
+  const header = headerRow(kit.type, columns);
+  const pieces: Slab[] = [];
+  for (let at = 0; at < rows.length; at += deep) pieces.push(stack([header, ...rows.slice(at, at + deep)]));
+  const row = {
+    heightPt: Math.max(...pieces.map((piece) => piece.heightPt)),
+    ops: pieces.map((piece, index) => moved(piece, index * (own + GAP_PT), 0)),
+  };
+  return slabItem(row);
+}
+
+function columnsOf(kit: Kit, readings: ReadingTable): Column[] {
+  const heads = headsOf(readings);
+  return heads.map((head, index): Column => {
+    const style = index ? READING : ROW_LABEL;
+    const cells = readings.rows.map((row) => (index ? (row.cells[index - 1] ?? '') : row.label));
+    return { head, widthPt: naturalWidth(kit.type, { head, style }, cells), align: index ? 'decimal' : 'left', style };
+  });
+}
+
+/** One head a column; where only the cells are named, the column of places has none. */
+function headsOf(readings: ReadingTable): string[] {
+  const cells = Math.max(0, ...readings.rows.map((row) => row.cells.length));
+  return readings.columns.length > cells ? readings.columns : ['', ...readings.columns];
+}
+
+/** A table too wide is cut between columns; each part has the column of places again. */
+function cutToWidth(kit: Kit, readings: ReadingTable, widthPt: number): ReadingTable[] {
+  const columns = columnsOf(kit, readings);
+  if (tableWidth(columns) <= widthPt || columns.length <= 2) return [readings];
+  let count = 1;
+  while (count < columns.length - 1 && tableWidth(columns.slice(0, count + 2)) <= widthPt) count += 1;
+  const heads = headsOf(readings);
+  const part = (from: number, to?: number): ReadingTable => ({
+    title: null,
+    columns: [heads[0] ?? '', ...heads.slice(from + 1, to === undefined ? undefined : to + 1)],
+    rows: readings.rows.map((row) => ({ label: row.label, cells: row.cells.slice(from, to) })),
+  });
+  return [part(0, count), ...cutToWidth(kit, part(count), widthPt)];
+}

@@ -1,0 +1,130 @@
+import { limitRule } from '@/components/plots/limit-rule-geometry';
+import { decimalsOf, shortLimit } from '@/components/plots/number';
+import type { PassBlock, TestBlock } from '@/lib/reporting/report-model';
+import { longDate, sentence } from '@/lib/reporting/report-text';
+import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { formatDecimal } from '@/lib/units/format';
+import { drawingSlab } from '@/templates/report/flow/drawing-slab';
+import { type FlowItem, type Slab, slabItem, space } from '@/templates/report/flow/ops';
+import { heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
+import { type Column, table, tableWidth } from '@/templates/report/flow/table';
+import { passReadings } from '@/templates/report/sections/pass-readings';
+import { testPictures } from '@/templates/report/sections/test-pictures';
+import { TYPE } from '@/templates/report/theme';
+
+/** Everything about one test: set-up, plots, readings, the limit rule of the final result, what was judged by what. */
+export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
+  const title = `${block.order} · ${block.title}`;
+  const head = heading(kit, title, { right: block.reference });
+  const component = kit.type.paragraph(block.componentWords, TYPE.quiet, kit.widthPt);
+  const items: FlowItem[] = [slabItem(component, { keepWithNext: true }), space(6)];
+  if (block.leftOut) items.push(slabItem(leftOutLine(kit, block.leftOut)));
+  else {
+    items.push(slabItem(testPictures(kit, block), { keepWithNext: true }), space(6));
+    items.push(...passReadings(kit, block.passes), ...finalResult(kit, block));
+  }
+  items.push(space(4), pairs(kit, details(block), { columns: 1, labelPt: 66 }), ...corrections(kit, block));
+  const [gap, titled] = head;
+  return [gap as FlowItem, { kind: 'together', items: [titled as FlowItem, ...items] }];
+}
+
+function leftOutLine(kit: Kit, leftOut: NonNullable<TestBlock['leftOut']>): Slab {
+  const words = [`${REPORT_WORDS.block.leftOut}: ${leftOut.reason}`, leftOut.text ?? '']
+    .filter((part) => part !== '')
+    .join('. ');
+  return markedWords(kit, 'left-out', words, TYPE.strong, kit.widthPt);
+}
+
+/** The pass that is judged in the end: as left, else as found. */
+function finalPass(block: TestBlock): PassBlock | null {
+  const judged = block.passes.filter((pass) => pass.kind !== 'adjusting' && pass.resultMm !== null);
+  return judged.findLast((pass) => pass.kind === 'as-left') ?? judged.at(-1) ?? null;
+}
+
+function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
+  const pass = finalPass(block);
+  if (!pass?.judgement || pass.resultMm === null) return [];
+  const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
+  // A figure without a sign never has words for its direction, and is never below zero.
+  const signed = block.passes.some((each) => each.resultWords !== null || /^[-−]/.test(each.resultMm ?? ''));
+  const rule = limitRule({
+    deviationUm: pass.resultUm === null ? null : pass.resultUm.replace('−', '-'),
+    toleranceUm,
+    limitUm,
+    direction,
+    signed,
+    verdict,
+    shown: pass.resultMm,
+    widthPx: 860,
+  });
+  const words = REPORT_WORDS.block;
+  const parts = [
+    `${sentence(pass.kindWords)} ${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`,
+    pass.resultWords ?? '',
+    marginUm === null ? '' : `${inMicrometres(marginUm, pass)} µm ${words.margin}`,
+    local
+      ? `${words.local} ${inMicrometres(local.deviationUm, pass)} µm ${words.over} ${local.lengthMm} mm, T ${shortLimit(local.toleranceUm)} µm, ${VERDICT_WORDS[local.verdict]}`
+      : '',
+  ];
+  const line = markedWords(
+    kit,
+    verdict,
+    parts.filter((part) => part !== '').join(' · '),
+    { ...TYPE.firm, sizePt: 9.5 },
+    kit.widthPt,
+  );
+  return [
+    space(6),
+    slabItem(drawingSlab(kit.type, rule, kit.widthPt), { keepWithNext: true }),
+    space(2),
+    slabItem(line, { keepWithNext: true }),
+  ];
+}
+
+/** A figure of the judgement in the resolution of the result; at least a tenth, so that a small margin is not lost. */
+function inMicrometres(um: string, pass: PassBlock): string {
+  return formatDecimal(um, { decimals: Math.max(1, decimalsOf(pass.resultUm ?? '')) });
+}
+
+/** Only what is known, each with its name. */
+function details(block: TestBlock): { label: string; value: string }[] {
+  const words = REPORT_WORDS.block;
+  const arithmetic = finalPass(block)?.judgement?.toleranceArithmetic;
+  const entries: [string, string | null][] = [
+    [words.judged, block.judgedFigure],
+    [words.tolerance, arithmetic ? `${block.toleranceWords}; ${arithmetic}` : block.toleranceWords],
+    [words.source, block.toleranceSource],
+    [words.direction, block.directionWords],
+    [words.instruments, block.instruments.join(' · ')],
+    [words.remark, block.remark],
+  ];
+  return entries.flatMap(([label, value]) => (value ? [{ label, value }] : []));
+}
+
+/** Readings that stood differently before: what was typed first, what stands now, who changed it and when. */
+function corrections(kit: Kit, block: TestBlock): FlowItem[] {
+  const changed = block.passes.flatMap((pass) =>
+    pass.corrections.map((correction) => ({ ...correction, pass: pass.kindWords })),
+  );
+  if (!changed.length) return [];
+  const words = REPORT_WORDS.block;
+  const field: Column = { head: words.corrected, widthPt: 0 };
+  const columns: Column[] = [
+    field,
+    { head: words.was, widthPt: 52, align: 'right', style: TYPE.figure },
+    { head: words.now, widthPt: 52, align: 'right', style: TYPE.figure },
+    { head: words.by, widthPt: 70 },
+    { head: words.at, widthPt: 92 },
+    { head: words.reason, widthPt: 80 },
+  ];
+  field.widthPt = kit.widthPt - tableWidth(columns);
+  const rows = changed.map((c) => [
+    `${c.pass}, ${c.field}`,
+    c.was,
+    c.now,
+    c.by,
+    longDate(c.at),
+    c.reason ?? REPORT_WORDS.none,
+  ]);
+  return [space(4), table(kit.type, columns, rows)];
+}
