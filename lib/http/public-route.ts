@@ -4,7 +4,7 @@ import { takeAttempt } from '@/db/queries/accounts';
 import { DomainError } from '@/lib/errors';
 import { parseOr422, problemResponse } from './problem';
 import { parseJson, readBody, refuseForeignOrigin } from './read-request';
-import { type RouteAnswer, respond } from './route';
+import { type RouteAnswer, type RouteHandler, respond } from './route';
 
 interface PublicRouteSpec<P extends z.ZodType, B extends z.ZodType> {
   /** Whoever has no session is slowed down by address: so many at once, then one each `1 / refillPerSecond` seconds. */
@@ -23,8 +23,8 @@ export const clientAddress = (request: Request): string =>
 /** The wrapper for what needs no session: the same checks and the same problems as `route`, and a limit on how often. */
 export function publicRoute<P extends z.ZodType = typeof none, B extends z.ZodType = typeof none>(
   spec: PublicRouteSpec<P, B>,
-) {
-  return async (request: Request, context: { params: Promise<Record<string, string>> }): Promise<Response> => {
+): RouteHandler {
+  const handler = async (request: Request, context: { params: Promise<Record<string, string>> }): Promise<Response> => {
     try {
       refuseForeignOrigin(request);
       const params = spec.params ? parseOr422(spec.params, await context.params) : (undefined as z.output<P>);
@@ -35,6 +35,7 @@ export function publicRoute<P extends z.ZodType = typeof none, B extends z.ZodTy
       return problemResponse(error, request);
     }
   };
+  return Object.assign(handler, { description: { action: [], params: spec.params, body: spec.body } });
 }
 
 /** @throws DomainError 429 with the seconds to wait */

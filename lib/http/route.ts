@@ -42,6 +42,12 @@ interface RouteSpec<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodTyp
   ): Promise<RouteAnswer>;
 }
 
+/** A handler that can say what it takes: the interface's description is made from this. */
+export interface RouteHandler {
+  (request: Request, context: { params: Promise<Record<string, string>> }): Promise<Response>;
+  description: { action: Action[]; params?: z.ZodType; query?: z.ZodType; body?: z.ZodType; needsVersion?: boolean };
+}
+
 const none = z.unknown();
 
 /**
@@ -52,8 +58,8 @@ export function route<
   P extends z.ZodType = typeof none,
   Q extends z.ZodType = typeof none,
   B extends z.ZodType = typeof none,
->(spec: RouteSpec<P, Q, B>) {
-  return async (request: Request, context: { params: Promise<Record<string, string>> }): Promise<Response> => {
+>(spec: RouteSpec<P, Q, B>): RouteHandler {
+  const handler = async (request: Request, context: { params: Promise<Record<string, string>> }): Promise<Response> => {
     try {
       const viewer = await viewerOf(request.headers);
       if (!viewer)
@@ -99,6 +105,7 @@ export function route<
       return problemResponse(error, request);
     }
   };
+  return Object.assign(handler, { description: { ...spec, action: [spec.action].flat() as Action[] } });
 }
 
 /** The answer as JSON, never kept by a cache in between. */
