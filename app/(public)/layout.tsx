@@ -5,7 +5,7 @@ import { version } from '@/lib/version';
 /** Pages that need no session. */
 export default function PublicLayout({ children }: { children: ReactNode }) {
   return (
-    <div className="mx-auto flex min-h-dvh max-w-3xl flex-col px-5 py-10">
+    <div className="mx-auto flex min-h-dvh max-w-5xl flex-col px-5 py-10">
       <header className="mb-8">
         <Brand />
       </header>

@@ -1,0 +1,31 @@
+import { DrawingSvg } from '@/components/plots/drawing-svg';
+import { driftDrawing } from '@/components/plots/drift-geometry';
+import { VerdictMark } from '@/components/ui/verdict-mark';
+import type { Verdict } from '@/lib/sheet/types';
+
+interface DriftTest {
+  key: string;
+  title: string;
+  component: string;
+  toleranceMm: string | null;
+  points: { reportId: string; measuredOn: string; asLeftMm: string; verdict: Verdict | null }[];
+}
+
+/** How each test that was signed more than once has moved; small, side by side, to be read at a glance. */
+export function DriftPlots({ tests }: { tests: DriftTest[] }) {
+  return (
+    <ul className="grid gap-x-8 gap-y-5 sm:grid-cols-2 xl:grid-cols-3">
+      {tests.map((test) => {
+        const verdict = test.points.at(-1)?.verdict;
+        return (
+          <li key={test.key} className="border-t border-hair pt-2">
+            <p className="font-medium leading-snug">{test.title}</p>
+            <p className="text-sm text-ink2">{test.component}</p>
+            <DrawingSvg drawing={driftDrawing(test.points, test.toleranceMm, test.title)} className="mt-1" />
+            {verdict && <VerdictMark verdict={verdict} className="text-sm" />}
+          </li>
+        );
+      })}
+    </ul>
+  );
+}

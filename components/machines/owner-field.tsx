@@ -1,0 +1,43 @@
+'use client';
+
+import { useState } from 'react';
+import { CustomerForm } from '@/components/customers/customer-form';
+import { Button } from '@/components/ui/button';
+import { Dialog } from '@/components/ui/dialog';
+import { Field } from '@/components/ui/field';
+import { Select } from '@/components/ui/inputs';
+import { useMachineForm } from './machine-input';
+
+/** The customer that owns the machine; a new one is added on the spot. */
+export function OwnerField({ customers }: { customers: { id: string; name: string }[] }) {
+  const { register, setValue, formState } = useMachineForm();
+  const [added, setAdded] = useState<{ id: string; name: string }[]>([]);
+  const [adding, setAdding] = useState(false);
+  return (
+    <div className="flex flex-wrap items-start gap-3">
+      <Field label="Customer that owns it" error={formState.errors.customerId?.message} className="min-w-64 flex-1">
+        <Select {...register('customerId')}>
+          <option value="">Not known yet</option>
+          {[...customers, ...added].map(({ id, name }) => (
+            <option key={id} value={id}>
+              {name}
+            </option>
+          ))}
+        </Select>
+      </Field>
+      <Button className="mt-7" onClick={() => setAdding(true)}>
+        Add a customer
+      </Button>
+      <Dialog open={adding} onOpenChange={setAdding} title="Add a customer">
+        <CustomerForm
+          onDone={(customer) => {
+            setAdded((before) => [...before, customer]);
+            setAdding(false);
+            // The option exists after the next drawing.
+            setTimeout(() => setValue('customerId', customer.id, { shouldDirty: true }));
+          }}
+        />
+      </Dialog>
+    </div>
+  );
+}

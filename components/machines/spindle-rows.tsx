@@ -1,0 +1,64 @@
+'use client';
+
+import { useFieldArray, useWatch } from 'react-hook-form';
+import { NumberText, Select, TextInput } from '@/components/ui/inputs';
+import { rowMessages, useMachineForm } from './machine-input';
+import { PartCell, PartRow, PartTable } from './row-parts';
+
+/** Main, sub- and tool spindles. */
+export function SpindleRows() {
+  const { register, control, formState } = useMachineForm();
+  const { fields, append, remove } = useFieldArray({ control, name: 'makeUp.spindles', keyName: 'rowKey' });
+  const spindles = useWatch({ control, name: 'makeUp.spindles' });
+  const errors = formState.errors.makeUp?.spindles;
+  return (
+    <PartTable
+      title="Spindles"
+      heads={['Name', 'Kind', 'Channel', 'Highest speed, 1/min']}
+      addLabel="Add a spindle"
+      onAdd={() =>
+        append({ id: `S${fields.length + 1}`, type: fields.length === 1 ? 'sub' : 'tool', channel: 1, carriedBy: null })
+      }
+      problem={errors?.message ?? errors?.root?.message}
+    >
+      {fields.map((field, index) => {
+        const name = `spindle ${spindles[index]?.id ?? ''}`;
+        const path = `makeUp.spindles.${index}` as const;
+        return (
+          <PartRow
+            key={field.rowKey}
+            name={name}
+            columns={4}
+            messages={rowMessages(errors?.[index])}
+            onRemove={fields.length > 1 ? () => remove(index) : undefined}
+          >
+            <PartCell>
+              <TextInput aria-label={`${name}: name`} className="min-w-16 font-mono" {...register(`${path}.id`)} />
+            </PartCell>
+            <PartCell>
+              <Select aria-label={`${name}: kind`} className="min-w-36" {...register(`${path}.type`)}>
+                <option value="main">main spindle</option>
+                <option value="sub">sub-spindle</option>
+                <option value="tool">tool spindle</option>
+              </Select>
+            </PartCell>
+            <PartCell>
+              <NumberText
+                aria-label={`${name}: channel`}
+                className="min-w-12 max-w-16"
+                {...register(`${path}.channel`)}
+              />
+            </PartCell>
+            <PartCell>
+              <NumberText
+                aria-label={`${name}: highest speed, 1/min`}
+                className="min-w-24"
+                {...register(`${path}.maximumSpeedPerMin`)}
+              />
+            </PartCell>
+          </PartRow>
+        );
+      })}
+    </PartTable>
+  );
+}

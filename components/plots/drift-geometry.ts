@@ -1,0 +1,99 @@
+import type { Drawing, DrawingItem } from '@/components/plots/drawing';
+import { type Point, polyline, text } from '@/components/plots/drawing-parts';
+import { coordinate } from '@/components/plots/number';
+import { extentOf, figure, marker } from '@/components/plots/plot-frame';
+
+export interface DriftPointInput {
+  measuredOn: string;
+  /** mm as it stands in the report; a typographic minus is understood. */
+  asLeftMm: string;
+}
+
+const size = { widthPx: 300, heightPx: 130 };
+const room = { left: 12, right: 66, top: 22, bottom: 24 };
+const letterPx = 14;
+
+/**
+ * As-left deviations of one test over the years: a mark a report, the tolerance as a dashed line on the side or sides where it is, zero
+ * as a thin line. Figures stand as they were issued; only the marks' places are computed.
+ */
+export function driftDrawing(points: DriftPointInput[], toleranceMm: string | null, title: string): Drawing {
+  const dates = points.map(({ measuredOn }) => Date.parse(measuredOn));
+  const values = points.map(({ asLeftMm }) => place(asLeftMm));
+  const tolerance = toleranceMm === null ? null : place(toleranceMm);
+  const signed = values.some((value) => value < 0);
+  const bounds = tolerance === null ? [] : signed ? [tolerance, -tolerance] : [tolerance];
+  const [lowY, highY] = extentOf([0, ...values, ...bounds]);
+  const [firstX, lastX] = extentOf(dates);
+  const right = size.widthPx - room.right;
+  const bottom = size.heightPx - room.bottom;
+  const x = (date: number) =>
+    lastX === firstX
+      ? (room.left + right) / 2
+      : room.left + 6 + ((date - firstX) / (lastX - firstX)) * (right - room.left - 12);
+  const y = (value: number) =>
+    highY === lowY ? bottom : bottom - ((value - lowY) / (highY - lowY)) * (bottom - room.top);
+  const path = dates.map((date, index): Point => [x(date), y(values[index] ?? 0)]);
+  const last = points.at(-1);
+  const across = (value: number, dash?: number[]): DrawingItem =>
+    polyline(
+      [
+        [room.left, y(value)],
+        [right, y(value)],
+      ],
+      dash ? { stroke: 'ink', widthPx: 1.5, dash } : { stroke: 'line', widthPx: 1 },
+    );
+  return {
+    ...size,
+    description: words(points, toleranceMm, title),
+    items: [
+      across(0),
+      ...bounds.map((bound) => across(bound, [6, 4])),
+      ...(tolerance === null || toleranceMm === null
+        ? []
+        : [text(right + 6, y(tolerance) + 5, `T ${toleranceMm}`, { sizePx: letterPx, mono: true, ink: 'ink2' })]),
+      polyline(path, { stroke: 'blue' }),
+      ...path.flatMap((point) => marker('plus', point)),
+      ...yearLabels(points, dates.map(x)),
+      ...(last
+        ? [
+            text(clamp(path.at(-1)?.[0] ?? 0, right), labelY(path), figure(last.asLeftMm), {
+              sizePx: letterPx,
+              mono: true,
+              ink: 'blue',
+              anchor: 'end',
+            }),
+          ]
+        : []),
+    ],
+  };
+}
+
+const place = (shown: string) => coordinate(shown.replace('−', '-').replace(',', '.').replace('+', ''));
+const clamp = (at: number, right: number) => Math.min(right, Math.max(at + 10, room.left + 60));
+const labelY = (path: Point[]) => Math.max(letterPx, (path.at(-1)?.[1] ?? 0) - 8);
+
+/** The first and the last year; in between the marks speak for themselves. */
+function yearLabels(points: DriftPointInput[], places: number[]): DrawingItem[] {
+  const first = points[0]?.measuredOn.slice(0, 4);
+  const last = points.at(-1)?.measuredOn.slice(0, 4);
+  const label = (year: string | undefined, at: number | undefined, anchor: 'start' | 'end') =>
+    year === undefined || at === undefined
+      ? []
+      : [
+          text(at + (anchor === 'start' ? -6 : 6), size.heightPx - 6, year, {
+            sizePx: letterPx,
+            mono: true,
+            ink: 'ink2',
+            anchor,
+          }),
+        ];
+  return first === last
+    ? label(first, places[0], 'start')
+    : [...label(first, places[0], 'start'), ...label(last, places.at(-1), 'end')];
+}
+
+function words(points: DriftPointInput[], toleranceMm: string | null, title: string): string {
+  const readings = points.map(({ measuredOn, asLeftMm }) => `${measuredOn.slice(0, 4)} ${asLeftMm} mm`).join(', ');
+  return `${title}, as left: ${readings}${toleranceMm === null ? '' : `; tolerance ${toleranceMm} mm`}`;
+}

@@ -1,0 +1,47 @@
+import type { MakeUpInput } from './make-up';
+
+/**
+ * What a form need not ask, because it follows from the rest: an axis is named by letter and number, the channels are those in use, a
+ * turret moves in the axes that carry it, and a work spindle is carried by the axis that is said to carry it (its Z-like one first).
+ */
+export function linkMakeUp(form: MakeUpInput): MakeUpInput {
+  const linearAxes = form.linearAxes.map((axis) => ({
+    ...axis,
+    id: `${axis.letter}${String(axis.number ?? '').trim()}`,
+  }));
+  const carrying = (id: string) => linearAxes.filter((axis) => same(axis.carries, id));
+  const workSpindles = form.spindles.filter(({ type }) => type !== 'tool').map(({ id }) => tidy(id));
+  return {
+    ...form,
+    channels: channelsIn(form),
+    linearAxes,
+    spindles: form.spindles.map((spindle) => {
+      if (spindle.type === 'tool') return spindle;
+      const axes = carrying(spindle.id);
+      const axis = axes.find(({ letter }) => letter === 'Z' || letter === 'W') ?? axes[0];
+      return { ...spindle, carriedBy: axis?.id ?? null };
+    }),
+    turrets: form.turrets.map((turret) => ({
+      ...turret,
+      axes: carrying(turret.id).map(({ id }) => id),
+      worksAt: turret.worksAt.map(tidy).filter((id) => workSpindles.includes(id)),
+    })),
+  };
+}
+
+const tidy = (id: string) => id.trim().toUpperCase();
+const same = (a: string, b: string) => tidy(a) === tidy(b);
+
+function channelsIn(form: MakeUpInput): number[] {
+  const parts = [
+    ...form.linearAxes,
+    ...form.rotaryAxes,
+    ...form.spindles,
+    ...form.turrets,
+    ...(form.tailstock ? [form.tailstock] : []),
+    ...(form.guideBush ? [form.guideBush] : []),
+  ];
+  return [...new Set(parts.map(({ channel }) => Number(channel)))]
+    .filter((channel) => channel >= 1)
+    .sort((a, b) => a - b);
+}
