@@ -4,6 +4,9 @@ import type { Unit } from '@/lib/units/unit';
 /** A committed change as the device keeps it until the server has answered for it. */
 export interface LoggedOperation {
   sheetId: string;
+  /** Where the sheet is and what it is called, to lead back to it. */
+  jobId: string;
+  sheetTitle: string;
   operation: ReadingOperation;
   state: 'waiting' | 'conflict' | 'rejected';
   /** conflict: what the server holds instead. */
@@ -147,7 +150,8 @@ export function decideConflict(
     ...(choice === 'server' ? { text: server.text, unit: server.unit as Unit | null } : {}),
     reason: (choice === 'own' ? `chosen over ${kept}` : `${kept} chosen over ${texts}`).slice(0, 500),
   };
-  const decided: LoggedOperation = { sheetId: entry.sheetId, operation, state: 'waiting' };
+  const { sheetId, jobId, sheetTitle } = entry;
+  const decided: LoggedOperation = { sheetId, jobId, sheetTitle, operation, state: 'waiting' };
   const others = choice === 'server' ? log.filter((candidate) => candidate === entry || !own.includes(candidate)) : log;
   return others.map((candidate) => (candidate === entry ? decided : candidate));
 }

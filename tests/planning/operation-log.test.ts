@@ -17,6 +17,8 @@ import type { OperationAnswer, ReadingOperation } from '@/lib/schemas/operation'
 
 const change = (opId: string, cellId: string, text: string, seq: number, base: number): LoggedOperation => ({
   sheetId: 'sheet',
+  jobId: 'job',
+  sheetTitle: 'Nose run-out',
   state: 'waiting',
   operation: {
     opId,

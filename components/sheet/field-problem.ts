@@ -1,0 +1,27 @@
+import type { CellPointer, Field } from '@/lib/sheet/types';
+import type { Evaluated } from './sheet-session';
+
+export const notReadYet = 'Not read yet.';
+
+/**
+ * What is said at a field, and in the same words in the summary. The first letter tells the kind: `!` cannot be read, `?` unusual,
+ * `-` missing; a plain text, so that a field is drawn again only when it changes. '' for nothing.
+ */
+export function problemAt(
+  { fields, outcome, problems }: Evaluated,
+  pointer: CellPointer,
+  options: { checked: boolean; confirmed: ReadonlySet<CellPointer>; text: string },
+): string {
+  const problem = problems.get(pointer);
+  if (problem?.severity === 'cannot-read') return `!${problem.message}`;
+  if (problem && !options.confirmed.has(pointer)) return `?${problem.message}`;
+  const missing = options.checked && options.text.trim() === '' && fields.order.includes(pointer);
+  return missing && outcome.filled < outcome.total ? `-${notReadYet}` : '';
+}
+
+export const problemId = (passId: string, pointer: CellPointer) => `problem-${passId}${pointer.replaceAll('/', '-')}`;
+export const fieldId = (passId: string, pointer: CellPointer) => `field-${passId}${pointer.replaceAll('/', '-')}`;
+
+/** Test, place and unit: an input that is read out alone says where it belongs. */
+export const fieldLabel = (title: string, field: Field) =>
+  [title, field.label, field.unit].filter((part) => part !== null).join(' – ');

@@ -1,0 +1,57 @@
+'use client';
+
+import { Plot } from '@/components/plots/plot';
+import { LimitRule } from '@/components/ui/limit-rule';
+import { VerdictMark } from '@/components/ui/verdict-mark';
+import { VERDICT_WORDS } from '@/lib/reporting/words';
+import type { SheetRules } from '@/lib/sheet/types';
+import { convert } from '@/lib/units/convert';
+import { isJudged, resultWords } from './result-words';
+import { useEvaluated, useOpenPass } from './sheet-context';
+
+/** The plot, drawn again with every reading; nothing where a method has none. */
+export function LivePlot({ widthPx, heightPx }: { widthPx: number; heightPx: number }) {
+  const { session, passId } = useOpenPass();
+  const outcome = useEvaluated(session, passId, (evaluated) => evaluated.outcome);
+  const series = outcome.state === 'empty' ? null : outcome.plot;
+  if (!series) return null;
+  const toleranceUm = isJudged(outcome) ? outcome.judgement.toleranceUm : null;
+  return <Plot series={series} toleranceUm={toleranceUm} widthPx={widthPx} heightPx={heightPx} />;
+}
+
+/** Limit rule, verdict in words and the distance to the limit. */
+export function LiveResult({ rules, signed }: { rules: SheetRules; signed: boolean }) {
+  const { session, passId } = useOpenPass();
+  const outcome = useEvaluated(session, passId, (evaluated) => evaluated.outcome);
+  const judged = isJudged(outcome) ? outcome : null;
+  const words = resultWords(outcome);
+  const local = judged?.judgement.local;
+  return (
+    <div className="grid gap-1">
+      <LimitRule
+        deviationUm={judged?.result.deviation ?? null}
+        toleranceUm={judged ? judged.judgement.toleranceUm : (rules.tolerance?.baseUm ?? null)}
+        direction={judged?.judgement.direction ?? (signed ? rules.direction : 'either')}
+        signed={judged?.result.signed ?? signed}
+        verdict={judged?.judgement.verdict ?? null}
+        shown={judged?.displayed.textMm ?? null}
+        widthPx={620}
+      />
+      <p className="flex flex-wrap items-baseline gap-x-4 gap-y-1">
+        <VerdictMark verdict={words.mark} words={words.verdict} className="text-lg leading-6" />
+        <span className="text-ink2">{words.beside}</span>
+      </p>
+      {local && (
+        <p className="text-sm text-ink2">
+          Over any {local.lengthMm} mm: {convert(local.deviationUm, 'µm', 'mm')} mm of{' '}
+          {convert(local.toleranceUm, 'µm', 'mm')} mm, {VERDICT_WORDS[local.verdict]}
+        </p>
+      )}
+      {judged?.judgement.toleranceArithmetic && (
+        <p className="text-sm text-ink2">
+          T, µm: <span className="font-mono">{judged.judgement.toleranceArithmetic}</span>
+        </p>
+      )}
+    </div>
+  );
+}

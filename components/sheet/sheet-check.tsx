@@ -1,0 +1,128 @@
+'use client';
+
+import { type RefObject, useMemo } from 'react';
+import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
+import { VerdictMark } from '@/components/ui/verdict-mark';
+import { convert } from '@/lib/units/convert';
+import { isJudged, resultWords } from './result-words';
+import { useEvaluated, useOpenPass } from './sheet-context';
+import { passWords, type SheetData, type SheetPass } from './sheet-data';
+import { type SheetFinding, sheetFindings } from './sheet-findings';
+import type { SheetSession } from './sheet-session';
+
+/** The whole sheet on one look: what is missing, with the way to it, and what every set of readings comes to. */
+export function SheetCheck(props: {
+  data: SheetData;
+  passes: SheetPass[];
+  pass: SheetPass;
+  remark: string | null;
+  headingRef: RefObject<HTMLHeadingElement | null>;
+  onClose: () => void;
+}) {
+  const { data, passes, pass, remark, headingRef, onClose } = props;
+  const { session, passId, confirmed } = useOpenPass();
+  const evaluated = useEvaluated(session, passId, (now) => now);
+  const findings = useMemo(
+    () =>
+      sheetFindings({
+        evaluated,
+        pass,
+        passes,
+        instruments: data.instruments,
+        confirmed,
+        remark,
+        textOf: (pointer) => session.textOf(passId, pointer),
+        today: data.readAt,
+      }),
+    [evaluated, pass, passes, data, confirmed, remark, session, passId],
+  );
+  const missing = findings.filter(({ weight }) => weight === 'missing');
+  const look = findings.filter(({ weight }) => weight === 'look');
+  return (
+    <section aria-labelledby="sheet-check" className="mb-5 border-[1.5px] border-ink bg-leaf px-5 py-4">
+      <div className="flex items-start justify-between gap-4">
+        <h2 id="sheet-check" ref={headingRef} tabIndex={-1} className="text-lg font-semibold outline-none">
+          {missing.length === 0
+            ? `Nothing is missing in the readings ${passWords(pass)}`
+            : `${missing.length === 1 ? '1 thing is' : `${missing.length} things are`} missing in the readings ${passWords(pass)}`}
+        </h2>
+        <button type="button" className="min-h-12 px-2 text-blue underline" onClick={onClose}>
+          Close the check
+        </button>
+      </div>
+      <Findings findings={missing} ink="border-oxide" />
+      {look.length > 0 && <p className="mt-2 font-medium text-brass">To be looked at</p>}
+      <Findings findings={look} ink="border-brass" />
+      <PassResults session={session} passes={passes} />
+    </section>
+  );
+}
+
+function Findings({ findings, ink }: { findings: SheetFinding[]; ink: string }) {
+  const { session, passId } = useOpenPass();
+  if (findings.length === 0) return null;
+  return (
+    <ul className="mt-1 grid gap-0.5">
+      {findings.map(({ label, message, pointer }) => (
+        <li key={`${label}${message}${pointer}`} className={`border-l-4 pl-3 ${ink}`}>
+          {pointer ? (
+            <button
+              type="button"
+              className="min-h-9 text-left underline"
+              onClick={() => session.inputOf(passId, pointer)?.focus()}
+            >
+              {label}: {message}
+            </button>
+          ) : (
+            <span className="flex min-h-9 items-center">
+              {label}: {message}
+            </span>
+          )}
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+function PassResults({ session, passes }: { session: SheetSession; passes: SheetPass[] }) {
+  return (
+    <div className="mt-4">
+      <Table caption="What every set of readings comes to">
+        <TableHead>
+          <HeadCell>Set of readings</HeadCell>
+          <HeadCell figure>result, mm</HeadCell>
+          <HeadCell figure>T, mm</HeadCell>
+          <HeadCell figure>readings</HeadCell>
+          <HeadCell>verdict</HeadCell>
+        </TableHead>
+        <tbody>
+          {passes.map((pass) => (
+            <PassResult key={pass.id} session={session} pass={pass} />
+          ))}
+        </tbody>
+      </Table>
+    </div>
+  );
+}
+
+function PassResult({ session, pass }: { session: SheetSession; pass: SheetPass }) {
+  const outcome = useEvaluated(session, pass.linkedTo ?? pass.id, (evaluated) => evaluated.outcome);
+  const judged = isJudged(outcome) ? outcome : null;
+  const words = resultWords(outcome);
+  return (
+    <Row>
+      <RowHead>{pass.linkedTo ? `${passWords(pass)} = as found` : passWords(pass)}</RowHead>
+      <DataCell figure>{judged ? judged.displayed.textMm.replace('-', '−') : '–'}</DataCell>
+      <DataCell figure>
+        {judged?.judgement.toleranceUm ? convert(judged.judgement.toleranceUm, 'µm', 'mm') : '–'}
+      </DataCell>
+      <DataCell figure>
+        {outcome.filled} of {outcome.total}
+      </DataCell>
+      <DataCell>
+        <VerdictMark verdict={words.mark} words={words.verdict} />
+        {words.beside && <span className="block text-sm text-ink2">{words.beside}</span>}
+      </DataCell>
+    </Row>
+  );
+}

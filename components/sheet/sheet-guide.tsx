@@ -1,0 +1,73 @@
+'use client';
+
+import { SetUpSketch } from '@/components/sketches/set-up-sketch';
+import { provenanceWords } from './provenance-words';
+import type { SheetData } from './sheet-data';
+import { toleranceWords } from './tolerance-words';
+
+/** Where the sheet stands and what it is called; then sketch and cautions, before the first reading. */
+export function SheetHead({ data }: { data: SheetData }) {
+  const { sheet, neighbours, place, definition, cautions } = data;
+  return (
+    <>
+      <div>
+        <p className="text-[15px] text-ink2">
+          {sheet.position} of {neighbours.count} · {place}
+        </p>
+        <h1 className="text-2xl font-semibold leading-tight">{sheet.title}</h1>
+      </div>
+      <div className="grid gap-4 sm:max-lg:grid-cols-2">
+        <SetUpSketch spec={definition.sketch} component={sheet.component} />
+        <div role="note" aria-label="Cautions" className="self-start border-l-4 border-brass bg-brass-wash px-4 py-3">
+          <ul className="grid gap-1.5 text-[15px] leading-snug">
+            {cautions.map((caution) => (
+              <li key={caution}>{caution}</li>
+            ))}
+          </ul>
+        </div>
+      </div>
+    </>
+  );
+}
+
+/** How it is done, how large the deviation may be, and where both come from. */
+export function SheetBackground({ data }: { data: SheetData }) {
+  const { definition, rules, codeTitle } = data;
+  const { tolerance } = rules;
+  return (
+    <div className="grid gap-3">
+      <details className="border-y border-line">
+        <summary className="flex min-h-12 items-center font-semibold">
+          <span className="mr-2" aria-hidden="true">
+            ▸
+          </span>
+          How it is measured, {definition.procedure.length} steps
+        </summary>
+        <ol className="mb-3 grid list-decimal gap-1.5 pl-6 text-[15px] leading-snug marker:text-ink2">
+          {definition.procedure.map((step) => (
+            <li key={step}>{step}</li>
+          ))}
+        </ol>
+      </details>
+      <section aria-labelledby="tolerance" className="text-[15px] leading-snug text-ink2">
+        <h2 id="tolerance" className="text-base font-semibold text-ink">
+          {toleranceWords(tolerance, rules.direction)}
+        </h2>
+        {tolerance && (
+          <p>
+            {tolerance.foundBy} ·{' '}
+            <span className={tolerance.provenance.kind === 'from-memory' ? 'font-medium text-brass' : ''}>
+              {provenanceWords(tolerance.provenance)}
+            </span>
+            : {tolerance.provenance.text}
+          </p>
+        )}
+        <p className="mt-1.5">Judged: {definition.judgedFigure}.</p>
+        <p className="mt-1.5">
+          {codeTitle}, own id <span className="font-mono">{definition.id}</span> · {provenanceWords(definition.source)}:{' '}
+          {definition.source.text}
+        </p>
+      </section>
+    </div>
+  );
+}
