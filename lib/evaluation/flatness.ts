@@ -84,7 +84,8 @@ function planeOfThree({ x, y, z }: Cloud, three: readonly number[]): Plane {
   return solution ? positive(solution) : refuse(['three'], 'the three points lie on one line');
 }
 
-function leastSquaresPlane({ x, y, z }: Cloud): Plane | null {
+/** Unweighted least squares in the reading direction; null where all points lie on one line. */
+export function leastSquaresPlane({ x, y, z }: Cloud): Plane | null {
   const sum = (of: (i: number) => bigint) => x.reduce((total, _, i) => total + of(i), 0n);
   const [sx, sy] = [sum((i) => x[i]!), sum((i) => y[i]!)];
   const sxy = sum((i) => x[i]! * y[i]!);
