@@ -6,6 +6,21 @@ const config = {
   turbopack: { root: import.meta.dirname },
   outputFileTracingRoot: import.meta.dirname,
   serverExternalPackages: ['knex', 'pg', '@node-rs/argon2', 'nodemailer'],
+  headers: async () => [
+    {
+      source: '/:path*',
+      headers: [
+        { key: 'x-content-type-options', value: 'nosniff' },
+        { key: 'referrer-policy', value: 'same-origin' },
+        { key: 'x-frame-options', value: 'DENY' },
+        {
+          key: 'content-security-policy',
+          value: "object-src 'none'; base-uri 'none'; frame-ancestors 'none'; form-action 'self'",
+        },
+        { key: 'permissions-policy', value: 'geolocation=(), microphone=(), payment=()' },
+      ],
+    },
+  ],
   env: { NEXT_PUBLIC_VERSION: process.env.npm_package_version ?? '' },
 };
 
