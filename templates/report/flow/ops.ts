@@ -69,6 +69,26 @@ export function beside(placed: readonly { slab: Slab; x: number }[]): Slab {
   };
 }
 
+/** Flowing items as one piece that is not split. */
+export function asSlab(items: readonly FlowItem[]): Slab {
+  const ops: Op[] = [];
+  let y = 0;
+  for (const item of items) {
+    for (const slab of slabsOf(item)) {
+      ops.push(moved(slab, 0, y));
+      y += slab.heightPt;
+    }
+    if (item.kind === 'space') y += item.heightPt;
+  }
+  return { heightPt: y, ops };
+}
+
+function slabsOf(item: FlowItem): readonly Slab[] {
+  if (item.kind === 'slab') return [item.slab];
+  if (item.kind === 'rows') return item.header ? [item.header, ...item.rows] : item.rows;
+  return item.kind === 'together' ? [asSlab(item.items)] : [];
+}
+
 export function ruleLine(widthPt: number, ink: Ink = 'ink', lineWidthPt = 1): Slab {
   return {
     heightPt: lineWidthPt,

@@ -14,14 +14,26 @@ export interface Kit {
 
 const MARK_PT = 22;
 
-/** A section's heading under a line over the whole width; stays with what follows. */
-export function heading(kit: Kit, words: string, more: { bookmark?: string; right?: string } = {}): FlowItem[] {
-  const right = more.right ? kit.type.line(more.right, TYPE.code, kit.widthPt, 'end') : null;
-  const room = right && more.right ? kit.widthPt - kit.type.width(more.right, TYPE.code) - 14 : kit.widthPt;
-  const title = kit.type.paragraph(words, TYPE.heading, room);
-  const ops: Op[] = [...ruleLine(kit.widthPt).ops, moved(title, 0, 8), ...(right ? [moved(right, 0, 10)] : [])];
-  const slab = { heightPt: title.heightPt + 13, ops };
-  return [space(18), slabItem(slab, { keepWithNext: true, bookmark: more.bookmark ?? words })];
+/**
+ * A section's heading under a line over the whole width; stays with what follows. `after` stands behind the title where it fits, else
+ * below it; `right` at the right end.
+ */
+export function heading(kit: Kit, words: string, more: { after?: string; right?: string } = {}): FlowItem[] {
+  const { type, widthPt } = kit;
+  const code = more.right ?? '';
+  const room = code ? widthPt - type.width(code, TYPE.code) - 14 : widthPt;
+  const title = type.paragraph(words, TYPE.heading, room);
+  const ops: Op[] = [...ruleLine(widthPt).ops, moved(title, 0, 8)];
+  if (code) ops.push(moved(type.line(code, TYPE.code, widthPt, 'end'), 0, 10));
+  let heightPt = title.heightPt + 12;
+  if (more.after) {
+    const behind = type.width(words, TYPE.heading) + 10;
+    const fits = behind + type.width(more.after, TYPE.quiet) <= room;
+    const after = type.paragraph(more.after, TYPE.quiet, fits ? room - behind : widthPt);
+    ops.push(moved(after, fits ? behind : 0, fits ? 10.4 : heightPt - 3));
+    if (!fits) heightPt += after.heightPt;
+  }
+  return [space(15), slabItem({ heightPt, ops }, { keepWithNext: true, bookmark: words })];
 }
 
 /** Words that may go over several pages. */
@@ -43,13 +55,14 @@ export function markedWords(kit: Kit, kind: MarkKind, words: string, style: Text
 export function pairs(
   kit: Kit,
   entries: readonly { label: string; value: string }[],
-  options: { columns: number; labelPt: number },
+  options: { columns: number; labelPt: number; small?: boolean },
 ): FlowItem {
   const gap = 18;
+  const [quiet, body] = options.small ? [TYPE.small, { ...TYPE.small, ink: 'ink' as const }] : [TYPE.quiet, TYPE.body];
   const columnPt = (kit.widthPt - gap * (options.columns - 1)) / options.columns;
   const slabs = entries.map(({ label, value }): Slab => {
-    const name = kit.type.paragraph(label, TYPE.quiet, options.labelPt - 6);
-    const words = kit.type.paragraph(value, TYPE.body, columnPt - options.labelPt);
+    const name = kit.type.paragraph(label, quiet, options.labelPt - 6);
+    const words = kit.type.paragraph(value, body, columnPt - options.labelPt);
     return {
       heightPt: Math.max(name.heightPt, words.heightPt) + 1.5,
       ops: [moved(name, 0, 0), moved(words, options.labelPt, 0)],

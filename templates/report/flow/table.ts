@@ -8,6 +8,8 @@ export interface Column {
   /** decimal: figures of the column stand with their decimal marks below each other, at the right. */
   align?: 'left' | 'right' | 'decimal';
   style?: TextStyle;
+  /** Room between the column before and this one. */
+  gapPt?: number;
 }
 
 /** A cell: words, a figure, or something drawn. */
@@ -132,7 +134,9 @@ function mostDecimals(cells: readonly TableCell[]): number {
 }
 
 export const tableWidth = (columns: readonly Column[]) =>
-  columns.reduce((sum, column) => sum + column.widthPt, 0) + GAP_PT * Math.max(0, columns.length - 1);
+  columns.reduce((sum, column, index) => sum + column.widthPt + gapBefore(column, index), 0);
+
+const gapBefore = (column: Column, index: number) => (index === 0 ? 0 : (column.gapPt ?? GAP_PT));
 
 /** Width that a column needs so that none of its cells is broken. */
 export function naturalWidth(
@@ -151,9 +155,9 @@ const inner = (column: Column) => column.widthPt - 2 * PAD_X_PT;
 
 function lefts(columns: readonly Column[]): number[] {
   let x = 0;
-  return columns.map((column) => {
-    const left = x;
-    x += column.widthPt + GAP_PT;
+  return columns.map((column, index) => {
+    const left = x + gapBefore(column, index);
+    x = left + column.widthPt;
     return left;
   });
 }

@@ -12,7 +12,7 @@ export function instruments(kit: Kit, model: ReportModel): FlowItem[] {
   const words = REPORT_WORDS.instruments;
   const fixed: Column[] = [
     { head: words.resolution, widthPt: 46, style: TYPE.figure },
-    { head: words.uncertainty, widthPt: 90, style: TYPE.figure },
+    { head: words.uncertainty, widthPt: 102, style: TYPE.figure },
     { head: words.certificate, widthPt: 56, style: TYPE.figure },
     { head: words.calibrated, widthPt: 58, style: TYPE.figure },
     { head: words.due, widthPt: 58, style: TYPE.figure },
@@ -33,7 +33,7 @@ export function instruments(kit: Kit, model: ReportModel): FlowItem[] {
   const overrides = model.instruments.flatMap((i) => (i.override ? [`${i.number}: ${sentence(i.override)}.`] : []));
   return [
     ...heading(kit, words.heading),
-    table(kit.type, [number, name, ...fixed], rows),
+    { ...table(kit.type, [number, name, ...fixed], rows), keepWithNext: overrides.length > 0 },
     ...overrides.flatMap((text) => [space(4), flowingText(kit, text)]),
   ];
 }

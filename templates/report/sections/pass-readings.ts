@@ -1,28 +1,36 @@
 import type { PassBlock } from '@/lib/reporting/report-model';
 import { longDate } from '@/lib/reporting/report-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
-import { type FlowItem, heightOf, moved, type Op, type Slab, slabItem, space } from '@/templates/report/flow/ops';
+import {
+  asSlab,
+  beside,
+  type FlowItem,
+  heightOf,
+  moved,
+  type Slab,
+  slabItem,
+  space,
+} from '@/templates/report/flow/ops';
 import { type Kit, markedWords } from '@/templates/report/flow/parts';
 import { passTables, passWidth } from '@/templates/report/sections/pass-tables';
 import { TYPE } from '@/templates/report/theme';
 
-const GAP_PT = 24;
+const GAP_PT = 14;
 /** Two passes stand beside each other up to this height; higher ones below each other, where they can be split. */
 const BESIDE_PT = 320;
 
-/** As found and as left beside each other where they fit, adjusting ones in a line each. */
+/** As found and as left beside each other where they fit; adjusting ones, and an as left that is as found, in a line each. */
 export function passReadings(kit: Kit, passes: readonly PassBlock[]): FlowItem[] {
-  const full = passes.filter((pass) => pass.kind !== 'adjusting');
+  const full = passes.filter((pass) => pass.kind !== 'adjusting' && !pass.linkedWords);
   const half = (kit.widthPt - GAP_PT) / 2;
   const narrow = full.every((pass) => passWidth(kit, pass) <= half);
   const columns = full.map((pass) => onePass(kit, pass, half));
-  const beside = full.length === 2 && narrow && Math.max(...columns.map(heightOf)) <= BESIDE_PT;
-  const readings = beside
-    ? [slabItem(besideEachOther(columns, half))]
+  const sideBySide = full.length === 2 && narrow && Math.max(...columns.map(heightOf)) <= BESIDE_PT;
+  const readings = sideBySide
+    ? [slabItem(beside(columns.map((items, index) => ({ slab: asSlab(items), x: index * (half + GAP_PT) }))))]
     : full.flatMap((pass, index) => [...(index ? [space(8)] : []), ...onePass(kit, pass, kit.widthPt)]);
-  const adjusting = passes.filter((pass) => pass.kind === 'adjusting');
-  const short = adjusting.flatMap((pass) => [space(2), slabItem(adjustingLine(kit, pass))]);
-  return [...readings, ...(short.length ? [space(3), ...short] : [])];
+  const short = passes.filter((pass) => !full.includes(pass));
+  return [...readings, ...short.flatMap((pass) => [space(4), slabItem(shortPass(kit, pass))])];
 }
 
 function onePass(kit: Kit, pass: PassBlock, widthPt: number): FlowItem[] {
@@ -38,7 +46,6 @@ function onePass(kit: Kit, pass: PassBlock, widthPt: number): FlowItem[] {
     ops: [...head.ops, moved(details, after, 0)],
   };
   const items: FlowItem[] = [slabItem(title, { keepWithNext: true })];
-  if (pass.linkedWords) items.push(slabItem(type.paragraph(pass.linkedWords, TYPE.body, widthPt)));
   if (pass.setUp.length) {
     const setUp = pass.setUp.map(({ label, value }) => `${label} ${value}`).join(' · ');
     items.push(
@@ -59,42 +66,16 @@ function resultLine(kit: Kit, pass: PassBlock, widthPt: number): Slab {
   return { heightPt: line.heightPt + below.heightPt + 1, ops: [...line.ops, moved(below, 0, line.heightPt + 1)] };
 }
 
-function adjustingLine(kit: Kit, pass: PassBlock): Slab {
+/** What was done in a line: result, when, by whom. */
+function shortPass(kit: Kit, pass: PassBlock): Slab {
   const verdict = pass.judgement?.verdict ?? 'not-measured';
   const result =
     pass.resultMm === null ? REPORT_WORDS.block.noResult : `${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`;
-  const details = [pass.takenAt ? longDate(pass.takenAt) : '', pass.by ?? ''].filter((part) => part !== '');
-  const name = kit.type.line(pass.kindWords, TYPE.quiet);
-  const left = Math.max(92, kit.type.width(pass.kindWords, TYPE.quiet) + 10);
-  const words = markedWords(
-    kit,
-    verdict,
-    [result, ...details].join(' · '),
-    { ...TYPE.body, face: 'sansMedium' },
-    kit.widthPt - left,
-  );
+  const taken = [pass.takenAt ? longDate(pass.takenAt) : '', pass.by ?? ''];
+  const details = pass.linkedWords ? [pass.linkedWords] : taken.filter((part) => part !== '');
+  const name = kit.type.line(pass.kindWords, TYPE.strong);
+  const left = kit.type.width(pass.kindWords, TYPE.strong) + 10;
+  const style = { ...TYPE.body, face: 'sansMedium' as const };
+  const words = markedWords(kit, verdict, [result, ...details].join(' · '), style, kit.widthPt - left);
   return { heightPt: words.heightPt, ops: [...name.ops, moved(words, left, 0)] };
-}
-
-/** Both columns in one piece, heads and results on the same lines. */
-function besideEachOther(columns: readonly FlowItem[][], widthPt: number): Slab {
-  const ops: Op[] = columns.map((items, index) => {
-    const own: Op[] = [];
-    let y = 0;
-    for (const item of items) {
-      for (const slab of slabsOf(item)) {
-        own.push(moved(slab, 0, y));
-        y += slab.heightPt;
-      }
-      if (item.kind === 'space') y += item.heightPt;
-    }
-    return { op: 'group', x: index * (widthPt + GAP_PT), y: 0, ops: own };
-  });
-  return { heightPt: Math.max(...columns.map(heightOf)), ops };
-}
-
-function slabsOf(item: FlowItem): readonly Slab[] {
-  if (item.kind === 'slab') return [item.slab];
-  if (item.kind === 'rows') return item.header ? [item.header, ...item.rows] : item.rows;
-  return item.kind === 'together' ? item.items.flatMap(slabsOf) : [];
 }

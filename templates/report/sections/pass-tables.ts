@@ -9,9 +9,9 @@ type ReadingTable = PassBlock['tables'][number];
 const ROW_LABEL = { ...TYPE.figureQuiet, sizePt: 8 };
 const READING = { ...TYPE.figure, sizePt: 8 };
 const TITLE = TYPE.small;
-const GAP_PT = 18;
+const GAP_PT = 14;
 /** A longer table of few columns is set in pieces beside each other. */
-const ROWS_BESIDE = 14;
+const ROWS_BESIDE = 8;
 
 /** The readings of a pass in a width: tables too wide are cut between columns, long narrow ones set in pieces beside each other. */
 export function passTables(kit: Kit, pass: PassBlock, widthPt: number): FlowItem[] {
@@ -53,7 +53,13 @@ function columnsOf(kit: Kit, readings: ReadingTable): Column[] {
   return heads.map((head, index): Column => {
     const style = index ? READING : ROW_LABEL;
     const cells = readings.rows.map((row) => (index ? (row.cells[index - 1] ?? '') : row.label));
-    return { head, widthPt: naturalWidth(kit.type, { head, style }, cells), align: index ? 'decimal' : 'left', style };
+    return {
+      head,
+      widthPt: naturalWidth(kit.type, { head, style }, cells),
+      align: index ? 'decimal' : 'left',
+      gapPt: 2,
+      style,
+    };
   });
 }
 

@@ -5,27 +5,58 @@ import { longDate, sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
 import { formatDecimal } from '@/lib/units/format';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
-import { type FlowItem, type Slab, slabItem, space } from '@/templates/report/flow/ops';
-import { heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
+import {
+  asSlab,
+  beside,
+  type FlowItem,
+  heightOf,
+  type Slab,
+  slabItem,
+  space,
+  stack,
+} from '@/templates/report/flow/ops';
+import { flowingText, heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
 import { type Column, table, tableWidth } from '@/templates/report/flow/table';
 import { passReadings } from '@/templates/report/sections/pass-readings';
-import { testPictures } from '@/templates/report/sections/test-pictures';
+import { plotsSlab, sketchSlab } from '@/templates/report/sections/test-pictures';
 import { TYPE } from '@/templates/report/theme';
 
-/** Everything about one test: set-up, plots, readings, the limit rule of the final result, what was judged by what. */
+const SIDE_PT = 165;
+const GUTTER_PT = 18;
+/** Readings stand beside the sketch up to this height; longer ones go below, over the whole width, where they can be split. */
+const READINGS_BESIDE_PT = 260;
+
+/**
+ * Everything about one test: at the left the set-up and what is judged by what, at the right plots and readings; below them the limit
+ * rule of the final result over the whole width.
+ */
 export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
-  const title = `${block.order} · ${block.title}`;
-  const head = heading(kit, title, { right: block.reference });
-  const component = kit.type.paragraph(block.componentWords, TYPE.quiet, kit.widthPt);
-  const items: FlowItem[] = [slabItem(component, { keepWithNext: true }), space(6)];
+  const head = heading(kit, `${block.order} · ${block.title}`, { after: block.componentWords, right: block.reference });
+  const items: FlowItem[] = [space(2)];
   if (block.leftOut) items.push(slabItem(leftOutLine(kit, block.leftOut)));
-  else {
-    items.push(slabItem(testPictures(kit, block), { keepWithNext: true }), space(6));
-    items.push(...passReadings(kit, block.passes), ...finalResult(kit, block));
-  }
-  items.push(space(4), pairs(kit, details(block), { columns: 1, labelPt: 66 }), ...corrections(kit, block));
-  const [gap, titled] = head;
-  return [gap as FlowItem, { kind: 'together', items: [titled as FlowItem, ...items] }];
+  else items.push(...measured(kit, block));
+  if (block.remark) items.push(space(4), flowingText(kit, `${REPORT_WORDS.block.remark}: ${block.remark}`));
+  const [gap, titled] = head as [FlowItem, FlowItem];
+  return [gap, { kind: 'together', items: [titled, ...items, ...corrections(kit, block)] }];
+}
+
+function measured(kit: Kit, block: TestBlock): FlowItem[] {
+  const side: Kit = { ...kit, widthPt: SIDE_PT };
+  const main: Kit = { ...kit, widthPt: kit.widthPt - SIDE_PT - GUTTER_PT };
+  const plots = plotsSlab(main, block);
+  const besidePlots = passReadings(main, block.passes);
+  const fits = heightOf(besidePlots) <= READINGS_BESIDE_PT;
+  const left = stack(
+    [sketchSlab(side, block), asSlab([pairs(side, details(block), { columns: 1, labelPt: 52, small: true })])],
+    4,
+  );
+  const right = stack([...(plots ? [plots] : []), ...(fits ? [asSlab(besidePlots)] : [])], 6);
+  const pictures = beside([
+    { slab: left, x: 0 },
+    { slab: right, x: SIDE_PT + GUTTER_PT },
+  ]);
+  const below = fits ? [] : [space(6), ...passReadings(kit, block.passes)];
+  return [slabItem(pictures, { keepWithNext: true }), ...below, ...finalResult(kit, block)];
 }
 
 function leftOutLine(kit: Kit, leftOut: NonNullable<TestBlock['leftOut']>): Slab {
@@ -77,7 +108,7 @@ function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
     space(6),
     slabItem(drawingSlab(kit.type, rule, kit.widthPt), { keepWithNext: true }),
     space(2),
-    slabItem(line, { keepWithNext: true }),
+    slabItem(line),
   ];
 }
 
@@ -96,7 +127,6 @@ function details(block: TestBlock): { label: string; value: string }[] {
     [words.source, block.toleranceSource],
     [words.direction, block.directionWords],
     [words.instruments, block.instruments.join(' · ')],
-    [words.remark, block.remark],
   ];
   return entries.flatMap(([label, value]) => (value ? [{ label, value }] : []));
 }

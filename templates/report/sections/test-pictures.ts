@@ -6,20 +6,25 @@ import { beside, type Slab, stack } from '@/templates/report/flow/ops';
 import type { Kit } from '@/templates/report/flow/parts';
 import { TYPE } from '@/templates/report/theme';
 
-const GAP_PT = 16;
+const GAP_PT = 14;
 
-/** The set-up at the left; beside it the plot as left, or as found and as left where both were measured. */
-export function testPictures(kit: Kit, block: TestBlock): Slab {
+export function sketchSlab(kit: Kit, block: TestBlock): Slab {
+  return drawingSlab(
+    kit.type,
+    setUpSketch(block.sketch, block.component, { widthPx: 360, heightPx: 234 }),
+    kit.widthPt,
+  );
+}
+
+/** Plot as found, as left, or both beside each other; null where no pass has one. */
+export function plotsSlab(kit: Kit, block: TestBlock): Slab | null {
   const plotted = block.passes.filter((pass) => pass.plot && pass.kind !== 'adjusting').slice(-2);
-  const sketchPt = 165;
-  const sketch = setUpSketch(block.sketch, block.component, { widthPx: 360, heightPx: 234 });
-  const pictures = [{ slab: drawingSlab(kit.type, sketch, sketchPt), x: 0 }];
-  const widthPt = (kit.widthPt - sketchPt - GAP_PT * plotted.length) / Math.max(1, plotted.length);
-  const size = plotted.length === 2 ? { widthPx: 300, heightPx: 190 } : { widthPx: 560, heightPx: 184 };
-  plotted.forEach((pass, index) => {
-    pictures.push({ slab: plotSlab(kit, pass, widthPt, size), x: sketchPt + GAP_PT + index * (widthPt + GAP_PT) });
-  });
-  return beside(pictures);
+  if (!plotted.length) return null;
+  const widthPt = (kit.widthPt - GAP_PT * (plotted.length - 1)) / plotted.length;
+  const size = plotted.length === 2 ? { widthPx: 300, heightPx: 176 } : { widthPx: 560, heightPx: 160 };
+  return beside(
+    plotted.map((pass, index) => ({ slab: plotSlab(kit, pass, widthPt, size), x: index * (widthPt + GAP_PT) })),
+  );
 }
 
 function plotSlab(kit: Kit, pass: PassBlock, widthPt: number, size: { widthPx: number; heightPx: number }): Slab {
