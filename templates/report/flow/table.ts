@@ -31,7 +31,7 @@ export function table(
   columns: readonly Column[],
   rows: readonly TableCell[][],
   density: Density = 'open',
-): FlowItem {
+): Extract<FlowItem, { kind: 'rows' }> {
   return { kind: 'rows', header: headerRow(type, columns), rows: tableRows(type, columns, rows, density) };
 }
 
