@@ -78,9 +78,23 @@ export function trigFraction(value: bigint): Fraction {
   return Fraction.of(divideHalfEven(value * scale, TRIG_ONE), scale);
 }
 
-/** Angle in degrees, 0 ≤ φ < 360, of the vector (a, b). */
+/**
+ * Angle in degrees, 0 ≤ φ < 360, of the vector (a, b) of length > 0. Begun at a coarse angle; what is left of it after
+ * turning the vector back, below 10^-10, is taken by the series of the arc tangent, so nothing of the start remains.
+ */
 export function angleOf(a: Dec, b: Dec): Dec {
-  const degrees = Dec.atan2(b, a).times(180).div(PI);
+  const length = a.times(a).plus(b.times(b)).sqrt();
+  const coarse = (Math.atan2(b.div(length).toNumber(), a.div(length).toNumber()) * 180) / Math.PI;
+  const start = coarse.toFixed(10);
+  const { cos, sin } = directionOf(Fraction.from(start));
+  const [c, s] = [new Dec(cos.toString()), new Dec(sin.toString())];
+  const rest = b
+    .times(c)
+    .minus(a.times(s))
+    .div(a.times(c).plus(b.times(s)));
+  const cube = rest.times(rest).times(rest);
+  const radians = rest.minus(cube.div(3)).plus(cube.times(rest).times(rest).div(5));
+  const degrees = radians.times(180).div(PI).plus(start);
   const turned = degrees.isNegative() && !degrees.isZero() ? degrees.plus(360) : degrees;
   return turned.toSignificantDigits(40).gte(360) ? new Dec(0) : turned;
 }

@@ -201,9 +201,9 @@ export class Fraction {
     return divisor > 1n ? new Fraction(this.n / divisor, this.d / divisor) : this;
   }
 
+  /** Exact where 50 digits hold it, else rounded to them. */
   toDec(): Dec {
-    const { n, d } = this.reduced();
-    return new Dec(n.toString()).div(d.toString());
+    return new Dec(this.n.toString()).div(this.d.toString());
   }
 
   /** Square root: exact where it is rational, otherwise to the working precision. Throws below zero. */

@@ -134,6 +134,20 @@ describe('methods by hand', () => {
     expect(evaluate({ method: 'run-out', angles, insertions, judge: 'largest' }).deviation).toBe('10');
   });
 
+  it.each([
+    ['0', '1', '0', '-1', '90'],
+    ['1', '0', '-1', '0', '0'],
+    ['0', '-1', '0', '1', '270'],
+    ['-1', '0', '1', '0', '180'],
+    ['1', '1', '-1', '-1', '45'],
+    ['2', '1', '-2', '-1', '26.5650511770779893515721937205'],
+    ['1', '-1e-40', '-1', '1e-40', '0'],
+  ])('phase of readings %s, %s, %s, %s is %s°', (r0, r90, r180, r270, phase) => {
+    const angles = ['0', '90', '180', '270'];
+    const result = evaluate({ method: 'run-out', angles, insertions: [{ readings: [r0, r90, r180, r270] }] });
+    expect(new Dec(result.phase!).minus(phase).abs().lt('1e-27')).toBe(true);
+  });
+
   it('phase stays below 360', () => {
     const result = evaluate({
       method: 'run-out',
