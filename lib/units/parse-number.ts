@@ -19,6 +19,8 @@ const SPELLINGS: Readonly<Record<string, Unit>> = {
 };
 
 const MAX_LENGTH = 60;
+/** What nearly every reading looks like; all other rules only decide about the rest. */
+const PLAIN = /^([-+\u2212\u2013]?)(\d{1,25})(?:[.,](\d{1,25}))?$/;
 // Format characters and control characters an instrument's cable or the clipboard leaves behind.
 const INVISIBLE = /(?![\t-\r\u0085])[\p{Cc}\p{Cf}]/gu;
 // Line and column breaks separate values: they count as a space, so that two pasted values never melt into one.
@@ -40,6 +42,8 @@ const SHAPE = /^([+-]?) *([\d.,]*)(.*)$/s;
  * @example parseNumber('−0,003mm') → { ok: true, value: '-0.003', unit: 'mm', decimals: 3 }
  */
 export function parseNumber(text: string, opts: { defaultUnit?: Unit } = {}): ParsedNumber {
+  const usual = PLAIN.exec(text);
+  if (usual) return asRead(usual[1]!, usual[2]!, usual[3] ?? '', opts.defaultUnit ?? null);
   const visible = text.replace(INVISIBLE, '');
   const trimmed = visible.replace(/^[\s\u0085]+|[\s\u0085]+$/g, '');
   if (trimmed === '') return { ok: false, problem: 'Nothing is written here.' };
@@ -65,9 +69,13 @@ export function parseNumber(text: string, opts: { defaultUnit?: Unit } = {}): Pa
   if (unit === undefined) return { ok: false, problem: unitProblem(unitText) };
 
   const [whole = '', fraction = ''] = digits.split(/[.,]/);
+  return asRead(sign, whole, fraction, unit);
+}
+
+function asRead(sign: string, whole: string, fraction: string, unit: Unit | null): ParsedNumber {
   const plainWhole = whole.replace(/^0+(?=\d)/, '') || '0';
   const unsigned = fraction ? `${plainWhole}.${fraction}` : plainWhole;
-  const negative = sign === '-' && /[1-9]/.test(unsigned);
+  const negative = sign !== '' && sign !== '+' && /[1-9]/.test(unsigned);
   return { ok: true, value: negative ? `-${unsigned}` : unsigned, unit, decimals: fraction.length };
 }
 
