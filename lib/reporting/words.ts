@@ -187,7 +187,7 @@ export const REPORT_WORDS = {
     closed: 'Closed',
     open: 'open',
   },
-  signatures: { heading: 'Signatures', unsigned: 'not signed yet', drawn: 'drawn by hand', reason: 'Reason' },
+  signatures: { heading: 'Signatures', unsigned: 'not signed yet', reason: 'reason' },
   statement: 'Statement',
   monthNames: [
     'January',

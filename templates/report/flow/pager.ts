@@ -81,6 +81,8 @@ class Pager {
   }
 
   private put(slab: Slab, bookmark?: string): void {
+    if (slab.heightPt > this.heightPt)
+      throw new Error('A piece of the report that cannot be split is higher than a page');
     if (this.y > 0 && slab.heightPt > this.left()) this.newPage();
     if (bookmark) this.page().bookmarks.push({ title: bookmark, yPt: this.y });
     this.page().slabs.push({ slab, yPt: this.y });

@@ -1,7 +1,17 @@
 import { MARK_INK, type MarkKind } from '@/components/plots/verdict-ink';
 import { verdictMark } from '@/components/plots/verdict-mark-geometry';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
-import { type FlowItem, moved, type Op, ruleLine, type Slab, slabItem, space } from '@/templates/report/flow/ops';
+import {
+  beside,
+  type FlowItem,
+  moved,
+  type Op,
+  ruleLine,
+  type Slab,
+  slabItem,
+  space,
+  stack,
+} from '@/templates/report/flow/ops';
 import { lineMiddle } from '@/templates/report/flow/table';
 import type { Typesetter } from '@/templates/report/flow/typesetter';
 import { type TextStyle, TYPE } from '@/templates/report/theme';
@@ -51,7 +61,7 @@ export function markedWords(kit: Kit, kind: MarkKind, words: string, style: Text
   return { heightPt: text.heightPt, ops: [moved(mark, 0, top), moved(text, MARK_PT + 7, 0)] };
 }
 
-/** Pairs of a name and what it is, in columns; values broken to their column. */
+/** Pairs of a name and what it is, in columns; values broken to their column. In one column a value may go over several pages. */
 export function pairs(
   kit: Kit,
   entries: readonly { label: string; value: string }[],
@@ -60,21 +70,30 @@ export function pairs(
   const gap = 18;
   const [quiet, body] = options.small ? [TYPE.small, { ...TYPE.small, ink: 'ink' as const }] : [TYPE.quiet, TYPE.body];
   const columnPt = (kit.widthPt - gap * (options.columns - 1)) / options.columns;
-  const slabs = entries.map(({ label, value }): Slab => {
+  const slabs = entries.map(({ label, value }): Slab[] => {
     const name = kit.type.paragraph(label, quiet, options.labelPt - 6);
-    const words = kit.type.paragraph(value, body, columnPt - options.labelPt);
-    return {
-      heightPt: Math.max(name.heightPt, words.heightPt) + 1.5,
-      ops: [moved(name, 0, 0), moved(words, options.labelPt, 0)],
+    const lines = kit.type.lines(value, body, columnPt - options.labelPt).map((line): Slab => {
+      const set = kit.type.line(line, body);
+      return { ...set, ops: [moved(set, options.labelPt, 0)] };
+    });
+    const first: Slab = {
+      heightPt: Math.max(name.heightPt, body.leadPt),
+      ops: [...name.ops, ...(lines[0]?.ops ?? [])],
     };
+    return [first, ...lines.slice(1), { heightPt: 1.5, ops: [] }];
   });
+  if (options.columns === 1) return { kind: 'rows', header: null, rows: slabs.flatMap(joinLast) };
   const rows: Slab[] = [];
   for (let at = 0; at < slabs.length; at += options.columns) {
-    const row = slabs.slice(at, at + options.columns);
-    rows.push({
-      heightPt: Math.max(...row.map((slab) => slab.heightPt)),
-      ops: row.map((slab, index) => moved(slab, index * (columnPt + gap), 0)),
-    });
+    const row = slabs
+      .slice(at, at + options.columns)
+      .map((lines, index) => ({ slab: stack(lines), x: index * (columnPt + gap) }));
+    rows.push(beside(row));
   }
   return { kind: 'rows', header: null, rows };
+}
+
+/** The room below an entry belongs to its last line. */
+function joinLast(lines: readonly Slab[]): Slab[] {
+  return [...lines.slice(0, -2), stack(lines.slice(-2))];
 }

@@ -31,9 +31,7 @@ export function instruments(kit: Kit, model: ReportModel): FlowItem[] {
     show(i.due),
   ]);
   const overrides = model.instruments.flatMap((i) => (i.override ? [`${i.number}: ${sentence(i.override)}.`] : []));
-  return [
-    ...heading(kit, words.heading),
-    { ...table(kit.type, [number, name, ...fixed], rows), keepWithNext: overrides.length > 0 },
-    ...overrides.flatMap((text) => [space(4), flowingText(kit, text)]),
-  ];
+  const list = table(kit.type, [number, name, ...fixed], rows);
+  list.keepWithNext = overrides.length > 0;
+  return [...heading(kit, words.heading), list, ...overrides.flatMap((text) => [space(4), flowingText(kit, text)])];
 }

@@ -1,5 +1,12 @@
 import type { PassBlock } from '@/lib/reporting/report-model';
-import { type FlowItem, moved, type Slab, slabItem, space, stack } from '@/templates/report/flow/ops';
+import {
+  beside as besideEachOther,
+  type FlowItem,
+  type Slab,
+  slabItem,
+  space,
+  stack,
+} from '@/templates/report/flow/ops';
 import type { Kit } from '@/templates/report/flow/parts';
 import { type Column, headerRow, naturalWidth, table, tableRows, tableWidth } from '@/templates/report/flow/table';
 import { TYPE } from '@/templates/report/theme';
@@ -10,6 +17,8 @@ const ROW_LABEL = { ...TYPE.figureQuiet, sizePt: 8 };
 const READING = { ...TYPE.figure, sizePt: 8 };
 const TITLE = TYPE.small;
 const GAP_PT = 14;
+/** Depth of such pieces: well below a page. */
+const ROWS_DEEP = 40;
 /** A longer table of few columns is set in pieces beside each other. */
 const ROWS_BESIDE = 8;
 
@@ -20,7 +29,7 @@ export function passTables(kit: Kit, pass: PassBlock, widthPt: number): FlowItem
     ...(readings.title ? [slabItem(kit.type.paragraph(readings.title, TITLE, widthPt), { keepWithNext: true })] : []),
     ...cutToWidth(kit, readings, widthPt).flatMap((part, partNo) => [
       ...(partNo ? [space(6)] : []),
-      oneTable(kit, part, widthPt),
+      ...oneTable(kit, part, widthPt),
     ]),
   ]);
 }
@@ -30,22 +39,31 @@ export function passWidth(kit: Kit, pass: PassBlock): number {
   return Math.max(0, ...pass.tables.map((readings) => tableWidth(columnsOf(kit, readings))));
 }
 
-function oneTable(kit: Kit, readings: ReadingTable, widthPt: number): FlowItem {
+function oneTable(kit: Kit, readings: ReadingTable, widthPt: number): FlowItem[] {
   const columns = columnsOf(kit, readings);
   const cells = readings.rows.map((row) => [row.label, ...row.cells]);
   const own = tableWidth(columns);
   const beside = Math.floor((widthPt + GAP_PT) / (own + GAP_PT));
-  if (cells.length <= ROWS_BESIDE || beside < 2) return table(kit.type, columns, cells, 'close');
-  const deep = Math.ceil(cells.length / Math.min(beside, Math.ceil(cells.length / ROWS_BESIDE)));
+  if (cells.length <= ROWS_BESIDE || beside < 2) return [table(kit.type, columns, cells, 'close')];
   const rows = tableRows(kit.type, columns, cells, 'close');
   const header = headerRow(kit.type, columns);
-  const pieces: Slab[] = [];
-  for (let at = 0; at < rows.length; at += deep) pieces.push(stack([header, ...rows.slice(at, at + deep)]));
-  const row = {
-    heightPt: Math.max(...pieces.map((piece) => piece.heightPt)),
-    ops: pieces.map((piece, index) => moved(piece, index * (own + GAP_PT), 0)),
-  };
-  return slabItem(row);
+  const items: FlowItem[] = [];
+  for (let at = 0; at < rows.length; at += beside * ROWS_DEEP) {
+    if (at) items.push(space(6));
+    items.push(slabItem(pieces(header, rows.slice(at, at + beside * ROWS_DEEP), beside, own)));
+  }
+  return items;
+}
+
+/** Rows in pieces of the same depth beside each other, each with its header. */
+function pieces(header: Slab, rows: readonly Slab[], most: number, widthPt: number): Slab {
+  const count = Math.min(most, Math.ceil(rows.length / ROWS_BESIDE));
+  const deep = Math.ceil(rows.length / count);
+  const placed = Array.from({ length: Math.ceil(rows.length / deep) }, (_, index) => ({
+    slab: stack([header, ...rows.slice(index * deep, (index + 1) * deep)]),
+    x: index * (widthPt + GAP_PT),
+  }));
+  return besideEachOther(placed);
 }
 
 function columnsOf(kit: Kit, readings: ReadingTable): Column[] {

@@ -2,7 +2,7 @@ import type { ReportModel, SignatureBlock } from '@/lib/reporting/report-model';
 import { longDate } from '@/lib/reporting/report-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { beside, type FlowItem, moved, type Op, type Slab, slabItem, space, stack } from '@/templates/report/flow/ops';
-import { heading, type Kit } from '@/templates/report/flow/parts';
+import { flowingText, heading, type Kit } from '@/templates/report/flow/parts';
 import { TYPE } from '@/templates/report/theme';
 
 /** Box of a drawn signature's strokes. */
@@ -20,6 +20,9 @@ export function signatures(kit: Kit, model: ReportModel): FlowItem[] {
     if (at) items.push(space(14));
     items.push(slabItem(beside(row)));
   }
+  for (const { roleWords, reason } of model.signatures) {
+    if (reason) items.push(space(6), flowingText(kit, `${roleWords}, ${REPORT_WORDS.signatures.reason}: ${reason}`));
+  }
   return items;
 }
 
@@ -33,8 +36,6 @@ function signatureSlab(kit: Kit, signature: SignatureBlock, widthPt: number): Sl
     type.paragraph(name, TYPE.strong, widthPt),
     type.paragraph([when, signature.outcome].filter((part) => part).join(' · '), TYPE.quiet, widthPt),
   ];
-  if (signature.reason)
-    below.push(type.paragraph(`${REPORT_WORDS.signatures.reason}: ${signature.reason}`, TYPE.body, widthPt));
   return stack([type.line(signature.roleWords, TYPE.columnHead), field, ...below]);
 }
 

@@ -5,16 +5,7 @@ import { longDate, sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
 import { formatDecimal } from '@/lib/units/format';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
-import {
-  asSlab,
-  beside,
-  type FlowItem,
-  heightOf,
-  type Slab,
-  slabItem,
-  space,
-  stack,
-} from '@/templates/report/flow/ops';
+import { asSlab, beside, type FlowItem, heightOf, slabItem, space, stack } from '@/templates/report/flow/ops';
 import { flowingText, heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
 import { type Column, table, tableWidth } from '@/templates/report/flow/table';
 import { passReadings } from '@/templates/report/sections/pass-readings';
@@ -33,7 +24,7 @@ const READINGS_BESIDE_PT = 260;
 export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
   const head = heading(kit, `${block.order} · ${block.title}`, { after: block.componentWords, right: block.reference });
   const items: FlowItem[] = [space(2)];
-  if (block.leftOut) items.push(slabItem(leftOutLine(kit, block.leftOut)));
+  if (block.leftOut) items.push(...leftOut(kit, block.leftOut));
   else items.push(...measured(kit, block));
   if (block.remark) items.push(space(4), flowingText(kit, `${REPORT_WORDS.block.remark}: ${block.remark}`));
   const [gap, titled] = head as [FlowItem, FlowItem];
@@ -59,11 +50,9 @@ function measured(kit: Kit, block: TestBlock): FlowItem[] {
   return [slabItem(pictures, { keepWithNext: true }), ...below, ...finalResult(kit, block)];
 }
 
-function leftOutLine(kit: Kit, leftOut: NonNullable<TestBlock['leftOut']>): Slab {
-  const words = [`${REPORT_WORDS.block.leftOut}: ${leftOut.reason}`, leftOut.text ?? '']
-    .filter((part) => part !== '')
-    .join('. ');
-  return markedWords(kit, 'left-out', words, TYPE.strong, kit.widthPt);
+function leftOut(kit: Kit, { reason, text }: NonNullable<TestBlock['leftOut']>): FlowItem[] {
+  const line = markedWords(kit, 'left-out', `${REPORT_WORDS.block.leftOut}: ${reason}`, TYPE.strong, kit.widthPt);
+  return [slabItem(line, { keepWithNext: text !== null }), ...(text ? [space(2), flowingText(kit, text)] : [])];
 }
 
 /** The pass that is judged in the end: as left, else as found. */

@@ -1,0 +1,166 @@
+import { beforeAll, describe, expect, it } from 'vitest';
+import type { FlowItem, Op, Slab } from '@/templates/report/flow/ops';
+import { paginate } from '@/templates/report/flow/pager';
+import { type Fonts, loadFonts } from '@/templates/report/fonts';
+import { type ReportPages, reportPages } from '@/templates/report/report-pages';
+import { type Box, overlap } from '../helpers/drawing-geometry';
+import { manyBlocks, sampleReportModel, summaryRow } from '../helpers/sample-report-model';
+
+let fonts: Fonts;
+beforeAll(async () => {
+  fonts = await loadFonts();
+});
+
+/** Boxes of everything that is written on a page, drawings included, draft mark left out. */
+function boxesOf(made: ReportPages, ops: readonly Op[], x = 0, y = 0): Box[] {
+  return ops.flatMap((op): Box[] => {
+    if (op.op === 'group') return boxesOf(made, op.ops, x + op.x, y + op.y);
+    if (op.op === 'text') {
+      const [left, base, width] = [x + op.x, y + op.y, made.type.width(op.text, op.style)];
+      if (op.text.trim() === '') return [];
+      return [
+        {
+          left,
+          right: left + width,
+          top: base - op.style.sizePt * 0.72,
+          bottom: base + op.style.sizePt * 0.05,
+          what: op.text,
+        },
+      ];
+    }
+    if (op.op !== 'drawing') return [];
+    return op.items.flatMap((item): Box[] => {
+      if (item.kind !== 'text') return [];
+      const style = {
+        face: item.mono ? ('mono' as const) : ('sans' as const),
+        sizePt: item.sizePx * op.scale,
+        ink: 'ink' as const,
+        leadPt: 0,
+      };
+      const width = made.type.width(item.text, style);
+      const left =
+        x + op.x + item.x * op.scale - (item.anchor === 'end' ? width : item.anchor === 'middle' ? width / 2 : 0);
+      const base = y + op.y + item.y * op.scale;
+      return [{ left, right: left + width, top: base - style.sizePt * 0.72, bottom: base, what: item.text }];
+    });
+  });
+}
+
+describe('pages of a report', () => {
+  const remark = 'W'.repeat(200);
+  const base = sampleReportModel();
+  const long = manyBlocks(60).map((block, index) => ({
+    ...block,
+    remark: index % 7 ? block.remark : remark,
+    title: index % 9 ? block.title : `${block.title} ${block.title} ${block.title}`,
+  }));
+  const models = {
+    usual: base,
+    long: {
+      ...base,
+      blocks: long,
+      summary: long.map(summaryRow),
+      machine: { ...base.machine, serialNumber: 'W'.repeat(60), manufacturer: 'A maker with a long name, Limited' },
+      remarks: [{ ...base.remarks[0]!, text: remark }],
+    },
+  };
+
+  it.each([
+    ['usual', 'A4'],
+    ['usual', 'Letter'],
+    ['long', 'A4'],
+    ['long', 'Letter'],
+  ] as const)('%s model on %s: no word outside the printable page, none on another', (name, paper) => {
+    const made = reportPages({ ...models[name], paper }, fonts);
+    const problems: string[] = [];
+    made.pages.forEach((page, index) => {
+      const boxes = boxesOf(made, page.ops);
+      for (const box of boxes) {
+        const inside =
+          box.left >= 28.3 &&
+          box.right <= made.paper.widthPt - 28.3 &&
+          box.top >= 28.3 &&
+          box.bottom <= made.paper.heightPt - 20;
+        if (!inside) problems.push(`page ${index + 1}: “${box.what}” leaves the page`);
+      }
+      const sorted = boxes.sort((a, b) => a.top - b.top);
+      sorted.forEach((box, at) => {
+        for (const other of sorted.slice(at + 1)) {
+          if (other.top >= box.bottom) break;
+          // Half a point is less than a stroke.
+          if (overlap({ ...box, right: box.right - 0.5, bottom: box.bottom - 0.5 }, other))
+            problems.push(`page ${index + 1}: “${box.what}” on “${other.what}”`);
+        }
+      });
+    });
+    expect(problems).toEqual([]);
+  });
+
+  it('starts no page of a long report with an empty rest: every page has more than its foot', () => {
+    const made = reportPages(models.long, fonts);
+    for (const page of made.pages) expect(boxesOf(made, page.ops).length).toBeGreaterThan(8);
+  });
+});
+
+describe('laying out on pages', () => {
+  const slab = (heightPt: number, what = ''): Slab => ({
+    heightPt,
+    ops: what ? [{ op: 'line', x1: 0, y1: 0, x2: 1, y2: heightPt, ink: 'ink', widthPt: 1 }] : [],
+  });
+  const header = slab(20, 'header');
+
+  it.each([5, 37, 55, 71, 90])(
+    'leaves no row alone, repeats the header, never ends with a heading (%d pt above the table)',
+    (above) => {
+      for (let count = 1; count <= 120; count += 1) {
+        const rows = Array.from({ length: count }, () => slab(10));
+        const heading = slab(14);
+        const items: FlowItem[] = [
+          { kind: 'slab', slab: slab(above) },
+          { kind: 'slab', slab: heading, keepWithNext: true },
+          { kind: 'rows', header, rows },
+        ];
+        const pages = paginate(items, 100);
+        let placed = 0;
+        for (const page of pages) {
+          const slabs = page.slabs.map((entry) => entry.slab);
+          const own = slabs.filter((entry) => rows.includes(entry));
+          placed += own.length;
+          if (own.length) expect(slabs.filter((entry) => entry === header)).toHaveLength(1);
+          if (own.length === 1) expect(count).toBe(1);
+          if (slabs.includes(heading)) expect(own.length).toBeGreaterThan(0);
+          const last = page.slabs.at(-1)!;
+          expect(last.yPt + last.slab.heightPt).toBeLessThanOrEqual(100.02);
+        }
+        expect(placed).toBe(count);
+      }
+    },
+  );
+
+  it('keeps a block together where that costs less than a part of the page, and splits it otherwise', () => {
+    const block: FlowItem = {
+      kind: 'together',
+      items: [
+        { kind: 'slab', slab: slab(30) },
+        { kind: 'slab', slab: slab(30) },
+      ],
+    };
+    const after = (used: number) =>
+      paginate([{ kind: 'slab', slab: slab(used) }, block], 100).map((page) => page.slabs.length);
+    expect(after(35)).toEqual([3]);
+    expect(after(70)).toEqual([1, 2]);
+    expect(after(45)).toEqual([2, 1]);
+  });
+
+  it('drops space at the head of a page', () => {
+    const pages = paginate(
+      [
+        { kind: 'slab', slab: slab(95) },
+        { kind: 'space', heightPt: 10 },
+        { kind: 'slab', slab: slab(20) },
+      ],
+      100,
+    );
+    expect(pages[1]?.slabs[0]?.yPt).toBe(0);
+  });
+});
