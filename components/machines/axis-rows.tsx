@@ -66,7 +66,11 @@ export function AxisRows({ carried }: { carried: string[] }) {
               </Select>
             </PartCell>
             <PartCell>
-              <NumberText aria-label={`${name}: travel, mm`} className="min-w-24" {...register(`${path}.travelMm`)} />
+              <NumberText
+                aria-label={`${name}: travel, mm`}
+                className="min-w-24 max-w-32"
+                {...register(`${path}.travelMm`)}
+              />
             </PartCell>
             <PartCell>
               <Select aria-label={`${name}: programmed on`} className="min-w-30" {...register(`${path}.programmedOn`)}>

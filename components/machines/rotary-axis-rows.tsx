@@ -31,7 +31,11 @@ export function RotaryAxisRows({ carried }: { carried: string[] }) {
             onRemove={() => remove(index)}
           >
             <PartCell>
-              <TextInput aria-label={`${name}: name`} className="min-w-16 font-mono" {...register(`${path}.id`)} />
+              <TextInput
+                aria-label={`${name}: name`}
+                className="min-w-16 max-w-24 font-mono"
+                {...register(`${path}.id`)}
+              />
             </PartCell>
             <PartCell>
               <Select aria-label={`${name}: turns`} className="min-w-22" {...register(`${path}.carries`)}>

@@ -22,7 +22,7 @@ export function PartTable(props: {
       {hint && <p className="text-sm text-ink2">{hint}</p>}
       {!isEmpty && (
         <div className="overflow-x-auto">
-          <table className="mt-1 w-full border-collapse">
+          <table className="mt-1 border-collapse">
             <thead>
               <tr className="border-b-[1.5px] border-ink">
                 {heads.map((head) => (
@@ -61,7 +61,13 @@ export function PartRow(props: {
         {children}
         <td className="py-1 text-right">
           {onRemove && (
-            <Button small variant="quiet" aria-label={`Take out ${name}`} onClick={onRemove}>
+            <Button
+              small
+              variant="quiet"
+              className="whitespace-nowrap"
+              aria-label={`Take out ${name}`}
+              onClick={onRemove}
+            >
               Take out
             </Button>
           )}

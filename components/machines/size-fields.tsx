@@ -19,7 +19,7 @@ export function SizeFields() {
   return (
     <fieldset>
       <legend className="font-semibold">Sizes, in mm</legend>
-      <p className="text-sm text-ink2">Tolerances are found by the size class, so its size decides.</p>
+      <p className="text-sm text-ink2">Tolerances are found by the size class. Of the other sizes, what is known.</p>
       <div className="mt-2 grid gap-4 sm:grid-cols-3">
         <Field label="Size class by" error={errors?.sizeClass?.criterion?.message} className="sm:col-span-2">
           <Select {...register('makeUp.sizeClass.criterion')}>
@@ -32,7 +32,7 @@ export function SizeFields() {
           <NumberText {...register('makeUp.sizeClass.valueMm')} />
         </Field>
         {sizes.map(([name, label]) => (
-          <Field key={name} label={label} optional error={errors?.[name]?.message}>
+          <Field key={name} label={label} error={errors?.[name]?.message}>
             <NumberText {...register(`makeUp.${name}`)} />
           </Field>
         ))}

@@ -33,7 +33,11 @@ export function SpindleRows() {
             onRemove={fields.length > 1 ? () => remove(index) : undefined}
           >
             <PartCell>
-              <TextInput aria-label={`${name}: name`} className="min-w-16 font-mono" {...register(`${path}.id`)} />
+              <TextInput
+                aria-label={`${name}: name`}
+                className="min-w-16 max-w-24 font-mono"
+                {...register(`${path}.id`)}
+              />
             </PartCell>
             <PartCell>
               <Select aria-label={`${name}: kind`} className="min-w-36" {...register(`${path}.type`)}>
@@ -52,7 +56,7 @@ export function SpindleRows() {
             <PartCell>
               <NumberText
                 aria-label={`${name}: highest speed, 1/min`}
-                className="min-w-24"
+                className="min-w-24 max-w-32"
                 {...register(`${path}.maximumSpeedPerMin`)}
               />
             </PartCell>

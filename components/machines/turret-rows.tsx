@@ -40,7 +40,11 @@ export function TurretRows({ workSpindles }: { workSpindles: string[] }) {
             onRemove={fields.length > 1 ? () => remove(index) : undefined}
           >
             <PartCell>
-              <TextInput aria-label={`${name}: name`} className="min-w-16 font-mono" {...register(`${path}.id`)} />
+              <TextInput
+                aria-label={`${name}: name`}
+                className="min-w-16 max-w-24 font-mono"
+                {...register(`${path}.id`)}
+              />
             </PartCell>
             <PartCell>
               <Select aria-label={`${name}: kind`} className="min-w-32" {...register(`${path}.type`)}>

@@ -14,4 +14,5 @@ export const customerFields = z.strictObject({
 });
 export type CustomerFields = z.output<typeof customerFields>;
 
-export const customerChange = customerFields.partial();
+/** Without a default: what is not named stays as it is. */
+export const customerChange = customerFields.extend({ addressLines }).partial();
