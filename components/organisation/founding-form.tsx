@@ -22,7 +22,7 @@ export function FoundingForm({ timeZones }: { timeZones: string[] }) {
     onDone: () => window.location.assign('/welcome'),
   });
   return (
-    <form onSubmit={submit} noValidate className="grid max-w-3xl gap-4 sm:grid-cols-2">
+    <form method="post" onSubmit={submit} noValidate className="grid max-w-3xl gap-4 sm:grid-cols-2">
       <Field label="Name of your organisation" error={errorAt('organisationName')} className="sm:col-span-2">
         <TextInput {...form.register('organisationName')} autoComplete="organization" />
       </Field>

@@ -23,7 +23,7 @@ export function AcceptanceForm(props: { token: string; name: string; hasAccount:
     onDone: () => window.location.assign('/'),
   });
   return (
-    <form onSubmit={submit} noValidate className="grid max-w-md gap-4">
+    <form method="post" onSubmit={submit} noValidate className="grid max-w-md gap-4">
       <Field label="Your name, as it stands on reports" error={errorAt('name')}>
         <TextInput {...form.register('name')} autoComplete="name" />
       </Field>

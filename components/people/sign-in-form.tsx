@@ -47,7 +47,7 @@ export function SignInForm({ demo }: { demo: { accounts: readonly DemoAccount[];
 
   return (
     <div className="grid gap-8">
-      <form onSubmit={submit} className="grid max-w-md gap-4">
+      <form method="post" onSubmit={submit} className="grid max-w-md gap-4">
         <Field label="E-mail address">
           <TextInput
             name="email"
