@@ -1,5 +1,15 @@
 import { spawn, spawnSync } from 'node:child_process';
-import { chownSync, existsSync, mkdirSync, openSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import {
+  chownSync,
+  existsSync,
+  mkdirSync,
+  openSync,
+  readFileSync,
+  renameSync,
+  rmSync,
+  statSync,
+  writeFileSync,
+} from 'node:fs';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { findPostgres, postgresUser } from './debian.mjs';
@@ -9,9 +19,26 @@ import { processesInFolder, stopProcesses } from './processes.mjs';
 export const superuser = 'postgres';
 
 /** Whether the user that runs PostgreSQL can stand in this folder. */
-export function postgresReaches(folder) {
-  const { uid, gid } = postgresUser();
+export function postgresReaches(folder, { uid, gid } = postgresUser()) {
   return spawnSync('/bin/sh', ['-c', 'cd -- "$1"', 'sh', folder], { uid, gid, cwd: '/' }).status === 0;
+}
+
+/**
+ * Who must run the server on these data: their owner, whoever made them. Data that a copy by root has left to root,
+ * which PostgreSQL refuses, are given to the system's user for it.
+ */
+export function clusterUser(directory) {
+  const { uid, gid } = statSync(directory);
+  const me = process.geteuid();
+  if (me !== 0) {
+    if (uid === me) return {};
+    throw new PlainError(`The data in ${directory} belong to another user of this machine; start as that user.`);
+  }
+  if (uid !== 0) return { uid, gid };
+  const user = postgresUser();
+  const given = spawnSync('chown', ['-R', `${user.uid}:${user.gid}`, directory], { encoding: 'utf8' });
+  if (given.status !== 0) throw new Error(`chown: ${given.stderr}`);
+  return user;
 }
 
 /** Makes a cluster in `directory`; whole or not at all, so that a kill in between leaves nothing half-made. */
@@ -81,7 +108,7 @@ export function serverCommand({ directory, bin, port, throwAway = false }) {
     command: path.join(bin, 'postgres'),
     args: serverArguments({ directory, port, throwAway }),
     // Not our environment: the server ends by its folder, and it needs nothing of ours.
-    options: { ...postgresUser(), cwd: '/', env: { PATH: process.env.PATH, LC_ALL: 'C.UTF-8', TZ: 'UTC' } },
+    options: { ...clusterUser(directory), cwd: '/', env: { PATH: process.env.PATH, LC_ALL: 'C.UTF-8', TZ: 'UTC' } },
   };
 }
 

@@ -3,6 +3,7 @@ import { existsSync, mkdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import {
   clearCluster,
+  clusterUser,
   createCluster,
   hasCluster,
   postgresFor,
@@ -23,8 +24,9 @@ import { freePort, isFree } from './ports.mjs';
 function chooseDirectory(data, remembered) {
   if (remembered) return remembered;
   const inside = data.inside('postgres');
-  if (postgresReaches(data.folder)) return inside;
-  if (hasCluster(inside)) {
+  const made = existsSync(inside);
+  if (postgresReaches(data.folder, made ? clusterUser(inside) : undefined)) return inside;
+  if (made) {
     throw new PlainError(`The user postgres cannot reach the data in ${inside}; make the folders above it passable.`);
   }
   const name = `${path.basename(path.dirname(data.folder))}-${randomBytes(4).toString('hex')}`;

@@ -202,7 +202,13 @@ function announce({ url, host, demo, data }) {
 }
 
 requireNode();
+function describe(error) {
+  if (error instanceof PlainError) return error.message;
+  if (error.code !== 'EACCES') return error.stack;
+  return `${error.path ?? 'A file here'} belongs to another user of this machine; start as that user.`;
+}
+
 start().catch((error) => {
-  process.stderr.write(`${error instanceof PlainError ? error.message : error.stack}\n`);
+  process.stderr.write(`${describe(error)}\n`);
   process.exit(1);
 });
