@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import { Suspense } from 'react';
 import type { Theme } from '@/lib/theme';
 import { Brand } from './brand';
 import { Navigation, type NavigationPlace } from './navigation';
@@ -20,7 +21,9 @@ export function Header(props: { person: Person; places: NavigationPlace[]; offic
         </div>
         <div className="ml-auto flex min-w-0 flex-1 items-center justify-end gap-x-5 text-sm">
           <SaveStateSlot />
-          <SearchBox />
+          <Suspense>
+            <SearchBox />
+          </Suspense>
           <PersonMenu person={person} places={office} theme={theme} />
         </div>
       </div>
