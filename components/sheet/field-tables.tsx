@@ -5,35 +5,46 @@ import type { FieldTable, SheetFields } from '@/lib/sheet/types';
 import { ReadingCell } from './reading-cell';
 import { useEvaluated, useOpenPass } from './sheet-context';
 
-/** The fields of a set of readings. Drawn again only when fields come or go; figures that change are drawn by their own cells. */
+/** The tables of a set of readings. Drawn again only when fields come or go; figures that change are drawn by their own cells. */
 export function FieldTables() {
   const { session, passId } = useOpenPass();
   const shape = useEvaluated(session, passId, (evaluated) => evaluated.shape);
-  return <ShapedTables key={passId} shape={shape} fields={session.evaluation(passId).fields} />;
+  return <ShapedTables shape={shape} fields={session.evaluation(passId).fields} />;
 }
 
-const ShapedTables = memo(
-  function ShapedTables({ fields }: { shape: string; fields: SheetFields }) {
-    const several = fields.tables.length > 1;
-    return (
-      <>
-        {fields.setUp.length > 0 && <SetUpFields fields={fields} />}
-        <div className={several ? 'grid gap-x-8 gap-y-5 sm:grid-cols-2' : ''}>
-          {fields.tables.map((table, index) => (
-            <OneTable key={table.title ?? index} table={table} index={index} />
-          ))}
-        </div>
-      </>
-    );
-  },
-  (before, after) => before.shape === after.shape,
-);
+/** Where and how it was taken: the fields above the tables. */
+export function SetUpFields() {
+  const { session, passId } = useOpenPass();
+  const shape = useEvaluated(session, passId, (evaluated) => evaluated.shape);
+  return <ShapedSetUp shape={shape} fields={session.evaluation(passId).fields} />;
+}
 
-function SetUpFields({ fields }: { fields: SheetFields }) {
+interface Shaped {
+  shape: string;
+  fields: SheetFields;
+}
+const sameShape = (before: Shaped, after: Shaped) => before.shape === after.shape;
+
+const ShapedTables = memo(function ShapedTables({ fields }: Shaped) {
+  const several = fields.tables.length > 1;
   return (
-    <div className="mb-4 grid gap-x-5 gap-y-2 sm:grid-cols-2">
+    <div className={several ? 'grid gap-x-8 gap-y-5 sm:grid-cols-2' : ''}>
+      {fields.tables.map((table, index) => (
+        <OneTable key={table.title ?? index} table={table} index={index} />
+      ))}
+    </div>
+  );
+}, sameShape);
+
+const ShapedSetUp = memo(function ShapedSetUp({ fields }: Shaped) {
+  if (fields.setUp.length === 0) return null;
+  return (
+    <div className="mt-3 grid gap-x-8 gap-y-1.5 sm:grid-cols-2">
       {fields.setUp.map((field) => (
-        <div key={field.pointer} className="grid grid-cols-[1fr_minmax(6.5rem,auto)] items-center gap-x-3">
+        <div
+          key={field.pointer}
+          className={`grid items-center gap-x-3 ${field.role === 'choice' ? 'grid-cols-[1fr_minmax(0,13rem)]' : 'grid-cols-[1fr_6.5rem]'}`}
+        >
           <span aria-hidden="true" className="text-sm leading-tight text-ink2">
             {field.label}
             {field.unit && `, ${field.unit}`}
@@ -45,7 +56,7 @@ function SetUpFields({ fields }: { fields: SheetFields }) {
       ))}
     </div>
   );
-}
+}, sameShape);
 
 function OneTable({ table, index }: { table: FieldTable; index: number }) {
   const { title } = useOpenPass();
@@ -60,7 +71,7 @@ function OneTable({ table, index }: { table: FieldTable; index: number }) {
               <th
                 key={column.label}
                 scope="col"
-                className="px-2.5 py-1.5 text-right align-bottom text-sm font-semibold text-ink2"
+                className="px-2 py-1.5 text-right align-bottom text-sm font-semibold text-ink2"
               >
                 {column.label}
                 {column.unit && `, ${column.unit}`}
@@ -71,7 +82,7 @@ function OneTable({ table, index }: { table: FieldTable; index: number }) {
         <tbody>
           {table.rows.map((row, rowIndex) => (
             <tr key={row.label} className="border-b border-hair">
-              <th scope="row" className="max-w-32 py-0.5 pr-2 text-sm font-normal text-ink2">
+              <th scope="row" className="max-w-32 py-0.5 pr-1 text-sm font-normal text-ink2">
                 {row.label}
               </th>
               {row.cells.map((cell, column) => (
@@ -95,7 +106,7 @@ function DerivedCell({ table, row, column }: { table: number; row: number; colum
     return cell && 'derived' in cell ? cell.derived : '';
   });
   return (
-    <span className="flex h-12 items-center justify-end px-2.5 font-mono tabular-nums text-ink2">
+    <span className="flex h-12 items-center justify-end px-2 font-mono tabular-nums text-ink2">
       {figure.replace('-', '−')}
     </span>
   );

@@ -8,15 +8,22 @@ import type { SheetRules } from '@/lib/sheet/types';
 import { convert } from '@/lib/units/convert';
 import { isJudged, resultWords } from './result-words';
 import { useEvaluated, useOpenPass } from './sheet-context';
+import { useWidth } from './use-width';
 
 /** The plot, drawn again with every reading; nothing where a method has none. */
-export function LivePlot({ widthPx, heightPx }: { widthPx: number; heightPx: number }) {
+export function LivePlot({ heightPx }: { heightPx: number }) {
+  const { box, widthPx } = useWidth(320);
   const { session, passId } = useOpenPass();
   const outcome = useEvaluated(session, passId, (evaluated) => evaluated.outcome);
   const series = outcome.state === 'empty' ? null : outcome.plot;
-  if (!series) return null;
   const toleranceUm = isJudged(outcome) ? outcome.judgement.toleranceUm : null;
-  return <Plot series={series} toleranceUm={toleranceUm} widthPx={widthPx} heightPx={heightPx} />;
+  return (
+    <div ref={box} className="min-w-0">
+      {series && (
+        <Plot series={series} toleranceUm={toleranceUm} widthPx={Math.min(widthPx, 620)} heightPx={heightPx} />
+      )}
+    </div>
+  );
 }
 
 /** Limit rule, verdict in words and the distance to the limit. */

@@ -6,12 +6,12 @@ import { fieldId, fieldLabel, problemAt, problemId } from './field-problem';
 import { useEvaluated, useOpenPass } from './sheet-context';
 
 const looks: Record<Field['role'], string> = {
-  reading: 'min-w-24 border-line bg-leaf text-xl',
-  'set-up': 'min-w-20 border-transparent text-base text-ink2 hover:border-line',
+  reading: 'min-w-20 border-line bg-leaf text-xl',
+  'set-up': 'min-w-14 border-transparent text-base text-ink2 hover:border-line',
   choice: 'border-ink2 bg-leaf text-base',
 };
 const box =
-  'block h-12 w-full rounded border-[1.5px] px-2.5 focus:border-blue focus:bg-blue-wash focus:text-ink aria-invalid:border-oxide';
+  'block h-12 w-full rounded border-[1.5px] px-2 focus:border-blue focus:bg-blue-wash focus:text-ink aria-invalid:border-oxide';
 
 /** One field: an uncontrolled input; what happens in it is handled by the table around it (use-entry.ts). */
 export function ReadingCell({ field, framed }: { field: Field; framed?: boolean }) {

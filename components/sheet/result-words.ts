@@ -3,6 +3,7 @@ import type { MarkKind } from '@/components/plots/verdict-ink';
 import { VERDICT_WORDS } from '@/lib/reporting/words';
 import type { SheetOutcome } from '@/lib/sheet/types';
 import { convert } from '@/lib/units/convert';
+import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
 
 export type Judged = Extract<SheetOutcome, { state: 'partial' | 'complete' }>;
@@ -32,25 +33,22 @@ export function resultWords(outcome: SheetOutcome): ResultWords {
   };
 }
 
-/** How far it is to the limit, mm, in the resolution of the result; a distance is never rounded to nothing. */
+/**
+ * How far it is to the limit, mm: between the limit and the result as it is shown, so that the reader's own subtraction agrees. A result
+ * beyond its limit is shown with as many figures as it takes to see it.
+ */
 export function distanceWords({ judgement, displayed, result }: Judged): string {
-  if (judgement.marginUm === null) return '';
-  const beyond = judgement.marginUm.startsWith('-');
-  const shown = millimetres(unsigned(judgement.marginUm), decimalsOf(displayed.textMm));
+  const { limitUm, marginUm, direction } = judgement;
+  if (limitUm === null || marginUm === null) return '';
+  const beyond = marginUm.startsWith('-');
+  const shownUm = new Dec(displayed.textUm).abs();
   // A one-sided figure is held from both ends: by its limit and by zero, and the nearer one counts.
-  const byZero = judgement.direction !== 'either' && unsigned(judgement.marginUm) === unsigned(result.deviation);
-  if (beyond) return byZero ? `${shown} on the side that is not allowed` : `${shown} beyond the limit`;
-  return byZero ? `${shown} to zero, the other side is not allowed` : `${shown} to the limit`;
+  const byZero = direction !== 'either' && unsigned(marginUm) === unsigned(result.deviation);
+  const distanceUm = byZero ? shownUm : new Dec(limitUm).minus(shownUm).abs();
+  const mm = formatDecimal(convert(distanceUm.toFixed(), 'µm', 'mm'), { decimals: decimalsOf(displayed.textMm) });
+  if (beyond) return byZero ? `${mm} on the side that is not allowed` : `${mm} beyond the limit`;
+  if (!/[1-9]/.test(mm)) return 'at the limit';
+  return byZero ? `${mm} to zero, the other side is not allowed` : `${mm} to the limit`;
 }
 
 const unsigned = (figure: string) => figure.replace('-', '');
-
-function millimetres(um: string, decimals: number): string {
-  const mm = convert(um, 'µm', 'mm');
-  if (!/[1-9]/.test(mm)) return formatDecimal(mm, { decimals });
-  for (let places = decimals; places < decimals + 12; places++) {
-    const shown = formatDecimal(mm, { decimals: places });
-    if (/[1-9]/.test(shown)) return shown;
-  }
-  return formatDecimal(mm, {});
-}

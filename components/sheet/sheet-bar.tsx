@@ -16,19 +16,20 @@ export function SheetBar(props: {
   readOnly: boolean;
   keypad: boolean;
   busy: boolean;
+  checked: boolean;
   checkRef: RefObject<HTMLButtonElement | null>;
   onKeypad: () => void;
   onStart: (pass: { kind: PassKind; linkTo?: string }) => void;
   onLeaveOut: () => void;
   onCheck: () => void;
 }) {
-  const { data, readOnly, keypad, checkRef, onKeypad, onCheck } = props;
+  const { data, readOnly, keypad, checked, checkRef, onKeypad, onCheck } = props;
   const { job, neighbours } = data;
   const more = useId();
   return (
     <div
       data-print="no"
-      data-sheet-bar
+      data-at-foot
       className="sticky bottom-0 z-20 flex flex-wrap items-center gap-2 border-t border-line bg-paper px-5 py-2.5 sm:px-7"
     >
       {!readOnly && (
@@ -62,7 +63,7 @@ export function SheetBar(props: {
             title={neighbours.previous.title}
             className={buttonClass('plain', false, 'px-3.5')}
           >
-            <span className="max-sm:sr-only">Sheet </span>‹ {neighbours.previous.position}
+            ‹ <span className="mx-1 max-sm:sr-only">Sheet</span> {neighbours.previous.position}
           </Link>
         )}
         {neighbours.next && (
@@ -71,13 +72,12 @@ export function SheetBar(props: {
             title={neighbours.next.title}
             className={buttonClass('plain', false, 'px-3.5')}
           >
-            <span className="max-sm:sr-only">Sheet </span>
-            {neighbours.next.position} ›
+            <span className="mr-1 max-sm:sr-only">Sheet</span> {neighbours.next.position} ›
           </Link>
         )}
       </nav>
-      <Button ref={checkRef} variant="strong" className="max-sm:w-full" onClick={onCheck}>
-        Check the sheet
+      <Button ref={checkRef} variant={checked ? 'plain' : 'strong'} className="max-sm:w-full" onClick={onCheck}>
+        {checked ? 'Check again' : 'Check the sheet'}
       </Button>
     </div>
   );

@@ -1,6 +1,7 @@
 'use client';
 
 import { type RefObject, useMemo } from 'react';
+import { LinkButton } from '@/components/ui/button';
 import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import { convert } from '@/lib/units/convert';
@@ -54,7 +55,25 @@ export function SheetCheck(props: {
       {look.length > 0 && <p className="mt-2 font-medium text-brass">To be looked at</p>}
       <Findings findings={look} ink="border-brass" />
       <PassResults session={session} passes={passes} />
+      {missing.length === 0 && <GoOn data={data} />}
     </section>
+  );
+}
+
+function GoOn({ data: { job, neighbours } }: { data: SheetData }) {
+  const { next } = neighbours;
+  return (
+    <div className="mt-4">
+      {next ? (
+        <LinkButton variant="strong" href={`/jobs/${job.id}/sheets/${next.id}`}>
+          Go on with {next.position}: {next.title}
+        </LinkButton>
+      ) : (
+        <LinkButton variant="strong" href={`/jobs/${job.id}`}>
+          Back to the plan of {job.reference}
+        </LinkButton>
+      )}
+    </div>
   );
 }
 

@@ -1,5 +1,6 @@
 'use client';
 
+import Link from 'next/link';
 import { SetUpSketch } from '@/components/sketches/set-up-sketch';
 import { provenanceWords } from './provenance-words';
 import type { SheetData } from './sheet-data';
@@ -7,10 +8,16 @@ import { toleranceWords } from './tolerance-words';
 
 /** Where the sheet stands and what it is called; then sketch and cautions, before the first reading. */
 export function SheetHead({ data }: { data: SheetData }) {
-  const { sheet, neighbours, place, definition, cautions } = data;
+  const { sheet, job, machine, neighbours, place, definition, cautions } = data;
   return (
     <>
       <div>
+        <p className="flex flex-wrap items-center gap-x-4 text-[15px] text-ink2">
+          <Link href={`/jobs/${job.id}`} className="inline-flex min-h-12 items-center text-blue underline">
+            ‹ Plan of {job.reference}
+          </Link>
+          <span className="font-mono text-base text-ink">{machine.serialNumber}</span>
+        </p>
         <p className="text-[15px] text-ink2">
           {sheet.position} of {neighbours.count} · {place}
         </p>
@@ -19,7 +26,7 @@ export function SheetHead({ data }: { data: SheetData }) {
       <div className="grid gap-4 sm:max-lg:grid-cols-2">
         <SetUpSketch spec={definition.sketch} component={sheet.component} />
         <div role="note" aria-label="Cautions" className="self-start border-l-4 border-brass bg-brass-wash px-4 py-3">
-          <ul className="grid gap-1.5 text-[15px] leading-snug">
+          <ul className="grid gap-1 text-sm leading-snug">
             {cautions.map((caution) => (
               <li key={caution}>{caution}</li>
             ))}

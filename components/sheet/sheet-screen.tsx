@@ -20,6 +20,7 @@ import { SheetNotices } from './sheet-notices';
 import { SheetSession } from './sheet-session';
 import { StrayReadings } from './stray-readings';
 import { Undecided } from './undecided';
+import { useClearView } from './use-clear-view';
 import { clockTime, useReadingLog } from './use-reading-log';
 import { useLiveSheet, useStartPass } from './use-sheet-changes';
 
@@ -60,6 +61,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
   const checkHeading = useRef<HTMLHeadingElement>(null);
   const start = useStartPass(sheet.id, again);
   const { server } = useSaveState(log);
+  useClearView();
 
   // A linked set shows the readings that it stands for.
   const passId = pass?.linkedTo ?? pass?.id ?? '';
@@ -71,7 +73,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
     },
     [session, passId],
   );
-  const onEnd = useCallback(() => checkButton.current?.focus(), []);
+  const onEnd = useCallback(() => checkButton.current?.focus({ preventScroll: true }), []);
   const choose = (id: string) => {
     setChosen(id);
     setChecked(false);
@@ -103,7 +105,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
     >
       <SaveLine log={log} />
       <div className="-mx-7 -mb-10 -mt-5 flex flex-col">
-        <div className="grid flex-1 lg:grid-cols-[minmax(20rem,25rem)_minmax(0,1fr)]">
+        <div className="grid flex-1 lg:grid-cols-[minmax(18rem,23.5rem)_minmax(0,1fr)]">
           <aside
             className="flex flex-col gap-4 px-5 py-4 sm:px-7 lg:border-r lg:border-line lg:px-5"
             aria-label="The test"
@@ -177,7 +179,10 @@ export function SheetScreen({ data }: { data: SheetData }) {
           </section>
         </div>
         {keypad && (
-          <div className="sticky bottom-[4.5rem] z-20 border-t border-line bg-paper px-5 py-2 sm:px-7 lg:hidden">
+          <div
+            data-at-foot
+            className="sticky bottom-[4.4rem] z-20 border-t border-line bg-paper px-5 py-2 sm:px-7 lg:hidden"
+          >
             <Keypad onNothing={firstEmpty} />
           </div>
         )}
@@ -188,6 +193,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
           readOnly={readOnly}
           keypad={keypad}
           busy={start.isPending}
+          checked={checked}
           checkRef={checkButton}
           onKeypad={() => setKeypad(!keypad)}
           onStart={(next) => start.mutate(next, { onSuccess: ({ data: { id } }) => choose(id) })}
