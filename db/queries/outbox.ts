@@ -1,7 +1,5 @@
 import type { Knex } from 'knex';
-import { inScope, systemScope } from '@/db/client';
 import { newId } from '@/lib/id';
-import { sendMail } from '@/lib/mail/send-mail';
 
 export interface OutgoingMail {
   to: string;
@@ -42,48 +40,28 @@ interface WaitingMail {
   messageId: string;
 }
 
-/**
- * Sends one mail of the outbox, for the worker. Repeating it is safe: a mail that was sent is not sent again, and if the process dies
- * between the mail server's yes and our note of it, the second copy carries the same message id, by which it is recognised.
- * @throws what the mail server said, so that the queue tries again later
- */
-export async function deliverOutboxMail(organisationId: string, outboxId: string): Promise<void> {
-  try {
-    await inScope(systemScope(organisationId), async (trx) => {
-      const mail: WaitingMail | undefined = await trx('outbox')
-        .where({ id: outboxId })
-        .whereNot({ state: 'sent' })
-        .forUpdate()
-        .first({
-          recipient: 'recipient',
-          subject: 'subject',
-          text: 'text_body',
-          html: 'html_body',
-          messageId: 'message_id',
-        });
-      if (!mail) return;
-      const { recipient: to, ...content } = mail;
-      await sendMail({ to, ...content });
-      await trx('outbox')
-        .where({ id: outboxId })
-        .update({ state: 'sent', sent_at: trx.fn.now(), attempts: trx.raw('attempts + 1') });
-    });
-  } catch (error) {
-    await noteFailure(organisationId, outboxId, error);
-    throw error;
-  }
+/** The mail, held until the transaction ends; nothing when it has been sent already. */
+export const lockUnsentMail = (trx: Knex.Transaction, outboxId: string): Promise<WaitingMail | undefined> =>
+  trx('outbox').where({ id: outboxId }).whereNot({ state: 'sent' }).forUpdate().first({
+    recipient: 'recipient',
+    subject: 'subject',
+    text: 'text_body',
+    html: 'html_body',
+    messageId: 'message_id',
+  });
+
+export async function noteMailSent(trx: Knex.Transaction, outboxId: string): Promise<void> {
+  await trx('outbox')
+    .where({ id: outboxId })
+    .update({ state: 'sent', sent_at: trx.fn.now(), attempts: trx.raw('attempts + 1') });
 }
 
-async function noteFailure(organisationId: string, outboxId: string, error: unknown): Promise<void> {
-  const errorId = newId();
-  console.error(JSON.stringify({ errorId, outboxId, message: String(error) }));
-  await inScope(systemScope(organisationId), (trx) =>
-    trx('outbox')
-      .where({ id: outboxId })
-      .update({
-        attempts: trx.raw('attempts + 1'),
-        last_error_id: errorId,
-        state: trx.raw(`case when attempts + 1 >= ? then 'failed' else 'waiting' end`, [maxAttempts]),
-      }),
-  );
+export async function noteMailFailure(trx: Knex.Transaction, outboxId: string, errorId: string): Promise<void> {
+  await trx('outbox')
+    .where({ id: outboxId })
+    .update({
+      attempts: trx.raw('attempts + 1'),
+      last_error_id: errorId,
+      state: trx.raw(`case when attempts + 1 >= ? then 'failed' else 'waiting' end`, [maxAttempts]),
+    });
 }

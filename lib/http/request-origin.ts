@@ -1,4 +1,8 @@
-import type { RequestOrigin } from '@/lib/services/issue-report';
+/** Stands beside every signature as evidence. */
+export interface RequestOrigin {
+  ip: string;
+  userAgent: string;
+}
 
 /** From where a request came, for the evidence; what is not known is said so, never left empty. */
 export const requestOrigin = (request: Request): RequestOrigin => ({

@@ -1,6 +1,6 @@
 import type { TaskList } from 'graphile-worker';
 import { z } from 'zod';
-import { deliverOutboxMail } from '@/db/queries/outbox';
+import { deliverOutboxMail } from '@/lib/queue/deliver-outbox-mail';
 import { renderReport } from '@/lib/queue/render-report';
 
 const mailPayload = z.object({ organisationId: z.uuid(), outboxId: z.uuid() });

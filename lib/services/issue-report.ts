@@ -13,14 +13,10 @@ import {
 import { reportSource } from '@/db/read-models/report-source';
 import type { Viewer } from '@/lib/auth/viewer';
 import { conflict, DomainError, notFound } from '@/lib/errors';
+import type { RequestOrigin } from '@/lib/http/request-origin';
 import { newId } from '@/lib/id';
 import { checkFindings } from '@/lib/reporting/check-findings';
 import { buildReport } from './build-report';
-
-export interface RequestOrigin {
-  ip: string;
-  userAgent: string;
-}
 
 /**
  * Checks the job once more and issues its report: the document is frozen, numbered, and handed to the worker for its PDF.

@@ -4,8 +4,8 @@ import { insertRemarks } from '@/db/queries/remarks';
 import { findReport, insertSignature, lockReport, queueRendering, setReportState } from '@/db/queries/reports';
 import type { Viewer } from '@/lib/auth/viewer';
 import { conflict, notFound } from '@/lib/errors';
+import type { RequestOrigin } from '@/lib/http/request-origin';
 import type { Outcome, SignatureForm } from '@/lib/schemas/signature';
-import type { RequestOrigin } from './issue-report';
 
 const states = { accept: 'signed', 'accept-with-remarks': 'signed-with-remarks', refuse: 'refused' } as const;
 
