@@ -54,7 +54,11 @@ export async function up(knex: Knex): Promise<void> {
       updated_at timestamptz not null default now()
     );`);
 
-  await secureTenantTable(knex, { name: 'organisations', customerReads: '(select app_customer()) is not null', grants: 'select, update' });
+  await secureTenantTable(knex, {
+    name: 'organisations',
+    customerReads: '(select app_customer()) is not null',
+    grants: 'select, update',
+  });
 
   await createTenantTable(knex, {
     name: 'customers',

@@ -1,17 +1,19 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
+import { useRef } from 'react';
 import { FormProblem } from '@/components/forms/form-problem';
 import { useApiForm } from '@/components/forms/use-api-form';
 import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { NumberText, Select, TextInput } from '@/components/ui/inputs';
-import { api } from '@/lib/http/api-client';
+import { api, uploadFile } from '@/lib/http/api-client';
 import { calibrationFields, resolutionUnits } from '@/lib/schemas/instrument';
 
 /** Adds a certificate. */
 export function CalibrationForm({ instrumentId }: { instrumentId: string }) {
   const router = useRouter();
+  const file = useRef<HTMLInputElement>(null);
   const { form, submit, problem, sending, errorAt } = useApiForm({
     schema: calibrationFields,
     defaultValues: {
@@ -22,11 +24,20 @@ export function CalibrationForm({ instrumentId }: { instrumentId: string }) {
       expandedUncertainty: '',
       uncertaintyUnit: 'µm',
       coverageFactor: '2',
+      fileId: '',
     },
-    send: (body, idempotencyKey) =>
-      api(`/api/instruments/${instrumentId}/calibrations`, { method: 'POST', body, idempotencyKey }),
+    send: async (body, idempotencyKey) => {
+      const chosen = file.current?.files?.[0];
+      const fileId = chosen ? await uploadFile('certificate', chosen) : null;
+      return api(`/api/instruments/${instrumentId}/calibrations`, {
+        method: 'POST',
+        body: { ...body, fileId },
+        idempotencyKey,
+      });
+    },
     onDone: () => {
       form.reset();
+      if (file.current) file.current.value = '';
       router.refresh();
     },
   });
@@ -57,6 +68,14 @@ export function CalibrationForm({ instrumentId }: { instrumentId: string }) {
       </Field>
       <Field label="Coverage factor k" error={errorAt('coverageFactor')} className="sm:col-span-2">
         <NumberText {...form.register('coverageFactor')} />
+      </Field>
+      <Field label="The certificate itself" optional hint="PDF or picture, up to 15 MB" className="sm:col-span-6">
+        <input
+          ref={file}
+          type="file"
+          accept="application/pdf,image/jpeg,image/png,image/webp"
+          className="min-h-12 py-2"
+        />
       </Field>
       <div className="grid gap-4 sm:col-span-6">
         <FormProblem problem={problem} />

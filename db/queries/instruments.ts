@@ -79,6 +79,7 @@ export const listCalibrations = (db: Db, instrumentId: string): Promise<Calibrat
       expandedUncertainty: 'expanded_uncertainty',
       uncertaintyUnit: 'uncertainty_unit',
       coverageFactor: 'coverage_factor',
+      fileId: 'file_id',
     });
 
 export async function insertCalibration(db: Db, instrumentId: string, calibration: CalibrationFields): Promise<string> {
@@ -94,6 +95,7 @@ export async function insertCalibration(db: Db, instrumentId: string, calibratio
     expanded_uncertainty: calibration.expandedUncertainty,
     uncertainty_unit: calibration.uncertaintyUnit,
     coverage_factor: calibration.coverageFactor,
+    file_id: calibration.fileId,
   });
   return id;
 }

@@ -14,6 +14,7 @@ export interface MachineRow {
   site: string | null;
   kind: MakeUp['kind'];
   makeUp: MakeUp;
+  nameplateFileId: string | null;
   version: number;
 }
 
@@ -27,6 +28,7 @@ const columns = {
   site: 'site',
   kind: 'kind',
   makeUp: 'make_up',
+  nameplateFileId: 'nameplate_file_id',
   version: 'version',
 };
 

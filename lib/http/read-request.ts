@@ -27,3 +27,17 @@ export function parseJson(text: string): unknown {
     throw new DomainError(400, 'Cannot be read', 'The request is not valid JSON.');
   }
 }
+
+/** The body as bytes, for uploads; refused before it is read where the sender says that it is too large. */
+export async function readBytes(request: Request, mostBytes: number): Promise<Buffer> {
+  const tooLarge = () =>
+    new DomainError(
+      422,
+      'This file cannot be taken',
+      `The file is larger than ${Math.floor(mostBytes / 1_000_000)} MB.`,
+    );
+  if (Number(request.headers.get('content-length') ?? 0) > mostBytes) throw tooLarge();
+  const bytes = Buffer.from(await request.arrayBuffer());
+  if (bytes.length > mostBytes) throw tooLarge();
+  return bytes;
+}

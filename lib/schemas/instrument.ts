@@ -56,6 +56,11 @@ export const calibrationFields = z
     expandedUncertainty: positiveFigure('Expanded uncertainty'),
     uncertaintyUnit: unit,
     coverageFactor: positiveFigure('Coverage factor'),
+    /** The certificate itself, uploaded before. */
+    fileId: z
+      .union([z.literal(''), z.uuid()])
+      .nullish()
+      .transform((fileId) => fileId || null),
   })
   .refine((form) => form.dueOn >= form.calibratedOn, {
     path: ['dueOn'],

@@ -61,7 +61,15 @@ export default async function InstrumentPage({ params }: { params: Promise<{ ins
           <tbody>
             {calibrations.map((calibration) => (
               <Row key={calibration.id}>
-                <RowHead className="font-mono">{calibration.certificate}</RowHead>
+                <RowHead className="font-mono">
+                  {calibration.fileId ? (
+                    <a href={`/api/files/${calibration.fileId}`} className="text-blue underline">
+                      {calibration.certificate}
+                    </a>
+                  ) : (
+                    calibration.certificate
+                  )}
+                </RowHead>
                 <DataCell>{calibration.laboratory}</DataCell>
                 <DataCell className="whitespace-nowrap">{dayWords(calibration.calibratedOn)}</DataCell>
                 <DataCell className="whitespace-nowrap">{dayWords(calibration.dueOn)}</DataCell>

@@ -3,6 +3,7 @@ import { notFound } from 'next/navigation';
 import { DriftPlots } from '@/components/machines/drift-plots';
 import { MachineTimeLine } from '@/components/machines/machine-time-line';
 import { MakeUpWords } from '@/components/machines/make-up-words';
+import { NameplatePhoto } from '@/components/machines/nameplate-photo';
 import { OwnerList } from '@/components/machines/owner-list';
 import { TransferButton } from '@/components/machines/transfer-form';
 import { LinkButton } from '@/components/ui/button';
@@ -89,6 +90,9 @@ export default async function MachinePage({ params }: { params: Promise<{ machin
             <LinkButton href={`/machines/${machine.id}/edit`} small className="mt-3">
               Change nameplate or make-up
             </LinkButton>
+          )}
+          {(machine.nameplateFileId || may('machine.manage')) && (
+            <NameplatePhoto machineId={machine.id} fileId={machine.nameplateFileId} changes={may('machine.manage')} />
           )}
           <SectionTitle>Owners</SectionTitle>
           <OwnerList owners={machine.owners} />
