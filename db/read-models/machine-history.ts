@@ -79,11 +79,11 @@ async function machineDrift(db: Db, machineId: string): Promise<Drift[]> {
          from reports r join jobs j on j.organisation_id = r.organisation_id and j.id = r.job_id
         where j.machine_id = ? and r.state in ('signed', 'signed-with-remarks')
         order by r.job_id, r.revision desc)
-     select s.id as "reportId", s.number, s.measured_on as "measuredOn", t.row ->> 'title' as title,
-            t.row ->> 'component' as component, t.row ->> 'asLeft' as "asLeftMm", t.row ->> 'asLeftVerdict' as verdict,
-            t.row ->> 'toleranceMm' as "toleranceMm"
-       from signed s cross join lateral jsonb_array_elements(s.model -> 'summary') with ordinality as t(row, place)
-      where t.row ->> 'asLeft' is not null
+     select s.id as "reportId", s.number, s.measured_on as "measuredOn", t.entry ->> 'title' as title,
+            t.entry ->> 'component' as component, t.entry ->> 'asLeft' as "asLeftMm", t.entry ->> 'asLeftVerdict' as verdict,
+            t.entry ->> 'toleranceMm' as "toleranceMm"
+       from signed s cross join lateral jsonb_array_elements(s.model -> 'summary') with ordinality as t(entry, place)
+      where t.entry ->> 'asLeft' is not null
       order by s.measured_on, s.id, t.place`,
     [machineId],
   );
