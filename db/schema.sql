@@ -103,7 +103,7 @@ CREATE FUNCTION public.reports_are_frozen() RETURNS trigger
     LANGUAGE plpgsql
     AS $$
     begin
-      if new.model is distinct from old.model or new.model_sha256 <> old.model_sha256 or new.number <> old.number
+      if new.model::text <> old.model::text or new.model_sha256 <> old.model_sha256 or new.number <> old.number
          or new.revision <> old.revision or new.job_id <> old.job_id or new.issued_at <> old.issued_at
          or new.issued_by is distinct from old.issued_by then
         raise exception 'an issued report does not change' using errcode = 'WM001';
@@ -377,6 +377,7 @@ CREATE TABLE public.machines (
     make_up jsonb NOT NULL,
     version integer DEFAULT 1 NOT NULL,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
+    nameplate_file_id uuid,
     CONSTRAINT machines_year_check CHECK (((year >= 1900) AND (year <= 2200)))
 );
 
@@ -570,7 +571,7 @@ CREATE TABLE public.reports (
     number text NOT NULL,
     revision integer DEFAULT 1 NOT NULL,
     state text NOT NULL,
-    model jsonb NOT NULL,
+    model json NOT NULL,
     model_sha256 text NOT NULL,
     pdf_state text DEFAULT 'waiting'::text NOT NULL,
     pdf_file_id uuid,
@@ -887,6 +888,9 @@ ALTER TABLE ONLY public.machine_owners
 ALTER TABLE ONLY public.machines
     ADD CONSTRAINT machines_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 
+ALTER TABLE ONLY public.machines
+    ADD CONSTRAINT machines_organisation_id_nameplate_file_id_fkey FOREIGN KEY (organisation_id, nameplate_file_id) REFERENCES public.files(organisation_id, id);
+
 ALTER TABLE ONLY public.memberships
     ADD CONSTRAINT memberships_account_id_fkey FOREIGN KEY (account_id) REFERENCES public.accounts(id);
 
@@ -1130,7 +1134,7 @@ CREATE POLICY organisations_change ON public.organisations FOR UPDATE USING (((o
 
 CREATE POLICY organisations_owner_lookup ON public.organisations TO witnessmark_owner USING (true) WITH CHECK (true);
 
-CREATE POLICY organisations_read ON public.organisations FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR true)));
+CREATE POLICY organisations_read ON public.organisations FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR (( SELECT public.app_customer() AS app_customer) IS NOT NULL))));
 
 CREATE POLICY organisations_remove ON public.organisations FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
