@@ -91,7 +91,8 @@ function ruleLine(scale: RuleScale, input: LimitRuleInput): Point[] {
   const cuts = scale.notches.map((tenth) => ({ x: scale.x(tenth * scale.tenthUm), depth: deep }));
   const toleranceUm = 10 * scale.tenthUm;
   const limitUm = input.limitUm ? coordinate(input.limitUm) : toleranceUm - coordinate(input.guardUm ?? '0');
-  if (limitUm > 0 && limitUm < toleranceUm) {
+  // A guard too small to be seen is none; a tenth times ten need not be the tolerance to the last bit.
+  if (limitUm > 0 && limitUm < toleranceUm * 0.999) {
     for (const tenth of scale.notches) cuts.push({ x: scale.x(Math.sign(tenth) * limitUm), depth: deep / 2 });
   }
   cuts.sort((a, b) => a.x - b.x);

@@ -115,8 +115,8 @@ export const REPORT_WORDS = {
     place: 'Place',
     airRange: 'Temperature',
     time: 'Time',
-    air: 'Air',
-    machine: 'Machine',
+    air: 'Air, °C',
+    machine: 'Machine, °C',
   },
   instruments: {
     heading: 'Instruments',

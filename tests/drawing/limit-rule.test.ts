@@ -107,6 +107,8 @@ describe('limit rule', () => {
     expect(guard!.depth).toBeLessThan(limit!.depth);
     expect(notches({ limitUm: '12' })).toEqual(notches({ guardUm: '3' }));
     expect(notches({ limitUm: '15' })).toHaveLength(1);
+    const third = '6.66666666666666666666666666667';
+    expect(notches({ toleranceUm: third, limitUm: third })).toHaveLength(1);
   });
 
   it('puts an arrow at the end for a deviation beyond it and keeps the figure', () => {

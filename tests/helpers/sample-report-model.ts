@@ -603,7 +603,7 @@ function sampleBlocks(): TestBlock[] {
     block(8, 'AX-4 · ISO 13041-1:2020', 'Y square to X', 'axis Y1, axis X1', 'square-two-motions', {
       component: { axis: 'Y1', reference: 'X1', plane: 'XY' },
       sketch: { scene: 'square-two-motions', plane: 'XY', positiveMeans: 'angle above 90°' },
-      remark: 'Remark 1: accepted by C. Vale on 2026-03-12.',
+      remark: 'Accepted by C. Vale on 2026-03-12, see point 1.',
       passes: [
         pass({
           kind: 'as-found',

@@ -30,6 +30,9 @@ const TEXT_OPTIONS = { lineBreak: false, baseline: 'alphabetic' };
 
 /** Puts ops on a page, in their order: what is read out of the PDF comes in the order in which it was painted. */
 export class PagePainter {
+  /** Ink of the text before: said again only when it changes. */
+  private letters: Ink | null = null;
+
   constructor(
     private readonly painter: Painter,
     private readonly type: Typesetter,
@@ -44,11 +47,13 @@ export class PagePainter {
     else if (op.op === 'text') this.text(op.text, x + op.x, y + op.y, op.style);
     else if (op.op === 'drawing') this.drawing(op.items, x + op.x, y + op.y, op.scale);
     else {
+      const { letters } = this;
       this.painter.save();
       if (op.op === 'turned') this.turned(op, x, y);
       else if (op.op === 'line') this.line(op, x, y);
       else this.box(op, x, y);
       this.painter.restore();
+      this.letters = letters;
     }
   }
 
@@ -75,7 +80,8 @@ export class PagePainter {
 
   private text(text: string, x: number, y: number, style: Pick<TextStyle, 'face' | 'sizePt' | 'ink'>): void {
     if (text === '') return;
-    this.painter.fillColor(PAPER_INK[style.ink]);
+    if (this.letters !== style.ink) this.painter.fillColor(PAPER_INK[style.ink]);
+    this.letters = style.ink;
     let at = x;
     for (const run of this.type.runs(text, style.face)) {
       this.painter.font(run.font, run.font.postscriptName, style.sizePt).text(run.text, at, y, TEXT_OPTIONS);
