@@ -82,7 +82,7 @@ async function machineDrift(db: Db, machineId: string): Promise<Drift[]> {
      select s.id as "reportId", s.number, s.measured_on as "measuredOn", t.entry ->> 'title' as title,
             t.entry ->> 'component' as component, t.entry ->> 'asLeft' as "asLeftMm", t.entry ->> 'asLeftVerdict' as verdict,
             t.entry ->> 'toleranceMm' as "toleranceMm"
-       from signed s cross join lateral jsonb_array_elements(s.model -> 'summary') with ordinality as t(entry, place)
+       from signed s cross join lateral jsonb_array_elements(s.model::jsonb -> 'summary') with ordinality as t(entry, place)
       where t.entry ->> 'asLeft' is not null
       order by s.measured_on, s.id, t.place`,
     [machineId],
