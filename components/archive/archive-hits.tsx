@@ -46,7 +46,7 @@ export function ArchiveHits({ hits, query, timeZone }: { hits: Hit[]; query: str
             <div>
               <Link
                 href={`/machines/${machine.id}`}
-                className="inline-flex min-h-12 items-center font-mono text-xl underline"
+                className="inline-flex min-h-12 items-center font-mono text-xl text-blue underline"
               >
                 {matchedOn === 'serial number' ? (
                   <span>

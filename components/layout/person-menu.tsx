@@ -19,12 +19,12 @@ export function PersonMenu({ person, places, theme }: { person: Person; places: 
       <button
         type="button"
         popoverTarget="person-menu"
-        className="min-h-12 rounded px-1 text-right text-sm leading-tight text-ink2 hover:text-ink"
+        className="min-h-12 max-w-64 shrink-0 rounded px-1 text-right text-sm leading-tight text-ink2 hover:text-ink"
       >
-        <span className="block">
+        <span className="block truncate">
           <span className="text-ink">{person.name}</span> · {person.roles.join(', ')}
         </span>
-        <span className="block">
+        <span className="block truncate">
           {person.organisationName} <span aria-hidden="true">▾</span>
         </span>
       </button>

@@ -16,8 +16,8 @@ export function AxisRows({ carried }: { carried: string[] }) {
   return (
     <PartTable
       title="Linear axes"
-      hint="Axes side by side have numbers: X1 and X2. Each carries a turret, a tool post, a spindle or the tailstock."
-      heads={['Axis', 'Number', 'Carries', 'Travel, mm', 'Programmed on', 'Channel', 'Note, such as its + direction']}
+      hint="Axes side by side have numbers: X1 and X2. Each carries a turret, a tool post, a spindle or the tailstock. A note says what is unusual, such as its + direction."
+      heads={['Axis', 'Number', 'Carries', 'Travel, mm', 'Programmed on', 'Channel', 'Note']}
       addLabel="Add a linear axis"
       onAdd={() =>
         append({
@@ -45,7 +45,7 @@ export function AxisRows({ carried }: { carried: string[] }) {
             onRemove={fields.length > 1 ? () => remove(index) : undefined}
           >
             <PartCell>
-              <Select aria-label={`${name}: letter`} className="min-w-18" {...register(`${path}.letter`)}>
+              <Select aria-label={`${name}: letter`} className="min-w-16" {...register(`${path}.letter`)}>
                 {letters.map((letter) => (
                   <option key={letter}>{letter}</option>
                 ))}
@@ -59,7 +59,7 @@ export function AxisRows({ carried }: { carried: string[] }) {
               />
             </PartCell>
             <PartCell>
-              <Select aria-label={`${name}: carries`} className="min-w-22" {...register(`${path}.carries`)}>
+              <Select aria-label={`${name}: carries`} className="min-w-20" {...register(`${path}.carries`)}>
                 {carried.map((id) => (
                   <option key={id}>{id}</option>
                 ))}
@@ -68,12 +68,12 @@ export function AxisRows({ carried }: { carried: string[] }) {
             <PartCell>
               <NumberText
                 aria-label={`${name}: travel, mm`}
-                className="min-w-24 max-w-32"
+                className="min-w-20 max-w-28"
                 {...register(`${path}.travelMm`)}
               />
             </PartCell>
             <PartCell>
-              <Select aria-label={`${name}: programmed on`} className="min-w-30" {...register(`${path}.programmedOn`)}>
+              <Select aria-label={`${name}: programmed on`} className="min-w-28" {...register(`${path}.programmedOn`)}>
                 <option value="radius">radius</option>
                 <option value="diameter">diameter</option>
               </Select>
@@ -86,7 +86,7 @@ export function AxisRows({ carried }: { carried: string[] }) {
               />
             </PartCell>
             <PartCell>
-              <TextInput aria-label={`${name}: note`} className="min-w-36" {...register(`${path}.directionNote`)} />
+              <TextInput aria-label={`${name}: note`} className="min-w-28" {...register(`${path}.directionNote`)} />
             </PartCell>
           </PartRow>
         );

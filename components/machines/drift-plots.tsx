@@ -14,7 +14,7 @@ interface DriftTest {
 /** How each test that was signed more than once has moved; small, side by side, to be read at a glance. */
 export function DriftPlots({ tests }: { tests: DriftTest[] }) {
   return (
-    <ul className="grid gap-x-8 gap-y-5 sm:grid-cols-2 xl:grid-cols-3">
+    <ul className="grid grid-cols-[repeat(auto-fill,minmax(min(19rem,100%),1fr))] gap-x-6 gap-y-5">
       {tests.map((test) => {
         const verdict = test.points.at(-1)?.verdict;
         return (

@@ -57,12 +57,12 @@ export function driftDrawing(points: DriftPointInput[], toleranceMm: string | nu
       ...yearLabels(points, dates.map(x)),
       ...(last
         ? [
-            text(clamp(path.at(-1)?.[0] ?? 0, right), labelY(path), figure(last.asLeftMm), {
-              sizePx: letterPx,
-              mono: true,
-              ink: 'blue',
-              anchor: 'end',
-            }),
+            text(
+              right + 6,
+              besideTolerance(path.at(-1)?.[1] ?? 0, tolerance === null ? null : y(tolerance)),
+              figure(last.asLeftMm),
+              { sizePx: letterPx, mono: true, ink: 'blue' },
+            ),
           ]
         : []),
     ],
@@ -70,8 +70,13 @@ export function driftDrawing(points: DriftPointInput[], toleranceMm: string | nu
 }
 
 const place = (shown: string) => coordinate(shown.replace('−', '-').replace(',', '.').replace('+', ''));
-const clamp = (at: number, right: number) => Math.min(right, Math.max(at + 10, room.left + 60));
-const labelY = (path: Point[]) => Math.max(letterPx, (path.at(-1)?.[1] ?? 0) - 8);
+/** Where the last figure stands: level with its mark, but clear of the tolerance's own figure. */
+function besideTolerance(markY: number, toleranceY: number | null): number {
+  const own = markY + 5;
+  const other = toleranceY === null ? null : toleranceY + 5;
+  if (other === null || Math.abs(own - other) >= letterPx + 2) return own;
+  return markY >= (toleranceY ?? 0) ? other + letterPx + 2 : other - letterPx - 2;
+}
 
 /** The first and the last year; in between the marks speak for themselves. */
 function yearLabels(points: DriftPointInput[], places: number[]): DrawingItem[] {
