@@ -3,7 +3,7 @@ import { type Action, permissions } from '@/lib/auth/permissions';
 import { version } from '@/lib/version';
 
 export interface DescribedHandler {
-  description: { action: Action[]; params?: z.ZodType; query?: z.ZodType; body?: z.ZodType; needsVersion?: boolean };
+  description?: { action: Action[]; params?: z.ZodType; query?: z.ZodType; body?: z.ZodType; needsVersion?: boolean };
 }
 
 /** Path as the framework writes it (`/api/sheets/[id]`) → handlers by method. */
@@ -55,7 +55,7 @@ export function openApiDocument(routes: DescribedRoutes): Record<string, unknown
       Object.entries(routes).map(([path, handlers]) => [
         path.replace(/\[([^\]]+)\]/g, '{$1}'),
         Object.fromEntries(
-          Object.entries(handlers).map(([method, handler]) => [method.toLowerCase(), operation(path, method, handler)]),
+          methodsOf(handlers).map(([method, handler]) => [method.toLowerCase(), operation(path, method, handler)]),
         ),
       ]),
     ),
@@ -65,7 +65,15 @@ export function openApiDocument(routes: DescribedRoutes): Record<string, unknown
   };
 }
 
-function operation(path: string, method: string, { description }: DescribedHandler): Record<string, unknown> {
+const open: NonNullable<DescribedHandler['description']> = { action: [] };
+
+const methods = ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const;
+
+/** A route's module exports other things too: only methods count. */
+const methodsOf = (handlers: DescribedRoutes[string]) =>
+  methods.flatMap((method) => (handlers[method] ? [[method, handlers[method]] as const] : []));
+
+function operation(path: string, method: string, { description = open }: DescribedHandler): Record<string, unknown> {
   const inPath = [...path.matchAll(/\[([^\]]+)\]/g)].map(([, name]) => ({
     name,
     in: 'path',
@@ -99,7 +107,7 @@ function queryParameters(query: z.ZodType | undefined) {
   }));
 }
 
-function headerParameters(method: string, description: DescribedHandler['description']) {
+function headerParameters(method: string, description: NonNullable<DescribedHandler['description']>) {
   const header = (name: string, required: boolean) => ({ name, in: 'header', required, schema: { type: 'string' } });
   return [
     ...(description.needsVersion ? [header('If-Match', true)] : []),

@@ -1,7 +1,7 @@
 import { appDb } from '@/db/client';
 import { takeAttempt } from '@/db/queries/accounts';
 import { DomainError } from '@/lib/errors';
-import { EvaluationError, evaluateUnknown } from '@/lib/evaluation';
+import { EvaluationError, evaluateUnknown, evaluationInput } from '@/lib/evaluation';
 import { problemResponse } from '@/lib/http/problem';
 
 /** Room for a burst, then two requests a second for one address: a calculator, not a data centre. */
@@ -9,7 +9,7 @@ const limit = { capacity: 240, refillPerSecond: 4 };
 const maxBytes = 2_000_000;
 
 /** The calculator: the evaluation's own door as JSON, for anybody, without an account. */
-export async function POST(request: Request): Promise<Response> {
+async function calculate(request: Request): Promise<Response> {
   try {
     const address = request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? 'local';
     const waitSeconds = await takeAttempt(appDb(), `evaluations:${address}`, limit.capacity, limit.refillPerSecond);
@@ -29,6 +29,8 @@ export async function POST(request: Request): Promise<Response> {
     return problemResponse(error, request);
   }
 }
+
+export const POST = Object.assign(calculate, { description: { action: [], body: evaluationInput } });
 
 function parse(text: string): unknown {
   try {

@@ -1,0 +1,90 @@
+import * as archive from '@/app/api/archive/route';
+import * as catalogueCodeTest from '@/app/api/catalogue/[code]/[test]/route';
+import * as catalogue from '@/app/api/catalogue/route';
+import * as customersId from '@/app/api/customers/[id]/route';
+import * as customers from '@/app/api/customers/route';
+import * as evaluations from '@/app/api/evaluations/route';
+import * as filesId from '@/app/api/files/[id]/route';
+import * as files from '@/app/api/files/route';
+import * as health from '@/app/api/health/route';
+import * as instrumentsIdCalibrations from '@/app/api/instruments/[id]/calibrations/route';
+import * as instrumentsId from '@/app/api/instruments/[id]/route';
+import * as instruments from '@/app/api/instruments/route';
+import * as invitationsId from '@/app/api/invitations/[id]/route';
+import * as invitationsAccept from '@/app/api/invitations/accept/route';
+import * as invitations from '@/app/api/invitations/route';
+import * as jobsIdAsLeftLinks from '@/app/api/jobs/[id]/as-left-links/route';
+import * as jobsIdCheck from '@/app/api/jobs/[id]/check/route';
+import * as jobsIdConditions from '@/app/api/jobs/[id]/conditions/route';
+import * as jobsIdHandIn from '@/app/api/jobs/[id]/hand-in/route';
+import * as jobsIdPlan from '@/app/api/jobs/[id]/plan/route';
+import * as jobsIdReopen from '@/app/api/jobs/[id]/reopen/route';
+import * as jobsIdReports from '@/app/api/jobs/[id]/reports/route';
+import * as jobsId from '@/app/api/jobs/[id]/route';
+import * as jobsIdTemperatures from '@/app/api/jobs/[id]/temperatures/route';
+import * as jobs from '@/app/api/jobs/route';
+import * as machinesIdHistory from '@/app/api/machines/[id]/history/route';
+import * as machinesIdNameplate from '@/app/api/machines/[id]/nameplate/route';
+import * as machinesIdOwners from '@/app/api/machines/[id]/owners/route';
+import * as machinesId from '@/app/api/machines/[id]/route';
+import * as machines from '@/app/api/machines/route';
+import * as membersId from '@/app/api/members/[id]/route';
+import * as members from '@/app/api/members/route';
+import * as organisation from '@/app/api/organisation/route';
+import * as ready from '@/app/api/ready/route';
+import * as reportsIdData from '@/app/api/reports/[id]/data/route';
+import * as reportsIdPdf from '@/app/api/reports/[id]/pdf/route';
+import * as reportsId from '@/app/api/reports/[id]/route';
+import * as reportsIdSignatures from '@/app/api/reports/[id]/signatures/route';
+import * as sheetsIdOperations from '@/app/api/sheets/[id]/operations/route';
+import * as sheetsIdPassesPassid from '@/app/api/sheets/[id]/passes/[passId]/route';
+import * as sheetsIdPasses from '@/app/api/sheets/[id]/passes/route';
+import * as sheetsId from '@/app/api/sheets/[id]/route';
+import * as welcome from '@/app/api/welcome/route';
+
+/** Every route of the interface; a test finds one that is missing here. */
+export const describedRoutes = {
+  '/api/archive': archive,
+  '/api/catalogue/[code]/[test]': catalogueCodeTest,
+  '/api/catalogue': catalogue,
+  '/api/customers/[id]': customersId,
+  '/api/customers': customers,
+  '/api/evaluations': evaluations,
+  '/api/files/[id]': filesId,
+  '/api/files': files,
+  '/api/health': health,
+  '/api/instruments/[id]/calibrations': instrumentsIdCalibrations,
+  '/api/instruments/[id]': instrumentsId,
+  '/api/instruments': instruments,
+  '/api/invitations/[id]': invitationsId,
+  '/api/invitations/accept': invitationsAccept,
+  '/api/invitations': invitations,
+  '/api/jobs/[id]/as-left-links': jobsIdAsLeftLinks,
+  '/api/jobs/[id]/check': jobsIdCheck,
+  '/api/jobs/[id]/conditions': jobsIdConditions,
+  '/api/jobs/[id]/hand-in': jobsIdHandIn,
+  '/api/jobs/[id]/plan': jobsIdPlan,
+  '/api/jobs/[id]/reopen': jobsIdReopen,
+  '/api/jobs/[id]/reports': jobsIdReports,
+  '/api/jobs/[id]': jobsId,
+  '/api/jobs/[id]/temperatures': jobsIdTemperatures,
+  '/api/jobs': jobs,
+  '/api/machines/[id]/history': machinesIdHistory,
+  '/api/machines/[id]/nameplate': machinesIdNameplate,
+  '/api/machines/[id]/owners': machinesIdOwners,
+  '/api/machines/[id]': machinesId,
+  '/api/machines': machines,
+  '/api/members/[id]': membersId,
+  '/api/members': members,
+  '/api/organisation': organisation,
+  '/api/ready': ready,
+  '/api/reports/[id]/data': reportsIdData,
+  '/api/reports/[id]/pdf': reportsIdPdf,
+  '/api/reports/[id]': reportsId,
+  '/api/reports/[id]/signatures': reportsIdSignatures,
+  '/api/sheets/[id]/operations': sheetsIdOperations,
+  '/api/sheets/[id]/passes/[passId]': sheetsIdPassesPassid,
+  '/api/sheets/[id]/passes': sheetsIdPasses,
+  '/api/sheets/[id]': sheetsId,
+  '/api/welcome': welcome,
+};
