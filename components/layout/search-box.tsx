@@ -10,7 +10,7 @@ export function SearchBox() {
   return (
     <Form action="/archive" role="search" className="flex w-full min-w-0 max-w-sm">
       <label className="sr-only" htmlFor="search">
-        Look up by serial number, maker, customer or report
+        Look up in the archive
       </label>
       <input
         // Drawn anew when the search changes, so that it shows what was looked for.

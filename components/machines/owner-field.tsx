@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { CustomerForm } from '@/components/customers/customer-form';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
@@ -13,12 +13,19 @@ export function OwnerField({ customers }: { customers: { id: string; name: strin
   const { register, setValue, formState } = useMachineForm();
   const [added, setAdded] = useState<{ id: string; name: string }[]>([]);
   const [adding, setAdding] = useState(false);
+  // After it has been drawn as an option: a list cannot choose what it does not hold.
+  useEffect(() => {
+    const newest = added.at(-1);
+    if (newest) setValue('customerId', newest.id, { shouldDirty: true });
+  }, [added, setValue]);
+  const known = new Set(customers.map(({ id }) => id));
+  const options = [...customers, ...added.filter(({ id }) => !known.has(id))];
   return (
     <div className="flex flex-wrap items-start gap-3">
       <Field label="Customer that owns it" error={formState.errors.customerId?.message} className="min-w-64 flex-1">
         <Select {...register('customerId')}>
           <option value="">Not known yet</option>
-          {[...customers, ...added].map(({ id, name }) => (
+          {options.map(({ id, name }) => (
             <option key={id} value={id}>
               {name}
             </option>
@@ -33,8 +40,6 @@ export function OwnerField({ customers }: { customers: { id: string; name: strin
           onDone={(customer) => {
             setAdded((before) => [...before, customer]);
             setAdding(false);
-            // The option exists after the next drawing.
-            setTimeout(() => setValue('customerId', customer.id, { shouldDirty: true }));
           }}
         />
       </Dialog>
