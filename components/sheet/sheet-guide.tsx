@@ -2,7 +2,7 @@
 
 import Link from 'next/link';
 import { SetUpSketch } from '@/components/sketches/set-up-sketch';
-import { provenanceWords } from './provenance-words';
+import { provenanceWords } from '@/lib/reporting/record-words';
 import type { SheetData } from './sheet-data';
 import { toleranceWords } from './tolerance-words';
 
@@ -64,15 +64,15 @@ export function SheetBackground({ data }: { data: SheetData }) {
           <p>
             {tolerance.foundBy} ·{' '}
             <span className={tolerance.provenance.kind === 'from-memory' ? 'font-medium text-brass' : ''}>
-              {provenanceWords(tolerance.provenance)}
+              {provenanceWords[tolerance.provenance.kind]}
             </span>
             : {tolerance.provenance.text}
           </p>
         )}
         <p className="mt-1.5">Judged: {definition.judgedFigure}.</p>
         <p className="mt-1.5">
-          {codeTitle}, own id <span className="font-mono">{definition.id}</span> · {provenanceWords(definition.source)}:{' '}
-          {definition.source.text}
+          {codeTitle}, own id <span className="font-mono">{definition.id}</span> ·{' '}
+          {provenanceWords[definition.source.kind]}: {definition.source.text}
         </p>
       </section>
     </div>

@@ -1,0 +1,79 @@
+import Link from 'next/link';
+import { ReportStateWord } from '@/components/machines/report-state';
+import type { LeftOutReason } from '@/lib/schemas/job';
+import { leftOutReasons } from '@/lib/schemas/job';
+
+const roles = { inspector: 'measures', reviewer: 'has the check', customer: 'for the customer' } as const;
+
+export function JobPeople({ people }: { people: { name: string; role: keyof typeof roles }[] }) {
+  return (
+    <section aria-labelledby="people">
+      <h2 id="people" className="font-semibold">
+        People
+      </h2>
+      {people.length === 0 ? (
+        <p className="text-ink2">Nobody is named.</p>
+      ) : (
+        <ul className="text-[15px]">
+          {people.map(({ name, role }) => (
+            <li key={`${name}${role}`}>
+              {name} <span className="text-ink2">{roles[role]}</span>
+            </li>
+          ))}
+        </ul>
+      )}
+    </section>
+  );
+}
+
+/** Tests that fit the machine and were not taken into the plan, each with its reason. */
+export function NotInPlan(props: {
+  exclusions: { key: string; title: string; reason: LeftOutReason; text: string | null }[];
+}) {
+  const { exclusions } = props;
+  if (exclusions.length === 0) return null;
+  return (
+    <section aria-labelledby="not-in-plan">
+      <h2 id="not-in-plan" className="font-semibold">
+        Not in the plan
+      </h2>
+      <ul className="grid gap-1 text-[15px]">
+        {exclusions.map(({ key, title, reason, text }) => (
+          <li key={key}>
+            {title} <span className="text-ink2">{[leftOutReasons[reason], text].filter(Boolean).join(': ')}</span>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}
+
+export function JobReports(props: {
+  reports: { id: string; number: string; revision: number; state: string; pdfState: string; signedAt: Date | null }[];
+  timeZone: string;
+}) {
+  const { reports, timeZone } = props;
+  if (reports.length === 0) return null;
+  return (
+    <section aria-labelledby="reports">
+      <h2 id="reports" className="font-semibold">
+        Reports
+      </h2>
+      <ul>
+        {reports.map((report) => (
+          <li key={report.id} className="flex flex-wrap items-center gap-x-3 text-[15px]">
+            <Link
+              href={`/reports/${report.id}`}
+              className="inline-flex min-h-12 items-center font-mono text-blue underline"
+            >
+              {report.number} r{report.revision}
+            </Link>
+            <ReportStateWord state={report.state} signedAt={report.signedAt} timeZone={timeZone} />
+            {report.pdfState === 'failed' && <span className="text-oxide">PDF failed</span>}
+            {report.pdfState === 'waiting' && <span className="text-ink2">PDF is being made</span>}
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}
