@@ -11,6 +11,7 @@ export type RenderAnswer =
  * whole length. Drawing needs no database and no settings: the model goes in, the bytes come out.
  */
 function answer(message: RenderAnswer): void {
+  if (!process.connected) process.exit(0);
   process.send?.(message);
 }
 
