@@ -1,0 +1,45 @@
+import { shortLimit } from '@/components/plots/number';
+import { LimitRule } from '@/components/ui/limit-rule';
+import { VerdictMark } from '@/components/ui/verdict-mark';
+import type { TestBlock } from '@/lib/reporting/report-model';
+import { sentence } from '@/lib/reporting/report-text';
+import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { finalPass, inMicrometres } from './final-pass';
+
+/** The limit rule of the final result over the whole width, the verdict in words below it. */
+export function FinalResult({ block }: { block: TestBlock }) {
+  const pass = finalPass(block);
+  if (!pass?.judgement || pass.resultMm === null) return null;
+  const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
+  // A figure without a sign never has words for its direction, and is never below zero.
+  const signed = block.passes.some((each) => each.resultWords !== null || /^[-−]/.test(each.resultMm ?? ''));
+  const words = REPORT_WORDS.block;
+  const beside = [
+    pass.resultWords ?? '',
+    marginUm === null ? '' : `${inMicrometres(marginUm, pass)} µm ${words.margin}`,
+    local
+      ? `${words.local} ${inMicrometres(local.deviationUm, pass)} µm ${words.over} ${local.lengthMm} mm, T ${shortLimit(local.toleranceUm)} µm, ${VERDICT_WORDS[local.verdict]}`
+      : '',
+  ].filter((part) => part !== '');
+  return (
+    <div className="mt-4 break-inside-avoid">
+      <LimitRule
+        deviationUm={pass.resultUm === null ? null : pass.resultUm.replace('−', '-')}
+        toleranceUm={toleranceUm}
+        limitUm={limitUm}
+        direction={direction}
+        signed={signed}
+        verdict={verdict}
+        shown={pass.resultMm}
+        widthPx={760}
+      />
+      <p className="mt-1 flex flex-wrap items-baseline gap-x-4">
+        <VerdictMark
+          verdict={verdict}
+          words={`${sentence(pass.kindWords)} ${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`}
+        />
+        <span className="text-ink2">{beside.join(' · ')}</span>
+      </p>
+    </div>
+  );
+}

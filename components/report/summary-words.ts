@@ -1,0 +1,24 @@
+import type { MarkKind } from '@/components/plots/verdict-ink';
+import type { SummaryRow } from '@/lib/reporting/report-model';
+import { REPORT_WORDS, SHORT_VERDICT_WORDS } from '@/lib/reporting/words';
+
+/** The component after the title, unless the title names it. */
+export const summaryTitle = (row: Pick<SummaryRow, 'title' | 'component'>): string =>
+  row.component === '' || row.title.includes(row.component) ? row.title : `${row.title}, ${row.component}`;
+
+/** What counts in the end: as left, else as it was found. */
+export const finalVerdict = (row: SummaryRow): MarkKind =>
+  row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? row.asFoundVerdict ?? 'not-measured');
+
+/** `out, remark 1`; `left out: not agreed`. */
+export function verdictWords(row: SummaryRow): string {
+  const parts = [
+    row.leftOut ? `${SHORT_VERDICT_WORDS['left-out']}: ${row.leftOut}` : SHORT_VERDICT_WORDS[finalVerdict(row)],
+    row.remarkNo === null ? '' : `${REPORT_WORDS.summary.remark} ${row.remarkNo}`,
+  ];
+  return parts.filter((part) => part !== '').join(', ');
+}
+
+/** What a reader must have seen before accepting: everything that is not plainly within tolerance or for information. */
+export const isDeviation = (row: SummaryRow): boolean =>
+  !['within-tolerance', 'for-information'].includes(finalVerdict(row));

@@ -1,0 +1,93 @@
+import { Plot } from '@/components/plots/plot';
+import { SetUpSketch } from '@/components/sketches/set-up-sketch';
+import { VerdictMark } from '@/components/ui/verdict-mark';
+import type { TestBlock } from '@/lib/reporting/report-model';
+import { REPORT_WORDS } from '@/lib/reporting/words';
+import { CorrectedReadings } from './corrected-readings';
+import { Facts, known } from './facts';
+import { finalPass } from './final-pass';
+import { FinalResult } from './final-result';
+import { PassReadings } from './pass-readings';
+import { ReportSection } from './report-section';
+
+/** Everything about one test: at the left the set-up and what is judged by what, at the right plots and readings, the limit rule below. */
+export function TestBlockView({ block }: { block: TestBlock }) {
+  return (
+    <div id={`test-${block.order}`} className="scroll-mt-4">
+      <ReportSection
+        title={`${block.order} · ${block.title}`}
+        beside={
+          <p className="text-sm text-ink2">
+            {block.componentWords} · <span className="font-mono">{block.reference}</span>
+          </p>
+        }
+      >
+        {block.leftOut ? <LeftOut leftOut={block.leftOut} /> : <Measured block={block} />}
+        {block.remark && (
+          <p className="mt-3">
+            <span className="font-semibold">{REPORT_WORDS.block.remark}:</span> {block.remark}
+          </p>
+        )}
+        <CorrectedReadings block={block} />
+      </ReportSection>
+    </div>
+  );
+}
+
+function LeftOut({ leftOut }: { leftOut: NonNullable<TestBlock['leftOut']> }) {
+  const words = [`${REPORT_WORDS.block.leftOut}: ${leftOut.reason}`, leftOut.text ?? ''].filter(Boolean).join('. ');
+  return <VerdictMark verdict="left-out" words={words} />;
+}
+
+function Measured({ block }: { block: TestBlock }) {
+  const words = REPORT_WORDS.block;
+  const arithmetic = finalPass(block)?.judgement?.toleranceArithmetic;
+  return (
+    <>
+      <div className="grid gap-x-8 gap-y-4 md:grid-cols-[17rem_minmax(0,1fr)] print:grid-cols-[14rem_minmax(0,1fr)]">
+        <div className="grid content-start gap-2">
+          <SetUpSketch spec={block.sketch} component={block.component} />
+          <Facts
+            small
+            facts={known([
+              [words.judged, block.judgedFigure],
+              [words.tolerance, arithmetic ? `${block.toleranceWords}; ${arithmetic}` : block.toleranceWords],
+              [words.source, block.toleranceSource],
+              [words.direction, block.directionWords],
+              [words.instruments, block.instruments.join(' · ')],
+            ])}
+          />
+        </div>
+        <div className="grid min-w-0 content-start gap-4">
+          <Plots block={block} />
+          <PassReadings passes={block.passes} of={block.title} />
+        </div>
+      </div>
+      <FinalResult block={block} />
+    </>
+  );
+}
+
+/** Plot as found, as left, or both beside each other. */
+function Plots({ block }: { block: TestBlock }) {
+  const plotted = block.passes.filter((pass) => pass.plot && pass.kind !== 'adjusting').slice(-2);
+  if (plotted.length === 0) return null;
+  return (
+    <div className="flex flex-wrap gap-x-6 gap-y-3">
+      {plotted.map(
+        (pass) =>
+          pass.plot && (
+            <figure key={`${pass.kindWords}${pass.takenAt}`} className="min-w-60 max-w-md flex-1">
+              <figcaption className="text-sm font-semibold text-ink2">{pass.kindWords}</figcaption>
+              <Plot
+                series={pass.plot}
+                toleranceUm={pass.judgement?.toleranceUm ?? null}
+                widthPx={plotted.length === 2 ? 300 : 440}
+                heightPx={plotted.length === 2 ? 190 : 220}
+              />
+            </figure>
+          ),
+      )}
+    </div>
+  );
+}
