@@ -23,7 +23,8 @@ export function sketchWords(spec: SketchSpec, component: BoundComponent): string
 }
 
 /** The meaning of the sign as it stands under the sketch. */
-export const signWords = (positiveMeans: string) => `+ : ${positiveMeans}`;
+export const signWords = (positiveMeans: string) =>
+  positiveMeans.startsWith('+') ? positiveMeans : `+ ${positiveMeans}`;
 
 /** What a limit rule says, for somebody who cannot see it. */
 export function limitRuleWords(rule: {

@@ -39,7 +39,7 @@ export function reportPages(model: ReportModel, fonts: Fonts): ReportPages {
   const pages = contents.map(({ slabs, bookmarks }, index) => {
     const body = slabs.map(({ slab, yPt }) => moved(slab, MARGIN_PT.left, MARGIN_PT.top + yPt));
     const foot = footer(kit, model, { no: index + 1, of: contents.length });
-    const frame: Op = { op: 'group', x: MARGIN_PT.left, y: paper.heightPt - MARGIN_PT.bottom + 16, ops: foot };
+    const frame: Op = { op: 'group', x: MARGIN_PT.left, y: paper.heightPt - MARGIN_PT.bottom + 14, ops: foot };
     return {
       ops: [...(draft ? [draftMark(paper)] : []), ...body, frame],
       bookmarks: bookmarks.map(({ title, yPt }) => ({ title, yPt: yPt + MARGIN_PT.top })),

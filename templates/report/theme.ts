@@ -21,7 +21,7 @@ export const PAPERS = {
   Letter: { widthPt: 612, heightPt: 792 },
 } as const;
 
-export const MARGIN_PT = { left: 42, right: 42, top: 36, bottom: 52 };
+export const MARGIN_PT = { left: 42, right: 42, top: 34, bottom: 48 };
 
 export type FaceName = 'sans' | 'sansMedium' | 'sansSemi' | 'mono' | 'monoMedium';
 

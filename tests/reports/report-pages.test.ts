@@ -149,6 +149,7 @@ describe('laying out on pages', () => {
       paginate([{ kind: 'slab', slab: slab(used) }, block], 100).map((page) => page.slabs.length);
     expect(after(35)).toEqual([3]);
     expect(after(70)).toEqual([1, 2]);
+    expect(after(55)).toEqual([1, 2]);
     expect(after(45)).toEqual([2, 1]);
   });
 

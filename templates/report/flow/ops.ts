@@ -69,6 +69,13 @@ export function beside(placed: readonly { slab: Slab; x: number }[]): Slab {
   };
 }
 
+/** The same items, the last of them on one page with what follows. */
+export function keptWithNext(items: readonly FlowItem[]): FlowItem[] {
+  return items.map((item, index) =>
+    index === items.length - 1 && item.kind === 'slab' ? { ...item, keepWithNext: true } : item,
+  );
+}
+
 /** Flowing items as one piece that is not split. */
 export function asSlab(items: readonly FlowItem[]): Slab {
   const ops: Op[] = [];

@@ -11,7 +11,7 @@ export interface PageContent {
 }
 
 /** A block moves to a new page as a whole when it leaves no more than this part of the page empty. */
-const EMPTY_PART = 0.45;
+const EMPTY_PART = 0.5;
 /** Fewest rows of a table at the foot and at the head of a page. */
 const ROWS_TOGETHER = 2;
 

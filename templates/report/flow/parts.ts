@@ -43,7 +43,7 @@ export function heading(kit: Kit, words: string, more: { after?: string; right?:
     ops.push(moved(after, fits ? behind : 0, fits ? 10.4 : heightPt - 3));
     if (!fits) heightPt += after.heightPt;
   }
-  return [space(15), slabItem({ heightPt, ops }, { keepWithNext: true, bookmark: words })];
+  return [space(13), slabItem({ heightPt, ops }, { keepWithNext: true, bookmark: words })];
 }
 
 /** Words that may go over several pages. */

@@ -21,6 +21,8 @@ const PAD_Y_PT = { open: 3.5, close: 1.25 };
 
 export type Density = keyof typeof PAD_Y_PT;
 const HEAD_PAD_PT = 3.5;
+/** Heads up to this width stay on one line. */
+const HEAD_ONE_LINE_PT = 23;
 const GAP_PT = 8;
 /** A row of more lines than this is set as several, so that none is ever higher than a page. */
 const LINES_PER_ROW = 40;
@@ -148,7 +150,11 @@ export function naturalWidth(
   const widths = cells.map(
     (cell) => type.width(cell, column.style) + (isFigure(cell) ? missingWidth(type, cell, column.style, decimals) : 0),
   );
-  return Math.max(type.width(column.head, TYPE.columnHead), ...widths, 12) + 2 * PAD_X_PT + 0.5;
+  // A long head of several words goes on two lines rather than make its column wide.
+  const whole = type.width(column.head, TYPE.columnHead);
+  const words = column.head.split(' ').map((word) => type.width(word, TYPE.columnHead));
+  const head = whole <= HEAD_ONE_LINE_PT ? whole : Math.max(...words, whole * 0.62);
+  return Math.max(head, ...widths, 12) + 2 * PAD_X_PT + 0.5;
 }
 
 const inner = (column: Column) => column.widthPt - 2 * PAD_X_PT;

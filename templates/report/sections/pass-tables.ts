@@ -1,5 +1,6 @@
 import type { PassBlock } from '@/lib/reporting/report-model';
 import {
+  asSlab,
   beside as besideEachOther,
   type FlowItem,
   type Slab,
@@ -19,14 +20,23 @@ const TITLE = TYPE.small;
 const GAP_PT = 14;
 /** Depth of such pieces: well below a page. */
 const ROWS_DEEP = 40;
+/** Tables up to this depth stand beside each other. */
+const ROWS_SMALL = 14;
 /** A longer table of few columns is set in pieces beside each other. */
 const ROWS_BESIDE = 8;
 
-/** The readings of a pass in a width: tables too wide are cut between columns, long narrow ones set in pieces beside each other. */
+/**
+ * The readings of a pass in a width: small tables beside each other; a table too wide is cut between columns, a long narrow one set in
+ * pieces beside each other.
+ */
 export function passTables(kit: Kit, pass: PassBlock, widthPt: number): FlowItem[] {
+  const small = pass.tables.every(
+    (readings) => readings.rows.length <= ROWS_SMALL && ownWidth(kit, readings) <= widthPt,
+  );
+  if (small && pass.tables.length > 1) return inRows(kit, pass.tables, widthPt);
   return pass.tables.flatMap((readings, index) => [
     ...(index ? [space(6)] : []),
-    ...(readings.title ? [slabItem(kit.type.paragraph(readings.title, TITLE, widthPt), { keepWithNext: true })] : []),
+    ...titleOf(kit, readings, widthPt),
     ...cutToWidth(kit, readings, widthPt).flatMap((part, partNo) => [
       ...(partNo ? [space(6)] : []),
       ...oneTable(kit, part, widthPt),
@@ -36,7 +46,31 @@ export function passTables(kit: Kit, pass: PassBlock, widthPt: number): FlowItem
 
 /** Width that the readings of a pass would like to have. */
 export function passWidth(kit: Kit, pass: PassBlock): number {
-  return Math.max(0, ...pass.tables.map((readings) => tableWidth(columnsOf(kit, readings))));
+  return Math.max(0, ...pass.tables.map((readings) => ownWidth(kit, readings)));
+}
+
+const ownWidth = (kit: Kit, readings: ReadingTable) => tableWidth(columnsOf(kit, readings));
+
+function titleOf(kit: Kit, { title }: ReadingTable, widthPt: number): FlowItem[] {
+  return title ? [slabItem(kit.type.paragraph(title, TITLE, widthPt), { keepWithNext: true })] : [];
+}
+
+/** Small tables beside each other, as many in a row as fit. */
+function inRows(kit: Kit, tables: readonly ReadingTable[], widthPt: number): FlowItem[] {
+  const rows: { slab: Slab; x: number }[][] = [];
+  let x = 0;
+  for (const readings of tables) {
+    const columns = columnsOf(kit, readings);
+    const own = Math.max(tableWidth(columns), Math.min(widthPt, kit.type.width(readings.title ?? '', TITLE)));
+    if (!rows.length || x + own > widthPt) {
+      rows.push([]);
+      x = 0;
+    }
+    const cells = readings.rows.map((row) => [row.label, ...row.cells]);
+    rows.at(-1)?.push({ slab: asSlab([...titleOf(kit, readings, own), table(kit.type, columns, cells, 'close')]), x });
+    x += own + GAP_PT;
+  }
+  return rows.flatMap((row, index) => [...(index ? [space(6)] : []), slabItem(besideEachOther(row))]);
 }
 
 function oneTable(kit: Kit, readings: ReadingTable, widthPt: number): FlowItem[] {

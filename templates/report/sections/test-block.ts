@@ -5,7 +5,17 @@ import { longDate, sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
 import { formatDecimal } from '@/lib/units/format';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
-import { asSlab, beside, type FlowItem, heightOf, slabItem, space, stack } from '@/templates/report/flow/ops';
+import {
+  asSlab,
+  beside,
+  type FlowItem,
+  heightOf,
+  keptWithNext,
+  type Slab,
+  slabItem,
+  space,
+  stack,
+} from '@/templates/report/flow/ops';
 import { flowingText, heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
 import { type Column, table, tableWidth } from '@/templates/report/flow/table';
 import { passReadings } from '@/templates/report/sections/pass-readings';
@@ -22,7 +32,7 @@ const READINGS_BESIDE_PT = 260;
  * rule of the final result over the whole width.
  */
 export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
-  const head = heading(kit, `${block.order} · ${block.title}`, { after: block.componentWords, right: block.reference });
+  const head = heading(kit, `${block.order} · ${block.title}`, { after: componentOf(block), right: block.reference });
   const items: FlowItem[] = [space(2)];
   if (block.leftOut) items.push(...leftOut(kit, block.leftOut));
   else items.push(...measured(kit, block));
@@ -31,23 +41,39 @@ export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
   return [gap, { kind: 'together', items: [titled, ...items, ...corrections(kit, block)] }];
 }
 
+/** What the test is bound to, unless the title names all of it. */
+function componentOf({ title, component, componentWords }: TestBlock): string {
+  const { spindle, axis, reference, turret, tailstock } = component;
+  const ids = [spindle, axis, reference, turret, tailstock].filter((id) => id !== undefined);
+  return ids.length && ids.every((id) => title.includes(id)) ? '' : componentWords;
+}
+
 function measured(kit: Kit, block: TestBlock): FlowItem[] {
   const side: Kit = { ...kit, widthPt: SIDE_PT };
   const main: Kit = { ...kit, widthPt: kit.widthPt - SIDE_PT - GUTTER_PT };
   const plots = plotsSlab(main, block);
-  const besidePlots = passReadings(main, block.passes);
-  const fits = heightOf(besidePlots) <= READINGS_BESIDE_PT;
-  const left = stack(
-    [sketchSlab(side, block), asSlab([pairs(side, details(block), { columns: 1, labelPt: 52, small: true })])],
-    4,
-  );
-  const right = stack([...(plots ? [plots] : []), ...(fits ? [asSlab(besidePlots)] : [])], 6);
-  const pictures = beside([
-    { slab: left, x: 0 },
-    { slab: right, x: SIDE_PT + GUTTER_PT },
-  ]);
-  const below = fits ? [] : [space(6), ...passReadings(kit, block.passes)];
-  return [slabItem(pictures, { keepWithNext: true }), ...below, ...finalResult(kit, block)];
+  const readings = passReadings(main, block.passes);
+  const narrow = heightOf(readings) <= READINGS_BESIDE_PT;
+  const pictured = (left: readonly Slab[], right: readonly Slab[]) =>
+    beside([
+      { slab: stack(left, 4), x: 0 },
+      { slab: stack(right, 6), x: SIDE_PT + GUTTER_PT },
+    ]);
+  const drawn = plots ? [plots] : [];
+  if (narrow) {
+    const judged = asSlab([pairs(side, details(block), { columns: 1, labelPt: 52, small: true })]);
+    const all = pictured([sketchSlab(side, block), judged], [...drawn, asSlab(readings)]);
+    return [slabItem(all, { keepWithNext: true }), ...finalResult(kit, block)];
+  }
+  const judged = pairs(kit, details(block), { columns: 2, labelPt: 52, small: true });
+  return [
+    slabItem(pictured([sketchSlab(side, block)], drawn), { keepWithNext: true }),
+    space(4),
+    judged,
+    space(6),
+    ...keptWithNext(passReadings(kit, block.passes)),
+    ...finalResult(kit, block),
+  ];
 }
 
 function leftOut(kit: Kit, { reason, text }: NonNullable<TestBlock['leftOut']>): FlowItem[] {
@@ -75,7 +101,7 @@ function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
     signed,
     verdict,
     shown: pass.resultMm,
-    widthPx: 860,
+    widthPx: 880,
   });
   const words = REPORT_WORDS.block;
   const parts = [

@@ -30,6 +30,10 @@ export function plotsSlab(kit: Kit, block: TestBlock): Slab | null {
 function plotSlab(kit: Kit, pass: PassBlock, widthPt: number, size: { widthPx: number; heightPx: number }): Slab {
   const name = kit.type.line(pass.kindWords, TYPE.columnHead);
   if (!pass.plot) return name;
-  const drawing = plotDrawing(pass.plot, { ...size, toleranceUm: pass.judgement?.toleranceUm ?? null });
+  const drawing = plotDrawing(pass.plot, {
+    ...size,
+    heightPx: pass.plot.kind === 'polar' ? size.heightPx + 40 : size.heightPx,
+    toleranceUm: pass.judgement?.toleranceUm ?? null,
+  });
   return stack([name, drawingSlab(kit.type, drawing, widthPt)], 2);
 }
