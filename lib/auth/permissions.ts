@@ -38,6 +38,7 @@ export type Action = keyof typeof permissions;
 
 /** Fails closed: an unknown action or an empty list of roles is refused. */
 export function can(held: readonly string[], action: Action): boolean {
-  const entry = permissions[action] as { roles: readonly string[] } | undefined;
-  return entry !== undefined && held.some((role) => entry.roles.includes(role));
+  // Own entries only: every object answers to `toString`.
+  const entry: { roles: readonly string[] } | null = Object.hasOwn(permissions, action) ? permissions[action] : null;
+  return entry !== null && held.some((role) => entry.roles.includes(role));
 }
