@@ -1,0 +1,60 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { GET as getTest } from '@/app/api/catalogue/[code]/[test]/route';
+import { GET as getCatalogue } from '@/app/api/catalogue/route';
+import { exampleComponent } from '@/lib/planning/catalogue';
+import { toleranceLines } from '@/lib/planning/tolerance-words';
+import { allDefinitions } from '@/standards/registry';
+import type { TestDefinition } from '@/standards/types';
+import { callRoute } from '@/tests/helpers/call-route';
+import { openTestWorkshop, type TestWorkshop } from '@/tests/helpers/test-workshop';
+
+let workshop: TestWorkshop;
+beforeAll(async () => {
+  workshop = await openTestWorkshop();
+});
+afterAll(() => workshop.close());
+
+describe('the catalogue', () => {
+  it('lists every code with its tests, each with its tolerance and where it comes from', async () => {
+    const { body } = await callRoute<{
+      items: { slug: string; title: string; tests: Pick<TestDefinition, 'id' | 'tolerance'>[] }[];
+    }>(getCatalogue, { as: workshop.people.customer });
+    expect(body.items.map(({ title }) => title)).toEqual(['ISO 13041-1:2020', 'common practice', 'ISO 13041-6:2009']);
+    const tests = body.items.flatMap(({ tests }) => tests);
+    expect(new Set(tests.map(({ id }) => id))).toEqual(new Set(allDefinitions().map(({ id }) => id)));
+    for (const { id, tolerance } of tests) {
+      if (tolerance) expect(tolerance.provenance.text, id).not.toBe('');
+    }
+  });
+
+  it('answers one test by slug or by title, the id in any case', async () => {
+    for (const code of ['iso-13041-1-2020', 'ISO 13041-1:2020']) {
+      const { body } = await callRoute<{ definition: TestDefinition }>(getTest, {
+        as: workshop.people.inspector,
+        params: { code, test: 'ax-1a' },
+      });
+      expect(body.definition).toMatchObject({ id: 'AX-1a', method: 'parallelism', edition: '2020' });
+    }
+    const missing = await callRoute(getTest, {
+      as: workshop.people.inspector,
+      params: { code: 'iso-13041-1-2020', test: 'WP-1' },
+    });
+    expect(missing.status).toBe(404);
+  });
+
+  it('is not for somebody who is not signed in', async () => {
+    expect((await callRoute(getCatalogue)).status).toBe(401);
+  });
+
+  it('can show every test on a component and every tolerance in mm', () => {
+    for (const definition of allDefinitions()) {
+      expect(Object.keys(exampleComponent(definition)).length, definition.id).toBeGreaterThan(0);
+      if (!definition.tolerance) continue;
+      const lines = toleranceLines(definition.tolerance);
+      expect(lines.length, definition.id).toBeGreaterThan(0);
+      for (const line of lines) expect(line.toleranceMm).toMatch(/^0\.\d{2,4}$/);
+    }
+    const nose = allDefinitions().find(({ id }) => id === 'SP-1a')?.tolerance;
+    expect(nose && toleranceLines(nose).map(({ toleranceMm }) => toleranceMm)).toEqual(['0.005', '0.008', '0.012']);
+  });
+});
