@@ -32,6 +32,8 @@ const TEXT_OPTIONS = { lineBreak: false, baseline: 'alphabetic' };
 export class PagePainter {
   /** Ink of the text before: said again only when it changes. */
   private letters: Ink | null = null;
+  /** Ink and width of the line before, likewise. */
+  private rule: { ink: Ink; widthPt: number } | null = null;
 
   constructor(
     private readonly painter: Painter,
@@ -46,14 +48,15 @@ export class PagePainter {
     if (op.op === 'group') this.paint(op.ops, x + op.x, y + op.y);
     else if (op.op === 'text') this.text(op.text, x + op.x, y + op.y, op.style);
     else if (op.op === 'drawing') this.drawing(op.items, x + op.x, y + op.y, op.scale);
+    else if (op.op === 'line' && !op.dash) this.line(op, x, y);
     else {
-      const { letters } = this;
+      const { letters, rule } = this;
       this.painter.save();
       if (op.op === 'turned') this.turned(op, x, y);
       else if (op.op === 'line') this.line(op, x, y);
       else this.box(op, x, y);
       this.painter.restore();
-      this.letters = letters;
+      [this.letters, this.rule] = [letters, rule];
     }
   }
 
@@ -63,7 +66,10 @@ export class PagePainter {
   }
 
   private line(op: Extract<Op, { op: 'line' }>, x: number, y: number): void {
-    const painter = this.painter.lineWidth(op.widthPt).strokeColor(colour(op.ink));
+    const { painter, rule } = this;
+    if (rule?.ink !== op.ink) painter.strokeColor(colour(op.ink));
+    if (rule?.widthPt !== op.widthPt) painter.lineWidth(op.widthPt);
+    this.rule = op;
     if (op.dash) painter.dash(op.dash);
     painter
       .moveTo(x + op.x1, y + op.y1)

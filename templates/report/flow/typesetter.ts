@@ -126,6 +126,7 @@ export const baseLine = (style: TextStyle) => (style.leadPt - style.sizePt) / 2 
 
 /** One kind of line break, no tabs, no control characters (an indicator's transmitter may have left some in a remark). */
 function clean(text: string): string {
+  if (PLAIN.test(text)) return text;
   return text
     .normalize('NFC')
     .replaceAll('\r\n', '\n')
