@@ -56,6 +56,10 @@ export const findJob = (db: Db, id: string): Promise<JobRow | undefined> => db('
 export const lockJob = (db: Db, id: string): Promise<JobRow | undefined> =>
   db('jobs').where({ id }).forUpdate().first(jobColumns);
 
+/** Holds the job as it is while its readings are written: a report that is being issued waits, or is out before they are looked at. */
+export const holdJob = (db: Db, id: string): Promise<JobRow | undefined> =>
+  db('jobs').where({ id }).forShare().first(jobColumns);
+
 export async function insertJob(
   db: Db,
   job: JobForm & { codes: JobRow['codes']; makeUp: MakeUp; createdBy: string },

@@ -19,8 +19,9 @@ interface Author {
 }
 
 /**
- * Applies operations to the fields of a sheet, in the order given, once each: an operation that is known already is answered as it was
- * answered then; one that was typed over another version is a conflict, and both texts are kept. The caller holds the sheet's lock.
+ * Applies operations to the fields of a sheet, once each and in the device's own order (`seq`, not its clock): an operation that is
+ * known already is answered as it was answered then; one that was typed over another version is a conflict, and both texts are kept.
+ * The answers stand in the order of the operations. The caller holds the sheet's lock.
  *
  * @param passIds passes of the sheet that may be written to
  * @param closed says why nothing may be written, or null
@@ -41,21 +42,29 @@ export async function applyOperations(
     db,
     [...new Set(operations.map((operation) => operation.passId))].filter((id) => passIds.has(id)),
   );
-  const answers: OperationAnswer[] = [];
+  const answers = new Array<OperationAnswer>(operations.length);
+  const inOrder = operations.map((operation, index) => ({ operation, index }));
+  inOrder.sort((a, b) => a.operation.seq - b.operation.seq);
+  const undecided = new Set<string>();
   const changed = new Map<string, ReadingOperation & { version: number }>();
   const log: Record<string, unknown>[] = [];
 
-  for (const operation of operations) {
+  for (const { operation, index } of inOrder) {
+    const key = `${operation.passId} ${operation.cellId}`;
     const earlier = known.get(operation.opId);
     if (earlier) {
-      answers.push(earlier);
+      answers[index] = sameChange(earlier, operation) ? earlier.answer : usedAlready(operation);
+      if (earlier.answer.outcome === 'conflict') undecided.add(key);
       continue;
     }
-    const key = `${operation.passId} ${operation.cellId}`;
     const cell = cells.get(key);
-    const answer = decide(operation, cell, passIds, closed);
-    answers.push(answer);
-    known.set(operation.opId, answer.outcome === 'applied' ? { ...answer, outcome: 'already' } : answer);
+    const answer = decide(operation, cell, passIds, closed, undecided.has(key));
+    answers[index] = answer;
+    known.set(operation.opId, {
+      ...operation,
+      answer: answer.outcome === 'applied' ? { ...answer, outcome: 'already' } : answer,
+    });
+    if (answer.outcome === 'conflict') undecided.add(key);
     if (answer.outcome === 'applied') {
       cells.set(key, {
         text: operation.text,
@@ -73,19 +82,38 @@ export async function applyOperations(
   return answers;
 }
 
+/** An operation that the server has answered for, with what it wanted. */
+type KnownOperation = Pick<ReadingOperation, 'passId' | 'cellId' | 'text'> & { answer: OperationAnswer };
+
+const sameChange = (earlier: KnownOperation, operation: ReadingOperation): boolean =>
+  earlier.passId === operation.passId && earlier.cellId === operation.cellId && earlier.text === operation.text;
+
+/** Answering `already` here would let the device forget a text that the server never kept. */
+const usedAlready = ({ opId }: ReadingOperation): OperationAnswer => ({
+  opId,
+  outcome: 'rejected',
+  problem: 'The id of this change belongs to another change that was sent before.',
+});
+
+/** `0.5` and `0.5` agree only when both mean the same unit; a unit typed with the figure counts before the column's. */
+const agrees = (cell: Cell | undefined, { text, unit }: ReadingOperation): boolean =>
+  cell !== undefined && cell.text === text && figureOf(text, cell.unit).unit === figureOf(text, unit).unit;
+
 function decide(
   operation: ReadingOperation,
   cell: Cell | undefined,
   passIds: Set<string>,
   closed: string | null,
+  behindConflict: boolean,
 ): OperationAnswer {
   const { opId } = operation;
   if (!passIds.has(operation.passId))
     return { opId, outcome: 'rejected', problem: 'This set of readings does not belong to this sheet.' };
   if (closed) return { opId, outcome: 'rejected', problem: closed };
   const version = cell?.version ?? 0;
-  // The same text over another version is no conflict: two devices agree.
-  if (operation.baseVersion !== version && cell?.text !== operation.text) {
+  // The same figure over another version is no conflict: two devices agree. What was typed over a text that is itself in conflict may
+  // fit the stranger's version by chance: it waits for the same decision.
+  if ((behindConflict || operation.baseVersion !== version) && !agrees(cell, operation)) {
     return {
       opId,
       outcome: 'conflict',
@@ -101,18 +129,34 @@ function decide(
   return { opId, outcome: 'applied', version: version + 1 };
 }
 
-async function knownOperations(db: Db, opIds: string[]): Promise<Map<string, OperationAnswer>> {
-  const rows: { id: string; outcome: OperationAnswer['outcome']; version: number | null; problem: string | null }[] =
-    await db('reading_operations').whereIn('id', opIds).select('id', 'outcome', 'version', 'problem');
+async function knownOperations(db: Db, opIds: string[]): Promise<Map<string, KnownOperation>> {
+  const rows: {
+    id: string;
+    passId: string;
+    cellId: string;
+    text: string;
+    outcome: OperationAnswer['outcome'];
+    version: number | null;
+    problem: string | null;
+  }[] = await db('reading_operations').whereIn('id', opIds).select({
+    id: 'id',
+    passId: 'pass_id',
+    cellId: 'pointer',
+    text: 'text',
+    outcome: 'outcome',
+    version: 'version',
+    problem: 'problem',
+  });
   return new Map(
-    rows.map((row) => [
-      row.id,
-      row.outcome === 'conflict'
-        ? ({ opId: row.id, outcome: 'conflict', server: JSON.parse(row.problem ?? '{}') } as OperationAnswer)
-        : row.outcome === 'rejected'
-          ? { opId: row.id, outcome: 'rejected', problem: row.problem ?? '' }
-          : { opId: row.id, outcome: 'already', version: row.version ?? 0 },
-    ]),
+    rows.map(({ id, passId, cellId, text, outcome, version, problem }) => {
+      const answer =
+        outcome === 'conflict'
+          ? ({ opId: id, outcome, server: JSON.parse(problem ?? '{}') } as OperationAnswer)
+          : outcome === 'rejected'
+            ? { opId: id, outcome, problem: problem ?? '' }
+            : { opId: id, outcome: 'already' as const, version: version ?? 0 };
+      return [id, { passId, cellId, text, answer }];
+    }),
   );
 }
 

@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { Db } from '@/db/client';
 import { recordEvent } from '@/db/queries/audit';
-import { findJob } from '@/db/queries/jobs';
+import { holdJob } from '@/db/queries/jobs';
 import { findPass, replacePassInstruments } from '@/db/queries/passes';
 import { lockSheet } from '@/db/queries/sheets';
 import { type InstrumentChoice, listInstrumentChoices } from '@/db/read-models/sheet-view';
@@ -23,7 +23,7 @@ export async function changePass(
 ): Promise<number> {
   const sheet = await lockSheet(db, ids.sheetId);
   const pass = await findPass(db, ids.passId);
-  const job = sheet && (await findJob(db, sheet.jobId));
+  const job = sheet && (await holdJob(db, sheet.jobId));
   if (!sheet || !job || pass?.sheetId !== ids.sheetId) throw notFound('set of readings');
   const closed = closedBecause(job.state);
   if (closed) throw conflict(closed);
@@ -71,6 +71,8 @@ async function checkInstruments(
     const dueOn = calibrationOn(instrument?.calibrations ?? [], measuredOn)?.dueOn ?? null;
     if (!instrument)
       errors.push({ pointer: `/instruments/${index}`, detail: 'This instrument is not in the register.' });
+    else if (used.findIndex(({ instrumentId }) => instrumentId === entry.instrumentId) !== index)
+      errors.push({ pointer: `/instruments/${index}`, detail: `${instrument.number} is named twice.` });
     else if (isOverdue(dueOn, measuredOn) && !(entry.overrideReason && entry.overrideBy)) {
       errors.push({
         pointer: `/instruments/${index}/overrideReason`,

@@ -1,5 +1,5 @@
 import type { Db } from '@/db/client';
-import { findJob } from '@/db/queries/jobs';
+import { holdJob } from '@/db/queries/jobs';
 import { applyOperations } from '@/db/queries/operations';
 import { findPass, listPasses, listReadings, type PassRow } from '@/db/queries/passes';
 import { keepResult } from '@/db/queries/results';
@@ -46,7 +46,7 @@ export async function keepReadings(
   author: { accountId: string; name: string },
 ): Promise<KeptReadings> {
   const sheet = await lockSheet(db, sheetId);
-  const job = sheet && (await findJob(db, sheet.jobId));
+  const job = sheet && (await holdJob(db, sheet.jobId));
   if (!sheet || !job) throw notFound('sheet');
   const passes = await listPasses(db, [sheetId]);
   const writable = new Set(passes.filter((pass) => pass.linkedTo === null).map((pass) => pass.id));

@@ -1,5 +1,5 @@
 import type { Db } from '@/db/client';
-import { findJob } from '@/db/queries/jobs';
+import { holdJob } from '@/db/queries/jobs';
 import { insertPass, listPasses, listReadings, type PassRow } from '@/db/queries/passes';
 import { listResults } from '@/db/queries/results';
 import { lockSheet, type SheetRow } from '@/db/queries/sheets';
@@ -21,7 +21,7 @@ export async function startPass(
   by: { name: string },
 ): Promise<string> {
   const sheet = await lockSheet(db, sheetId);
-  const job = sheet && (await findJob(db, sheet.jobId));
+  const job = sheet && (await holdJob(db, sheet.jobId));
   if (!sheet || !job) throw notFound('sheet');
   const closed = closedBecause(job.state);
   if (closed) throw conflict(closed);
@@ -53,6 +53,9 @@ async function linkPass(
 ): Promise<string> {
   const found = passes.find((row) => row.id === linkTo && row.kind === 'as-found');
   if (!found) throw conflict('As left can only be linked to the readings as found of the same sheet.');
+  if (passes.some((row) => row.linkedTo !== null)) throw conflict('As left is declared to be as found already.');
+  if (passes.some((row) => row.kind !== 'as-found' && row.takenAt !== null))
+    throw conflict('Readings were taken after those as found: as left cannot be declared to be as found any more.');
   const [result] = await listResults(db, [found.id]);
   if (result?.state !== 'complete')
     throw conflict('The readings as found are not complete: they cannot stand for as left.');

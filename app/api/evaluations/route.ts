@@ -4,7 +4,7 @@ import { DomainError } from '@/lib/errors';
 import { EvaluationError, evaluateUnknown, evaluationInput } from '@/lib/evaluation';
 import { problemResponse } from '@/lib/http/problem';
 
-/** Room for a burst, then two requests a second for one address: a calculator, not a data centre. */
+/** Room for a burst, then four requests a second for one address: a calculator, not a data centre. */
 const limit = { capacity: 240, refillPerSecond: 4 };
 const maxBytes = 2_000_000;
 

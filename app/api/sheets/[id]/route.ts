@@ -1,4 +1,5 @@
 import { recordEvent } from '@/db/queries/audit';
+import { holdJob } from '@/db/queries/jobs';
 import { findSheet, updateSheet } from '@/db/queries/sheets';
 import { sheetView } from '@/db/read-models/sheet-view';
 import { changedMeanwhile, conflict, notFound } from '@/lib/errors';
@@ -41,9 +42,9 @@ export const PATCH = route({
   needsVersion: true,
   async handle({ trx, viewer, params, body, expectedVersion }) {
     const sheet = await findSheet(trx, params.id);
-    const view = sheet && (await sheetView(trx, params.id));
-    if (!sheet || !view) throw notFound('sheet');
-    const closed = closedBecause(view.job.state);
+    const job = sheet && (await holdJob(trx, sheet.jobId));
+    if (!job) throw notFound('sheet');
+    const closed = closedBecause(job.state);
     if (closed) throw conflict(closed);
     if (!(await updateSheet(trx, params.id, expectedVersion, { ...body, by: viewer.name }))) throw changedMeanwhile();
     if (body.leftOut !== undefined) {
