@@ -20,6 +20,17 @@ declare module 'next-auth/jwt' {
 
 /** Five quick failures, then one attempt every 20 seconds: slowed down, never locked out for good. */
 const attempts = { capacity: 5, refillPerSecond: 1 / 20 };
+/** One address tries many accounts: room for a whole workshop behind one router, not for a list of stolen passwords. */
+const attemptsFrom = { capacity: 60, refillPerSecond: 1 / 2 };
+
+const addressOf = (request: { headers?: Record<string, string> } | undefined): string =>
+  request?.headers?.['x-forwarded-for']?.split(',')[0]?.trim() || 'unknown';
+
+/** @throws an error that the sign-in page turns into "wait n seconds" */
+async function refuseTooMany(bucket: string, limit: { capacity: number; refillPerSecond: number }): Promise<void> {
+  const waitSeconds = await takeAttempt(appDb(), bucket, limit.capacity, limit.refillPerSecond);
+  if (waitSeconds > 0) throw new Error(`wait:${Math.ceil(waitSeconds)}`);
+}
 
 /**
  * Sign-in by e-mail and password. The session is a signed cookie (the library's credentials need that); its version is compared with
@@ -32,13 +43,13 @@ export const authOptions = (): NextAuthOptions => ({
   providers: [
     CredentialsProvider({
       credentials: { email: { type: 'email' }, password: { type: 'password' } },
-      async authorize(credentials) {
+      async authorize(credentials, request) {
         const email = credentials?.email?.trim().toLowerCase() ?? '';
         const password = credentials?.password ?? '';
         if (email.length > 320 || password.length > 1000) return null;
         const bucket = `sign-in:${email}`;
-        const waitSeconds = await takeAttempt(appDb(), bucket, attempts.capacity, attempts.refillPerSecond);
-        if (waitSeconds > 0) throw new Error(`wait:${Math.ceil(waitSeconds)}`);
+        await refuseTooMany(`sign-in-from:${addressOf(request)}`, attemptsFrom);
+        await refuseTooMany(bucket, attempts);
         const account = await accountByEmail(appDb(), email);
         if (!(await passwordMatches(account?.passwordHash, password)) || !account || account.disabled) return null;
         const [first] = await accountMemberships(appDb(), account.id);
