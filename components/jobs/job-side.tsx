@@ -33,13 +33,13 @@ export function NotInPlan(props: {
   const { exclusions } = props;
   if (exclusions.length === 0) return null;
   return (
-    <section aria-labelledby="not-in-plan">
+    <section aria-labelledby="not-in-plan" className="mt-8">
       <h2 id="not-in-plan" className="font-semibold">
         Not in the plan
       </h2>
-      <ul className="grid gap-1 text-[15px]">
+      <ul className="mt-1 text-[15px] leading-snug">
         {exclusions.map(({ key, title, reason, text }) => (
-          <li key={key}>
+          <li key={key} className="border-b border-hair py-1.5">
             {title} <span className="text-ink2">{[leftOutReasons[reason], text].filter(Boolean).join(': ')}</span>
           </li>
         ))}

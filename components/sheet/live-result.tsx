@@ -33,8 +33,9 @@ export function LiveResult({ rules, signed }: { rules: SheetRules; signed: boole
   const judged = isJudged(outcome) ? outcome : null;
   const words = resultWords(outcome);
   const local = judged?.judgement.local;
+  const { box, widthPx } = useWidth(600);
   return (
-    <div className="grid gap-1">
+    <div ref={box} className="grid gap-1">
       <LimitRule
         deviationUm={judged?.result.deviation ?? null}
         toleranceUm={judged ? judged.judgement.toleranceUm : (rules.tolerance?.baseUm ?? null)}
@@ -42,7 +43,7 @@ export function LiveResult({ rules, signed }: { rules: SheetRules; signed: boole
         signed={judged?.result.signed ?? signed}
         verdict={judged?.judgement.verdict ?? null}
         shown={judged?.displayed.textMm ?? null}
-        widthPx={620}
+        widthPx={Math.min(widthPx, 680)}
       />
       <p className="flex flex-wrap items-baseline gap-x-4 gap-y-1">
         <VerdictMark verdict={words.mark} words={words.verdict} className="text-lg leading-6" />

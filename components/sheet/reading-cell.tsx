@@ -6,8 +6,8 @@ import { fieldId, fieldLabel, problemAt, problemId } from './field-problem';
 import { useEvaluated, useOpenPass } from './sheet-context';
 
 const looks: Record<Field['role'], string> = {
-  reading: 'min-w-20 border-line bg-leaf text-xl',
-  'set-up': 'min-w-14 border-transparent text-base text-ink2 hover:border-line',
+  reading: 'min-w-16 sm:min-w-20 border-line bg-leaf text-xl',
+  'set-up': 'min-w-14 border-line text-base text-ink2',
   choice: 'border-ink2 bg-leaf text-base',
 };
 const box =

@@ -12,30 +12,42 @@ export function useSaveState(log: ReadingLog) {
   return useSyncExternalStore(log.subscribe, log.snapshot, log.snapshot);
 }
 
-/** Where the readings are, always in sight; read out at most every ten seconds. */
-export function SaveLine({ log }: { log: ReadingLog }) {
+/** Where the readings are, in the header; the same stands at the foot, where it is read out. */
+export function SaveHeadLine({ log }: { log: ReadingLog }) {
+  const { words, tone } = saveWords(useSaveState(log));
+  return (
+    <SaveState>
+      <span aria-hidden="true" className={`hidden whitespace-nowrap lg:block ${ink[tone]}`}>
+        {words}
+      </span>
+    </SaveState>
+  );
+}
+
+/** Where the readings are, at the foot and so always in sight; read out at most every ten seconds. */
+export function SaveFootLine({ log, className = '' }: { log: ReadingLog; className?: string }) {
   const state = useSaveState(log);
   const { words, tone } = saveWords(state);
   const spoken = useAtMostEvery(words, quietMs);
   const canSend = state.waiting > 0 && state.server !== 'reached';
   return (
-    <SaveState>
-      <span className="flex items-center gap-2">
-        <span aria-hidden="true" className={ink[tone]}>
-          {words}
-        </span>
-        <span className="sr-only">{spoken}</span>
-        {canSend && (
-          <button
-            type="button"
-            className="min-h-12 px-1 font-medium text-blue underline"
-            onClick={() => void log.sendNow()}
-          >
-            Send now
-          </button>
-        )}
+    <div className={`flex items-center gap-2 text-sm leading-tight ${className}`}>
+      <span aria-hidden="true" className={ink[tone]}>
+        {words}
       </span>
-    </SaveState>
+      <span role="status" className="sr-only">
+        {spoken}
+      </span>
+      {canSend && (
+        <button
+          type="button"
+          className="min-h-12 px-1 font-medium text-blue underline"
+          onClick={() => void log.sendNow()}
+        >
+          Send now
+        </button>
+      )}
+    </div>
   );
 }
 

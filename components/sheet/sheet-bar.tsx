@@ -4,9 +4,13 @@ import Link from 'next/link';
 import { type RefObject, useId } from 'react';
 import { Button, buttonClass } from '@/components/ui/button';
 import { isJudged } from './result-words';
+import { SaveFootLine } from './save-line';
 import { useEvaluated } from './sheet-context';
 import type { PassKind, SheetData, SheetPass } from './sheet-data';
 import type { SheetSession } from './sheet-session';
+
+/** Only where there is room beside the other words; a screen reader always hears it. */
+const sheetWord = 'max-sm:sr-only xl:max-2xl:sr-only';
 
 /** At the foot, always in reach: keypad, the next set of readings, leaving out, the sheets around, and the one strong action. */
 export function SheetBar(props: {
@@ -23,25 +27,25 @@ export function SheetBar(props: {
   onLeaveOut: () => void;
   onCheck: () => void;
 }) {
-  const { data, readOnly, keypad, checked, checkRef, onKeypad, onCheck } = props;
+  const { data, session, readOnly, keypad, checked, checkRef, onKeypad, onCheck } = props;
   const { job, neighbours } = data;
   const more = useId();
   return (
     <div
       data-print="no"
       data-at-foot
-      className="sticky bottom-0 z-20 flex flex-wrap items-center gap-2 border-t border-line bg-paper px-5 py-2.5 sm:px-7"
+      className="sticky bottom-0 z-20 flex flex-wrap items-center gap-2 border-t border-line bg-paper px-4 py-2.5 sm:px-7"
     >
       {!readOnly && (
         <>
-          <Button aria-pressed={keypad} className="px-3.5" onClick={onKeypad}>
+          <Button aria-pressed={keypad} className="px-3 sm:px-3.5" onClick={onKeypad}>
             {keypad ? 'Keypad off' : 'Keypad'}
           </Button>
           <div className="hidden gap-2 xl:flex">
             <PassActions {...props} />
           </div>
           <div className="xl:hidden">
-            <button type="button" popoverTarget={more} className={buttonClass('plain', false, 'px-3.5')}>
+            <button type="button" popoverTarget={more} className={buttonClass('plain', false, 'px-3 sm:px-3.5')}>
               More
             </button>
             <div
@@ -56,27 +60,33 @@ export function SheetBar(props: {
           </div>
         </>
       )}
+      <SaveFootLine log={session.log} className="min-w-0 max-sm:order-last max-sm:w-full sm:ml-1 sm:flex-1" />
       <nav aria-label="Sheets around" className="ml-auto flex gap-2">
         {neighbours.previous && (
           <Link
             href={`/jobs/${job.id}/sheets/${neighbours.previous.id}`}
             title={neighbours.previous.title}
-            className={buttonClass('plain', false, 'px-3.5')}
+            className={buttonClass('plain', false, 'gap-1.5 px-2.5 sm:px-3.5')}
           >
-            ‹ <span className="mx-1 max-sm:sr-only">Sheet</span> {neighbours.previous.position}
+            ‹ <span className={sheetWord}>Sheet</span> {neighbours.previous.position}
           </Link>
         )}
         {neighbours.next && (
           <Link
             href={`/jobs/${job.id}/sheets/${neighbours.next.id}`}
             title={neighbours.next.title}
-            className={buttonClass('plain', false, 'px-3.5')}
+            className={buttonClass('plain', false, 'gap-1.5 px-2.5 sm:px-3.5')}
           >
-            <span className="mr-1 max-sm:sr-only">Sheet</span> {neighbours.next.position} ›
+            <span className={sheetWord}>Sheet</span> {neighbours.next.position} ›
           </Link>
         )}
       </nav>
-      <Button ref={checkRef} variant={checked ? 'plain' : 'strong'} className="max-sm:w-full" onClick={onCheck}>
+      <Button
+        ref={checkRef}
+        variant={checked || readOnly ? 'plain' : 'strong'}
+        className="max-sm:w-full"
+        onClick={onCheck}
+      >
         {checked ? 'Check again' : 'Check the sheet'}
       </Button>
     </div>

@@ -10,7 +10,7 @@ import { PassConditions } from './pass-conditions';
 import { PassPanel } from './pass-panel';
 import { PassTabs } from './pass-tabs';
 import { Remark } from './remark';
-import { SaveLine, useSaveState } from './save-line';
+import { SaveHeadLine, useSaveState } from './save-line';
 import { SheetBar } from './sheet-bar';
 import { SheetCheck } from './sheet-check';
 import { OpenPassContext } from './sheet-context';
@@ -103,33 +103,14 @@ export function SheetScreen({ data }: { data: SheetData }) {
     <OpenPassContext
       value={{ session, passId, title: sheet.title, readOnly: readOnly || linked, keypad, checked, confirmed, confirm }}
     >
-      <SaveLine log={log} />
+      <SaveHeadLine log={log} />
       <div className="-mx-7 -mb-10 -mt-5 flex flex-col">
-        <div className="grid flex-1 lg:grid-cols-[minmax(18rem,23.5rem)_minmax(0,1fr)]">
-          <aside
-            className="flex flex-col gap-4 px-5 py-4 sm:px-7 lg:border-r lg:border-line lg:px-5"
-            aria-label="The test"
-          >
+        <div className="grid flex-1 lg:grid-cols-[minmax(18rem,23.5rem)_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
+          <section className="flex flex-col gap-4 px-5 py-4 sm:px-7 lg:px-5" aria-label="The test">
             <SheetHead data={data} />
-            <div className="grid gap-4 sm:max-lg:grid-cols-2">
-              <PassConditions
-                key={pass.id}
-                data={data}
-                pass={linked ? (passes.find(({ id }) => id === pass.linkedTo) ?? pass) : pass}
-                earlier={passes[at - 1] ?? null}
-                readOnly={readOnly || linked}
-                again={again}
-              />
-              <SheetBackground data={data} />
-            </div>
-            {keypad && (
-              <div className="sticky bottom-20 z-10 mt-auto hidden bg-paper pt-3 lg:block">
-                <Keypad onNothing={firstEmpty} />
-              </div>
-            )}
-          </aside>
+          </section>
           <section
-            className="min-w-0 px-5 py-3 max-lg:border-t max-lg:border-line sm:px-7 lg:px-5"
+            className="min-w-0 border-line px-5 py-3 max-lg:border-y sm:px-7 lg:col-start-2 lg:row-span-2 lg:row-start-1 lg:border-l lg:px-5"
             aria-label="Readings"
           >
             <SheetNotices
@@ -176,6 +157,24 @@ export function SheetScreen({ data }: { data: SheetData }) {
             <div className="mt-5 max-w-2xl">
               <Remark sheetId={sheet.id} live={live} readOnly={readOnly} again={again} />
             </div>
+          </section>
+          <section className="flex flex-col gap-4 px-5 py-4 sm:px-7 lg:px-5 lg:pt-0" aria-label="How it is taken">
+            <div className="grid gap-4 sm:max-lg:grid-cols-2">
+              <PassConditions
+                key={pass.id}
+                data={data}
+                pass={linked ? (passes.find(({ id }) => id === pass.linkedTo) ?? pass) : pass}
+                earlier={passes[at - 1] ?? null}
+                readOnly={readOnly || linked}
+                again={again}
+              />
+              <SheetBackground data={data} />
+            </div>
+            {keypad && (
+              <div className="fixed bottom-[4.4rem] left-0 z-10 hidden w-[23.5rem] border-t border-r border-line bg-paper px-5 py-3 lg:block">
+                <Keypad onNothing={firstEmpty} />
+              </div>
+            )}
           </section>
         </div>
         {keypad && (

@@ -12,7 +12,7 @@ export function pathSheets(sheets: StoredSheet[]): PathSheet[] {
     id: sheet.id,
     position: sheet.position,
     title: sheet.title,
-    component: componentIds(sheet.component),
+    component: componentIds(sheet.component, sheet.title),
     isNext: sheet.id === next?.id,
     ...lineOf(sheet),
   }));
@@ -43,7 +43,9 @@ function lineOf(sheet: StoredSheet): Pick<PathSheet, 'mark' | 'words' | 'result'
   };
 }
 
-/** `T1 · S1 · Z1`, the ids alone. */
-export function componentIds({ turret, axis, spindle, reference, tailstock }: BoundComponent): string {
-  return [turret, axis, spindle, reference, tailstock].filter(Boolean).join(' · ');
+/** `T1 · S1 · Z1`: the ids that the title does not name. */
+export function componentIds(component: BoundComponent, title: string): string {
+  const { turret, axis, spindle, reference, tailstock } = component;
+  const named = new Set(title.split(/[^A-Za-z0-9]+/));
+  return [turret, axis, spindle, reference, tailstock].filter((id) => id !== undefined && !named.has(id)).join(' · ');
 }

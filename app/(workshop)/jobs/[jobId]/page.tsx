@@ -64,8 +64,8 @@ export default async function JobPage({ params }: Params) {
           { label: 'Customer', value: customer.name },
         ]}
       />
-      <div className="mt-5 grid gap-x-9 gap-y-6 lg:grid-cols-[minmax(0,1fr)_18.75rem]">
-        <div className="lg:order-2">
+      <div className="mt-5 grid gap-x-9 gap-y-6 lg:grid-cols-[minmax(0,1fr)_18.75rem] lg:grid-rows-[auto_1fr]">
+        <div className="lg:col-start-2 lg:row-start-1">
           <WaitingForYou
             jobId={job.id}
             state={job.state}
@@ -77,7 +77,10 @@ export default async function JobPage({ params }: Params) {
             may={may}
             checkers={board.people.filter(({ role }) => role === 'reviewer').map(({ name }) => name)}
           />
-          <div className="mt-6 grid gap-5 sm:max-lg:grid-cols-2">
+        </div>
+        <div className="max-lg:order-3 lg:col-start-2 lg:row-start-2">
+          <div className="grid gap-5 sm:max-lg:grid-cols-2">
+            <JobReports reports={board.reports} timeZone={viewer.timeZone} />
             <JobConditions
               jobId={job.id}
               version={job.version}
@@ -96,11 +99,9 @@ export default async function JobPage({ params }: Params) {
             />
             <JobPeople people={board.people} />
             <JobFacts board={board} />
-            <NotInPlan exclusions={board.exclusions} />
-            <JobReports reports={board.reports} timeZone={viewer.timeZone} />
           </div>
         </div>
-        <div>
+        <div className="max-lg:order-2 lg:row-span-2 lg:row-start-1">
           <div className="mb-1 flex flex-wrap items-baseline gap-x-4">
             <h1 className="text-2xl font-semibold">The plan, in working order</h1>
             {sheets.length > 0 && <p className="text-sm text-ink2">{progressWords(board, viewer.timeZone)}</p>}
@@ -113,6 +114,7 @@ export default async function JobPage({ params }: Params) {
               by the machine’s sizes.
             </EmptyState>
           )}
+          <NotInPlan exclusions={board.exclusions} />
         </div>
       </div>
     </>

@@ -2,6 +2,7 @@ import type { FindingLine } from '@/components/report/findings-list';
 import type { JobBoard } from '@/db/read-models/job-board';
 import { componentWords } from '@/lib/planning/component-words';
 import type { CheckFinding } from '@/lib/reporting/check-findings';
+import { titleWithComponent } from '@/lib/reporting/title-with-component';
 
 const jobTitles: Partial<Record<CheckFinding['kind'], string>> = {
   'no-plan': 'Plan',
@@ -17,14 +18,14 @@ export function findingLines(findings: CheckFinding[], board: JobBoard): Finding
   const sheets = new Map(board.sheets.map((sheet) => [sheet.id, sheet]));
   return findings.map(({ kind, weight, sheetId, position, text }) => {
     const sheet = sheetId === null ? undefined : sheets.get(sheetId);
-    const component = sheet ? componentWords(sheet.component, job.makeUp) : '';
-    const title = sheet ? (sheet.title.includes(component) ? sheet.title : `${sheet.title}, ${component}`) : '';
     return {
       kind,
       weight,
       position,
       text,
-      title: title || (jobTitles[kind] ?? 'The job'),
+      title: sheet
+        ? titleWithComponent(sheet.title, componentWords(sheet.component, job.makeUp))
+        : (jobTitles[kind] ?? 'The job'),
       href: sheet
         ? `/jobs/${job.id}/sheets/${sheet.id}`
         : kind === 'no-plan'
