@@ -1,6 +1,5 @@
 import { randomBytes } from 'node:crypto';
 import createKnex, { type Knex } from 'knex';
-import { encode } from 'next-auth/jwt';
 import { appDb, inScope } from '@/db/client';
 import { addPeople, brackwaterMembers, type DemoOrganisation, quillmereMembers } from '@/db/seeds/demo-people';
 import { addInstruments, addMachines, type RegisteredMachine } from '@/db/seeds/demo-register';
@@ -10,6 +9,7 @@ import { newId } from '@/lib/id';
 import type { PlanForm } from '@/lib/schemas/job';
 import { makePlan, proposalsFor } from '@/lib/services/make-plan';
 import { openJob } from '@/lib/services/open-job';
+import { type Call, type CallAnswer, callRoute } from '@/tests/helpers/call-route';
 import { type ClonedDatabase, cloneDatabase } from '@/tests/helpers/clone-database';
 
 export type Member = 'inspector' | 'reviewer' | 'administrator' | 'customer' | 'stranger';
@@ -22,21 +22,10 @@ const emails: Record<Member, string> = {
   stranger: 'admin@brackwater.example',
 };
 
-export interface Answer {
-  status: number;
-  headers: Headers;
-  // biome-ignore lint/suspicious/noExplicitAny: a test looks into whatever was answered
-  body: any;
-}
+// biome-ignore lint/suspicious/noExplicitAny: a test looks into whatever was answered
+type Answered = any;
 
-export interface Asked {
-  as?: Member | null;
-  method?: string;
-  path?: string;
-  params?: Record<string, string>;
-  body?: unknown;
-  headers?: Record<string, string>;
-}
+export type Asked = Omit<Call, 'as'> & { as?: Member | null };
 
 /** Two organisations with people, machines and instruments on a database of their own; nothing is planned or measured yet. */
 export class Workshop {
@@ -108,24 +97,9 @@ export class Workshop {
     return inScope({ organisationId, accountId, customerId }, work);
   }
 
-  /** Calls a route handler as it stands, with the signed cookie that a browser would send. */
-  async call(handler: RouteHandler, asked: Asked = {}): Promise<Answer> {
-    const { as = 'inspector', method = 'POST', path = '/api/test', params = {}, body, headers = {} } = asked;
-    const cookie: Record<string, string> = as === null ? {} : { cookie: await this.cookieOf(as) };
-    const request = new Request(`http://localhost:3000${path}`, {
-      method,
-      headers: { 'content-type': 'application/json', ...cookie, ...headers },
-      ...(body === undefined ? {} : { body: typeof body === 'string' ? body : JSON.stringify(body) }),
-    });
-    const response = await handler(request, { params: Promise.resolve(params) });
-    const text = await response.text();
-    return { status: response.status, headers: response.headers, body: text === '' ? null : JSON.parse(text) };
-  }
-
-  private async cookieOf(who: Member): Promise<string> {
-    const { accountId, organisationId } = this.viewer(who);
-    const token = { sub: accountId, organisationId, sessionVersion: 1 };
-    return `next-auth.session-token=${await encode({ token, secret: process.env.NEXTAUTH_SECRET! })}`;
+  /** Calls a route handler as it stands, as the inspector unless somebody else is named. */
+  call(handler: RouteHandler, { as = 'inspector', ...asked }: Asked = {}): Promise<CallAnswer<Answered>> {
+    return callRoute<Answered>(handler, { ...asked, ...(as === null ? {} : { as: this.viewer(as) }) });
   }
 
   /** A job of its own on a machine; the reference may come twice in no organisation. */
