@@ -80,7 +80,8 @@ function shownText(cell: { text: string; unit: Unit | null } | undefined, field:
   if (!parsed.ok) return text;
   const unit = parsed.unit ?? field.unit;
   if (!convertible(unit, field.unit)) return text;
-  return formatDecimal(convert(parsed.value, unit, field.unit));
+  // The zeros that were typed say how finely it was read: they stay.
+  return formatDecimal(unit === field.unit ? parsed.value : convert(parsed.value, unit, field.unit));
 }
 
 const fieldLabels = (fields: ReturnType<typeof sheetFields>): Map<string, string> => {
