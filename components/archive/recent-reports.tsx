@@ -41,7 +41,10 @@ export function RecentReports({ reports, timeZone }: { reports: Recent[]; timeZo
               </Link>
             </RowHead>
             <DataCell className="whitespace-nowrap font-mono text-[15px]">
-              <Link href={`/machines/${report.machineId}`} className="text-blue underline">
+              <Link
+                href={`/machines/${report.machineId}`}
+                className="inline-flex min-h-9 items-center text-blue underline"
+              >
                 {report.serialNumber}
               </Link>
             </DataCell>
@@ -54,7 +57,10 @@ export function RecentReports({ reports, timeZone }: { reports: Recent[]; timeZo
             </DataCell>
             <DataCell>
               {report.hasPdf && (
-                <a href={`/api/reports/${report.id}/pdf`} className="text-blue underline">
+                <a
+                  href={`/api/reports/${report.id}/pdf`}
+                  className="inline-flex min-h-9 items-center text-blue underline"
+                >
                   PDF<span className="sr-only"> of {report.number}</span>
                 </a>
               )}

@@ -6,7 +6,7 @@ import { FormProblem } from '@/components/forms/form-problem';
 import { useApiForm } from '@/components/forms/use-api-form';
 import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
-import { NumberText, Select, TextInput } from '@/components/ui/inputs';
+import { FileInput, NumberText, Select, TextInput } from '@/components/ui/inputs';
 import { api, uploadFile } from '@/lib/http/api-client';
 import { calibrationFields, resolutionUnits } from '@/lib/schemas/instrument';
 
@@ -70,12 +70,7 @@ export function CalibrationForm({ instrumentId }: { instrumentId: string }) {
         <NumberText {...form.register('coverageFactor')} />
       </Field>
       <Field label="The certificate itself" optional hint="PDF or picture, up to 15 MB" className="sm:col-span-6">
-        <input
-          ref={file}
-          type="file"
-          accept="application/pdf,image/jpeg,image/png,image/webp"
-          className="min-h-12 py-2"
-        />
+        <FileInput ref={file} accept="application/pdf,image/jpeg,image/png,image/webp" />
       </Field>
       <div className="grid gap-4 sm:col-span-6">
         <FormProblem problem={problem} />

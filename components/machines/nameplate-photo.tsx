@@ -3,6 +3,7 @@
 import { useMutation } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { useId } from 'react';
+import { FileInput } from '@/components/ui/inputs';
 import { Notice } from '@/components/ui/notice';
 import { SectionTitle } from '@/components/ui/page-title';
 import { ApiProblem, api, uploadFile } from '@/lib/http/api-client';
@@ -32,14 +33,13 @@ export function NameplatePhoto(props: { machineId: string; fileId: string | null
             {fileId ? 'Another photo of the nameplate' : 'Photo of the nameplate'}
           </label>
           <p className="text-sm text-ink2">JPEG, PNG or WebP, up to 15 MB</p>
-          <input
+          <FileInput
             id={inputId}
-            type="file"
             accept="image/jpeg,image/png,image/webp"
             capture="environment"
             disabled={upload.isPending}
             onChange={(event) => event.target.files?.[0] && upload.mutate(event.target.files[0])}
-            className="mt-1 min-h-12 w-full py-2"
+            className="mt-1"
           />
           {upload.isPending && <p>Sending the picture</p>}
           {upload.error instanceof ApiProblem && (

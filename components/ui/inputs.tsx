@@ -34,6 +34,18 @@ export function Select({ className = '', ...rest }: ComponentProps<'select'>) {
   return <select {...useFieldLinks()} className={`${box} ${className}`} {...rest} />;
 }
 
+/** Chooses a file; on a tablet the camera is among the choices. */
+export function FileInput({ className = '', ...rest }: ComponentProps<'input'>) {
+  return (
+    <input
+      type="file"
+      {...useFieldLinks()}
+      className={`min-h-12 w-full text-[15px] file:mr-3 file:min-h-12 file:rounded file:border-[1.5px] file:border-solid file:border-blue file:bg-transparent file:px-4 file:font-medium file:text-blue ${className}`}
+      {...rest}
+    />
+  );
+}
+
 export function Checkbox({
   label,
   hint,

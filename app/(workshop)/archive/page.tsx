@@ -46,8 +46,10 @@ export default async function ArchivePage({ searchParams }: { searchParams: Prom
     );
   }
   const { items, next } = await inScope(scopeOf(viewer), (trx) => archiveSearch(trx, { q, after, limit: 20 }));
-  const [only] = items;
-  if (open && !after && only && items.length === 1 && only.match === 'exact') redirect(`/machines/${only.machine.id}`);
+  const [first, second] = items;
+  // Not when another serial number looks the same: then the reader compares both with the plate.
+  const alone = first?.match === 'exact' && second?.match !== 'exact' && second?.match !== 'folded';
+  if (open && !after && alone) redirect(`/machines/${first.machine.id}`);
   const count = next || after ? '' : items.length === 1 ? '1 machine' : `${items.length} machines`;
   return (
     <>
