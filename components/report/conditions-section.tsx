@@ -24,8 +24,8 @@ export function ConditionsSection({ conditions }: { conditions: ReportModel['con
           <Table caption={words.airRange} className="text-sm">
             <TableHead>
               <HeadCell>{words.time}</HeadCell>
-              <HeadCell figure>{words.air}, °C</HeadCell>
-              <HeadCell figure>{words.machine}, °C</HeadCell>
+              <HeadCell figure>{words.air}</HeadCell>
+              <HeadCell figure>{words.machine}</HeadCell>
             </TableHead>
             <tbody>
               {temperatures.map(({ at, air, machine }, index) => (

@@ -4,6 +4,7 @@ import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { TestBlock } from '@/lib/reporting/report-model';
 import { sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { ByWidth } from './by-width';
 import { finalPass, inMicrometres } from './final-pass';
 
 /** The limit rule of the final result over the whole width, the verdict in words below it. */
@@ -21,19 +22,22 @@ export function FinalResult({ block }: { block: TestBlock }) {
       ? `${words.local} ${inMicrometres(local.deviationUm, pass)} µm ${words.over} ${local.lengthMm} mm, T ${shortLimit(local.toleranceUm)} µm, ${VERDICT_WORDS[local.verdict]}`
       : '',
   ].filter((part) => part !== '');
+  const rule = (widthPx: number) => (
+    <LimitRule
+      deviationUm={pass.resultUm === null ? null : pass.resultUm.replace('−', '-')}
+      toleranceUm={toleranceUm}
+      limitUm={limitUm}
+      direction={direction}
+      signed={signed}
+      verdict={verdict}
+      shown={pass.resultMm}
+      widthPx={widthPx}
+    />
+  );
   return (
     <div className="mt-4 break-inside-avoid">
-      <LimitRule
-        deviationUm={pass.resultUm === null ? null : pass.resultUm.replace('−', '-')}
-        toleranceUm={toleranceUm}
-        limitUm={limitUm}
-        direction={direction}
-        signed={signed}
-        verdict={verdict}
-        shown={pass.resultMm}
-        widthPx={760}
-      />
-      <p className="mt-1 flex flex-wrap items-baseline gap-x-4">
+      <ByWidth wide={rule(900)} narrow={rule(300)} />
+      <p className="mt-1 flex flex-wrap items-center gap-x-4">
         <VerdictMark
           verdict={verdict}
           words={`${sentence(pass.kindWords)} ${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`}

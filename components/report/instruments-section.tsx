@@ -41,7 +41,7 @@ export function InstrumentsSection({ instruments }: { instruments: ReportModel['
         .filter((instrument) => instrument.override)
         .map((instrument) => (
           <p key={instrument.number} className="mt-2 border-l-4 border-brass pl-3">
-            {instrument.number}: {sentence(instrument.override ?? '')}.
+            {instrument.number}: {sentence(instrument.override ?? '').replace(/\.$/, '')}.
           </p>
         ))}
     </ReportSection>

@@ -31,7 +31,10 @@ export function MachineAndJob({ model }: { model: ReportModel }) {
           [words.scope, job.scope],
           [words.codes, job.codes.join(', ')],
           [words.decisionRule, job.decisionRule],
-          [words.makeUp, machine.components.map(({ id, what }) => `${id} ${what}`).join(' · ')],
+          [
+            words.makeUp,
+            machine.components.map(({ id, what }) => (what.includes(id) ? what : `${id} ${what}`)).join(' · '),
+          ],
           [words.people, job.people.map(({ name, role }) => `${name}, ${role}`).join(' · ')],
         ])}
       />

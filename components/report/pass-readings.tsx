@@ -9,14 +9,14 @@ export function PassReadings({ passes, of }: { passes: PassBlock[]; of: string }
   const full = passes.filter((pass) => pass.kind !== 'adjusting' && !pass.linkedWords);
   const short = passes.filter((pass) => !full.includes(pass));
   return (
-    <div>
+    <div className="min-w-0">
       <div className="flex flex-wrap gap-x-8 gap-y-4">
         {full.map((pass) => (
           <FullPass key={`${pass.kindWords}${pass.takenAt}`} pass={pass} of={of} />
         ))}
       </div>
       {short.map((pass) => (
-        <p key={`${pass.kindWords}${pass.takenAt}`} className="mt-2 flex flex-wrap items-baseline gap-x-3 text-sm">
+        <p key={`${pass.kindWords}${pass.takenAt}`} className="mt-2 flex flex-wrap items-center gap-x-3 text-sm">
           <span className="font-semibold">{pass.kindWords}</span>
           <PassResult pass={pass} />
           <span className="text-ink2">{pass.linkedWords ?? takenWords(pass)}</span>

@@ -4,9 +4,13 @@ type ReadingTable = PassBlock['tables'][number];
 
 /** The readings of one pass, as they were typed, in the column's unit. */
 export function ReadingTables({ tables, name }: { tables: ReadingTable[]; name: string }) {
-  return tables.map((table, index) => (
-    <OneTable key={index} table={table} name={[name, table.title].filter(Boolean).join(', ')} />
-  ));
+  return (
+    <div className="flex flex-wrap gap-x-8 gap-y-2">
+      {tables.map((table, index) => (
+        <OneTable key={index} table={table} name={[name, table.title].filter(Boolean).join(', ')} />
+      ))}
+    </div>
+  );
 }
 
 function OneTable({ table, name }: { table: ReadingTable; name: string }) {
@@ -15,9 +19,9 @@ function OneTable({ table, name }: { table: ReadingTable; name: string }) {
   const heads = table.columns.length > cells ? table.columns : ['', ...table.columns];
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable by keyboard
-    <section className="mt-1 overflow-x-auto" tabIndex={0} aria-label={name}>
+    <section className="mt-1 max-w-full overflow-x-auto" tabIndex={0} aria-label={name}>
       {table.title && <p className="text-sm text-ink2">{table.title}</p>}
-      <table className="w-max min-w-1/2 border-collapse text-sm">
+      <table className="w-max border-collapse text-sm">
         <caption className="sr-only">{name}</caption>
         <thead className="border-b-[1.5px] border-ink">
           <tr>

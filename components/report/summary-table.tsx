@@ -4,8 +4,9 @@ import { verdictMark } from '@/components/plots/verdict-mark-geometry';
 import { DataCell, HeadCell, Row, Table, TableHead } from '@/components/ui/table';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { SummaryRow } from '@/lib/reporting/report-model';
+import { titleWithComponent } from '@/lib/reporting/title-with-component';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
-import { finalVerdict, summaryTitle, verdictWords } from './summary-words';
+import { finalVerdict, verdictWords } from './summary-words';
 
 const fine = ['within-tolerance', 'for-information'];
 
@@ -35,10 +36,10 @@ export function SummaryTable(props: { rows: SummaryRow[]; caption?: string; link
               <th scope="row" className="px-2.5 py-2.5 align-baseline font-normal">
                 {linkOf ? (
                   <Link href={linkOf(row)} className="text-blue underline">
-                    {summaryTitle(row)}
+                    {titleWithComponent(row.title, row.component)}
                   </Link>
                 ) : (
-                  summaryTitle(row)
+                  titleWithComponent(row.title, row.component)
                 )}
               </th>
               <DataCell figure className="whitespace-nowrap">
@@ -52,8 +53,8 @@ export function SummaryTable(props: { rows: SummaryRow[]; caption?: string; link
                     : row.asLeft}
               </DataCell>
               <DataCell figure>{row.toleranceMm ?? REPORT_WORDS.none}</DataCell>
-              <DataCell>
-                <VerdictMark verdict={finalVerdict(row)} words={verdictWords(row)} className="text-sm" />
+              <DataCell className={row.leftOut ? 'min-w-40 align-top' : 'whitespace-nowrap align-top'}>
+                <VerdictMark verdict={finalVerdict(row)} words={verdictWords(row)} className="leading-6" />
               </DataCell>
             </Row>
           ))}

@@ -2,10 +2,6 @@ import type { MarkKind } from '@/components/plots/verdict-ink';
 import type { SummaryRow } from '@/lib/reporting/report-model';
 import { REPORT_WORDS, SHORT_VERDICT_WORDS } from '@/lib/reporting/words';
 
-/** The component after the title, unless the title names it. */
-export const summaryTitle = (row: Pick<SummaryRow, 'title' | 'component'>): string =>
-  row.component === '' || row.title.includes(row.component) ? row.title : `${row.title}, ${row.component}`;
-
 /** What counts in the end: as left, else as it was found. */
 export const finalVerdict = (row: SummaryRow): MarkKind =>
   row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? row.asFoundVerdict ?? 'not-measured');

@@ -1,8 +1,9 @@
 import { Plot } from '@/components/plots/plot';
 import { SetUpSketch } from '@/components/sketches/set-up-sketch';
 import { VerdictMark } from '@/components/ui/verdict-mark';
-import type { TestBlock } from '@/lib/reporting/report-model';
+import type { PassBlock, TestBlock } from '@/lib/reporting/report-model';
 import { REPORT_WORDS } from '@/lib/reporting/words';
+import { ByWidth } from './by-width';
 import { CorrectedReadings } from './corrected-readings';
 import { Facts, known } from './facts';
 import { finalPass } from './final-pass';
@@ -41,11 +42,13 @@ function LeftOut({ leftOut }: { leftOut: NonNullable<TestBlock['leftOut']> }) {
 
 function Measured({ block }: { block: TestBlock }) {
   const words = REPORT_WORDS.block;
+  // A method with many tables takes the whole width below its pictures.
+  const many = block.passes.some((pass) => pass.tables.length > 2);
   const arithmetic = finalPass(block)?.judgement?.toleranceArithmetic;
   return (
     <>
-      <div className="grid gap-x-8 gap-y-4 md:grid-cols-[17rem_minmax(0,1fr)] print:grid-cols-[14rem_minmax(0,1fr)]">
-        <div className="grid content-start gap-2">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-8 gap-y-4 md:grid-cols-[20rem_minmax(0,1fr)] print:grid-cols-[14rem_minmax(0,1fr)]">
+        <div className="grid min-w-0 content-start gap-2">
           <SetUpSketch spec={block.sketch} component={block.component} />
           <Facts
             small
@@ -58,15 +61,25 @@ function Measured({ block }: { block: TestBlock }) {
             ])}
           />
         </div>
-        <div className="grid min-w-0 content-start gap-4">
+        <div className="grid min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-4">
           <Plots block={block} />
-          <PassReadings passes={block.passes} of={block.title} />
+          {!many && <PassReadings passes={block.passes} of={block.title} />}
         </div>
       </div>
+      {many && (
+        <div className="mt-4">
+          <PassReadings passes={block.passes} of={block.title} />
+        </div>
+      )}
       <FinalResult block={block} />
     </>
   );
 }
+
+const plotOf = (pass: PassBlock, widthPx: number, heightPx: number) =>
+  pass.plot && (
+    <Plot series={pass.plot} toleranceUm={pass.judgement?.toleranceUm ?? null} widthPx={widthPx} heightPx={heightPx} />
+  );
 
 /** Plot as found, as left, or both beside each other. */
 function Plots({ block }: { block: TestBlock }) {
@@ -77,13 +90,11 @@ function Plots({ block }: { block: TestBlock }) {
       {plotted.map(
         (pass) =>
           pass.plot && (
-            <figure key={`${pass.kindWords}${pass.takenAt}`} className="min-w-60 max-w-md flex-1">
+            <figure key={`${pass.kindWords}${pass.takenAt}`} className="min-w-0 max-w-md flex-1 basis-60">
               <figcaption className="text-sm font-semibold text-ink2">{pass.kindWords}</figcaption>
-              <Plot
-                series={pass.plot}
-                toleranceUm={pass.judgement?.toleranceUm ?? null}
-                widthPx={plotted.length === 2 ? 300 : 440}
-                heightPx={plotted.length === 2 ? 190 : 220}
+              <ByWidth
+                wide={plotted.length === 2 ? plotOf(pass, 300, 190) : plotOf(pass, 440, 220)}
+                narrow={plotOf(pass, 270, 190)}
               />
             </figure>
           ),

@@ -27,7 +27,7 @@ export default async function SignHerePage({ params }: { params: Promise<{ repor
   return (
     <SeenBefore>
       {/* The shell's header, search and menu are the office's: they are not there while the tablet is handed over. */}
-      <style>{'body > div > header, body > div > footer, body > div > a[href="#main"] { display: none }'}</style>
+      <style>{'header[data-print], footer[data-print], a.sr-only { display: none }'}</style>
       <div className="mx-auto max-w-[64rem]">
         <div className="mb-4 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
           <p className="text-lg font-semibold">{model.letterhead.name}</p>
