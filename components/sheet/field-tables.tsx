@@ -1,7 +1,7 @@
 'use client';
 
 import { memo } from 'react';
-import type { FieldTable, SheetFields } from '@/lib/sheet/types';
+import type { CellPointer, Field, FieldTable, SheetFields } from '@/lib/sheet/types';
 import { ReadingCell } from './reading-cell';
 import { useEvaluated, useOpenPass } from './sheet-context';
 
@@ -30,7 +30,7 @@ const ShapedTables = memo(function ShapedTables({ fields }: Shaped) {
   return (
     <div className={several ? 'grid gap-x-8 gap-y-5 sm:grid-cols-2' : ''}>
       {fields.tables.map((table, index) => (
-        <OneTable key={table.title ?? index} table={table} index={index} />
+        <OneTable key={table.title ?? index} table={table} index={index} order={fields.order} />
       ))}
     </div>
   );
@@ -58,8 +58,11 @@ const ShapedSetUp = memo(function ShapedSetUp({ fields }: Shaped) {
   );
 }, sameShape);
 
-function OneTable({ table, index }: { table: FieldTable; index: number }) {
-  const { title } = useOpenPass();
+function OneTable({ table, index, order }: { table: FieldTable; index: number; order: CellPointer[] }) {
+  const { session, passId, title } = useOpenPass();
+  // The empty row at the end offers its position first; its readings come when it has one.
+  const offered = ({ role, pointer }: Field) =>
+    role !== 'reading' || order.includes(pointer) || session.textOf(passId, pointer) !== '';
   return (
     <div className="overflow-x-auto">
       <table className="w-full border-collapse text-left">
@@ -87,7 +90,7 @@ function OneTable({ table, index }: { table: FieldTable; index: number }) {
               </th>
               {row.cells.map((cell, column) => (
                 <td key={table.columns[column]?.label ?? column} className="px-0.5 py-0.5">
-                  {cell && 'field' in cell && <ReadingCell field={cell.field} />}
+                  {cell && 'field' in cell && offered(cell.field) && <ReadingCell field={cell.field} />}
                   {cell && 'derived' in cell && <DerivedCell table={index} row={rowIndex} column={column} />}
                 </td>
               ))}

@@ -17,7 +17,7 @@ export function SaveHeadLine({ log }: { log: ReadingLog }) {
   const { words, tone } = saveWords(useSaveState(log));
   return (
     <SaveState>
-      <span aria-hidden="true" className={`hidden whitespace-nowrap lg:block ${ink[tone]}`}>
+      <span aria-hidden="true" className={`hidden whitespace-nowrap md:block ${ink[tone]}`}>
         {words}
       </span>
     </SaveState>

@@ -20,7 +20,7 @@ import { SheetNotices } from './sheet-notices';
 import { SheetSession } from './sheet-session';
 import { StrayReadings } from './stray-readings';
 import { Undecided } from './undecided';
-import { useClearView } from './use-clear-view';
+import { clearOfFoot, useClearView } from './use-clear-view';
 import { clockTime, useReadingLog } from './use-reading-log';
 import { useLiveSheet, useStartPass } from './use-sheet-changes';
 
@@ -105,7 +105,9 @@ export function SheetScreen({ data }: { data: SheetData }) {
     >
       <SaveHeadLine log={log} />
       <div className="-mx-7 -mb-10 -mt-5 flex flex-col">
-        <div className="grid flex-1 lg:grid-cols-[minmax(18rem,23.5rem)_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
+        <div
+          className={`grid flex-1 lg:grid-cols-[minmax(18rem,23.5rem)_minmax(0,1fr)] lg:grid-rows-[auto_1fr] ${clearOfFoot}`}
+        >
           <section className="flex flex-col gap-4 px-5 py-4 sm:px-7 lg:px-5" aria-label="The test">
             <SheetHead data={data} />
           </section>

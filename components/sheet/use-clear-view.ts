@@ -2,9 +2,14 @@
 
 import { useEffect } from 'react';
 
+/** For the container of everything that can have the focus above the foot. */
+export const clearOfFoot =
+  '[&_input]:scroll-mb-[var(--foot)] [&_select]:scroll-mb-[var(--foot)] [&_textarea]:scroll-mb-[var(--foot)] [&_button]:scroll-mb-[var(--foot)] [&_a]:scroll-mb-[var(--foot)]';
+
 /**
- * The field with the focus must not lie behind what sticks to the foot of the screen: the browser is told how high that is, whatever
- * is opened or closed there.
+ * The field with the focus must not lie behind what sticks to the foot of the screen: how high that is stands in `--foot`, whatever is
+ * opened or closed there, and what can have the focus keeps that distance (`clearOfFoot`). The page's own scroll padding would also
+ * hold for the buttons at the foot, and make the page jump when one of them is pressed.
  */
 export function useClearView(): void {
   useEffect(() => {
@@ -13,17 +18,19 @@ export function useClearView(): void {
       const heights = [...document.querySelectorAll<HTMLElement>('[data-at-foot]')].map((part) =>
         getComputedStyle(part).position === 'sticky' ? part.offsetHeight : 0,
       );
-      root.style.scrollPaddingBottom = `${heights.reduce((sum, height) => sum + height, 0) + 12}px`;
+      root.style.setProperty('--foot', `${heights.reduce((sum, height) => sum + height, 0) + 12}px`);
     };
     const watch = new ResizeObserver(measure);
     watch.observe(document.body);
     const changes = new MutationObserver(measure);
     changes.observe(document.body, { childList: true, subtree: true });
     measure();
+    root.style.scrollPaddingBottom = '0px';
     return () => {
       watch.disconnect();
       changes.disconnect();
       root.style.scrollPaddingBottom = '';
+      root.style.removeProperty('--foot');
     };
   }, []);
 }

@@ -91,7 +91,6 @@ describe('entry on a sheet', () => {
 
   it('says in the check what is missing, with the way to the field, in the words that stand there', async () => {
     const { page, context } = await visitor(browser, inspector);
-    await openSheet(page, /in YZ/);
     await openSheet(page, /Z1 motion parallel to the axis of main spindle S1, in YZ/);
     await readingFields(page).first().focus();
     await page.keyboard.type('1', { delay: 80 });
@@ -134,10 +133,10 @@ describe('entry on a sheet', () => {
 
   it('goes on without a session, and sends when somebody has signed in again', async () => {
     const { page, context } = await visitor(browser, inspector);
-    await openSheet(page, /X1 motion square/);
+    await openSheet(page, /Z1 motion parallel to the axis of main spindle S1, in ZX/);
     const cookies = await context.cookies();
     await context.clearCookies();
-    const field = readingFields(page).nth(1);
+    const field = readingFields(page).nth(3);
     await field.focus();
     await page.keyboard.type('-0.75', { delay: 80 });
     await page.keyboard.press('Enter');
@@ -147,7 +146,7 @@ describe('entry on a sheet', () => {
     await page.getByRole('button', { name: 'Send now' }).click();
     await allOnServer(page);
     await page.reload();
-    await expect.poll(() => readingFields(page).nth(1).inputValue()).toBe('-0.75');
+    await expect.poll(() => readingFields(page).nth(3).inputValue()).toBe('-0.75');
     await context.close();
   });
 });
