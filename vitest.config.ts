@@ -14,7 +14,9 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: 'unit',
-          include: ['tests/{evaluation,standards,external,drawing,units,planning,architecture,records}/**/*.test.{ts,tsx}'],
+          include: [
+            'tests/{evaluation,standards,external,drawing,units,planning,architecture,records}/**/*.test.{ts,tsx}',
+          ],
           testTimeout: 60_000,
         },
       },

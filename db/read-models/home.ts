@@ -1,5 +1,5 @@
 import type { Db } from '@/db/client';
-import { can, type Role } from '@/lib/auth/permissions';
+import type { Role } from '@/lib/auth/permissions';
 
 interface JobHead {
   id: string;
@@ -44,9 +44,9 @@ export async function homeView(
   const has = (role: Role) => viewer.roles.includes(role);
   return {
     toMeasure: has('inspector') ? await waitingJobs(db, 'open', viewer.membershipId) : [],
-    toCheck: can(viewer.roles, 'report.issue') ? await waitingJobs(db, 'in-check', null) : [],
-    refused: can(viewer.roles, 'report.issue') ? await waitingReports(db, 'refused') : [],
-    toSign: can(viewer.roles, 'report.sign') ? await waitingReports(db, 'issued') : [],
+    toCheck: has('reviewer') ? await waitingJobs(db, 'in-check', null) : [],
+    refused: has('reviewer') ? await waitingReports(db, 'refused') : [],
+    toSign: has('customer') ? await waitingReports(db, 'issued') : [],
     overdueInstruments: has('administrator') ? await overdueInstruments(db, today) : [],
     failedMails: has('administrator') ? await failedMails(db) : [],
     failedPdfs: has('administrator') ? await failedPdfs(db) : [],

@@ -37,7 +37,7 @@ export const rooms: Room[] = [
     packages: none,
   },
   { path: 'lib/schemas', uses: ['lib/units', 'lib/auth/permissions.ts', 'lib/dates.ts'], packages: /^zod$/ },
-  { path: 'lib/services', uses: ['db', 'lib', 'standards', 'templates/email'], packages: /^(knex|zod|node:.*)$/ },
+  { path: 'lib/services', uses: ['db', 'lib', 'standards', 'templates/email'], packages: /^(knex|zod|sharp|node:.*)$/ },
   { path: 'lib/auth', uses: ['db', ...leaves], packages: /^(next|next-auth|react|@node-rs\/argon2|node:crypto)(\/|$)/ },
   { path: 'lib/http', uses: ['db', 'lib/auth', 'lib/schemas', ...leaves], packages: /^(zod|knex|node:crypto)$/ },
   { path: 'lib/storage', uses: leaves, packages: /^(@aws-sdk\/client-s3|node:.*)$/ },

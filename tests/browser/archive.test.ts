@@ -22,7 +22,7 @@ it('archive look-up by machine serial', async () => {
   // As printed: straight to the machine.
   await look('LK32-0O81-B');
   await page.waitForURL(/\/machines\/[0-9a-f-]{36}/);
-  expect(await page.getByRole('heading', { level: 1 }).innerText()).toContain('LK32-0O81-B');
+  expect(await page.getByRole('heading', { level: 1 }).textContent()).toContain('LK32-0O81-B');
 
   // Small letters, no dashes, O for 0: both look-alikes are offered, the machine that was meant among them.
   await look('lk32oo81');
