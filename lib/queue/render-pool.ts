@@ -42,6 +42,7 @@ function nextAnswer(child: ChildProcess, timeoutMs: number, what: string): Promi
 
 /** One warm drawing process, one document at a time, replaced before it grows old and after it failed. */
 export class RenderPool {
+  private child: ChildProcess | undefined;
   private warm: Promise<Warm> | undefined;
   private last: Promise<unknown> = Promise.resolve();
   private nextId = 1;
@@ -67,11 +68,12 @@ export class RenderPool {
   /** Waits for the drawing in hand and ends the process. */
   async close(): Promise<void> {
     await this.last;
-    await this.retire();
+    this.retire();
   }
 
   private async start(): Promise<Warm> {
     const child = fork(this.childModule, { execArgv: ['--import', 'tsx'], serialization: 'advanced' });
+    this.child = child;
     try {
       await nextAnswer(child, this.limits.startTimeoutMs, 'starting');
       return { child, renders: 0, rssBytes: 0 };
@@ -81,10 +83,11 @@ export class RenderPool {
     }
   }
 
-  private async retire(): Promise<void> {
-    const old = await this.warm?.catch(() => undefined);
+  /** Also ends a process that is still starting. */
+  private retire(): void {
+    this.child?.kill('SIGKILL');
+    this.child = undefined;
     this.warm = undefined;
-    old?.child.kill('SIGKILL');
   }
 
   private async attempt(model: unknown): Promise<Buffer> {
@@ -96,18 +99,18 @@ export class RenderPool {
       warm.child.send(request);
       const answer = await answered;
       if (answer.kind !== 'done') throw new Error(answer.kind === 'failed' ? answer.message : 'Unexpected answer.');
-      await this.recycle(warm, answer.rssBytes);
+      this.recycle(warm, answer.rssBytes);
       return Buffer.from(answer.pdf);
     } catch (error) {
-      await this.retire();
+      this.retire();
       throw error;
     }
   }
 
-  private async recycle(warm: Warm, rssBytes: number): Promise<void> {
+  private recycle(warm: Warm, rssBytes: number): void {
     warm.renders += 1;
     if (warm.renders < this.limits.maxRenders && rssBytes <= this.limits.maxRssBytes) return;
-    await this.retire();
+    this.retire();
     this.warmUp();
   }
 }

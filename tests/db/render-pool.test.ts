@@ -5,7 +5,7 @@ import { afterAll, afterEach, expect, test } from 'vitest';
 import { defaultRenderLimits, RenderPool } from '@/lib/queue/render-pool';
 
 const childModule = path.join(import.meta.dirname, '../helpers/obedient-render-child.ts');
-const limits = { ...defaultRenderLimits, renderTimeoutMs: 700 };
+const limits = { ...defaultRenderLimits, renderTimeoutMs: 1500 };
 
 let pool: RenderPool;
 afterEach(() => pool.close());
@@ -46,7 +46,7 @@ test.each(['hang', 'crash', 'fail'])('tries once more in a fresh process when th
 });
 
 test.each([
-  ['hang', 'took more than 0.7 s'],
+  ['hang', 'took more than 1.5 s'],
   ['crash', 'ended (9)'],
   ['fail', 'no such font'],
 ])('gives up after the second %s and draws the next document', async (act, message) => {
