@@ -1,6 +1,7 @@
 import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
 import type { Counts } from '@/lib/reporting/report-model';
 import { REPORT_WORDS } from '@/lib/reporting/words';
+import { ByWidth } from './by-width';
 
 const counted = [
   'planned',
@@ -12,13 +13,23 @@ const counted = [
   'leftOut',
   'notMeasured',
 ] as const;
+const words = REPORT_WORDS.counts;
+const { asFound, asLeft } = REPORT_WORDS.summary;
 
-/** How many tests came out how, as found and as left. */
-export function CountsTable({ counts }: { counts: { asFound: Counts; asLeft: Counts } }) {
-  const words = REPORT_WORDS.counts;
+interface BothCounts {
+  asFound: Counts;
+  asLeft: Counts;
+}
+
+/** How many tests came out how, as found and as left; stands upright on a telephone. */
+export function CountsTable({ counts }: { counts: BothCounts }) {
+  return <ByWidth wide={<Lying counts={counts} />} narrow={<Standing counts={counts} />} />;
+}
+
+function Lying({ counts }: { counts: BothCounts }) {
   const rows = [
-    { name: REPORT_WORDS.summary.asFound, count: counts.asFound },
-    { name: REPORT_WORDS.summary.asLeft, count: counts.asLeft },
+    { name: asFound, count: counts.asFound },
+    { name: asLeft, count: counts.asLeft },
   ];
   return (
     <Table caption={words.heading}>
@@ -39,6 +50,31 @@ export function CountsTable({ counts }: { counts: { asFound: Counts; asLeft: Cou
                 {count[key]}
               </DataCell>
             ))}
+          </Row>
+        ))}
+      </tbody>
+    </Table>
+  );
+}
+
+function Standing({ counts }: { counts: BothCounts }) {
+  return (
+    <Table caption={words.heading}>
+      <TableHead>
+        <td />
+        <HeadCell figure>{asFound}</HeadCell>
+        <HeadCell figure>{asLeft}</HeadCell>
+      </TableHead>
+      <tbody>
+        {counted.map((key) => (
+          <Row key={key}>
+            <RowHead className="py-1.5 font-normal">{words[key]}</RowHead>
+            <DataCell figure className="py-1.5">
+              {counts.asFound[key]}
+            </DataCell>
+            <DataCell figure className="py-1.5">
+              {counts.asLeft[key]}
+            </DataCell>
           </Row>
         ))}
       </tbody>

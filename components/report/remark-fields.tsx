@@ -34,8 +34,8 @@ export function RemarkFields(props: {
           <Field label={`Remark ${index + 1}`} error={errorAt(`remarks.${index}.text`)}>
             <TextArea rows={2} {...form.register(`remarks.${index}.text`)} />
           </Field>
-          <div className="grid gap-3 md:grid-cols-[minmax(0,2fr)_minmax(0,1fr)_minmax(0,1fr)]">
-            <Field label="About" error={errorAt(`remarks.${index}.sheetId`)}>
+          <div className="grid gap-3 sm:grid-cols-2">
+            <Field label="About" className="sm:col-span-2" error={errorAt(`remarks.${index}.sheetId`)}>
               <Select {...form.register(`remarks.${index}.sheetId`, { setValueAs: (value: string) => value || null })}>
                 <option value="">the whole report</option>
                 {sheets.map(({ id, order, title }) => (
