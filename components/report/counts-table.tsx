@@ -32,7 +32,7 @@ function Lying({ counts }: { counts: BothCounts }) {
     { name: asLeft, count: counts.asLeft },
   ];
   return (
-    <Table caption={words.heading}>
+    <Table caption={words.heading} className="[&_td]:px-1.5 [&_th]:px-1.5 [&_th:first-child]:pl-0">
       <TableHead>
         <td className="w-px" />
         {counted.map((key) => (

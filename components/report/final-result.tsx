@@ -36,7 +36,7 @@ export function FinalResult({ block }: { block: TestBlock }) {
   );
   return (
     <div className="mt-4 break-inside-avoid">
-      <ByWidth wide={rule(900)} narrow={rule(300)} />
+      <ByWidth wide={rule(900)} medium={rule(620)} narrow={rule(300)} />
       <p className="mt-1 flex flex-wrap items-center gap-x-4">
         <VerdictMark
           verdict={verdict}

@@ -1,11 +1,10 @@
 import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
 import type { ReportModel } from '@/lib/reporting/report-model';
-import { longDate, sentence } from '@/lib/reporting/report-text';
+import { sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { ReportSection } from './report-section';
 
 const show = (text: string | null) => text ?? REPORT_WORDS.none;
-const day = (text: string | null) => (text ? longDate(text) : REPORT_WORDS.none);
 
 /** Instruments used, with certificate and due date; who allowed one that was out of date stands below. */
 export function InstrumentsSection({ instruments }: { instruments: ReportModel['instruments'] }) {
@@ -27,12 +26,12 @@ export function InstrumentsSection({ instruments }: { instruments: ReportModel['
           {instruments.map((instrument) => (
             <Row key={instrument.number}>
               <RowHead className="whitespace-nowrap font-mono">{instrument.number}</RowHead>
-              <DataCell>{instrument.name}</DataCell>
+              <DataCell className="min-w-40">{instrument.name}</DataCell>
               <DataCell className="whitespace-nowrap font-mono">{show(instrument.resolution)}</DataCell>
               <DataCell className="whitespace-nowrap font-mono">{show(instrument.uncertainty)}</DataCell>
               <DataCell className="whitespace-nowrap font-mono">{show(instrument.certificate)}</DataCell>
-              <DataCell>{day(instrument.calibrated)}</DataCell>
-              <DataCell>{day(instrument.due)}</DataCell>
+              <DataCell className="whitespace-nowrap font-mono">{show(instrument.calibrated)}</DataCell>
+              <DataCell className="whitespace-nowrap font-mono">{show(instrument.due)}</DataCell>
             </Row>
           ))}
         </tbody>

@@ -47,8 +47,8 @@ function Measured({ block }: { block: TestBlock }) {
   const arithmetic = finalPass(block)?.judgement?.toleranceArithmetic;
   return (
     <>
-      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-8 gap-y-4 md:grid-cols-[20rem_minmax(0,1fr)] print:grid-cols-[14rem_minmax(0,1fr)]">
-        <div className="grid min-w-0 content-start gap-2">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-8 gap-y-4 lg:grid-cols-[20rem_minmax(0,1fr)] print:grid-cols-[14rem_minmax(0,1fr)]">
+        <div className="grid min-w-0 content-start gap-x-8 gap-y-2 sm:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[minmax(0,1fr)] print:grid-cols-[minmax(0,1fr)]">
           <SetUpSketch spec={block.sketch} component={block.component} />
           <Facts
             small

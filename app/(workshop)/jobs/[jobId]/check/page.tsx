@@ -110,7 +110,7 @@ function NextStep(props: {
           <p className="mb-3">
             {job.state === 'in-check'
               ? 'The job has been handed in for the check.'
-              : 'The inspector has not handed this job in. It can be issued all the same.'}
+              : `The inspector has not handed this job in.${blocking === 0 ? ' It can be issued all the same.' : ''}`}
           </p>
           <IssueForm jobId={job.id} blocking={blocking} toConfirm={toConfirm} />
         </div>
