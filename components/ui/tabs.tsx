@@ -10,7 +10,7 @@ export interface TabChoice<K extends string> {
 }
 
 const look = (chosen: boolean) =>
-  `inline-flex min-h-12 items-center gap-1.5 border-b-[3px] px-0.5 ${chosen ? 'border-blue font-semibold text-ink' : 'border-transparent text-ink2 hover:border-line'}`;
+  `inline-flex min-h-12 min-w-6 items-center justify-center gap-1.5 border-b-[3px] px-0.5 ${chosen ? 'border-blue font-semibold text-ink' : 'border-transparent text-ink2 hover:border-line'}`;
 
 /** Words with a line under the chosen one. For panels in one page; the panel is tied to it by `panelId`. */
 export function Tabs<K extends string>(props: {

@@ -1,5 +1,4 @@
-import { execFileSync } from 'node:child_process';
-import { existsSync, readFileSync, statSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
 import path from 'node:path';
 
 export const root = path.resolve(import.meta.dirname, '../..');
@@ -19,11 +18,19 @@ export interface SourceFile {
   imports: SourceImport[];
 }
 
-/** Every file that is, or is about to be, in version control. */
-export const projectFiles = (): string[] =>
-  execFileSync('git', ['ls-files', '--cached', '--others', '--exclude-standard'], { cwd: root, encoding: 'utf8' })
-    .split('\n')
-    .filter((file) => file !== '' && existsSync(path.join(root, file)));
+/** What installing, building and running leave behind; a fresh machine has no git to ask. */
+const leftBehind =
+  /^(node_modules|\.git|\.next|\.data|coverage)$|^\.next-|^\.data-|\.tsbuildinfo$|^next-env\.d\.ts$|\.tmp\.ts$/;
+
+/** Every file of the project, as paths from its root. */
+export const projectFiles = (folder = ''): string[] =>
+  readdirSync(path.join(root, folder), { withFileTypes: true })
+    .filter((entry) => !leftBehind.test(entry.name))
+    .flatMap((entry) => {
+      const file = folder ? `${folder}/${entry.name}` : entry.name;
+      if (entry.isDirectory()) return projectFiles(file);
+      return entry.isFile() ? [file] : [];
+    });
 
 const statement =
   /^[ \t]*(?:import|export)\s+(type\s)?\s*((?:[\w*\s,]|\{[^}]*\})*?)\s*(?:from\s*)?['"]([^'"\n]+)['"]|\bimport\(\s*['"]([^'"\n]+)['"]\s*\)/gm;

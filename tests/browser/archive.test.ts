@@ -20,9 +20,26 @@ it('archive look-up by machine serial', async () => {
     await page.waitForURL(/\/(archive|machines\/)/);
   };
   // As printed: straight to the machine.
-  await look('LK32-0O81-B');
+  await look('QT-10-0DB1');
   await page.waitForURL(/\/machines\/[0-9a-f-]{36}/);
-  expect(await page.getByRole('heading', { level: 1 }).textContent()).toContain('LK32-0O81-B');
+  expect(await page.getByRole('heading', { level: 1 }).textContent()).toContain('QT-10-0DB1');
+
+  // Another serial number looks the same: nobody is led to one of the two without having seen both.
+  await look('LK32-0O81-B');
+  await expect
+    .poll(() =>
+      page
+        .getByRole('link', { name: /LK32-0O81-B/ })
+        .first()
+        .isVisible(),
+    )
+    .toBe(true);
+  expect(
+    await page
+      .getByRole('link', { name: /LK32-0081-8/ })
+      .first()
+      .isVisible(),
+  ).toBe(true);
 
   // Small letters, no dashes, O for 0: both look-alikes are offered, the machine that was meant among them.
   await look('lk32oo81');

@@ -125,12 +125,14 @@ it('inspector fills in a standard test sheet', async () => {
 
   await page.reload();
   await expect.poll(() => readingFields(page).last().inputValue()).toBe(good);
-  expect(
-    await page
-      .getByText(/within tolerance/)
-      .first()
-      .isVisible(),
-  ).toBe(true);
+  await expect
+    .poll(() =>
+      page
+        .getByText(/within tolerance/)
+        .first()
+        .isVisible(),
+    )
+    .toBe(true);
   const stored = await storedReadings(sheetId);
   expect(stored).toHaveLength(count);
   expect(stored.every((row) => row.value !== null && row.value === row.text.replace('−', '-'))).toBe(true);

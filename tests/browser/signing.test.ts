@@ -20,7 +20,7 @@ it('customer signs acceptance', async () => {
     .click();
   await page.waitForURL(/\/reports\//);
   const reportId = page.url().split('/reports/')[1]!.split(/[/?#]/)[0]!;
-  expect(await page.getByText('LK32-0081-8').first().isVisible()).toBe(true);
+  await expect.poll(() => page.getByText('LK32-0081-8').first().isVisible()).toBe(true);
   await expectAccessible(page, 'report to be signed');
 
   // Accepting opens when the deviations have been in view; nothing is ticked beforehand.

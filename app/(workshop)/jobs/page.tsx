@@ -47,7 +47,7 @@ export default async function JobsPage({
             key={words}
             href={state ? `/jobs?state=${state}` : '/jobs'}
             aria-current={filter.state === state ? 'true' : undefined}
-            className={`inline-flex min-h-12 items-center border-b-[3px] ${filter.state === state ? 'border-blue font-semibold' : 'border-transparent text-ink2 hover:text-ink'}`}
+            className={`inline-flex min-h-12 min-w-6 items-center justify-center border-b-[3px] ${filter.state === state ? 'border-blue font-semibold' : 'border-transparent text-ink2 hover:text-ink'}`}
           >
             {words}
           </Link>
