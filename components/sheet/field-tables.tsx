@@ -65,7 +65,7 @@ function OneTable({ table, index, order }: { table: FieldTable; index: number; o
     role !== 'reading' || order.includes(pointer) || session.textOf(passId, pointer) !== '';
   return (
     <div className="overflow-x-auto">
-      <table className="w-full border-collapse text-left">
+      <table className={`border-collapse text-left ${table.columns.length === 1 ? 'w-80 max-w-full' : 'w-full'}`}>
         <caption className={table.title ? 'pb-1 text-left font-semibold' : 'sr-only'}>{table.title ?? title}</caption>
         <thead className="border-b-[1.5px] border-ink">
           <tr>

@@ -11,7 +11,7 @@ const looks: Record<Field['role'], string> = {
   choice: 'border-ink2 bg-leaf text-base',
 };
 const box =
-  'block h-12 w-full rounded border-[1.5px] px-2 focus:border-blue focus:bg-blue-wash focus:text-ink aria-invalid:border-oxide';
+  'ml-auto block h-12 w-full max-w-52 rounded border-[1.5px] px-2 focus:border-blue focus:bg-blue-wash focus:text-ink aria-invalid:border-oxide';
 
 /** One field: an uncontrolled input; what happens in it is handled by the table around it (use-entry.ts). */
 export function ReadingCell({ field, framed }: { field: Field; framed?: boolean }) {

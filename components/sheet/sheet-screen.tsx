@@ -166,7 +166,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
                 key={pass.id}
                 data={data}
                 pass={linked ? (passes.find(({ id }) => id === pass.linkedTo) ?? pass) : pass}
-                earlier={passes[at - 1] ?? null}
+                earlier={passes.slice(0, at).findLast(({ instruments }) => instruments.length > 0) ?? null}
                 readOnly={readOnly || linked}
                 again={again}
               />
