@@ -53,8 +53,13 @@ function FullPass({ pass, of }: { pass: PassBlock; of: string }) {
 
 function PassResult({ pass }: { pass: PassBlock }) {
   const verdict = pass.judgement?.verdict ?? 'not-measured';
-  const words = pass.resultMm === null ? REPORT_WORDS.block.noResult : `${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`;
-  return <VerdictMark verdict={verdict} words={words} />;
+  if (pass.resultMm === null) return <VerdictMark verdict={verdict} words={REPORT_WORDS.block.noResult} />;
+  return (
+    <>
+      <VerdictMark verdict={verdict} words={`${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`} />
+      {pass.resultWords && <span className="text-ink2"> · {pass.resultWords}</span>}
+    </>
+  );
 }
 
 const takenWords = (pass: PassBlock): string =>
