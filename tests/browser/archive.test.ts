@@ -71,7 +71,7 @@ it('archive look-up by machine serial', async () => {
     .first()
     .click();
   await page.waitForURL(/\/reports\//);
-  expect(await page.getByText('HP25-1I10-S5').first().isVisible()).toBe(true);
+  await expect.poll(() => page.getByText('HP25-1I10-S5').first().isVisible()).toBe(true);
 
   await look('nothing-like-this');
   await expect

@@ -88,9 +88,10 @@ it('walks the whole line from registration to a signed report that is found agai
 
   await page.goto(jobUrl);
   await page
-    .getByRole('button', { name: /as left/i })
+    .getByRole('button', { name: /^As left = as found/ })
     .first()
     .click();
+  await page.getByRole('button', { name: 'Declare it for 1 sheet' }).click();
   await expect
     .poll(() => page.getByRole('button', { name: 'Hand in for the check' }).isVisible(), { timeout: 15_000 })
     .toBe(true);
