@@ -40,7 +40,7 @@ export function NotInPlan(props: {
       <ul className="mt-1 text-[15px] leading-snug">
         {exclusions.map(({ key, title, reason, text }) => (
           <li key={key} className="border-b border-hair py-1.5">
-            {title} <span className="text-ink2">{[leftOutReasons[reason], text].filter(Boolean).join(': ')}</span>
+            {title} <span className="text-ink2">· {[leftOutReasons[reason], text].filter(Boolean).join(': ')}</span>
           </li>
         ))}
       </ul>

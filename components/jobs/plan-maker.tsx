@@ -10,6 +10,7 @@ import { newId } from '@/lib/id';
 import { LeaveOutMany } from './leave-out-many';
 import { allTaken, chooseFor, type PlanChoices, type ProposedTest, planOf, type TestChoice } from './plan-choices';
 import { PlanTest } from './plan-test';
+import { ReasonForAll } from './reason-for-all';
 
 /** All proposals in working order, all taken. What is not taken wants a reason; then the plan is made, once. */
 export function PlanMaker({ jobId, tests }: { jobId: string; tests: ProposedTest[] }) {
@@ -75,10 +76,12 @@ export function PlanMaker({ jobId, tests }: { jobId: string; tests: ProposedTest
         const members = tests.filter((test) => test.group === group);
         const keys = members.map((test) => test.key);
         const allIn = keys.every((one) => choices[one]?.taken);
+        const noneIn = keys.length > 1 && keys.every((one) => !choices[one]?.taken);
         return (
           <section key={group} aria-label={group} className="mt-6">
             <div className="flex flex-wrap items-center justify-between gap-x-4 border-b-[1.5px] border-ink">
               <h2 className="text-lg font-semibold">{group}</h2>
+              {noneIn && <ReasonForAll group={group} onChoose={(reason) => choose(keys, { reason })} />}
               {members.length > 1 && (
                 <button
                   type="button"

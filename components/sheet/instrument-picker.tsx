@@ -9,6 +9,7 @@ import { Notice } from '@/components/ui/notice';
 import type { ApiProblem } from '@/lib/http/api-client';
 import { isOverdue } from '@/lib/schemas/instrument-state';
 import { dueWords } from './due-words';
+import { fitsKind } from './fits-kind';
 import type { Instrument, UsedInstrument } from './sheet-data';
 
 type Choice = Map<string, { reason: string; by: string }>;
@@ -54,7 +55,7 @@ export function InstrumentPicker(props: {
       })),
     );
   };
-  const sorted = [...instruments].sort((a, b) => Number(wanted.includes(b.kind)) - Number(wanted.includes(a.kind)));
+  const sorted = [...instruments].sort((a, b) => Number(fitsKind(b.kind, wanted)) - Number(fitsKind(a.kind, wanted)));
   return (
     <Dialog
       open

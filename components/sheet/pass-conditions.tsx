@@ -7,6 +7,7 @@ import { TextInput } from '@/components/ui/inputs';
 import { formatTime } from '@/lib/reporting/format-time';
 import { isOverdue } from '@/lib/schemas/instrument-state';
 import { dueWords } from './due-words';
+import { fitsKind } from './fits-kind';
 import { passWords, type SheetData, type SheetPass, type UsedInstrument } from './sheet-data';
 import { useKeptDraft } from './use-kept-draft';
 import { useChangePass } from './use-sheet-changes';
@@ -116,7 +117,7 @@ function proposal(data: SheetData, earlier: SheetPass | null, measuredOn: string
   }
   const ids = data.recentInstruments.filter((id) => {
     const one = data.instruments.find((candidate) => candidate.id === id);
-    return one && data.definition.instruments.includes(one.kind) && !isOverdue(one.dueOn, measuredOn);
+    return one && fitsKind(one.kind, data.definition.instruments) && !isOverdue(one.dueOn, measuredOn);
   });
   if (ids.length === 0) return null;
   const used = ids.map((instrumentId) => ({ instrumentId, overrideReason: null, overrideBy: null }));
