@@ -2,7 +2,7 @@ import { Notice, type NoticeTone } from '@/components/ui/notice';
 import { formatTime } from '@/lib/reporting/format-time';
 import { signedOutcomeWords } from '@/lib/reporting/record-words';
 import type { ReportModel } from '@/lib/reporting/report-model';
-import { longDate } from '@/lib/reporting/report-text';
+import { longDate, sentence } from '@/lib/reporting/report-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { Facts } from './facts';
 import { RemarksTable } from './remarks-section';
@@ -32,15 +32,15 @@ const tones: Record<string, NoticeTone> = { refuse: 'oxide' };
 export function answerWords(answer: RecordedAnswer, timeZone: string): string {
   const who = [answer.name, answer.company].filter(Boolean).join(', ');
   const words = signedOutcomeWords[answer.outcome] ?? answer.outcome;
-  return `${words.charAt(0).toUpperCase()}${words.slice(1)} by ${who} on ${timeWords(answer.signedAt, timeZone)}.`;
+  return `${sentence(words)} by ${who} on ${timeWords(answer.signedAt, timeZone)}.`;
 }
 
 const timeWords = (moment: Date, timeZone: string) => `${longDate(formatTime(moment, timeZone))} ${timeZone}`;
 
 const methods: Record<RecordedAnswer['method'], string> = {
   'signed-in': 'signed in with an account of their own',
-  'on-tablet': 'on the inspector’s tablet',
-  'signing-link': 'through a signing link',
+  'on-tablet': 'signed on the inspector’s tablet',
+  'signing-link': 'signed through a signing link',
 };
 
 /** The answer in one sentence, as it stands at the head of the report. */
@@ -48,7 +48,7 @@ export function AnswerNotice({ answer, timeZone }: { answer: RecordedAnswer; tim
   return (
     <Notice tone={tones[answer.outcome] ?? 'blue'} title={answerWords(answer, timeZone)}>
       <p>
-        Signed {methods[answer.method]}
+        {sentence(methods[answer.method])}
         {answer.witness && `, witnessed by ${answer.witness}`}.{answer.reason && ` Reason: ${answer.reason}`}
       </p>
     </Notice>

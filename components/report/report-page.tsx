@@ -24,6 +24,8 @@ export function ReportPage({ model }: { model: ReportModel }) {
       }
       className="relative max-w-[64rem] rounded border-[1.5px] border-line bg-leaf p-4 sm:p-8 print:max-w-none print:border-0 print:p-0"
     >
+      {/* On A4 a rem of 11 px gives the page the proportions that it has on a desk. */}
+      <style>{'@media print { html { font-size: 11px } @page { margin: 14mm } }'}</style>
       {draft && (
         <p
           aria-hidden="true"

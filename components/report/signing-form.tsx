@@ -116,7 +116,7 @@ export function SigningForm(props: {
           </div>
           <Refused problem={problem} doneHref={doneHref} />
           <div>
-            <Button type="submit" variant="strong" disabled={sending || recorded}>
+            <Button type="submit" variant="strong" disabled={sending || recorded || problem?.status === 409}>
               {sending || recorded ? 'Recording' : buttons[outcome]}
             </Button>
           </div>

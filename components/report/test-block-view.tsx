@@ -14,7 +14,7 @@ import { ReportSection } from './report-section';
 /** Everything about one test: at the left the set-up and what is judged by what, at the right plots and readings, the limit rule below. */
 export function TestBlockView({ block }: { block: TestBlock }) {
   return (
-    <div id={`test-${block.order}`} className="scroll-mt-4">
+    <div id={`test-${block.order}`} className="scroll-mt-4 print:break-inside-avoid">
       <ReportSection
         title={`${block.order} · ${block.title}`}
         beside={
@@ -47,7 +47,7 @@ function Measured({ block }: { block: TestBlock }) {
   const arithmetic = finalPass(block)?.judgement?.toleranceArithmetic;
   return (
     <>
-      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-8 gap-y-4 lg:grid-cols-[20rem_minmax(0,1fr)] print:grid-cols-[14rem_minmax(0,1fr)]">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-8 gap-y-4 lg:grid-cols-[20rem_minmax(0,1fr)] print:grid-cols-[19rem_minmax(0,1fr)]">
         <div className="grid min-w-0 content-start gap-x-8 gap-y-2 sm:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[minmax(0,1fr)] print:grid-cols-[minmax(0,1fr)]">
           <SetUpSketch spec={block.sketch} component={block.component} />
           <Facts

@@ -15,6 +15,8 @@ export interface LoadedReport extends ReportView {
   /** With the customer's answer on it, once there is one. */
   model: ReportModel;
   sheets: RemarkSheet[];
+  /** Those that came with the answer. */
+  answerRemarks: ReportModel['remarks'];
   answer: ReportView['signatures'][number] | null;
   /** The revision that has taken this one's place, as far as the reader may see it. */
   replacedBy: ReportView['revisions'][number] | null;
@@ -40,6 +42,7 @@ export const loadReport = cache(async (reportId: string): Promise<LoadedReport> 
       const row = model.summary.find(({ order }) => order === position);
       return row ? [{ id, order: position, title: row.title }] : [];
     }),
+    answerRemarks: model.remarks.filter(({ no }) => view.report.model.remarks.every((earlier) => earlier.no !== no)),
     answer: view.signatures.find(({ role }) => role === 'customer') ?? null,
     replacedBy: newest && newest.revision > view.report.revision ? newest : null,
   };

@@ -11,7 +11,7 @@ export const metadata: Metadata = { title: 'The answer is recorded' };
 /** After signing: what was recorded, and the document with the answer on it. */
 export default async function AnsweredPage({ params }: { params: Promise<{ reportId: string }> }) {
   const { reportId } = await params;
-  const { viewer, report, model, answer } = await loadReport(reportId);
+  const { viewer, report, answer, answerRemarks } = await loadReport(reportId);
   if (!answer) redirect(`/reports/${reportId}`);
   const { pdfState, pdfFileId, signedPdfFileId, pdfErrorId } = report;
   return (
@@ -29,7 +29,7 @@ export default async function AnsweredPage({ params }: { params: Promise<{ repor
       <div className="mt-5 grid gap-x-10 gap-y-6 lg:grid-cols-[minmax(0,1fr)_19rem]">
         <AnswerRecord
           answer={answer}
-          remarks={model.remarks}
+          remarks={answerRemarks}
           document={{ number: report.number, revision: report.revision }}
           timeZone={viewer.timeZone}
         />

@@ -114,7 +114,7 @@ function Signing({ loaded }: { loaded: LoadedReport }) {
 }
 
 function Recorded({ loaded, answer }: { loaded: LoadedReport; answer: NonNullable<LoadedReport['answer']> }) {
-  const { viewer, report, model } = loaded;
+  const { viewer, report, answerRemarks } = loaded;
   return (
     <>
       <h1 className="mb-4 mt-6 text-2xl font-semibold">The answer is recorded. Thank you.</h1>
@@ -122,7 +122,7 @@ function Recorded({ loaded, answer }: { loaded: LoadedReport; answer: NonNullabl
       <div className="mt-5">
         <AnswerRecord
           answer={answer}
-          remarks={model.remarks}
+          remarks={answerRemarks}
           document={{ number: report.number, revision: report.revision }}
           timeZone={viewer.timeZone}
         />
