@@ -113,6 +113,13 @@ export async function setJobState(db: Db, id: string, state: JobRow['state']): P
     .update({ state, version: db.raw('version + 1') });
 }
 
+/** The answer to a report closes its job; a job that was opened again meanwhile stays open. */
+export async function closeJob(db: Db, id: string): Promise<void> {
+  await db('jobs')
+    .where({ id, state: 'issued' })
+    .update({ state: 'closed', version: db.raw('version + 1') });
+}
+
 export async function insertTemperature(
   db: Db,
   row: {

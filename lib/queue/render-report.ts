@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { inScope, systemScope } from '@/db/client';
-import { setJobState } from '@/db/queries/jobs';
+import { closeJob } from '@/db/queries/jobs';
 import { queueMail } from '@/db/queries/outbox';
 import {
   findReport,
@@ -68,7 +68,7 @@ async function renderOne(
       sha256,
     });
     await keepReportPdf(trx, report.id, kind, fileId);
-    if (kind === 'signed' && report.state !== 'refused') await setJobState(trx, report.jobId, 'closed');
+    if (kind === 'signed' && report.state !== 'refused') await closeJob(trx, report.jobId);
     if (
       Date.now() - (kind === 'signed' ? (report.signedAt ?? report.issuedAt) : report.issuedAt).getTime() >
       newsDays * 86_400_000

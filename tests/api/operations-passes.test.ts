@@ -4,6 +4,7 @@ import { POST as takeOperations } from '@/app/api/sheets/[id]/operations/route';
 import { PATCH as patchPass } from '@/app/api/sheets/[id]/passes/[passId]/route';
 import { POST as postPass } from '@/app/api/sheets/[id]/passes/route';
 import { GET as getSheet } from '@/app/api/sheets/[id]/route';
+import { closeJob, findJob, setJobState } from '@/db/queries/jobs';
 import { newId } from '@/lib/id';
 import { ifMatch } from '@/tests/helpers/call-route';
 import { type Asked, Workshop } from './workshop';
@@ -180,4 +181,16 @@ describe('a set’s conditions', () => {
     expect((await patch({ temperature: '20' }, 1, { as: 'stranger' })).status).toBe(404);
     expect((await patch({ temperature: '20' }, 1, { as: 'customer' })).status).toBe(403);
   });
+});
+
+it('the answer to a report closes its job, but not one that was opened again meanwhile', async () => {
+  const { jobId } = await workshop.plannedJob(machine, [nose]);
+  const afterClosing = () =>
+    workshop.as('inspector', async (trx) => {
+      await closeJob(trx, jobId);
+      return (await findJob(trx, jobId))?.state;
+    });
+  expect(await afterClosing()).toBe('open');
+  await workshop.as('reviewer', (trx) => setJobState(trx, jobId, 'issued'));
+  expect(await afterClosing()).toBe('closed');
 });
