@@ -14,13 +14,17 @@ export const clearOfFoot =
 export function useClearView(): void {
   useEffect(() => {
     const root = document.documentElement;
+    const watch = new ResizeObserver(() => measure());
     const measure = () => {
-      const heights = [...document.querySelectorAll<HTMLElement>('[data-at-foot]')].map((part) =>
-        getComputedStyle(part).position === 'sticky' ? part.offsetHeight : 0,
-      );
-      root.style.setProperty('--foot', `${heights.reduce((sum, height) => sum + height, 0) + 12}px`);
+      const parts = [...document.querySelectorAll<HTMLElement>('[data-at-foot]')];
+      const heights = parts.map((part) => {
+        watch.observe(part);
+        return getComputedStyle(part).position === 'sticky' ? part.offsetHeight : 0;
+      });
+      const foot = heights.reduce((sum, height) => sum + height, 0) + 12;
+      root.style.setProperty('--foot', `${foot}px`);
+      keepInView(foot);
     };
-    const watch = new ResizeObserver(measure);
     watch.observe(document.body);
     const changes = new MutationObserver(measure);
     changes.observe(document.body, { childList: true, subtree: true });
@@ -33,4 +37,12 @@ export function useClearView(): void {
       root.style.removeProperty('--foot');
     };
   }, []);
+}
+
+/** The last reading makes the result appear, and with it the foot grows over the field that was just typed into. */
+function keepInView(footPx: number): void {
+  const field = document.activeElement;
+  if (!(field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement) || field.closest('[data-at-foot]'))
+    return;
+  if (field.getBoundingClientRect().bottom > window.innerHeight - footPx) field.scrollIntoView({ block: 'nearest' });
 }
