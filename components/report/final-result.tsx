@@ -13,7 +13,7 @@ export function FinalResult({ block }: { block: TestBlock }) {
   if (!pass?.judgement || pass.resultMm === null) return null;
   const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
   // A figure without a sign never has words for its direction, and is never below zero.
-  const signed = block.passes.some((each) => each.resultWords !== null || /^[-−]/.test(each.resultMm ?? ''));
+  const signed = block.passes.some((each) => each.judgement?.signed);
   const words = REPORT_WORDS.block;
   const beside = [
     pass.resultWords ?? '',

@@ -79,7 +79,7 @@ async function machineDrift(db: Db, machineId: string): Promise<Drift[]> {
          from reports r join jobs j on j.organisation_id = r.organisation_id and j.id = r.job_id
         where j.machine_id = ? and r.state in ('signed', 'signed-with-remarks')
         order by r.job_id, r.revision desc)
-     select s.id as "reportId", s.number, s.measured_on as "measuredOn", t.entry ->> 'title' as title,
+     select s.id as "reportId", s.number, s.measured_on as "measuredOn", t.entry ->> 'key' as key, t.entry ->> 'title' as title,
             t.entry ->> 'component' as component, t.entry ->> 'asLeft' as "asLeftMm", t.entry ->> 'asLeftVerdict' as verdict,
             t.entry ->> 'toleranceMm' as "toleranceMm"
        from signed s cross join lateral jsonb_array_elements(s.model::jsonb -> 'summary') with ordinality as t(entry, place)
@@ -88,8 +88,7 @@ async function machineDrift(db: Db, machineId: string): Promise<Drift[]> {
     [machineId],
   );
   const tests = new Map<string, Drift>();
-  for (const { title, component, toleranceMm, ...point } of rows) {
-    const key = `${title} · ${component}`;
+  for (const { key, title, component, toleranceMm, ...point } of rows) {
     const test: Drift = tests.get(key) ?? { key, title, component, toleranceMm, points: [] };
     test.points.push(point);
     test.toleranceMm = toleranceMm;

@@ -89,11 +89,14 @@ export function buildReportModel(input: ReportInput): ReportModel {
       const tolerance = (state.final?.result?.outcome.judgement.toleranceUm ?? sheet.tolerance?.baseUm) || null;
       return {
         order: sheet.position,
+        key: sheet.key,
         title: sheet.title,
         component: componentWords(sheet.component, job.makeUp),
         asFound: state.asFound?.result ? formatDecimal(state.asFound.result.displayedMm) : null,
+        asFoundUm: state.asFound?.result?.outcome.result.deviation ?? null,
         asFoundVerdict: state.asFound?.result?.verdict ?? null,
         asLeft: state.asLeft?.result ? formatDecimal(state.asLeft.result.displayedMm) : null,
+        asLeftUm: state.asLeft?.result?.outcome.result.deviation ?? null,
         asLeftVerdict: state.asLeft?.result?.verdict ?? null,
         linked: state.linked,
         toleranceMm: tolerance && toleranceText(tolerance),
@@ -120,19 +123,19 @@ function toleranceText(um: string): string {
 
 function componentList({ job: { makeUp } }: StoredJob): ReportModel['machine']['components'] {
   const programmed = { radius: 'programmed on radius', diameter: 'programmed on diameter' } as const;
+  // The id stands in front already: `T1 turret, 12 stations`.
+  const words = (id: string, ...rest: (string | null)[]) => ({
+    id,
+    what: [componentName(id, makeUp).replace(new RegExp(` ?${id}$`), ''), ...rest].filter(Boolean).join(', '),
+  });
   return [
-    ...makeUp.spindles.map((spindle) => ({
-      id: spindle.id,
-      what: `${componentName(spindle.id, makeUp)}, channel ${spindle.channel}`,
-    })),
-    ...makeUp.turrets.map((turret) => ({
-      id: turret.id,
-      what: `${componentName(turret.id, makeUp)}, ${turret.stations} stations, ${turret.axes.join(' ')}, channel ${turret.channel}`,
-    })),
-    ...makeUp.linearAxes.map((axis) => ({
-      id: axis.id,
-      what: `axis ${axis.id}, travel ${formatDecimal(axis.travelMm)} mm, ${programmed[axis.programmedOn]}`,
-    })),
+    ...makeUp.spindles.map((spindle) => words(spindle.id, `channel ${spindle.channel}`)),
+    ...makeUp.turrets.map((turret) =>
+      words(turret.id, `${turret.stations} stations`, turret.axes.join(' '), `channel ${turret.channel}`),
+    ),
+    ...makeUp.linearAxes.map((axis) =>
+      words(axis.id, `travel ${formatDecimal(axis.travelMm)} mm`, programmed[axis.programmedOn]),
+    ),
   ];
 }
 

@@ -67,7 +67,7 @@ export function passBlock(pass: StoredPass, context: PassContext): PassBlock {
 
 const cellText = (cell: FieldTableCell | null, shown: (field: Field) => string): string => {
   if (cell === null) return '';
-  return 'field' in cell ? shown(cell.field) : cell.derived;
+  return 'field' in cell ? shown(cell.field) : cell.derived.replace('-', '\u2212');
 };
 
 /** What was typed, as a figure in the column's unit; what cannot be read prints as it was typed. */

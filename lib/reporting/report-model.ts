@@ -89,12 +89,17 @@ export interface Counts {
 
 export interface SummaryRow {
   order: number;
+  /** The same for the same test of the same component at every visit: `AX-1a:Z1:S1`. */
+  key: string;
   title: string;
   component: string;
   /** mm as shown, sign included; null: not measured in that state. */
   asFound: string | null;
+  /** The unrounded deviation, µm, as a plain decimal: for machines, and for drift over the years. */
+  asFoundUm: string | null;
   asFoundVerdict: Verdict | null;
   asLeft: string | null;
+  asLeftUm: string | null;
   asLeftVerdict: Verdict | null;
   /** as left = as found, nothing was done. */
   linked: boolean;

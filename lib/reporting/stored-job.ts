@@ -33,6 +33,7 @@ export interface StoredJob {
 export interface StoredSheet {
   id: string;
   position: number;
+  key: string;
   definition: { id: string; code: string; edition: string; version: number };
   title: string;
   component: BoundComponent;

@@ -1,5 +1,6 @@
 import type { Knex } from 'knex';
 import { recordEvent } from '@/db/queries/audit';
+import { findJob } from '@/db/queries/jobs';
 import { insertRemarks } from '@/db/queries/remarks';
 import { findReport, insertSignature, lockReport, queueRendering, setReportState } from '@/db/queries/reports';
 import type { Viewer } from '@/lib/auth/viewer';
@@ -27,6 +28,10 @@ export async function signReport(
     const seen = report ?? (await findReport(trx, reportId));
     if (!seen) throw notFound('report');
     throw conflict('This report has its answer already, or has been replaced.', { report: `/reports/${reportId}` });
+  }
+  const job = await findJob(trx, report.jobId);
+  if (job?.state === 'open' || job?.state === 'in-check') {
+    throw conflict('The job has been opened again: this revision will be replaced and takes no answer any more.');
   }
   const onTablet = viewer.customerId === null;
   const state = states[form.outcome];

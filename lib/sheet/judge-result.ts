@@ -12,12 +12,13 @@ export function judgeResult(rules: SheetRules, result: MeasuredResult, scaled: S
   const direction = result.signed ? rules.direction : 'either';
   if (!rules.tolerance || !scaled) {
     const nothing = { toleranceUm: null, toleranceArithmetic: null, limitUm: null, marginUm: null, local: null };
-    return { verdict: 'for-information', ...nothing, direction };
+    return { verdict: 'for-information', signed: result.signed, ...nothing, direction };
   }
   const whole = verdictOn(rules, result.deviation, result.signed, scaled.toleranceUm);
   const local = localJudgement(rules, result);
   return {
     verdict: local ? worse(whole.verdict, local.verdict) : whole.verdict,
+    signed: result.signed,
     toleranceUm: scaled.toleranceUm,
     toleranceArithmetic: scaled.arithmetic,
     limitUm: whole.limit,

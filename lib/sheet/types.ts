@@ -59,6 +59,8 @@ export type Verdict = 'within-tolerance' | 'out-of-tolerance' | 'undecided' | 'f
 
 export interface Judgement {
   verdict: Verdict;
+  /** The deviation has a sign that says something; false: an amount that cannot be negative. */
+  signed: boolean;
   /** Tolerance that applied, µm, after scaling to the length really measured. */
   toleranceUm: DecimalText | null;
   /** How it came about: `15·240/300 = 12, above the floor of 5`. */

@@ -200,11 +200,14 @@ export function summaryRow(block: TestBlock): SummaryRow {
   const toleranceUm = block.passes.at(-1)?.judgement?.toleranceUm ?? null;
   return {
     order: block.order,
+    key: `${block.reference.split(' ')[0]}:${block.order}`,
     title: block.title,
     component: block.componentWords,
     asFound: of('as-found')?.resultMm ?? null,
+    asFoundUm: of('as-found')?.resultUm?.replace('−', '-') ?? null,
     asFoundVerdict: of('as-found')?.judgement?.verdict ?? null,
     asLeft: of('as-left')?.resultMm ?? null,
+    asLeftUm: of('as-left')?.resultUm?.replace('−', '-') ?? null,
     asLeftVerdict: of('as-left')?.judgement?.verdict ?? null,
     linked: of('as-left')?.linkedWords != null,
     toleranceMm: toleranceUm && (Number(toleranceUm) / 1000).toFixed(3),
@@ -280,6 +283,7 @@ function pass(figures: PassFigures): PassBlock {
     resultWords: words,
     judgement: {
       verdict,
+      signed: words !== null || resultUm.startsWith('-'),
       toleranceUm,
       toleranceArithmetic: null,
       limitUm: toleranceUm,
@@ -504,6 +508,7 @@ function sampleBlocks(): TestBlock[] {
               ],
               judgement: {
                 verdict: 'within-tolerance',
+                signed: true,
                 toleranceUm: '12',
                 toleranceArithmetic: '15·240/300 = 12, above the floor of 5',
                 limitUm: '12',
@@ -564,6 +569,7 @@ function sampleBlocks(): TestBlock[] {
           more: {
             judgement: {
               verdict: 'out-of-tolerance',
+              signed: true,
               toleranceUm: '6.66666666666666666666666666667',
               toleranceArithmetic: '20·100/300, cut off to 6.6',
               limitUm: '6.66666666666666666666666666667',
@@ -589,6 +595,7 @@ function sampleBlocks(): TestBlock[] {
           more: {
             judgement: {
               verdict: 'within-tolerance',
+              signed: true,
               toleranceUm: '6.66666666666666666666666666667',
               toleranceArithmetic: '20·100/300, cut off to 6.6',
               limitUm: '6.66666666666666666666666666667',

@@ -1,6 +1,7 @@
 import type { MarkKind } from '@/components/plots/verdict-ink';
 import { verdictMark } from '@/components/plots/verdict-mark-geometry';
 import type { ReportModel, SummaryRow } from '@/lib/reporting/report-model';
+import { titleWithComponent } from '@/lib/reporting/title-with-component';
 import { REPORT_WORDS, SHORT_VERDICT_WORDS } from '@/lib/reporting/words';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
 import { type FlowItem, moved, type Slab, slabItem, space } from '@/templates/report/flow/ops';
@@ -24,7 +25,7 @@ export function summary(kit: Kit, model: ReportModel): FlowItem[] {
   const decimals = Math.max(0, ...model.summary.map((row) => row.asFound?.match(/[.,](\d+)/)?.[1]?.length ?? 0));
   const rows = model.summary.map((row): TableCell[] => [
     String(row.order),
-    titleOf(row),
+    titleWithComponent(row.title, row.component),
     asFoundCell(kit, row, fixed[0] as Column, decimals),
     row.asLeft === null ? REPORT_WORDS.none : row.linked ? `${words.linkedSign} ${row.asLeft}` : row.asLeft,
     row.toleranceMm ?? REPORT_WORDS.none,
@@ -41,10 +42,6 @@ export function summary(kit: Kit, model: ReportModel): FlowItem[] {
 const FINE: readonly MarkKind[] = ['within-tolerance', 'for-information'];
 
 /** The component after the title, unless the title names it. */
-function titleOf(row: SummaryRow): string {
-  return row.component === '' || row.title.includes(row.component) ? row.title : `${row.title}, ${row.component}`;
-}
-
 /** A figure as found, with the mark before it where it was not within tolerance. */
 function asFoundCell(kit: Kit, row: SummaryRow, column: Column, decimals: number): TableCell {
   const verdict = row.asFoundVerdict;

@@ -92,7 +92,7 @@ function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
   if (!pass?.judgement || pass.resultMm === null) return [];
   const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
   // A figure without a sign never has words for its direction, and is never below zero.
-  const signed = block.passes.some((each) => each.resultWords !== null || /^[-−]/.test(each.resultMm ?? ''));
+  const signed = block.passes.some((each) => each.judgement?.signed);
   const rule = limitRule({
     deviationUm: pass.resultUm === null ? null : pass.resultUm.replace('−', '-'),
     toleranceUm,
