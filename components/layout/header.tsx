@@ -19,12 +19,17 @@ export function Header(props: { person: Person; places: NavigationPlace[]; offic
         <div className="order-3 w-full xl:order-none xl:w-auto">
           <Navigation places={places} />
         </div>
-        <div className="ml-auto flex min-w-0 flex-1 items-center justify-end gap-x-5 text-sm">
+        <div className="ml-auto flex min-w-0 flex-1 items-center justify-end gap-x-5 text-sm max-sm:contents">
           <SaveStateSlot />
-          <Suspense>
-            <SearchBox />
-          </Suspense>
-          <PersonMenu person={person} places={office} theme={theme} />
+          {/* On a telephone the box has a line of its own. */}
+          <div className="flex min-w-0 flex-1 justify-end max-sm:order-2 max-sm:w-full max-sm:flex-none">
+            <Suspense>
+              <SearchBox />
+            </Suspense>
+          </div>
+          <div className="max-sm:ml-auto">
+            <PersonMenu person={person} places={office} theme={theme} />
+          </div>
         </div>
       </div>
     </header>

@@ -8,7 +8,7 @@ export function SearchBox() {
   const q = useSearchParams().get('q');
   const shown = usePathname() === '/archive' ? (q ?? '') : '';
   return (
-    <Form action="/archive" role="search" className="flex w-full min-w-0 max-w-sm">
+    <Form action="/archive" role="search" className="flex w-full min-w-0 max-w-sm max-sm:max-w-none">
       <label className="sr-only" htmlFor="search">
         Look up in the archive
       </label>

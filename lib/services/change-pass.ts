@@ -5,6 +5,7 @@ import { holdJob } from '@/db/queries/jobs';
 import { findPass, replacePassInstruments } from '@/db/queries/passes';
 import { lockSheet } from '@/db/queries/sheets';
 import { type InstrumentChoice, listInstrumentChoices } from '@/db/read-models/sheet-view';
+import { can } from '@/lib/auth/permissions';
 import type { Viewer } from '@/lib/auth/viewer';
 import { changedMeanwhile, conflict, type FieldError, invalid, notFound } from '@/lib/errors';
 import { formatDay } from '@/lib/reporting/format-time';
@@ -66,6 +67,7 @@ async function checkInstruments(
     (await listInstrumentChoices(db)).map((entry) => [entry.id, entry]),
   );
   const errors: FieldError[] = [];
+  const allowing = await whoMayAllow(db);
   used.forEach((entry, index) => {
     const instrument = register.get(entry.instrumentId);
     const dueOn = calibrationOn(instrument?.calibrations ?? [], measuredOn)?.dueOn ?? null;
@@ -78,7 +80,21 @@ async function checkInstruments(
         pointer: `/instruments/${index}/overrideReason`,
         detail: `${instrument.number} was due on ${dueOn ?? '(no certificate)'}: say why it may be used all the same, and who allows it.`,
       });
+    } else if (entry.overrideBy && !allowing.includes(entry.overrideBy)) {
+      errors.push({
+        pointer: `/instruments/${index}/overrideBy`,
+        detail: `Name somebody who may allow it: ${allowing.join(', ') || 'nobody is registered who may'}.`,
+      });
     }
   });
   if (errors.length > 0) throw invalid(errors);
+}
+
+/** Members whose role includes it, by name, as it prints. */
+async function whoMayAllow(db: Db): Promise<string[]> {
+  const members: { name: string; roles: string[] }[] = await db('memberships')
+    .whereNull('disabled_at')
+    .orderBy('name')
+    .select('name', 'roles');
+  return members.filter(({ roles }) => can(roles, 'instrument.override')).map(({ name }) => name);
 }

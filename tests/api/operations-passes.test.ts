@@ -152,6 +152,9 @@ describe('a set’s conditions', () => {
     expect([refused.status, refused.body.errors[0].pointer]).toEqual([422, '/instruments/0/overrideReason']);
     const halfSaid = { ...square, overrideReason: 'turned square: its own error cancels' };
     expect((await patch({ ...late, instruments: [halfSaid] }, 2)).status).toBe(422);
+    // An inspector may not allow it, and a name that is nobody's neither.
+    const byHimself = await patch({ ...late, instruments: [{ ...halfSaid, overrideBy: 'T. Orrell' }] }, 2);
+    expect([byHimself.status, byHimself.body.errors[0].pointer]).toEqual([422, '/instruments/0/overrideBy']);
     const allowed = { ...halfSaid, overrideBy: 'J. Penhale' };
     expect((await patch({ ...late, instruments: [{ ...square, instrumentId: id('IN-01') }, allowed] }, 2)).status).toBe(
       200,
