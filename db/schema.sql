@@ -413,6 +413,7 @@ CREATE TABLE public.organisations (
     set_up_done boolean DEFAULT false NOT NULL,
     version integer DEFAULT 1 NOT NULL,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
+    codes jsonb,
     CONSTRAINT organisations_paper_check CHECK ((paper = ANY (ARRAY['A4'::text, 'Letter'::text])))
 );
 

@@ -2,6 +2,7 @@
 
 import { useRouter } from 'next/navigation';
 import type { z } from 'zod';
+import { CodeChoice, type OfferedCode } from '@/components/forms/code-choice';
 import { FormProblem } from '@/components/forms/form-problem';
 import { useApiForm } from '@/components/forms/use-api-form';
 import { Button } from '@/components/ui/button';
@@ -17,6 +18,7 @@ export interface JobFormData {
   /** Fields that were taken over, and from where: said at each of them. */
   takenOver: Partial<Record<keyof z.input<typeof jobForm>, string>>;
   lastReference: string | null;
+  offeredCodes: OfferedCode[];
 }
 
 /** Opens a job on a machine. What the last visit said is proposed, and marked as such. */
@@ -91,6 +93,15 @@ export function JobForm({ data }: { data: JobFormData }) {
         ))}
         {takenOver.decisionRule && <p className="text-sm text-ink2">{takenOver.decisionRule}</p>}
       </fieldset>
+      <div className="sm:col-span-2">
+        <CodeChoice
+          offered={data.offeredCodes}
+          chosen={form.watch('codes') ?? []}
+          onChoose={(next) => form.setValue('codes', next, { shouldValidate: form.formState.isSubmitted })}
+          hint="The plan is made of their tests; the job keeps these editions."
+          error={errorAt('codes')}
+        />
+      </div>
       <People members={members} form={form} hint={takenOver.people} />
       <div className="grid gap-4 sm:col-span-2">
         {errorAt('machineId') && <FieldErrorLine>{errorAt('machineId')}</FieldErrorLine>}

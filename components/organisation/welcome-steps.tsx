@@ -1,7 +1,7 @@
-const steps = ['You and your organisation', 'Letterhead', 'First machine'] as const;
+const steps = ['You and your organisation', 'Letterhead', 'Test codes', 'First machine'] as const;
 
 /** Where I am in the first start. */
-export function WelcomeSteps({ at }: { at: 0 | 1 | 2 }) {
+export function WelcomeSteps({ at }: { at: 0 | 1 | 2 | 3 }) {
   return (
     <ol className="mb-6 flex flex-wrap gap-x-6 gap-y-1 text-sm">
       {steps.map((step, index) => (

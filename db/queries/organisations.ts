@@ -1,5 +1,6 @@
 import type { Db } from '@/db/client';
 import type { OrganisationChange } from '@/lib/schemas/organisation';
+import type { TestCodeChoice } from '@/lib/schemas/test-codes';
 
 export interface Organisation {
   id: string;
@@ -10,6 +11,8 @@ export interface Organisation {
   timeZone: string;
   paper: 'A4' | 'Letter';
   setUpDone: boolean;
+  /** What a new job is proposed with; null: every code of the catalogue. */
+  codes: TestCodeChoice | null;
   version: number;
 }
 
@@ -24,6 +27,7 @@ export async function ownOrganisation(db: Db): Promise<Organisation> {
     timeZone: 'time_zone',
     paper: 'paper',
     setUpDone: 'set_up_done',
+    codes: 'codes',
     version: 'version',
   });
   if (!row) throw new Error('The organisation of this transaction does not exist.');
@@ -40,6 +44,7 @@ export async function updateOrganisation(db: Db, version: number, change: Organi
     time_zone: change.timeZone,
     paper: change.paper,
     set_up_done: change.setUpDone,
+    codes: change.codes && JSON.stringify(change.codes),
   };
   const given = Object.fromEntries(Object.entries(columns).filter(([, value]) => value !== undefined));
   return (

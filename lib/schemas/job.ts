@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { day, id, line, optionalDay, optionalText } from './common';
+import { testCodes } from './test-codes';
 
 export const purposes = {
   'new-machine': 'acceptance of a new machine',
@@ -35,6 +36,8 @@ export const jobForm = z
     customerOrder: optionalText('The order', 100),
     customerEngineer: optionalText('The customer’s engineer', 120),
     decisionRule: z.enum(['simple', 'guarded'], 'Choose the decision rule.').default('simple'),
+    /** Left out: those that the organisation works by. */
+    codes: testCodes.optional(),
     startsOn: day('First day'),
     endsOn: optionalDay('Last day'),
     place: optionalText('The place', 200),

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { line, optionalText } from './common';
 import { newPassword } from './password';
 import { email } from './people';
+import { testCodes } from './test-codes';
 
 const isTimeZone = (zone: string): boolean => {
   try {
@@ -35,7 +36,9 @@ export const organisationFields = z.strictObject({
   paper: z.enum(['A4', 'Letter']),
 });
 
-export const organisationChange = organisationFields.partial().extend({ setUpDone: z.boolean().optional() });
+export const organisationChange = organisationFields
+  .partial()
+  .extend({ setUpDone: z.boolean().optional(), codes: testCodes.optional() });
 export type OrganisationChange = z.output<typeof organisationChange>;
 
 /** The first start: organisation and first administrator in one. */

@@ -1,11 +1,13 @@
 import type { Db } from '@/db/client';
 import { recordEvent } from '@/db/queries/audit';
 import { insertJob } from '@/db/queries/jobs';
+import { ownOrganisation } from '@/db/queries/organisations';
 import type { Viewer } from '@/lib/auth/viewer';
 import { invalid } from '@/lib/errors';
 import type { JobForm } from '@/lib/schemas/job';
 import type { MakeUp } from '@/lib/schemas/make-up';
-import { codes } from '@/standards/registry';
+import { sameCode, type TestCodeChoice } from '@/lib/schemas/test-codes';
+import { codes, codeTitle } from '@/standards/registry';
 
 /** Opens a job on a machine; it keeps the make-up and the editions that it began with. */
 export async function openJob(db: Db, viewer: Viewer, form: JobForm): Promise<string> {
@@ -17,7 +19,7 @@ export async function openJob(db: Db, viewer: Viewer, form: JobForm): Promise<st
   if (!customer) throw invalid([{ pointer: '/customerId', detail: 'Choose the customer.' }]);
   const id = await insertJob(db, {
     ...form,
-    codes: codes().map(({ code, edition }) => ({ code, edition })),
+    codes: await jobCodes(db, form.codes),
     makeUp: machine.makeUp,
     createdBy: viewer.accountId,
   });
@@ -28,4 +30,16 @@ export async function openJob(db: Db, viewer: Viewer, form: JobForm): Promise<st
     detail: { reference: form.reference },
   });
   return id;
+}
+
+/** The codes that were chosen, or those that the organisation works by; each must be in the catalogue. */
+async function jobCodes(db: Db, chosen: TestCodeChoice | undefined): Promise<TestCodeChoice> {
+  const known = codes().map(({ code, edition }) => ({ code, edition }));
+  const wanted = chosen ?? (await ownOrganisation(db)).codes ?? known;
+  const unknown = wanted.filter((one) => !known.some((other) => sameCode(one, other)));
+  if (unknown.length > 0) {
+    const names = unknown.map(({ code, edition }) => codeTitle(code, edition)).join(', ');
+    throw invalid([{ pointer: '/codes', detail: `Not in the catalogue: ${names}.` }]);
+  }
+  return wanted;
 }

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { redirect } from 'next/navigation';
+import { CodesForm } from '@/components/organisation/codes-form';
 import { FirstMachine } from '@/components/organisation/first-machine';
 import { FoundingForm } from '@/components/organisation/founding-form';
 import { OrganisationForm } from '@/components/organisation/organisation-form';
@@ -11,6 +12,7 @@ import { listCustomers } from '@/db/queries/customers';
 import { ownOrganisation } from '@/db/queries/organisations';
 import { can } from '@/lib/auth/permissions';
 import { currentViewer, scopeOf } from '@/lib/auth/session';
+import { offeredCodes } from '@/lib/planning/offered-codes';
 import { timeZones } from '@/lib/time-zones';
 
 export const metadata: Metadata = { title: 'Welcome' };
@@ -33,19 +35,34 @@ export default async function WelcomePage({ searchParams }: { searchParams: Prom
     organisation: await ownOrganisation(trx),
     customers: await listCustomers(trx),
   }));
-  if ((await searchParams).step !== 'machine') {
+  const { step } = await searchParams;
+  if (step === 'codes') {
+    return (
+      <>
+        <PageTitle>The test codes that you work by</PageTitle>
+        <WelcomeSteps at={2} />
+        <CodesForm
+          offered={offeredCodes()}
+          chosen={organisation.codes}
+          version={organisation.version}
+          goOnTo="/welcome?step=machine"
+        />
+      </>
+    );
+  }
+  if (step !== 'machine') {
     return (
       <>
         <PageTitle>The letterhead of your reports</PageTitle>
         <WelcomeSteps at={1} />
-        <OrganisationForm organisation={organisation} timeZones={timeZones()} goOnTo="/welcome?step=machine" />
+        <OrganisationForm organisation={organisation} timeZones={timeZones()} goOnTo="/welcome?step=codes" />
       </>
     );
   }
   return (
     <>
       <PageTitle>Your first machine</PageTitle>
-      <WelcomeSteps at={2} />
+      <WelcomeSteps at={3} />
       <FirstMachine version={organisation.version} customers={customers.map(({ id, name }) => ({ id, name }))} />
     </>
   );

@@ -1,11 +1,13 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
+import { CodesForm } from '@/components/organisation/codes-form';
 import { OrganisationForm } from '@/components/organisation/organisation-form';
-import { PageTitle } from '@/components/ui/page-title';
+import { PageTitle, SectionTitle } from '@/components/ui/page-title';
 import { inScope } from '@/db/client';
 import { ownOrganisation } from '@/db/queries/organisations';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
+import { offeredCodes } from '@/lib/planning/offered-codes';
 import { timeZones } from '@/lib/time-zones';
 
 export const metadata: Metadata = { title: 'Letterhead and defaults' };
@@ -17,7 +19,14 @@ export default async function SettingsPage() {
   return (
     <>
       <PageTitle note="Every report that is issued from now on carries it">Letterhead and defaults</PageTitle>
-      <OrganisationForm organisation={organisation} timeZones={timeZones()} />
+      <OrganisationForm key={organisation.version} organisation={organisation} timeZones={timeZones()} />
+      <SectionTitle>Test codes of a new job</SectionTitle>
+      <CodesForm
+        key={`codes ${organisation.version}`}
+        offered={offeredCodes()}
+        chosen={organisation.codes}
+        version={organisation.version}
+      />
     </>
   );
 }

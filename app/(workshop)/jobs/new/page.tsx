@@ -7,13 +7,16 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { Nameplate } from '@/components/ui/nameplate';
 import { PageTitle } from '@/components/ui/page-title';
 import { inScope } from '@/db/client';
+import { ownOrganisation } from '@/db/queries/organisations';
 import { machineList } from '@/db/read-models/machine-list';
 import { type NewJobView, newJobView } from '@/db/read-models/new-job';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
 import type { Viewer } from '@/lib/auth/viewer';
 import { todayIn } from '@/lib/dates';
+import { offeredCodes } from '@/lib/planning/offered-codes';
 import { id as isId } from '@/lib/schemas/common';
+import type { TestCodeChoice } from '@/lib/schemas/test-codes';
 
 export const metadata: Metadata = { title: 'Open a job' };
 
@@ -22,9 +25,13 @@ export default async function NewJobPage({ searchParams }: { searchParams: Promi
   if (!can(viewer.roles, 'job.manage')) notFound();
   const { machine: asked } = await searchParams;
   const machineId = isId.safeParse(asked).success ? asked! : null;
-  const { view, machines } = await inScope(scopeOf(viewer), async (trx) => {
+  const { view, machines, organisationCodes } = await inScope(scopeOf(viewer), async (trx) => {
     const found = await newJobView(trx, machineId);
-    return { view: found, machines: found.machine ? [] : (await machineList(trx, { limit: 200 })).items };
+    return {
+      organisationCodes: (await ownOrganisation(trx)).codes,
+      view: found,
+      machines: found.machine ? [] : (await machineList(trx, { limit: 200 })).items,
+    };
   });
   const { machine } = view;
   if (machineId && !machine) notFound();
@@ -42,13 +49,19 @@ export default async function NewJobPage({ searchParams }: { searchParams: Promi
       <div className="mt-5">
         <PageTitle>Open a job on this machine</PageTitle>
       </div>
-      <JobForm data={formData(viewer, view, machine)} />
+      <JobForm data={formData(viewer, view, machine, organisationCodes)} />
     </>
   );
 }
 
 /** What the last visit said is proposed again; the dates and the order are new. */
-function formData(viewer: Viewer, view: NewJobView, machine: NonNullable<NewJobView['machine']>): JobFormData {
+function formData(
+  viewer: Viewer,
+  view: NewJobView,
+  machine: NonNullable<NewJobView['machine']>,
+  organisationCodes: TestCodeChoice | null,
+): JobFormData {
+  const offered = offeredCodes();
   const { lastJob, customers, members, lastReference } = view;
   const from = lastJob ? `From the last job here, ${lastJob.reference}` : undefined;
   const still = new Set(members.map(({ id }) => id));
@@ -63,7 +76,9 @@ function formData(viewer: Viewer, view: NewJobView, machine: NonNullable<NewJobV
     customers,
     members,
     lastReference,
+    offeredCodes: offered,
     defaults: {
+      codes: organisationCodes ?? offered.map(({ code, edition }) => ({ code, edition })),
       machineId: machine.id,
       customerId,
       reference: '',
