@@ -533,6 +533,8 @@ CREATE TABLE public.readings (
     version integer NOT NULL,
     device_time timestamp with time zone,
     updated_at timestamp with time zone DEFAULT now() NOT NULL,
+    resolution numeric,
+    CONSTRAINT readings_resolution_check CHECK ((resolution > (0)::numeric)),
     CONSTRAINT readings_source_check CHECK ((source = ANY (ARRAY['typed'::text, 'keypad'::text, 'paste'::text, 'device'::text, 'planned'::text])))
 );
 

@@ -3,6 +3,7 @@
 import { useCallback } from 'react';
 import type { Field } from '@/lib/sheet/types';
 import { fieldId, fieldLabel, problemAt, problemId } from './field-problem';
+import { readAs } from './read-as';
 import { useEvaluated, useOpenPass } from './sheet-context';
 
 const looks: Record<Field['role'], string> = {
@@ -17,9 +18,11 @@ const box =
 export function ReadingCell({ field, framed }: { field: Field; framed?: boolean }) {
   const { session, passId, title, readOnly, keypad, checked, confirmed } = useOpenPass();
   const { pointer } = field;
-  const problem = useEvaluated(session, passId, (evaluated) =>
-    problemAt(evaluated, pointer, { checked, confirmed, text: session.textOf(passId, pointer) }),
-  );
+  const problem = useEvaluated(session, passId, (evaluated) => {
+    const said = problemAt(evaluated, pointer, { checked, confirmed, text: session.textOf(passId, pointer) });
+    const understood = said ? '' : readAs(session.cellAt(passId, pointer), field);
+    return said || (understood && `=${understood}`);
+  });
   const register = useCallback(
     (input: HTMLInputElement | HTMLSelectElement | null) => {
       session.register(passId, pointer, input);
@@ -74,6 +77,13 @@ function FieldProblem({ text, pointer }: { text: string; pointer: string }) {
   const { passId, confirm } = useOpenPass();
   if (!text) return null;
   const kind = text[0];
+  if (kind === '=') {
+    return (
+      <p id={problemId(passId, pointer)} className="px-2 pb-1 text-right text-sm text-ink2">
+        {text.slice(1)}
+      </p>
+    );
+  }
   const look = kind === '!' ? 'border-oxide text-oxide' : 'border-brass text-brass';
   return (
     <p id={problemId(passId, pointer)} className={`my-1 border-l-4 pl-2 text-left text-sm font-medium ${look}`}>

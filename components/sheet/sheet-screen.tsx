@@ -16,6 +16,7 @@ import { SheetCheck } from './sheet-check';
 import { OpenPassContext } from './sheet-context';
 import { passWords, type SheetData } from './sheet-data';
 import { SheetBackground, SheetHead } from './sheet-guide';
+import { SheetHistory } from './sheet-history';
 import { SheetNotices } from './sheet-notices';
 import { SheetSession } from './sheet-session';
 import { StrayReadings } from './stray-readings';
@@ -157,6 +158,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
               say={setSaid}
             />
             <div className="mt-5 max-w-2xl">
+              <SheetHistory key={`history ${live.version}`} sheetId={sheet.id} timeZone={data.timeZone} />
               <Remark sheetId={sheet.id} live={live} readOnly={readOnly} again={again} />
             </div>
           </section>

@@ -80,6 +80,11 @@ export class SheetSession {
     return this.current.get(cellKey(passId, pointer))?.text ?? '';
   }
 
+  /** The text with the unit that applies to it. */
+  cellAt(passId: string, pointer: CellPointer): { text: string; unit: Unit | null } {
+    return this.current.get(cellKey(passId, pointer)) ?? { text: '', unit: null };
+  }
+
   committedText(passId: string, pointer: CellPointer): string {
     return this.settled(passId, pointer).text;
   }

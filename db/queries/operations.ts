@@ -226,7 +226,7 @@ async function writeReadings(db: Db, changed: (ReadingOperation & { version: num
       })),
     )
     .onConflict(['organisation_id', 'pass_id', 'pointer'])
-    .merge(['text', 'value', 'unit', 'source', 'version', 'device_time', 'updated_at']);
+    .merge(['text', 'value', 'unit', 'resolution', 'source', 'version', 'device_time', 'updated_at']);
 }
 
 export interface CellChange {

@@ -40,10 +40,15 @@ export const findPass = (db: Db, id: string): Promise<PassRow | undefined> =>
   db('passes').where({ id }).first(passColumns);
 
 /** The figure in the unit that applied when it was typed; null for a choice or for what cannot be read. */
-export function figureOf(text: string, unit: Unit | null): { value: string | null; unit: Unit | null } {
-  if (unit === null || text.trim() === '') return { value: null, unit };
+export function figureOf(
+  text: string,
+  unit: Unit | null,
+): { value: string | null; unit: Unit | null; resolution: string | null } {
+  if (unit === null || text.trim() === '') return { value: null, unit, resolution: null };
   const parsed = parseNumber(text, { defaultUnit: unit });
-  return parsed.ok ? { value: parsed.value, unit: parsed.unit } : { value: null, unit };
+  return parsed.ok
+    ? { value: parsed.value, unit: parsed.unit, resolution: `1e-${parsed.decimals}` }
+    : { value: null, unit, resolution: null };
 }
 
 export async function insertPass(

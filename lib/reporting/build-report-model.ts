@@ -5,9 +5,9 @@ import { machineKinds } from '@/lib/schemas/make-up';
 import { convert } from '@/lib/units/convert';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
+import type { CellChangeText } from './corrected-readings';
 import { countVerdicts } from './count-verdicts';
 import { formatDay, formatTime } from './format-time';
-import type { CellChangeText } from './pass-block';
 import {
   conditionLabels,
   criterionWords,

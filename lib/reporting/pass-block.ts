@@ -6,19 +6,11 @@ import { formatDecimal } from '@/lib/units/format';
 import { parseNumber } from '@/lib/units/parse-number';
 import type { Unit } from '@/lib/units/unit';
 import type { TestDefinition } from '@/standards/types';
+import { type CellChangeText, correctedReadings } from './corrected-readings';
 import { formatTime } from './format-time';
 import { linkedWords, passKindWords } from './record-words';
 import type { PassBlock } from './report-model';
 import type { StoredPass } from './stored-job';
-
-export interface CellChangeText {
-  passId: string;
-  pointer: string;
-  text: string;
-  by: string;
-  at: Date;
-  reason: string | null;
-}
 
 interface PassContext {
   definition: TestDefinition;
@@ -94,23 +86,9 @@ const fieldLabels = (fields: ReturnType<typeof sheetFields>): Map<string, string
   return labels;
 };
 
-/** Readings that stood differently before: both texts print, oldest first. */
-function corrections(pass: StoredPass, labels: Map<string, string>, context: PassContext): PassBlock['corrections'] {
-  const last = new Map<string, string>();
-  const found: PassBlock['corrections'] = [];
-  for (const change of context.changes.filter((entry) => entry.passId === pass.id)) {
-    const was = last.get(change.pointer);
-    if (was !== undefined && was !== '' && was !== change.text) {
-      found.push({
-        field: labels.get(change.pointer) ?? change.pointer,
-        was,
-        now: change.text,
-        by: change.by,
-        at: formatTime(change.at, context.timeZone),
-        reason: change.reason,
-      });
-    }
-    last.set(change.pointer, change.text);
-  }
-  return found;
-}
+const corrections = (pass: StoredPass, labels: Map<string, string>, context: PassContext): PassBlock['corrections'] =>
+  correctedReadings(context.changes, pass.id).map(({ pointer, at, ...corrected }) => ({
+    field: labels.get(pointer) ?? pointer,
+    ...corrected,
+    at: formatTime(at, context.timeZone),
+  }));

@@ -123,6 +123,10 @@ it('inspector fills in a standard test sheet', async () => {
   await fields.first().press('Enter');
   await allOnServer(page);
 
+  // What stood there before is kept, and shown on demand.
+  await page.getByText('Readings that were put right').click();
+  await expect.poll(() => page.getByRole('cell', { name: '77' }).first().isVisible()).toBe(true);
+
   await page.reload();
   await expect.poll(() => readingFields(page).last().inputValue()).toBe(good);
   await expect
@@ -153,6 +157,8 @@ it('nothing typed is lost when the server is away and the page is loaded again',
   await page.route('**/api/sheets/*/operations', (route) => route.abort());
   await readingFields(page).first().focus();
   await typeReadings(page, ['40,012', '40,007']);
+  // A comma and three figures: how it is understood is said at the field.
+  await expect.poll(() => page.getByText('read as 40.012 mm').isVisible()).toBe(true);
   await expect
     .poll(() =>
       page

@@ -36,6 +36,7 @@ import * as reportsIdData from '@/app/api/reports/[id]/data/route';
 import * as reportsIdPdf from '@/app/api/reports/[id]/pdf/route';
 import * as reportsId from '@/app/api/reports/[id]/route';
 import * as reportsIdSignatures from '@/app/api/reports/[id]/signatures/route';
+import * as sheetsIdChanges from '@/app/api/sheets/[id]/changes/route';
 import * as sheetsIdOperations from '@/app/api/sheets/[id]/operations/route';
 import * as sheetsIdPassesPassid from '@/app/api/sheets/[id]/passes/[passId]/route';
 import * as sheetsIdPasses from '@/app/api/sheets/[id]/passes/route';
@@ -82,6 +83,7 @@ export const describedRoutes = {
   '/api/reports/[id]/pdf': reportsIdPdf,
   '/api/reports/[id]': reportsId,
   '/api/reports/[id]/signatures': reportsIdSignatures,
+  '/api/sheets/[id]/changes': sheetsIdChanges,
   '/api/sheets/[id]/operations': sheetsIdOperations,
   '/api/sheets/[id]/passes/[passId]': sheetsIdPassesPassid,
   '/api/sheets/[id]/passes': sheetsIdPasses,
