@@ -21,7 +21,6 @@ const config = {
       ],
     },
   ],
-  env: { NEXT_PUBLIC_VERSION: process.env.npm_package_version ?? '' },
 };
 
 export default config;

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { choosePlan, groupProposals } from '@/lib/planning/choose';
 import { withContractTolerance } from '@/lib/planning/contract-tolerance';
+import { groupProposals } from '@/lib/planning/group-proposals';
 import { planSheets } from '@/lib/planning/plan-sheets';
 import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
 import { allDefinitions } from '@/standards/registry';
@@ -111,12 +111,7 @@ describe.each(startingMakeUps)('plan of a $kind', ({ kind, makeUp }) => {
 });
 
 describe('choosing', () => {
-  it('keeps every proposal, measured or left out with its reason', () => {
-    const chosen = choosePlan(plan, {
-      'AX-5:Z1:YZ': { kind: 'leave-out', reason: 'not-agreed', text: 'by letter of the customer' },
-    });
-    expect(chosen.measured).toHaveLength(plan.length - 1);
-    expect(chosen.leftOut.map(({ sheet, reason }) => [sheet.key, reason])).toEqual([['AX-5:Z1:YZ', 'not-agreed']]);
+  it('keeps every proposal under the headings of the working order', () => {
     expect(groupProposals(plan).flatMap(({ sheets }) => sheets)).toEqual(plan);
     expect(groupProposals(plan).every(({ title }) => title !== 'Other tests')).toBe(true);
   });

@@ -12,7 +12,7 @@ import { findJob, type JobRow } from '@/db/queries/jobs';
 import { machineHead } from '@/db/read-models/sheet-view';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
-import { groupProposals } from '@/lib/planning/choose';
+import { groupProposals } from '@/lib/planning/group-proposals';
 import { provenanceWords } from '@/lib/reporting/record-words';
 import { id as isId } from '@/lib/schemas/common';
 import { purposes } from '@/lib/schemas/job';
