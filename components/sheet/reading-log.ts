@@ -188,9 +188,11 @@ export class ReadingLog {
       });
       const before = this.log;
       const { log, updates } = applyAnswers(this.log, data.results);
+      // Taken in while the operations still stand in the log: a field that somebody has typed over meanwhile, even back to what it was
+      // before, is seen to differ from what was sent, and keeps what is being typed.
+      for (const listener of this.onUpdates) listener(updates, data.passes);
       this.log = log;
       this.reached('reached');
-      for (const listener of this.onUpdates) listener(updates, data.passes);
       await this.keepDifference(before);
       return true;
     } catch (error) {

@@ -1,6 +1,6 @@
 import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, expect, it } from 'vitest';
-import { expectAccessible, launchBrowser, visitor } from '@/tests/helpers/browser';
+import { expectAccessible, goToSearch, launchBrowser, visitor } from '@/tests/helpers/browser';
 
 let browser: Browser;
 beforeAll(async () => {
@@ -14,7 +14,7 @@ it('archive look-up by machine serial', async () => {
     // "/" leads to the box from any page.
     await page.goto('/machines');
     await page.locator('body').click({ position: { x: 5, y: 400 } });
-    await page.keyboard.press('/');
+    await goToSearch(page);
     await page.keyboard.type(text);
     await page.keyboard.press('Enter');
     await page.waitForURL(/\/(archive|machines\/)/);

@@ -1,6 +1,6 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { expectAccessible, launchBrowser, visitor, widths } from '@/tests/helpers/browser';
+import { expectAccessible, goToSearch, launchBrowser, visitor, widths } from '@/tests/helpers/browser';
 
 let browser: Browser;
 beforeAll(async () => {
@@ -108,8 +108,7 @@ describe('every page', () => {
 it('"/" leads to the search and "?" lists the keys', async () => {
   const { page, context } = await visitor(browser, 'inspector@quillmere.example');
   await page.goto('/machines');
-  await page.keyboard.press('/');
-  expect(await page.evaluate(() => document.activeElement?.id)).toBe('search');
+  await goToSearch(page);
   await page.keyboard.type('?');
   expect(await page.getByRole('dialog').count()).toBe(0);
   await page.locator('main').click({ position: { x: 5, y: 5 } });

@@ -125,7 +125,7 @@ it('inspector fills in a standard test sheet', async () => {
 
   // What stood there before is kept, and shown on demand.
   await page.getByText('Readings that were put right').click();
-  await expect.poll(() => page.getByRole('cell', { name: '77' }).first().isVisible()).toBe(true);
+  await expect.poll(() => page.getByRole('cell', { name: '1,2,3' }).first().isVisible()).toBe(true);
 
   await page.reload();
   await expect.poll(() => readingFields(page).last().inputValue()).toBe(good);

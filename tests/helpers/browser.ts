@@ -52,6 +52,16 @@ export async function signIn(page: Page, email: string): Promise<void> {
   await page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));
 }
 
+/** Presses "/" until the page listens: a key that comes before its script has been loaded is nobody's. */
+export async function goToSearch(page: Page): Promise<void> {
+  await expect
+    .poll(async () => {
+      await page.keyboard.press('/');
+      return page.evaluate(() => document.activeElement?.id);
+    })
+    .toBe('search');
+}
+
 interface AxeViolation {
   id: string;
   impact: string | null;
