@@ -9,6 +9,7 @@ import { FieldErrorLine } from '@/components/ui/field';
 import { Checkbox } from '@/components/ui/inputs';
 import { Notice } from '@/components/ui/notice';
 import { ApiProblem, api } from '@/lib/http/api-client';
+import { issueIntent } from '@/lib/schemas/signature';
 
 /** The reviewer's one deliberate act: what is to be confirmed is confirmed together, then the report goes out. */
 export function IssueForm({ jobId, blocking, toConfirm }: { jobId: string; blocking: number; toConfirm: number }) {
@@ -63,6 +64,7 @@ export function IssueForm({ jobId, blocking, toConfirm }: { jobId: string; block
           )}
         </Notice>
       )}
+      {blocking === 0 && <p className="text-lg">{issueIntent}</p>}
       <Button type="submit" variant="strong" disabled={blocking > 0 || sending || out} aria-describedby="issue-note">
         {sending || out ? 'Issuing' : 'Check and issue the report'}
       </Button>

@@ -18,6 +18,9 @@ export const intentTexts: Record<Outcome, string> = {
     'I have read this acceptance report and do not accept the machine, for the reason given here. I sign this electronically; a paper copy can be signed instead.',
 };
 
+/** What the reviewer signs by issuing a report; shown above the button, stored with the signature. */
+export const issueIntent = 'I have checked this report and issue it.';
+
 /** Strokes of a drawn signature: SVG path data in a box of 600 × 200. */
 const stroke = z
   .string()

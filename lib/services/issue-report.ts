@@ -16,6 +16,7 @@ import { conflict, DomainError, notFound } from '@/lib/errors';
 import type { RequestOrigin } from '@/lib/http/request-origin';
 import { newId } from '@/lib/id';
 import { checkFindings } from '@/lib/reporting/check-findings';
+import { issueIntent } from '@/lib/schemas/signature';
 import { buildReport } from './build-report';
 
 /**
@@ -84,7 +85,7 @@ export async function issueReport(
     typed: viewer.name,
     strokes: null,
     reason: null,
-    intentText: 'I have checked this report and issue it.',
+    intentText: issueIntent,
     method: 'signed-in',
     witness: null,
     modelSha256,
