@@ -1,7 +1,7 @@
 import { Nameplate } from '@/components/ui/nameplate';
 import type { ReportModel } from '@/lib/reporting/report-model';
-import { dateSpan, longDate, sentence } from '@/lib/reporting/report-text';
-import { REPORT_WORDS, STATE_WORDS } from '@/lib/reporting/words';
+import { dateSpan, sentence, standingWords } from '@/lib/reporting/report-text';
+import { REPORT_WORDS } from '@/lib/reporting/words';
 import { CountsTable } from './counts-table';
 
 /** Who made the report at the left; what it is, its number, revision and state at the right; the machine's plate below. */
@@ -28,11 +28,7 @@ export function Letterhead({ model }: { model: ReportModel }) {
               <p className="font-mono">
                 {document.number} · {REPORT_WORDS.revision} {document.revision}
               </p>
-              <p className="text-sm text-ink2">
-                {[STATE_WORDS[document.state], document.issuedAt ? longDate(document.issuedAt) : '']
-                  .filter(Boolean)
-                  .join(' · ')}
-              </p>
+              <p className="text-sm text-ink2">{standingWords(document)}</p>
             </>
           )}
         </div>

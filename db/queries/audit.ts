@@ -58,7 +58,13 @@ export interface AuditActor {
 export async function recordEvent(
   trx: Db,
   actor: AuditActor,
-  event: { action: AuditAction; subjectType: AuditSubject; subjectId: string; detail?: object },
+  event: {
+    action: AuditAction;
+    subjectType: AuditSubject;
+    subjectId: string;
+    detail?: object /** Left out: now. */;
+    at?: Date;
+  },
 ): Promise<void> {
   await trx('audit_events').insert({
     organisation_id: trx.raw('app_organisation()'),
@@ -69,5 +75,6 @@ export async function recordEvent(
     account_id: actor.accountId,
     account_name: actor.name,
     detail: JSON.stringify(event.detail ?? {}),
+    ...(event.at ? { happened_at: event.at } : {}),
   });
 }

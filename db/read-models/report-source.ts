@@ -1,4 +1,5 @@
 import type { Db } from '@/db/client';
+import { handedIn } from '@/db/queries/hand-ins';
 import { type CellChange, listChanges } from '@/db/queries/operations';
 import { listRemarks, type RemarkRow } from '@/db/queries/remarks';
 import { type JobBoard, jobBoard } from './job-board';
@@ -7,6 +8,7 @@ export interface ReportSource {
   board: JobBoard;
   changes: CellChange[];
   remarks: RemarkRow[];
+  handedIn: { name: string; at: Date } | undefined;
   machine: { control: string | null; site: string | null };
   organisation: {
     name: string;
@@ -27,6 +29,7 @@ export async function reportSource(db: Db, jobId: string): Promise<ReportSource 
     board,
     changes: await listChanges(db, passIds),
     remarks: await listRemarks(db, jobId),
+    handedIn: await handedIn(db, jobId),
     machine: await db('machines').where({ id: board.job.machineId }).first('control', 'site'),
     organisation: await db('organisations').first({
       name: 'name',

@@ -1,9 +1,10 @@
 import type { Knex } from 'knex';
-import { insertTemperature, setJobState, updateConditions } from '@/db/queries/jobs';
+import { insertTemperature, updateConditions } from '@/db/queries/jobs';
 import { listSheets } from '@/db/queries/sheets';
 import type { Viewer } from '@/lib/auth/viewer';
 import type { Purpose } from '@/lib/schemas/job';
 import { intentTexts, type Outcome } from '@/lib/schemas/signature';
+import { handIn } from '@/lib/services/hand-in';
 import { issueReport } from '@/lib/services/issue-report';
 import { linkAsLeft } from '@/lib/services/link-as-left';
 import { makePlan, proposalsFor } from '@/lib/services/make-plan';
@@ -73,7 +74,7 @@ export async function addDemoJob(
     jobId,
     (await listSheets(trx, jobId)).map((sheet) => sheet.id),
   );
-  await setJobState(trx, jobId, 'in-check');
+  await handIn(trx, inspector, jobId, at(demo.startsOn, 14, 45));
   if (demo.progress === 'in-check') return;
   const report = await issueReport(trx, reviewer, jobId, true, origin, at(demo.startsOn, 15, 30));
   if (demo.progress === 'issued') return;

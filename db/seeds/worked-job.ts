@@ -5,6 +5,7 @@ import { listSheets } from '@/db/queries/sheets';
 import type { Viewer } from '@/lib/auth/viewer';
 import { definitionOf } from '@/lib/planning/definition-of';
 import { intentTexts } from '@/lib/schemas/signature';
+import { handIn } from '@/lib/services/hand-in';
 import { issueReport } from '@/lib/services/issue-report';
 import { makePlan, proposalsFor } from '@/lib/services/make-plan';
 import { openJob } from '@/lib/services/open-job';
@@ -175,6 +176,7 @@ async function issueAndSign(
   remarkedSheet: string | null,
   { reviewer, customer, inspector }: People,
 ): Promise<void> {
+  await handIn(trx, inspector, jobId, new Date('2026-03-12T11:00:00+01:00'));
   const report = await issueReport(trx, reviewer, jobId, true, origin, new Date('2026-03-12T11:30:00+01:00'));
   await signReport(
     trx,

@@ -41,7 +41,8 @@ export interface ReportInput {
     paper: 'A4' | 'Letter';
   };
   document: ReportModel['document'];
-  inspector: { name: string; function: string | null } | null;
+  /** `at`: when the job was handed in; null: named for the job, has handed nothing in. */
+  inspector: { name: string; at: string | null } | null;
   reviewer: { name: string; function: string | null; at: string } | null;
   remarks: ReportModel['remarks'];
 }
@@ -205,29 +206,39 @@ function uncertaintyWords(held: CalibrationFacts): string | null {
   return `U = ${formatDecimal(held.expandedUncertainty)} ${held.uncertaintyUnit ?? ''}${factor}`;
 }
 
+/** Only acts that were done print as done: handing in has its time, issuing has its signature, the customer's place is empty. */
 function signatures({ inspector, reviewer, organisation }: ReportInput): SignatureBlock[] {
-  const block = (
-    role: SignatureBlock['role'],
-    person: { name: string; function: string | null } | null,
-    signed: { at: string | null; outcome: string | null },
-  ): SignatureBlock => ({
+  const block = (role: SignatureBlock['role'], done: Partial<SignatureBlock>): SignatureBlock => ({
     role,
     roleWords: roleWords[role],
-    name: person?.name ?? '',
-    function: person?.function ?? null,
+    name: '',
+    function: null,
     company: role === 'customer' ? null : organisation.name,
-    signedAt: signed.at,
-    outcome: signed.outcome,
+    signedAt: null,
+    outcome: null,
     reason: null,
-    typed: person && signed.at ? person.name : null,
+    typed: null,
     strokes: null,
+    ...done,
   });
   return [
-    block('inspector', inspector, {
-      at: reviewer?.at ?? null,
-      outcome: inspector && reviewer ? signedOutcomeWords.measured! : null,
+    block('inspector', {
+      name: inspector?.name ?? '',
+      signedAt: inspector?.at ?? null,
+      outcome: inspector?.at ? signedOutcomeWords['handed-in']! : null,
     }),
-    block('reviewer', reviewer, { at: reviewer?.at ?? null, outcome: reviewer ? signedOutcomeWords.checked! : null }),
-    block('customer', null, { at: null, outcome: null }),
+    block(
+      'reviewer',
+      reviewer
+        ? {
+            name: reviewer.name,
+            function: reviewer.function,
+            signedAt: reviewer.at,
+            outcome: signedOutcomeWords.checked!,
+            typed: reviewer.name,
+          }
+        : {},
+    ),
+    block('customer', {}),
   ];
 }

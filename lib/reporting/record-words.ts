@@ -50,7 +50,7 @@ export const roleWords = {
 } as const;
 
 export const signedOutcomeWords: Record<string, string> = {
-  measured: 'measured',
+  'handed-in': 'handed in for the check, signed in',
   checked: 'checked and issued',
   accept: 'accepted',
   'accept-with-remarks': 'accepted with remarks',

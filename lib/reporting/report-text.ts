@@ -1,4 +1,5 @@
-import { REPORT_WORDS } from '@/lib/reporting/words';
+import type { ReportModel } from '@/lib/reporting/report-model';
+import { REPORT_WORDS, STATE_WORDS } from '@/lib/reporting/words';
 
 const DATE = /^(\d{4})-(\d{2})-(\d{2})$/;
 const DAY_AND_TIME = /^(\d{4}-\d{2}-\d{2})[ T](\d{2}:\d{2})(?: ([A-Za-z_/+\-0-9]+))?$/;
@@ -25,6 +26,13 @@ export function dateSpan(from: string, to: string | null): string {
   if (first[1] !== last[1]) return `${longDate(from)} ${REPORT_WORDS.to} ${longDate(to)}`;
   if (first[2] !== last[2]) return `${Number(first[3])} ${month(first)} ${REPORT_WORDS.to} ${longDate(to)}`;
   return `${Number(first[3])} ${REPORT_WORDS.to} ${longDate(to)}`;
+}
+
+/** `issued 12 March 2026, 11:30 · signed with remarks`: the time is that of issuing, whatever came after. */
+export function standingWords({ state, issuedAt }: ReportModel['document']): string {
+  if (issuedAt === null) return STATE_WORDS[state];
+  const issued = `${STATE_WORDS.issued} ${longDate(issuedAt)}`;
+  return state === 'issued' ? issued : `${issued} · ${STATE_WORDS[state]}`;
 }
 
 /** First letter large, for the beginning of a sentence. */

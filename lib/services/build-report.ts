@@ -15,7 +15,8 @@ interface Issuing {
 export function buildReport(source: ReportSource, issuing: Issuing | null): ReportModel {
   const { board, organisation } = source;
   const at = issuing && formatTime(issuing.at, organisation.timeZone);
-  const inspector = board.people.find((person) => person.role === 'inspector');
+  const { handedIn } = source;
+  const named = board.people.find((person) => person.role === 'inspector');
   return buildReportModel({
     stored: board,
     changes: source.changes,
@@ -37,7 +38,11 @@ export function buildReport(source: ReportSource, issuing: Issuing | null): Repo
       checkedBy: issuing?.by.name ?? null,
       programVersion: version,
     },
-    inspector: inspector ? { name: inspector.name, function: null } : null,
+    inspector: handedIn
+      ? { name: handedIn.name, at: formatTime(handedIn.at, organisation.timeZone) }
+      : named
+        ? { name: named.name, at: null }
+        : null,
     reviewer: issuing && at ? { name: issuing.by.name, function: issuing.by.functionTitle, at } : null,
     remarks: source.remarks.map((remark) => ({
       no: remark.number,

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { GET as getCheck } from '@/app/api/jobs/[id]/check/route';
 import { POST as handIn } from '@/app/api/jobs/[id]/hand-in/route';
+import { POST as reopen } from '@/app/api/jobs/[id]/reopen/route';
 import { GET as listReports } from '@/app/api/jobs/[id]/reports/route';
 import { GET as getData } from '@/app/api/reports/[id]/data/route';
 import { GET as getPdf } from '@/app/api/reports/[id]/pdf/route';
@@ -62,6 +63,36 @@ describe('the check', () => {
     const hand = () => workshop.call(handIn, { method: 'POST', params: { id: jobId } });
     expect((await hand()).body).toEqual({ state: 'in-check' });
     expect((await hand()).status).toBe(409);
+  });
+
+  it('prints as done only what somebody did', async () => {
+    const blocks = async (jobId: string, number: number) => {
+      const { body } = await issue(workshop, jobId, true);
+      expect(body.revision).toBe(number);
+      const report = await workshop.as('inspector', (trx) => findReport(trx, body.id));
+      return Object.fromEntries(report!.model.signatures.map((block) => [block.role, block]));
+    };
+    const { jobId } = await measuredJob(workshop, ashdowns, within);
+    // Issued without having been handed in: nobody's act is made up.
+    const without = await blocks(jobId, 1);
+    expect(without.inspector).toMatchObject({ signedAt: null, outcome: null, typed: null, strokes: null });
+    expect(without.reviewer).toMatchObject({ name: 'J. Penhale', outcome: 'checked and issued', typed: 'J. Penhale' });
+    expect(without.customer).toMatchObject({ name: '', signedAt: null, outcome: null, typed: null });
+
+    const reopened = { as: 'reviewer' as const, params: { id: jobId }, body: { reason: 'Order number was wrong.' } };
+    expect((await workshop.call(reopen, reopened)).status).toBe(200);
+    await workshop.call(handIn, { method: 'POST', params: { id: jobId } });
+    const handed = await blocks(jobId, 2);
+    expect(handed.inspector).toMatchObject({
+      name: 'T. Orrell',
+      outcome: 'handed in for the check, signed in',
+      typed: null,
+    });
+    expect(handed.inspector!.signedAt).toMatch(/^\d{4}-\d{2}-\d{2} \d{2}:\d{2}/);
+
+    // A hand-in before the job was opened again says nothing about what was measured after it.
+    await workshop.call(reopen, reopened);
+    expect((await blocks(jobId, 3)).inspector).toMatchObject({ signedAt: null, outcome: null });
   });
 });
 

@@ -102,6 +102,35 @@ describe('pages of a report', () => {
   });
 });
 
+describe('signatures', () => {
+  const words = (made: ReportPages) => made.pages.map((page) => boxesOf(made, page.ops).map((box) => box.what));
+  // Whatever stands before them: however far down the page they begin, they stay on one.
+  it.each([1, 2, 3, 4, 5, 6, 7, 8])('stand on one page after %i tests', (count) => {
+    const blocks = manyBlocks(count);
+    const made = reportPages(sampleReportModel({ blocks, summary: blocks.map(summaryRow) }), fonts);
+    const roles = sampleReportModel().signatures.map((signature) => signature.roleWords);
+    const signed = words(made).filter((page) => page.includes('Signatures'));
+    expect(signed).toHaveLength(1);
+    expect(signed[0]).toEqual(expect.arrayContaining(roles));
+    // Nothing of them is carried over to the next page: the names below the lines are there too.
+    const names = sampleReportModel().signatures.map(({ name }) => name);
+    for (const name of names)
+      expect(
+        signed[0]!.some((text) => text.startsWith(name)),
+        name,
+      ).toBe(true);
+  });
+
+  it('the letterhead gives the time of issuing as that, not as the time of signing', () => {
+    const { document } = sampleReportModel();
+    const made = reportPages(
+      sampleReportModel({ document: { ...document, state: 'signed-with-remarks', issuedAt: '2026-03-12 11:30' } }),
+      fonts,
+    );
+    expect(words(made)[0]).toContain('issued 12 March 2026, 11:30 · signed with remarks');
+  });
+});
+
 describe('laying out on pages', () => {
   const slab = (heightPt: number, what = ''): Slab => ({
     heightPt,

@@ -1,6 +1,6 @@
 import type { ReportModel } from '@/lib/reporting/report-model';
-import { longDate } from '@/lib/reporting/report-text';
-import { REPORT_WORDS, STATE_WORDS } from '@/lib/reporting/words';
+import { standingWords } from '@/lib/reporting/report-text';
+import { REPORT_WORDS } from '@/lib/reporting/words';
 import { beside, type FlowItem, slabItem, space, stack } from '@/templates/report/flow/ops';
 import type { Kit } from '@/templates/report/flow/parts';
 import { TYPE } from '@/templates/report/theme';
@@ -15,13 +15,10 @@ export function letterhead(kit: Kit, model: ReportModel): FlowItem[] {
     type.paragraph(head.name, TYPE.firm, half),
     ...address.map((line) => type.paragraph(line, TYPE.small, half)),
   ]);
-  const state = [STATE_WORDS[document.state], document.issuedAt ? longDate(document.issuedAt) : ''].filter(
-    (part) => part !== '',
-  );
   const right = stack([
     type.line(REPORT_WORDS.title, TYPE.title, half, 'end'),
     type.line(`${document.number} · ${REPORT_WORDS.revision} ${document.revision}`, TYPE.code, half, 'end'),
-    type.line(state.join(' · '), TYPE.small, half, 'end'),
+    type.line(standingWords(document), TYPE.small, half, 'end'),
   ]);
   return [
     slabItem(

@@ -15,11 +15,12 @@ export function signatures(kit: Kit, model: ReportModel): FlowItem[] {
   const widthPt = (kit.widthPt - 30) / 2;
   const slabs = model.signatures.map((signature) => signatureSlab(kit, signature, widthPt));
   const items = [...heading(kit, REPORT_WORDS.signatures.heading)];
+  const rows: Slab[] = [];
   for (let at = 0; at < slabs.length; at += 2) {
-    const row = slabs.slice(at, at + 2).map((slab, index) => ({ slab, x: index * (widthPt + 30) }));
-    if (at) items.push(space(14));
-    items.push(slabItem(beside(row)));
+    rows.push(beside(slabs.slice(at, at + 2).map((slab, index) => ({ slab, x: index * (widthPt + 30) }))));
   }
+  // One piece: nobody's signature stands on a page without the others.
+  items.push(slabItem(stack(rows, 14)));
   for (const { roleWords, reason } of model.signatures) {
     if (reason) items.push(space(6), flowingText(kit, `${roleWords}, ${REPORT_WORDS.signatures.reason}: ${reason}`));
   }
