@@ -141,6 +141,18 @@ CREATE FUNCTION public.throttle_take(bucket text, capacity double precision, ref
         return 0;
       end $$;
 
+CREATE FUNCTION public.tolerance_values_are_kept() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+    begin
+      if old.second_account_id is not null
+         or to_jsonb(new) - array['second_account_id', 'second_account_name', 'second_at']
+            is distinct from to_jsonb(old) - array['second_account_id', 'second_account_name', 'second_at'] then
+        raise exception 'a value that was written down does not change' using errcode = 'WM001';
+      end if;
+      return new;
+    end $$;
+
 CREATE TABLE public.access_tokens (
     token_hash text NOT NULL,
     organisation_id uuid NOT NULL,
@@ -341,6 +353,7 @@ CREATE TABLE public.jobs (
     version integer DEFAULT 1 NOT NULL,
     created_by uuid,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
+    refuse_unconfirmed boolean DEFAULT false NOT NULL,
     CONSTRAINT jobs_check CHECK (((ends_on IS NULL) OR (ends_on >= starts_on))),
     CONSTRAINT jobs_decision_rule_check CHECK ((decision_rule = ANY (ARRAY['simple'::text, 'guarded'::text]))),
     CONSTRAINT jobs_purpose_check CHECK ((purpose = ANY (ARRAY['new-machine'::text, 'overhaul'::text, 'collision'::text, 'move'::text, 'periodic'::text]))),
@@ -414,6 +427,8 @@ CREATE TABLE public.organisations (
     version integer DEFAULT 1 NOT NULL,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
     codes jsonb,
+    four_eyes boolean DEFAULT false NOT NULL,
+    refuse_unconfirmed boolean DEFAULT false NOT NULL,
     CONSTRAINT organisations_paper_check CHECK ((paper = ANY (ARRAY['A4'::text, 'Letter'::text])))
 );
 
@@ -436,6 +451,34 @@ CREATE TABLE public.outbox (
 );
 
 ALTER TABLE ONLY public.outbox FORCE ROW LEVEL SECURITY;
+
+CREATE TABLE public.own_definitions (
+    organisation_id uuid NOT NULL,
+    id uuid NOT NULL,
+    sequence bigint NOT NULL,
+    definition_id text NOT NULL,
+    version integer NOT NULL,
+    withdrawn boolean DEFAULT false NOT NULL,
+    definition jsonb,
+    composed jsonb,
+    account_id uuid NOT NULL,
+    account_name text NOT NULL,
+    recorded_at timestamp with time zone DEFAULT now() NOT NULL,
+    CONSTRAINT own_definitions_check CHECK (((withdrawn = (definition IS NULL)) AND (withdrawn = (composed IS NULL)))),
+    CONSTRAINT own_definitions_definition_id_check CHECK ((definition_id ~ '^[A-Z][A-Z0-9-]{1,19}$'::text)),
+    CONSTRAINT own_definitions_version_check CHECK ((version > 0))
+);
+
+ALTER TABLE ONLY public.own_definitions FORCE ROW LEVEL SECURITY;
+
+ALTER TABLE public.own_definitions ALTER COLUMN sequence ADD GENERATED ALWAYS AS IDENTITY (
+    SEQUENCE NAME public.own_definitions_sequence_seq
+    START WITH 1
+    INCREMENT BY 1
+    NO MINVALUE
+    NO MAXVALUE
+    CACHE 1
+);
 
 CREATE TABLE public.pass_instruments (
     organisation_id uuid NOT NULL,
@@ -592,6 +635,26 @@ CREATE TABLE public.reports (
 
 ALTER TABLE ONLY public.reports FORCE ROW LEVEL SECURITY;
 
+CREATE TABLE public.sheet_photos (
+    organisation_id uuid NOT NULL,
+    id uuid NOT NULL,
+    sheet_id uuid NOT NULL,
+    item text,
+    caption text DEFAULT ''::text NOT NULL,
+    file_id uuid NOT NULL,
+    width_px integer NOT NULL,
+    height_px integer NOT NULL,
+    added_by text NOT NULL,
+    added_at timestamp with time zone DEFAULT now() NOT NULL,
+    removed_by text,
+    removed_at timestamp with time zone,
+    CONSTRAINT sheet_photos_check CHECK (((removed_by IS NULL) = (removed_at IS NULL))),
+    CONSTRAINT sheet_photos_height_px_check CHECK ((height_px > 0)),
+    CONSTRAINT sheet_photos_width_px_check CHECK ((width_px > 0))
+);
+
+ALTER TABLE ONLY public.sheet_photos FORCE ROW LEVEL SECURITY;
+
 CREATE TABLE public.sheets (
     organisation_id uuid NOT NULL,
     id uuid NOT NULL,
@@ -653,6 +716,48 @@ CREATE TABLE public.throttles (
     key text NOT NULL,
     allowance double precision NOT NULL,
     updated_at timestamp with time zone DEFAULT now() NOT NULL
+);
+
+CREATE TABLE public.tolerance_values (
+    organisation_id uuid NOT NULL,
+    id uuid NOT NULL,
+    sequence bigint NOT NULL,
+    code text NOT NULL,
+    edition text NOT NULL,
+    definition_id text NOT NULL,
+    version integer NOT NULL,
+    cell text NOT NULL,
+    state text NOT NULL,
+    figure numeric,
+    unit text NOT NULL,
+    of_edition text NOT NULL,
+    clause text NOT NULL,
+    remark text,
+    account_id uuid NOT NULL,
+    account_name text NOT NULL,
+    recorded_at timestamp with time zone DEFAULT now() NOT NULL,
+    needs_second boolean NOT NULL,
+    second_account_id uuid,
+    second_account_name text,
+    second_at timestamp with time zone,
+    CONSTRAINT tolerance_values_check CHECK (((state = 'withdrawn'::text) = (figure IS NULL))),
+    CONSTRAINT tolerance_values_check1 CHECK (((state = 'withdrawn'::text) OR ((of_edition <> ''::text) AND (clause <> ''::text)))),
+    CONSTRAINT tolerance_values_check2 CHECK (((second_account_id IS NULL) OR (needs_second AND (second_account_id <> account_id)))),
+    CONSTRAINT tolerance_values_check3 CHECK ((((second_account_id IS NULL) = (second_at IS NULL)) AND ((second_account_id IS NULL) = (second_account_name IS NULL)))),
+    CONSTRAINT tolerance_values_figure_check CHECK ((figure > (0)::numeric)),
+    CONSTRAINT tolerance_values_state_check CHECK ((state = ANY (ARRAY['confirmed'::text, 'replaced'::text, 'withdrawn'::text]))),
+    CONSTRAINT tolerance_values_unit_check CHECK ((unit = ANY (ARRAY['µm'::text, 'µm/m'::text, '″'::text])))
+);
+
+ALTER TABLE ONLY public.tolerance_values FORCE ROW LEVEL SECURITY;
+
+ALTER TABLE public.tolerance_values ALTER COLUMN sequence ADD GENERATED ALWAYS AS IDENTITY (
+    SEQUENCE NAME public.tolerance_values_sequence_seq
+    START WITH 1
+    INCREMENT BY 1
+    NO MINVALUE
+    NO MAXVALUE
+    CACHE 1
 );
 
 ALTER TABLE ONLY public.access_tokens
@@ -739,6 +844,12 @@ ALTER TABLE ONLY public.outbox
 ALTER TABLE ONLY public.outbox
     ADD CONSTRAINT outbox_pkey PRIMARY KEY (organisation_id, id);
 
+ALTER TABLE ONLY public.own_definitions
+    ADD CONSTRAINT own_definitions_organisation_id_definition_id_version_withd_key UNIQUE (organisation_id, definition_id, version, withdrawn);
+
+ALTER TABLE ONLY public.own_definitions
+    ADD CONSTRAINT own_definitions_pkey PRIMARY KEY (organisation_id, id);
+
 ALTER TABLE ONLY public.pass_instruments
     ADD CONSTRAINT pass_instruments_organisation_id_pass_id_instrument_id_key UNIQUE (organisation_id, pass_id, instrument_id);
 
@@ -784,6 +895,9 @@ ALTER TABLE ONLY public.reports
 ALTER TABLE ONLY public.reports
     ADD CONSTRAINT reports_pkey PRIMARY KEY (organisation_id, id);
 
+ALTER TABLE ONLY public.sheet_photos
+    ADD CONSTRAINT sheet_photos_pkey PRIMARY KEY (organisation_id, id);
+
 ALTER TABLE ONLY public.sheets
     ADD CONSTRAINT sheets_organisation_id_job_id_key_key UNIQUE (organisation_id, job_id, key);
 
@@ -802,6 +916,9 @@ ALTER TABLE ONLY public.signatures
 ALTER TABLE ONLY public.throttles
     ADD CONSTRAINT throttles_pkey PRIMARY KEY (key);
 
+ALTER TABLE ONLY public.tolerance_values
+    ADD CONSTRAINT tolerance_values_pkey PRIMARY KEY (organisation_id, id);
+
 CREATE INDEX jobs_machine ON public.jobs USING btree (organisation_id, machine_id);
 
 CREATE UNIQUE INDEX machine_owners_current ON public.machine_owners USING btree (organisation_id, machine_id) WHERE (until_date IS NULL);
@@ -810,11 +927,19 @@ CREATE INDEX machine_owners_customer ON public.machine_owners USING btree (organ
 
 CREATE INDEX machines_serial_folded ON public.machines USING btree (organisation_id, serial_folded text_pattern_ops);
 
+CREATE INDEX own_definitions_newest ON public.own_definitions USING btree (organisation_id, definition_id, sequence DESC);
+
 CREATE INDEX reading_operations_pass ON public.reading_operations USING btree (organisation_id, pass_id, sequence);
 
 CREATE INDEX reports_job ON public.reports USING btree (organisation_id, job_id);
 
+CREATE INDEX sheet_photos_sheet ON public.sheet_photos USING btree (organisation_id, sheet_id);
+
+CREATE INDEX tolerance_values_cell ON public.tolerance_values USING btree (organisation_id, code, edition, definition_id, version, cell, sequence DESC);
+
 CREATE TRIGGER reports_frozen BEFORE UPDATE ON public.reports FOR EACH ROW EXECUTE FUNCTION public.reports_are_frozen();
+
+CREATE TRIGGER tolerance_values_kept BEFORE UPDATE ON public.tolerance_values FOR EACH ROW EXECUTE FUNCTION public.tolerance_values_are_kept();
 
 ALTER TABLE ONLY public.access_tokens
     ADD CONSTRAINT access_tokens_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
@@ -906,6 +1031,9 @@ ALTER TABLE ONLY public.memberships
 ALTER TABLE ONLY public.outbox
     ADD CONSTRAINT outbox_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 
+ALTER TABLE ONLY public.own_definitions
+    ADD CONSTRAINT own_definitions_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
+
 ALTER TABLE ONLY public.pass_instruments
     ADD CONSTRAINT pass_instruments_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 
@@ -969,6 +1097,15 @@ ALTER TABLE ONLY public.reports
 ALTER TABLE ONLY public.reports
     ADD CONSTRAINT reports_organisation_id_signed_pdf_file_id_fkey FOREIGN KEY (organisation_id, signed_pdf_file_id) REFERENCES public.files(organisation_id, id);
 
+ALTER TABLE ONLY public.sheet_photos
+    ADD CONSTRAINT sheet_photos_organisation_id_file_id_fkey FOREIGN KEY (organisation_id, file_id) REFERENCES public.files(organisation_id, id);
+
+ALTER TABLE ONLY public.sheet_photos
+    ADD CONSTRAINT sheet_photos_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
+
+ALTER TABLE ONLY public.sheet_photos
+    ADD CONSTRAINT sheet_photos_organisation_id_sheet_id_fkey FOREIGN KEY (organisation_id, sheet_id) REFERENCES public.sheets(organisation_id, id);
+
 ALTER TABLE ONLY public.sheets
     ADD CONSTRAINT sheets_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 
@@ -980,6 +1117,9 @@ ALTER TABLE ONLY public.signatures
 
 ALTER TABLE ONLY public.signatures
     ADD CONSTRAINT signatures_organisation_id_report_id_fkey FOREIGN KEY (organisation_id, report_id) REFERENCES public.reports(organisation_id, id);
+
+ALTER TABLE ONLY public.tolerance_values
+    ADD CONSTRAINT tolerance_values_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 
 ALTER TABLE public.audit_events ENABLE ROW LEVEL SECURITY;
 
@@ -1151,6 +1291,16 @@ CREATE POLICY outbox_read ON public.outbox FOR SELECT USING (((organisation_id =
 
 CREATE POLICY outbox_remove ON public.outbox FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
+ALTER TABLE public.own_definitions ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY own_definitions_add ON public.own_definitions FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
+
+CREATE POLICY own_definitions_change ON public.own_definitions FOR UPDATE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff))) WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
+CREATE POLICY own_definitions_read ON public.own_definitions FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR true)));
+
+CREATE POLICY own_definitions_remove ON public.own_definitions FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
 ALTER TABLE public.pass_instruments ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY pass_instruments_add ON public.pass_instruments FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
@@ -1241,6 +1391,16 @@ CREATE POLICY reports_read ON public.reports FOR SELECT USING (((organisation_id
 
 CREATE POLICY reports_remove ON public.reports FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
+ALTER TABLE public.sheet_photos ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY sheet_photos_add ON public.sheet_photos FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
+
+CREATE POLICY sheet_photos_change ON public.sheet_photos FOR UPDATE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff))) WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
+CREATE POLICY sheet_photos_read ON public.sheet_photos FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
+
+CREATE POLICY sheet_photos_remove ON public.sheet_photos FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
 ALTER TABLE public.sheets ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY sheets_add ON public.sheets FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
@@ -1264,6 +1424,16 @@ CREATE POLICY signatures_read ON public.signatures FOR SELECT USING (((organisat
   WHERE ((r.organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (r.id = signatures.report_id)))))));
 
 CREATE POLICY signatures_remove ON public.signatures FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
+ALTER TABLE public.tolerance_values ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY tolerance_values_add ON public.tolerance_values FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
+
+CREATE POLICY tolerance_values_change ON public.tolerance_values FOR UPDATE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff))) WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
+CREATE POLICY tolerance_values_read ON public.tolerance_values FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR true)));
+
+CREATE POLICY tolerance_values_remove ON public.tolerance_values FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
 GRANT USAGE ON SCHEMA public TO witnessmark_app;
 
@@ -1356,6 +1526,8 @@ GRANT SELECT,UPDATE ON TABLE public.organisations TO witnessmark_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.outbox TO witnessmark_app;
 
+GRANT SELECT,INSERT ON TABLE public.own_definitions TO witnessmark_app;
+
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.pass_instruments TO witnessmark_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.pass_results TO witnessmark_app;
@@ -1372,6 +1544,16 @@ GRANT SELECT,INSERT,UPDATE ON TABLE public.report_counters TO witnessmark_app;
 
 GRANT SELECT,INSERT,UPDATE ON TABLE public.reports TO witnessmark_app;
 
+GRANT SELECT,INSERT,UPDATE ON TABLE public.sheet_photos TO witnessmark_app;
+
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.sheets TO witnessmark_app;
 
 GRANT SELECT,INSERT ON TABLE public.signatures TO witnessmark_app;
+
+GRANT SELECT,INSERT ON TABLE public.tolerance_values TO witnessmark_app;
+
+GRANT UPDATE(second_account_id) ON TABLE public.tolerance_values TO witnessmark_app;
+
+GRANT UPDATE(second_account_name) ON TABLE public.tolerance_values TO witnessmark_app;
+
+GRANT UPDATE(second_at) ON TABLE public.tolerance_values TO witnessmark_app;
