@@ -20,10 +20,17 @@ export const auditActions = [
   'instrument.changed',
   'instrument.calibrated',
   'instrument.overridden',
+  'tolerance.confirmed',
+  'tolerance.agreed',
+  'tolerance.imported',
+  'own-test.composed',
+  'own-test.withdrawn',
   'job.opened',
   'job.changed',
   'plan.made',
   'sheet.left-out',
+  'sheet.photo-added',
+  'sheet.photo-removed',
   'sheet.taken-in',
   'sheet.linked',
   'sheet.changed',
@@ -43,6 +50,8 @@ export type AuditSubject =
   | 'customer'
   | 'machine'
   | 'instrument'
+  | 'tolerance'
+  | 'own-test'
   | 'job'
   | 'sheet'
   | 'report'

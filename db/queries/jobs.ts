@@ -14,6 +14,8 @@ export interface JobRow {
   customerEngineer: string | null;
   decisionRule: 'simple' | 'guarded';
   codes: { code: string; edition: string }[];
+  /** Its plan takes only tolerances that are confirmed or given by the contract. */
+  refuseUnconfirmed: boolean;
   startsOn: string;
   endsOn: string | null;
   place: string | null;
@@ -36,6 +38,7 @@ export const jobColumns = {
   customerEngineer: 'jobs.customer_engineer',
   decisionRule: 'jobs.decision_rule',
   codes: 'jobs.codes',
+  refuseUnconfirmed: 'jobs.refuse_unconfirmed',
   startsOn: 'jobs.starts_on',
   endsOn: 'jobs.ends_on',
   place: 'jobs.place',
@@ -62,7 +65,7 @@ export const holdJob = (db: Db, id: string): Promise<JobRow | undefined> =>
 
 export async function insertJob(
   db: Db,
-  job: JobForm & { codes: JobRow['codes']; makeUp: MakeUp; createdBy: string },
+  job: JobForm & { codes: JobRow['codes']; refuseUnconfirmed: boolean; makeUp: MakeUp; createdBy: string },
 ): Promise<string> {
   const id = newId();
   await db('jobs').insert({
@@ -77,6 +80,7 @@ export async function insertJob(
     customer_engineer: job.customerEngineer,
     decision_rule: job.decisionRule,
     codes: JSON.stringify(job.codes),
+    refuse_unconfirmed: job.refuseUnconfirmed,
     starts_on: job.startsOn,
     ends_on: job.endsOn,
     place: job.place,

@@ -13,6 +13,10 @@ export interface Organisation {
   setUpDone: boolean;
   /** What a new job is proposed with; null: every code of the catalogue. */
   codes: TestCodeChoice | null;
+  /** Values of tolerances wait for a second person. */
+  fourEyes: boolean;
+  /** What a new job says about tolerances that nobody confirmed. */
+  refuseUnconfirmed: boolean;
   version: number;
 }
 
@@ -28,6 +32,8 @@ export async function ownOrganisation(db: Db): Promise<Organisation> {
     paper: 'paper',
     setUpDone: 'set_up_done',
     codes: 'codes',
+    fourEyes: 'four_eyes',
+    refuseUnconfirmed: 'refuse_unconfirmed',
     version: 'version',
   });
   if (!row) throw new Error('The organisation of this transaction does not exist.');
@@ -45,6 +51,8 @@ export async function updateOrganisation(db: Db, version: number, change: Organi
     paper: change.paper,
     set_up_done: change.setUpDone,
     codes: change.codes && JSON.stringify(change.codes),
+    four_eyes: change.fourEyes,
+    refuse_unconfirmed: change.refuseUnconfirmed,
   };
   const given = Object.fromEntries(Object.entries(columns).filter(([, value]) => value !== undefined));
   return (

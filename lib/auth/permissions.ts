@@ -18,6 +18,12 @@ export const permissions = {
     roles: ['administrator', 'reviewer'],
   },
   'catalogue.read': { means: 'see the catalogue', roles: ['administrator', 'reviewer', 'inspector', 'customer'] },
+  'catalogue.confirm': { means: 'confirm or replace tolerances of the catalogue', roles: ['administrator'] },
+  'catalogue.agree': {
+    means: 'agree to a tolerance as the second person',
+    roles: ['administrator', 'reviewer'],
+  },
+  'catalogue.compose': { means: 'compose own tests', roles: ['administrator'] },
   'job.read': { means: 'see jobs, plans and sheets', roles: ['administrator', 'reviewer', 'inspector'] },
   'job.manage': {
     means: 'open a job, make its plan, leave tests out',

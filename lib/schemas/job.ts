@@ -38,6 +38,8 @@ export const jobForm = z
     decisionRule: z.enum(['simple', 'guarded'], 'Choose the decision rule.').default('simple'),
     /** Left out: those that the organisation works by. */
     codes: testCodes.optional(),
+    /** Only tolerances that are confirmed or given by the contract; left out: as the organisation wants it. */
+    refuseUnconfirmed: z.boolean().optional(),
     startsOn: day('First day'),
     endsOn: optionalDay('Last day'),
     place: optionalText('The place', 200),

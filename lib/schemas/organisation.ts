@@ -36,9 +36,14 @@ export const organisationFields = z.strictObject({
   paper: z.enum(['A4', 'Letter']),
 });
 
-export const organisationChange = organisationFields
-  .partial()
-  .extend({ setUpDone: z.boolean().optional(), codes: testCodes.optional() });
+export const organisationChange = organisationFields.partial().extend({
+  setUpDone: z.boolean().optional(),
+  codes: testCodes.optional(),
+  /** A confirmed tolerance holds only when a second person has agreed. */
+  fourEyes: z.boolean().optional(),
+  /** A new job takes confirmed tolerances only, unless it says otherwise. */
+  refuseUnconfirmed: z.boolean().optional(),
+});
 export type OrganisationChange = z.output<typeof organisationChange>;
 
 /** The first start: organisation and first administrator in one. */
