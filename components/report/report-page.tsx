@@ -12,9 +12,10 @@ import { TestBlockView } from './test-block-view';
 
 /**
  * The acceptance report as a page: the same content in the same order as its PDF, for every screen, for screen readers and for paper.
- * Shows what the frozen model says and computes nothing.
+ * Shows what the frozen model says and computes nothing. `photosAt`: address below which its photographs are found.
  */
-export function ReportPage({ model }: { model: ReportModel }) {
+export function ReportPage(props: { model: ReportModel; photosAt: string }) {
+  const { model, photosAt } = props;
   const draft = model.document.state === 'draft';
   return (
     <article
@@ -48,7 +49,7 @@ export function ReportPage({ model }: { model: ReportModel }) {
         </ReportSection>
       )}
       {model.blocks.map((block) => (
-        <TestBlockView key={block.order} block={block} />
+        <TestBlockView key={block.order} block={block} photosAt={photosAt} />
       ))}
       {model.remarks.length > 0 && (
         <ReportSection title={REPORT_WORDS.remarks.heading}>

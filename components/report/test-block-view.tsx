@@ -10,9 +10,10 @@ import { finalPass } from './final-pass';
 import { FinalResult } from './final-result';
 import { PassReadings } from './pass-readings';
 import { ReportSection } from './report-section';
+import { TestPhotos } from './test-photos';
 
 /** Everything about one test: at the left the set-up and what is judged by what, at the right plots and readings, the limit rule below. */
-export function TestBlockView({ block }: { block: TestBlock }) {
+export function TestBlockView({ block, photosAt }: { block: TestBlock; photosAt: string }) {
   return (
     <div id={`test-${block.order}`} className="scroll-mt-4 print:break-inside-avoid">
       <ReportSection
@@ -24,6 +25,7 @@ export function TestBlockView({ block }: { block: TestBlock }) {
         }
       >
         {block.leftOut ? <LeftOut leftOut={block.leftOut} /> : <Measured block={block} />}
+        <TestPhotos photos={block.photos} at={photosAt} />
         {block.remark && (
           <p className="mt-3">
             <span className="font-semibold">{REPORT_WORDS.block.remark}:</span> {block.remark}

@@ -18,6 +18,7 @@ import { passWords, type SheetData } from './sheet-data';
 import { SheetBackground, SheetHead } from './sheet-guide';
 import { SheetHistory } from './sheet-history';
 import { SheetNotices } from './sheet-notices';
+import { SheetPhotos } from './sheet-photos';
 import { SheetSession } from './sheet-session';
 import { StrayReadings } from './stray-readings';
 import { Undecided } from './undecided';
@@ -159,6 +160,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
             />
             <div className="mt-5 max-w-2xl">
               <SheetHistory key={`history ${live.version}`} sheetId={sheet.id} timeZone={data.timeZone} />
+              <SheetPhotos sheetId={sheet.id} layout={data.definition.layout} readOnly={readOnly} />
               <Remark sheetId={sheet.id} live={live} readOnly={readOnly} again={again} />
             </div>
           </section>

@@ -1,6 +1,7 @@
 import type { Db } from '@/db/client';
 import { findJob, type JobRow, listPeople, listTemperatures, type TemperatureRow } from '@/db/queries/jobs';
 import { type Exclusion, listExclusions } from '@/db/queries/plans';
+import { listPhotos, type SheetPhoto } from '@/db/queries/sheet-photos';
 import { listSheets, type SheetRow } from '@/db/queries/sheets';
 import {
   type InstrumentChoice,
@@ -27,7 +28,7 @@ export interface JobBoard {
   customer: { id: string; name: string };
   people: { name: string; role: 'inspector' | 'reviewer' | 'customer' }[];
   temperatures: TemperatureRow[];
-  sheets: (SheetRow & { passes: PassView[] })[];
+  sheets: (SheetRow & { passes: PassView[]; photos: SheetPhoto[] })[];
   exclusions: Exclusion[];
   instruments: InstrumentChoice[];
   reports: BoardReport[];
@@ -40,10 +41,9 @@ export async function jobBoard(db: Db, jobId: string): Promise<JobBoard | undefi
   if (!job || !machine) return undefined;
   const customer = await db('customers').where({ id: job.customerId }).first('id', 'name');
   const sheets = await listSheets(db, jobId);
-  const passes = await passViews(
-    db,
-    sheets.map((sheet) => sheet.id),
-  );
+  const sheetIds = sheets.map((sheet) => sheet.id);
+  const passes = await passViews(db, sheetIds);
+  const photos = await listPhotos(db, sheetIds);
   const bySheet = new Map<string, PassView[]>();
   for (const pass of passes) bySheet.set(pass.sheetId, [...(bySheet.get(pass.sheetId) ?? []), pass]);
   return {
@@ -52,7 +52,11 @@ export async function jobBoard(db: Db, jobId: string): Promise<JobBoard | undefi
     customer,
     people: await listPeople(db, jobId),
     temperatures: await listTemperatures(db, jobId),
-    sheets: sheets.map((sheet) => ({ ...sheet, passes: bySheet.get(sheet.id) ?? [] })),
+    sheets: sheets.map((sheet) => ({
+      ...sheet,
+      passes: bySheet.get(sheet.id) ?? [],
+      photos: photos.filter(({ sheetId }) => sheetId === sheet.id),
+    })),
     exclusions: await listExclusions(db, jobId),
     instruments: await listInstrumentChoices(db),
     reports: await db('reports').where({ job_id: jobId }).orderBy('created_at', 'desc').select({

@@ -65,7 +65,7 @@ export async function api<T>(path: string, request: ApiRequest = {}): Promise<Ap
  * Sends a file; the answer names it. The bytes are the body, so that nothing has to be packed and unpacked.
  * @throws ApiProblem as `api` does
  */
-export async function uploadFile(kind: 'certificate' | 'nameplate', file: File): Promise<string> {
+export async function uploadFile(kind: 'certificate' | 'nameplate' | 'photo', file: File): Promise<string> {
   const response = await reach(`/api/files?kind=${kind}&name=${encodeURIComponent(file.name)}`, {
     method: 'POST',
     headers: { 'content-type': 'application/octet-stream', 'idempotency-key': newId() },

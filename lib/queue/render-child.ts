@@ -1,6 +1,10 @@
+import type { ReportModel } from '@/lib/reporting/report-model';
 import { renderReportPdf } from '@/templates/report/render';
+import type { ReportPhotos } from '@/templates/report/report-document';
 
+/** `model`: the report and its photographs, see `ReportToDraw`. */
 export type RenderRequest = { id: number; model: unknown };
+export type ReportToDraw = { report: ReportModel; photos: ReportPhotos };
 export type RenderAnswer =
   | { kind: 'ready' }
   | { kind: 'done'; id: number; pdf: Uint8Array; rssBytes: number }
@@ -17,7 +21,8 @@ function answer(message: RenderAnswer): void {
 
 process.on('message', async ({ id, model }: RenderRequest) => {
   try {
-    const pdf = await renderReportPdf(model as Parameters<typeof renderReportPdf>[0]);
+    const { report, photos } = model as ReportToDraw;
+    const pdf = await renderReportPdf(report, photos);
     answer({ kind: 'done', id, pdf, rssBytes: process.memoryUsage.rss() });
   } catch (error) {
     const message = error instanceof Error ? (error.stack ?? error.message) : String(error);

@@ -1,6 +1,6 @@
 import { type ChildProcess, fork } from 'node:child_process';
 import path from 'node:path';
-import type { RenderAnswer, RenderRequest } from './render-child';
+import type { RenderAnswer, RenderRequest, ReportToDraw } from './render-child';
 
 export type RenderPoolLimits = {
   /** A process is replaced after this many documents, or when it holds more memory than this. */
@@ -118,7 +118,7 @@ export class RenderPool {
 /** The worker's own pool. */
 export const renderPool = new RenderPool();
 
-/** Draws a report model as PDF in the warm process. Throws after two failed tries. */
-export function renderPdf(model: unknown): Promise<Buffer> {
-  return renderPool.render(model);
+/** Draws a report as PDF in the warm process. Throws after two failed tries. */
+export function renderPdf(drawn: ReportToDraw): Promise<Buffer> {
+  return renderPool.render(drawn);
 }

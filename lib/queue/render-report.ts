@@ -3,6 +3,7 @@ import { inScope, systemScope } from '@/db/client';
 import { closeJob } from '@/db/queries/jobs';
 import { queueMail } from '@/db/queries/outbox';
 import {
+  findFile,
   findReport,
   insertFile,
   keepReportPdf,
@@ -15,9 +16,10 @@ import { env } from '@/lib/env';
 import { newId } from '@/lib/id';
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { signedModel } from '@/lib/services/signed-model';
-import { putFile } from '@/lib/storage/storage';
+import { getFile, putFile } from '@/lib/storage/storage';
 import { reportAnsweredMail } from '@/templates/email/report-answered';
 import { reportIssuedMail } from '@/templates/email/report-issued';
+import type { ReportPhotos } from '@/templates/report/report-document';
 import { renderPdf } from './render-pool';
 
 /** Nobody is told about a report of last year because its document is drawn again. */
@@ -45,13 +47,27 @@ export async function renderReport(organisationId: string, reportId: string): Pr
   }
 }
 
+/** The photographs that the report names, as they were when it was issued. */
+async function photosOf(organisationId: string, model: ReportModel): Promise<ReportPhotos> {
+  const named = model.blocks.flatMap(({ photos }) => photos ?? []);
+  const photos: Record<string, Uint8Array> = {};
+  for (const { fileId, sha256 } of named) {
+    const file = await inScope(systemScope(organisationId), (trx) => findFile(trx, fileId));
+    const stored = file && (await getFile(file.key));
+    if (!stored || createHash('sha256').update(stored.bytes).digest('hex') !== sha256)
+      throw new Error(`photo ${fileId} is not there as it was when the report was issued`);
+    photos[fileId] = stored.bytes;
+  }
+  return photos;
+}
+
 async function renderOne(
   organisationId: string,
   report: ReportRow,
   kind: 'issued' | 'signed',
   model: ReportModel,
 ): Promise<void> {
-  const bytes = await renderPdf(model);
+  const bytes = await renderPdf({ report: model, photos: await photosOf(organisationId, model) });
   const sha256 = createHash('sha256').update(bytes).digest('hex');
   const key = `${organisationId}/reports/${report.id}-${kind}.pdf`;
   await putFile(key, bytes, 'application/pdf');

@@ -125,6 +125,17 @@ export interface TestBlock {
   passes: PassBlock[];
   leftOut: { reason: string; text: string | null } | null;
   remark: string | null;
+  /** Absent in reports from before photographs could be added. */
+  photos?: PhotoBlock[];
+}
+
+export interface PhotoBlock {
+  fileId: string;
+  sha256: string;
+  widthPx: number;
+  heightPx: number;
+  /** Item of a function check and caption, for the line below the picture. */
+  words: string;
 }
 
 export interface PassBlock {

@@ -43,6 +43,16 @@ export interface StoredSheet {
   leftOutText: string | null;
   remark: string | null;
   passes: StoredPass[];
+  photos: StoredPhoto[];
+}
+
+export interface StoredPhoto {
+  fileId: string;
+  sha256: string;
+  item: string | null;
+  caption: string;
+  widthPx: number;
+  heightPx: number;
 }
 
 export interface StoredPass {

@@ -4,12 +4,12 @@ import { leftOutReasons } from '@/lib/schemas/job';
 import { convert } from '@/lib/units/convert';
 import { formatDecimal } from '@/lib/units/format';
 import { cautionText } from '@/standards/cautions';
-import type { PlannedTolerance } from '@/standards/types';
+import type { PlannedTolerance, TestDefinition } from '@/standards/types';
 import type { CellChangeText } from './corrected-readings';
 import { passBlock } from './pass-block';
 import { provenanceWords } from './record-words';
-import type { TestBlock } from './report-model';
-import type { StoredJob, StoredSheet } from './stored-job';
+import type { PhotoBlock, TestBlock } from './report-model';
+import type { StoredJob, StoredPhoto, StoredSheet } from './stored-job';
 import { DIRECTION_WORDS } from './words';
 
 const mm = (um: string) => formatDecimal(convert(um, 'µm', 'mm'));
@@ -68,5 +68,12 @@ export function testBlock(
           .map((pass) => passBlock(pass, { definition, ...context })),
     leftOut: sheet.leftOutReason ? { reason: leftOutReasons[sheet.leftOutReason], text: sheet.leftOutText } : null,
     remark: sheet.remark,
+    ...(sheet.photos.length > 0 ? { photos: sheet.photos.map((photo) => photoBlock(photo, definition)) } : {}),
   };
+}
+
+function photoBlock(photo: StoredPhoto, { layout }: TestDefinition): PhotoBlock {
+  const item = layout.kind === 'check-list' ? layout.items.find(({ id }) => id === photo.item) : undefined;
+  const { fileId, sha256, widthPx, heightPx } = photo;
+  return { fileId, sha256, widthPx, heightPx, words: [item?.question, photo.caption].filter(Boolean).join(' · ') };
 }

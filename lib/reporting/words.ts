@@ -154,6 +154,8 @@ export const REPORT_WORDS = {
   },
   notInPlan: { heading: 'Not in the plan', test: 'Test', reason: 'Reason' },
   block: {
+    photos: 'Photos',
+    photo: 'Photo',
     setUp: 'Set-up',
     result: 'Result',
     judged: 'Judged',

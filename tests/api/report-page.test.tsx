@@ -18,7 +18,7 @@ afterAll(() => workshop?.close());
 
 /** The words of the page in the order in which they are read out, one cell after another. */
 function wordsOf(model: ReportModel): { markup: string; words: string } {
-  const markup = renderToStaticMarkup(<ReportPage model={model} />);
+  const markup = renderToStaticMarkup(<ReportPage model={model} photosAt="/photos" />);
   const words = markup
     .replaceAll(/<[^>]+>/g, ' ')
     .replaceAll('&#x27;', "'")

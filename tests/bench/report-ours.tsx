@@ -35,7 +35,7 @@ export async function ours(samples: readonly SamplePage[]): Promise<Buffer> {
     bookmarks,
   }));
   type.assertComplete();
-  return renderToBuffer(<ReportDocument model={model} made={{ paper, type, pages }} date={new Date(0)} />);
+  return renderToBuffer(<ReportDocument model={model} made={{ paper, type, pages }} date={new Date(0)} photos={{}} />);
 }
 
 function onePage(kit: Kit, sample: SamplePage): FlowItem[] {

@@ -107,10 +107,10 @@ function longModel(tests: number) {
 async function eventLoop(): Promise<BenchLine> {
   const pool = new RenderPool();
   const model = longModel(40);
-  await pool.render(model);
+  await pool.render({ report: model, photos: {} });
   const stops: { idle: number[]; busy: number[] } = { idle: [], busy: [] };
   for (let window = 0; window < 5; window += 1) {
-    stops.busy.push(await longestStop(() => pool.render(model).then(() => pool.render(model))));
+    stops.busy.push(await longestStop(() => pool.render({ report: model, photos: {} }).then(() => pool.render(model))));
     stops.idle.push(await longestStop(() => new Promise((resolve) => setTimeout(resolve, 500))));
   }
   await pool.close();

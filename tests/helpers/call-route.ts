@@ -37,10 +37,11 @@ export async function callRoute<T = Record<string, unknown>>(
   });
   const response = await (handler as Handler)(request, { params: Promise.resolve(params) });
   const text = await response.text();
+  const isJson = /json/.test(response.headers.get('content-type') ?? '');
   const tag = /"(\d+)"/.exec(response.headers.get('etag') ?? '')?.[1];
   return {
     status: response.status,
-    body: (text ? JSON.parse(text) : undefined) as T,
+    body: (text && isJson ? JSON.parse(text) : text || undefined) as T,
     headers: response.headers,
     version: tag === undefined ? null : Number(tag),
   };

@@ -34,12 +34,15 @@ import * as organisation from '@/app/api/organisation/route';
 import * as ready from '@/app/api/ready/route';
 import * as reportsIdData from '@/app/api/reports/[id]/data/route';
 import * as reportsIdPdf from '@/app/api/reports/[id]/pdf/route';
+import * as reportsIdPhotosFileid from '@/app/api/reports/[id]/photos/[fileId]/route';
 import * as reportsId from '@/app/api/reports/[id]/route';
 import * as reportsIdSignatures from '@/app/api/reports/[id]/signatures/route';
 import * as sheetsIdChanges from '@/app/api/sheets/[id]/changes/route';
 import * as sheetsIdOperations from '@/app/api/sheets/[id]/operations/route';
 import * as sheetsIdPassesPassid from '@/app/api/sheets/[id]/passes/[passId]/route';
 import * as sheetsIdPasses from '@/app/api/sheets/[id]/passes/route';
+import * as sheetsIdPhotosPhotoid from '@/app/api/sheets/[id]/photos/[photoId]/route';
+import * as sheetsIdPhotos from '@/app/api/sheets/[id]/photos/route';
 import * as sheetsId from '@/app/api/sheets/[id]/route';
 import * as welcome from '@/app/api/welcome/route';
 
@@ -80,11 +83,14 @@ export const describedRoutes = {
   '/api/organisation': organisation,
   '/api/ready': ready,
   '/api/reports/[id]/data': reportsIdData,
+  '/api/reports/[id]/photos/[fileId]': reportsIdPhotosFileid,
   '/api/reports/[id]/pdf': reportsIdPdf,
   '/api/reports/[id]': reportsId,
   '/api/reports/[id]/signatures': reportsIdSignatures,
   '/api/sheets/[id]/changes': sheetsIdChanges,
   '/api/sheets/[id]/operations': sheetsIdOperations,
+  '/api/sheets/[id]/photos/[photoId]': sheetsIdPhotosPhotoid,
+  '/api/sheets/[id]/photos': sheetsIdPhotos,
   '/api/sheets/[id]/passes/[passId]': sheetsIdPassesPassid,
   '/api/sheets/[id]/passes': sheetsIdPasses,
   '/api/sheets/[id]': sheetsId,

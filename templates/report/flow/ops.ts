@@ -19,6 +19,8 @@ export type Op =
     }
   /** A drawing's own items, scaled. */
   | { op: 'drawing'; x: number; y: number; scale: number; items: readonly DrawingItem[] }
+  /** A photograph, by its file; the document lays it over the canvas. */
+  | { op: 'picture'; x: number; y: number; widthPt: number; heightPt: number; fileId: string }
   | { op: 'turned'; x: number; y: number; deg: number; text: string; style: TextStyle }
   | { op: 'group'; x: number; y: number; ops: readonly Op[] };
 

@@ -45,6 +45,8 @@ export class PagePainter {
   }
 
   private one(op: Op, x: number, y: number): void {
+    // Pictures are laid over the canvas by the document itself.
+    if (op.op === 'picture') return;
     if (op.op === 'group') this.paint(op.ops, x + op.x, y + op.y);
     else if (op.op === 'text') this.text(op.text, x + op.x, y + op.y, op.style);
     else if (op.op === 'drawing') this.drawing(op.items, x + op.x, y + op.y, op.scale);

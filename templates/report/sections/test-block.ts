@@ -19,6 +19,7 @@ import {
 import { flowingText, heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
 import { type Column, table, tableWidth } from '@/templates/report/flow/table';
 import { passReadings } from '@/templates/report/sections/pass-readings';
+import { testPhotos } from '@/templates/report/sections/test-photos';
 import { plotsSlab, sketchSlab } from '@/templates/report/sections/test-pictures';
 import { TYPE } from '@/templates/report/theme';
 
@@ -36,6 +37,7 @@ export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
   const items: FlowItem[] = [space(2)];
   if (block.leftOut) items.push(...leftOut(kit, block.leftOut));
   else items.push(...measured(kit, block));
+  items.push(...testPhotos(kit, block.photos));
   if (block.remark) items.push(space(4), flowingText(kit, `${REPORT_WORDS.block.remark}: ${block.remark}`));
   const [gap, titled] = head as [FlowItem, FlowItem];
   return [gap, { kind: 'together', items: [titled, ...items, ...corrections(kit, block)] }];

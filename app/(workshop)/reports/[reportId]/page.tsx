@@ -57,7 +57,7 @@ export default async function IssuedReportPage({ params }: Params) {
           </SectionTitle>
         </div>
       </div>
-      <ReportPage model={model} />
+      <ReportPage model={model} photosAt={`/api/reports/${report.id}/photos`} />
       <div id="document-end">
         <SeenMark />
       </div>

@@ -58,7 +58,7 @@ export default async function JobReportPage({ params }: Params) {
       </div>
       {open && (
         <div className="mt-6 print:mt-0">
-          <ReportPage model={buildReport(source, null)} />
+          <ReportPage model={buildReport(source, null)} photosAt="/api/files" />
         </div>
       )}
     </>

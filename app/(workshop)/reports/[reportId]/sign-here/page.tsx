@@ -88,7 +88,7 @@ function Signing({ loaded }: { loaded: LoadedReport }) {
           <span className="hidden group-open:inline">Fold the document up</span>
         </summary>
         <div className="mt-4">
-          <ReportPage model={model} />
+          <ReportPage model={model} photosAt={`/api/reports/${loaded.report.id}/photos`} />
           <div id="document-end">
             <SeenMark />
           </div>
