@@ -32,7 +32,7 @@ export interface FormMachine {
 
 const blank = { manufacturer: '', model: '', serialNumber: '', year: null, control: '', site: '' };
 
-/** Registers a machine, starting from one of four kinds; or changes one. `goOnTo` leads elsewhere than to the machine. */
+/** Registers a machine, starting from one of the usual kinds; or changes one. `goOnTo` leads elsewhere than to the machine. */
 export function MachineForm(props: {
   machine?: FormMachine;
   customers: { id: string; name: string }[];

@@ -12,6 +12,9 @@ export function toMakeUpInput(makeUp: MakeUp): MakeUpInput {
   return {
     ...makeUp,
     linearAxes: makeUp.linearAxes.map((axis) => ({ ...axis, directionNote: axis.directionNote ?? '' })),
+    spindles: makeUp.spindles.map((spindle) => ({ ...spindle, onTurret: spindle.onTurret ?? '' })),
+    turrets: makeUp.turrets.map((turret) => ({ ...turret, drivenTools: turret.drivenTools ?? 'none' })),
+    toolChanger: makeUp.toolChanger ?? null,
     distanceBetweenCentresMm: makeUp.distanceBetweenCentresMm ?? '',
     swingOverBedMm: makeUp.swingOverBedMm ?? '',
     swingOverCrossSlideMm: makeUp.swingOverCrossSlideMm ?? '',

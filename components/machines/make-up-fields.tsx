@@ -31,7 +31,7 @@ export function MakeUpFields() {
   return (
     <div className="grid gap-7">
       <SizeFields />
-      <SpindleRows />
+      <SpindleRows turrets={turrets.map(({ id }) => tidy(id)).filter(Boolean)} />
       <TurretRows workSpindles={workSpindles} />
       <AxisRows carried={carried} />
       <div className="grid gap-7 lg:grid-cols-2">
@@ -49,6 +49,7 @@ export function MakeUpFields() {
           <div className="flex flex-wrap gap-x-8">
             <SinglePart name="tailstock" />
             <SinglePart name="guideBush" />
+            <SinglePart name="toolChanger" />
           </div>
         </div>
       </div>

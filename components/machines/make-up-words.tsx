@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { componentName } from '@/lib/planning/component-words';
-import { type MakeUp, machineKinds } from '@/lib/schemas/make-up';
+import { drivenToolWords, type MakeUp, machineKinds } from '@/lib/schemas/make-up';
 
 const criteria = {
   'swing-over-bed': 'swing over bed',
@@ -29,18 +29,20 @@ export function MakeUpWords({ makeUp }: { makeUp: MakeUp }) {
         {criteria[makeUp.sizeClass.criterion]} <Figure>{makeUp.sizeClass.valueMm}</Figure> mm
       </Part>
       <Part name="Spindles">
-        {makeUp.spindles.map(({ id, carriedBy }) => (
+        {makeUp.spindles.map(({ id, carriedBy, onTurret }) => (
           <Line key={id}>
             {componentName(id, makeUp)}
             {carriedBy && `, carried by ${carriedBy}`}
+            {onTurret && `, rides on ${componentName(onTurret, makeUp)}`}
           </Line>
         ))}
       </Part>
       <Part name="Turrets and posts">
-        {makeUp.turrets.map(({ id, stations, axes, worksAt }) => (
+        {makeUp.turrets.map(({ id, stations, axes, worksAt, drivenTools = 'none' }) => (
           <Line key={id}>
             {componentName(id, makeUp)}, {stations} stations{axes.length > 0 && `, moves in ${axes.join(' ')}`}, works
             at {worksAt.join(' and ')}
+            {drivenTools !== 'none' && `, driven tools ${drivenToolWords[drivenTools]}`}
           </Line>
         ))}
       </Part>
@@ -62,11 +64,12 @@ export function MakeUpWords({ makeUp }: { makeUp: MakeUp }) {
           ))}
         </Part>
       )}
-      {(makeUp.tailstock || makeUp.guideBush) && (
+      {(makeUp.tailstock || makeUp.guideBush || makeUp.toolChanger) && (
         <Part name="Besides">
           {[
             makeUp.tailstock && `tailstock ${makeUp.tailstock.id}`,
             makeUp.guideBush && `guide bush ${makeUp.guideBush.id}`,
+            makeUp.toolChanger && `tool changer ${makeUp.toolChanger.id}`,
           ]
             .filter(Boolean)
             .join(', ')}

@@ -7,6 +7,7 @@ import { useMachineForm } from './machine-input';
 const parts = {
   tailstock: { label: 'Tailstock', id: 'TS1' },
   guideBush: { label: 'Guide bush', id: 'GB1' },
+  toolChanger: { label: 'Tool changer', id: 'TC1' },
 } as const;
 
 /** A part of which there is one or none. */
@@ -16,7 +17,7 @@ export function SinglePart({ name }: { name: keyof typeof parts }) {
   return (
     <Checkbox
       label={parts[name].label}
-      checked={value !== null}
+      checked={Boolean(value)}
       onChange={(event) =>
         setValue(`makeUp.${name}`, event.target.checked ? { id: parts[name].id, channel: 1 } : null, {
           shouldDirty: true,

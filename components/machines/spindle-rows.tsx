@@ -5,8 +5,8 @@ import { NumberText, Select, TextInput } from '@/components/ui/inputs';
 import { rowMessages, useMachineForm } from './machine-input';
 import { PartCell, PartRow, PartTable } from './row-parts';
 
-/** Main, sub- and tool spindles. */
-export function SpindleRows() {
+/** Main, sub- and tool spindles; a tool spindle may ride on a turret or post. */
+export function SpindleRows({ turrets }: { turrets: string[] }) {
   const { register, control, formState } = useMachineForm();
   const { fields, append, remove } = useFieldArray({ control, name: 'makeUp.spindles', keyName: 'rowKey' });
   const spindles = useWatch({ control, name: 'makeUp.spindles' });
@@ -14,7 +14,7 @@ export function SpindleRows() {
   return (
     <PartTable
       title="Spindles"
-      heads={['Name', 'Kind', 'Channel', 'Highest speed, 1/min']}
+      heads={['Name', 'Kind', 'Channel', 'Highest speed, 1/min', 'Rides on']}
       addLabel="Add a spindle"
       onAdd={() =>
         append({ id: `S${fields.length + 1}`, type: fields.length === 1 ? 'sub' : 'tool', channel: 1, carriedBy: null })
@@ -28,7 +28,7 @@ export function SpindleRows() {
           <PartRow
             key={field.rowKey}
             name={name}
-            columns={4}
+            columns={5}
             messages={rowMessages(errors?.[index])}
             onRemove={fields.length > 1 ? () => remove(index) : undefined}
           >
@@ -59,6 +59,18 @@ export function SpindleRows() {
                 className="min-w-24 max-w-32"
                 {...register(`${path}.maximumSpeedPerMin`)}
               />
+            </PartCell>
+            <PartCell>
+              {spindles[index]?.type === 'tool' ? (
+                <Select aria-label={`${name}: rides on`} className="min-w-36" {...register(`${path}.onTurret`)}>
+                  <option value="">no turret or post</option>
+                  {turrets.map((id) => (
+                    <option key={id}>{id}</option>
+                  ))}
+                </Select>
+              ) : (
+                <span className="text-sm text-ink2">the axis that carries it</span>
+              )}
             </PartCell>
           </PartRow>
         );

@@ -6,7 +6,7 @@ import { Notice } from '@/components/ui/notice';
 import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
 import { toMakeUpInput, useMachineForm } from './machine-input';
 
-/** Four whole machines to start from. Choosing another one later asks first, because it replaces the rows. */
+/** Whole machines to start from. Choosing another one later asks first, because it replaces the rows. */
 export function StartFrom({ initial }: { initial: number }) {
   const form = useMachineForm();
   const [chosen, setChosen] = useState(initial);
@@ -27,7 +27,7 @@ export function StartFrom({ initial }: { initial: number }) {
   return (
     <fieldset>
       <legend className="font-semibold">Start from the kind that is nearest</legend>
-      <div className="mt-2 grid gap-2 sm:grid-cols-2 lg:grid-cols-4">
+      <div className="mt-2 grid gap-2 sm:grid-cols-2 lg:grid-cols-5">
         {startingMakeUps.map(({ title }, index) => (
           <button
             key={title}

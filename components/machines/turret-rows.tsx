@@ -2,6 +2,7 @@
 
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { Checkbox, NumberText, Select, TextInput } from '@/components/ui/inputs';
+import { drivenToolWords } from '@/lib/schemas/make-up';
 import { rowMessages, useMachineForm } from './machine-input';
 import { PartCell, PartRow, PartTable } from './row-parts';
 
@@ -14,7 +15,7 @@ export function TurretRows({ workSpindles }: { workSpindles: string[] }) {
   return (
     <PartTable
       title="Turrets and tool posts"
-      heads={['Name', 'Kind', 'Stations', 'Channel', 'Works at']}
+      heads={['Name', 'Kind', 'Stations', 'Driven tools', 'Channel', 'Works at']}
       addLabel="Add a turret or tool post"
       onAdd={() =>
         append({
@@ -24,6 +25,7 @@ export function TurretRows({ workSpindles }: { workSpindles: string[] }) {
           stations: 12,
           axes: [],
           worksAt: workSpindles.slice(0, 1),
+          drivenTools: 'none',
         })
       }
       problem={errors?.message ?? errors?.root?.message}
@@ -35,7 +37,7 @@ export function TurretRows({ workSpindles }: { workSpindles: string[] }) {
           <PartRow
             key={field.rowKey}
             name={name}
-            columns={5}
+            columns={6}
             messages={rowMessages(errors?.[index])}
             onRemove={fields.length > 1 ? () => remove(index) : undefined}
           >
@@ -59,6 +61,15 @@ export function TurretRows({ workSpindles }: { workSpindles: string[] }) {
                 className="min-w-14 max-w-20"
                 {...register(`${path}.stations`)}
               />
+            </PartCell>
+            <PartCell>
+              <Select aria-label={`${name}: driven tools`} className="min-w-28" {...register(`${path}.drivenTools`)}>
+                {Object.entries(drivenToolWords).map(([value, words]) => (
+                  <option key={value} value={value}>
+                    {words}
+                  </option>
+                ))}
+              </Select>
             </PartCell>
             <PartCell>
               <NumberText

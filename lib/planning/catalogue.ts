@@ -1,4 +1,5 @@
 import { bind } from '@/lib/planning/bind';
+import { fitsKind } from '@/lib/planning/fits-kind';
 import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
 import { codes, codeTitle, currentDefinitions, type TestCode } from '@/standards/registry';
 import type { BoundComponent, TestDefinition } from '@/standards/types';
@@ -40,7 +41,7 @@ export function findCatalogueTest(code: string, test: string): { code: Catalogue
 
 /** A component on which the test can be shown, taken from the starting make-ups. */
 export function exampleComponent(test: TestDefinition): BoundComponent {
-  for (const { makeUp } of startingMakeUps) {
+  for (const { makeUp } of startingMakeUps.filter((start) => fitsKind(test, start.makeUp))) {
     const [first] = bind(test.appliesTo, makeUp);
     if (first) return first;
   }

@@ -1,59 +1,105 @@
 import type { MakeUp } from '@/lib/schemas/make-up';
 import { defaultSetUp } from '@/lib/sheet/default-set-up';
+import { isOwnTest } from '@/standards/own-tests';
 import type { BoundComponent, PlannedSheet, TestDefinition } from '@/standards/types';
 import { workingSteps } from '@/standards/working-order';
 import { axisRank } from './axes';
 import { bind } from './bind';
-import { boundTitle } from './component-words';
+import { boundTitle, putIn } from './component-words';
 import { resolveDependsOn } from './depends-on';
 import { findTolerance } from './find-tolerance';
+import { fitsKind } from './fits-kind';
+import { keepTogether } from './keep-together';
+import type { OrganisationValues } from './organisation-values';
+
+/** Setting up and measuring once, where a definition does not say (our estimate). */
+export const USUAL_MINUTES = 15;
 
 /**
- * The plan of a machine: every definition bound to every component that it fits, with its tolerance, in mechanical working order.
- * A plan is a proposal: a job takes a selection of it (see choose.ts). Pure; the same make-up and definitions give the same plan.
+ * The plan of a machine: every definition bound to every component that it fits, with its tolerance, in mechanical working order; within
+ * a working step, what is set up together stands together. A plan is a proposal: a job takes a selection of it. Pure; the same make-up,
+ * definitions and values give the same plan. Definitions must hold one edition of each code.
  */
-export function planSheets(makeUp: MakeUp, definitions: readonly TestDefinition[]): PlannedSheet[] {
-  return definitions
+export function planSheets(
+  makeUp: MakeUp,
+  definitions: readonly TestDefinition[],
+  values?: OrganisationValues,
+): PlannedSheet[] {
+  const sorted = definitions
     .flatMap((definition, index) =>
-      bind(definition.appliesTo, makeUp).map((component) => ({ definition, index, component })),
+      fitsKind(definition, makeUp)
+        ? bind(definition.appliesTo, makeUp).map((component) => ({ definition, index, component }))
+        : [],
     )
     .map((entry) => ({ entry, rank: rank(entry, makeUp) }))
     .sort((a, b) => compare(a.rank, b.rank))
-    .map(({ entry: { definition, component } }) => planSheet(definition, component, makeUp));
+    .map(({ entry: { definition, component } }) => planSheet(definition, component, makeUp, values));
+  return distinct(
+    keepTogether(
+      sorted,
+      ({ workingStep }) => workingStep,
+      ({ setUpTogether }) => setUpTogether,
+    ),
+  );
 }
 
-function planSheet(definition: TestDefinition, component: BoundComponent, makeUp: MakeUp): PlannedSheet {
-  const { id, code, edition, version } = definition;
+function planSheet(
+  definition: TestDefinition,
+  component: BoundComponent,
+  makeUp: MakeUp,
+  values: OrganisationValues | undefined,
+): PlannedSheet {
+  const { id, code, edition, version, setUpTogether } = definition;
   return {
     key: sheetKey(definition, component),
     definition: { id, code, edition, version },
+    ownDefinition: isOwnTest(definition) ? definition : null,
     title: boundTitle(definition, component, makeUp),
     component,
     dependsOn: resolveDependsOn(definition, component, makeUp),
-    tolerance: findTolerance(definition.tolerance, component, makeUp),
+    tolerance: findTolerance(definition, component, makeUp, values),
     direction: definition.direction,
     setUp: defaultSetUp(definition, component, makeUp),
     workingStep: plannedStep(definition, component, makeUp),
+    setUpTogether: setUpTogether === undefined ? null : putIn(setUpTogether, definition, component, makeUp),
+    minutes: definition.minutes ?? USUAL_MINUTES,
   };
 }
 
 /**
- * Stable within a job: definition id, then turret, axis, spindle, reference as far as the component has them, then the plane where a
- * definition is measured in more than one: `AX-1a:Z1:S1`, `AX-4:Y1:X1`, `TU-3:T2:S1`, `SS-1:S2:S1`, `AX-5:Z1:ZX`.
+ * Stable within a job: definition id, then turret, axis, spindle, reference and the other parts as far as the component has them, the
+ * station and the channel where there is a sheet for each, then the plane where a definition is measured in more than one:
+ * `AX-1a:Z1:S1`, `AX-4:Y1:X1`, `TU-3:T2:S1`, `SS-1:S2:S1`, `AX-5:Z1:ZX`, `GB-3:T1:S1:st4`, `FC-1:ch2`.
  */
 export function sheetKey(definition: TestDefinition, component: BoundComponent): string {
-  const { turret, axis, spindle, reference, tailstock, plane } = component;
-  const several = 'planes' in definition.appliesTo && definition.appliesTo.planes.length > 1;
-  const parts = [turret, axis, spindle, reference, tailstock, several ? plane : undefined];
+  const { turret, axis, spindle, reference, tailstock, guideBush, toolChanger, rotary, station, plane } = component;
+  const { appliesTo } = definition;
+  const parts = [
+    ...[turret, axis, spindle, reference, tailstock, guideBush, toolChanger, rotary],
+    station === undefined ? undefined : `st${station}`,
+    appliesTo.kind === 'channel' ? `ch${component.channel}` : undefined,
+    'planes' in appliesTo && appliesTo.planes.length > 1 ? plane : undefined,
+  ];
   return [definition.id, ...parts.filter((part) => part !== undefined)].join(':');
+}
+
+/** Two codes may use one id for different tests: the later of the two carries its code too. */
+function distinct(sheets: PlannedSheet[]): PlannedSheet[] {
+  const taken = new Map<string, string>();
+  return sheets.map((sheet) => {
+    const owner = taken.get(sheet.key);
+    if (owner === undefined) taken.set(sheet.key, sheet.definition.code);
+    return owner === undefined ? sheet : { ...sheet, key: `${sheet.key}:${sheet.definition.code}` };
+  });
 }
 
 /** Whatever is measured against a sub-spindle waits until the sub-spindle itself is right. */
 function plannedStep(definition: TestDefinition, component: BoundComponent, makeUp: MakeUp): number {
-  const against = makeUp.spindles.find(({ id }) => id === component.spindle);
+  const isSub = (id: string | undefined) => makeUp.spindles.some((one) => one.id === id && one.type === 'sub');
+  const isTool = makeUp.spindles.some(({ id, type }) => id === component.spindle && type === 'tool');
   const relation = component.axis !== undefined || component.turret !== undefined;
-  const later = workingSteps['axes-to-sub-spindle'];
-  return relation && against?.type === 'sub' ? Math.max(definition.workingStep, later) : definition.workingStep;
+  const against = (relation && isSub(component.spindle)) || (isTool && isSub(component.reference));
+  return against ? Math.max(definition.workingStep, workingSteps['axes-to-sub-spindle']) : definition.workingStep;
 }
 
 function rank(
@@ -69,6 +115,7 @@ function rank(
     makeUp.turrets.findIndex(({ id }) => id === component.turret),
     makeUp.spindles.findIndex(({ id }) => id === component.spindle),
     index,
+    component.station ?? 0,
   ];
 }
 

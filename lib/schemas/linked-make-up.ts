@@ -2,7 +2,8 @@ import type { MakeUpInput } from './make-up';
 
 /**
  * What a form need not ask, because it follows from the rest: an axis is named by letter and number, the channels are those in use, a
- * turret moves in the axes that carry it, and a work spindle is carried by the axis that is said to carry it (its Z-like one first).
+ * turret moves in the axes that carry it, and a spindle is carried by the axis that is said to carry it (its Z-like one first). Only a
+ * tool spindle rides on a turret; one that does moves with it.
  */
 export function linkMakeUp(form: MakeUpInput): MakeUpInput {
   const linearAxes = form.linearAxes.map((axis) => ({
@@ -16,10 +17,14 @@ export function linkMakeUp(form: MakeUpInput): MakeUpInput {
     channels: channelsIn(form),
     linearAxes,
     spindles: form.spindles.map((spindle) => {
-      if (spindle.type === 'tool') return spindle;
+      const { onTurret, ...rest } = spindle;
+      const rides = onTurret && form.turrets.some(({ id }) => same(id, onTurret));
+      const turret = spindle.type === 'tool' && rides ? { onTurret: tidy(onTurret) } : {};
       const axes = carrying(spindle.id);
       const axis = axes.find(({ letter }) => letter === 'Z' || letter === 'W') ?? axes[0];
-      return { ...spindle, carriedBy: axis?.id ?? null };
+      // An axis that was named for a tool spindle without being said to carry it stays, while the machine has it.
+      const named = spindle.type === 'tool' ? linearAxes.find(({ id }) => id === spindle.carriedBy) : undefined;
+      return { ...rest, ...turret, carriedBy: axis?.id ?? named?.id ?? null };
     }),
     turrets: form.turrets.map((turret) => ({
       ...turret,
@@ -40,6 +45,7 @@ function channelsIn(form: MakeUpInput): number[] {
     ...form.turrets,
     ...(form.tailstock ? [form.tailstock] : []),
     ...(form.guideBush ? [form.guideBush] : []),
+    ...(form.toolChanger ? [form.toolChanger] : []),
   ];
   return [...new Set(parts.map(({ channel }) => Number(channel)))]
     .filter((channel) => channel >= 1)

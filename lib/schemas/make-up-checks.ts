@@ -24,6 +24,7 @@ function components(value: MakeUp): Named[] {
     ...value.turrets.map(({ id }, k) => ({ id, path: ['turrets', k, 'id'] })),
     ...(value.tailstock ? [{ id: value.tailstock.id, path: ['tailstock', 'id'] }] : []),
     ...(value.guideBush ? [{ id: value.guideBush.id, path: ['guideBush', 'id'] }] : []),
+    ...(value.toolChanger ? [{ id: value.toolChanger.id, path: ['toolChanger', 'id'] }] : []),
   ];
 }
 
@@ -54,6 +55,7 @@ function checkChannels(value: MakeUp): MakeUpProblem[] {
   value.turrets.forEach((turret, k) => void check(turret.channel, ['turrets', k, 'channel']));
   if (value.tailstock) check(value.tailstock.channel, ['tailstock', 'channel']);
   if (value.guideBush) check(value.guideBush.channel, ['guideBush', 'channel']);
+  if (value.toolChanger) check(value.toolChanger.channel, ['toolChanger', 'channel']);
   return problems;
 }
 
@@ -85,6 +87,7 @@ function checkAxes(value: MakeUp): MakeUpProblem[] {
 function checkSpindles(value: MakeUp): MakeUpProblem[] {
   const problems: MakeUpProblem[] = [];
   value.spindles.forEach((spindle, k) => {
+    if (spindle.onTurret) problems.push(...checkOnTurret(value, k, spindle.id, spindle.type, spindle.onTurret));
     if (spindle.carriedBy === null) return;
     const axis = value.linearAxes.find(({ id }) => id === spindle.carriedBy);
     const path = ['spindles', k, 'carriedBy'];
@@ -99,6 +102,13 @@ function checkSpindles(value: MakeUp): MakeUpProblem[] {
   if (!value.spindles.some(({ type }) => type === 'main'))
     problems.push({ path: ['spindles'], message: 'One spindle must be the main spindle.' });
   return problems;
+}
+
+function checkOnTurret(value: MakeUp, k: number, id: string, type: string, turret: string): MakeUpProblem[] {
+  const path = ['spindles', k, 'onTurret'];
+  if (type !== 'tool') return [{ path, message: `${id} is a work spindle; only a tool spindle rides on a turret.` }];
+  if (value.turrets.some((candidate) => candidate.id === turret)) return [];
+  return [{ path, message: `${id} rides on ${turret}, which is no turret or tool post of the machine.` }];
 }
 
 function checkTurrets(value: MakeUp): MakeUpProblem[] {

@@ -1,16 +1,26 @@
 import { z } from 'zod';
 import { checkMakeUp } from './make-up-checks';
 
-/** Words for the kinds of machine; the kind decides from which make-up a person starts, nothing else. */
+/** Words for the kinds of machine; the kind decides from which make-up a person starts, and whether it is tested as an engine lathe. */
 export const machineKinds = {
   'turning-centre': 'turning centre with one spindle',
   'turning-centre-sub-spindle': 'turning centre with sub-spindle',
+  'multi-channel-turning-centre': 'turning centre with several slides and channels',
   'sliding-head-lathe': 'sliding-head lathe',
   'engine-lathe': 'engine lathe',
   'turret-lathe': 'turret lathe',
   other: 'other turning machine',
 } as const;
 export type MachineKind = keyof typeof machineKinds;
+
+/** Which way the driven tools of a turret point. */
+export const drivenToolWords = {
+  none: 'none',
+  axial: 'axial',
+  radial: 'radial',
+  both: 'axial and radial',
+} as const;
+export type DrivenTools = keyof typeof drivenToolWords;
 
 /** Sizes are typed with a point or a comma; kept as a decimal string with a point, in mm. */
 const sizeMm = z
@@ -45,6 +55,11 @@ const spindle = z.object({
   channel,
   /** Linear axis that moves it; null where it stands fast. */
   carriedBy: z.string().nullable(),
+  /** Turret or post that a tool spindle rides on; absent in make-ups from before it was asked. */
+  onTurret: z
+    .union([z.literal('').transform(() => null), componentId])
+    .nullable()
+    .optional(),
   maximumSpeedPerMin: z.string().trim().max(8).optional(),
 });
 const turret = z.object({
@@ -55,6 +70,8 @@ const turret = z.object({
   axes: z.array(z.string()),
   /** Work spindles that it can reach, the one it mainly works at first. */
   worksAt: z.array(z.string()).min(1, 'Name the work spindle that it works at.'),
+  /** Absent in make-ups from before it was asked: none. */
+  drivenTools: z.enum(Object.keys(drivenToolWords) as [DrivenTools, ...DrivenTools[]]).optional(),
 });
 const single = z.object({ id: componentId, channel });
 
@@ -77,6 +94,8 @@ export const makeUp = z
     turrets: z.array(turret).min(1, 'At least one turret or tool post.'),
     tailstock: single.nullable(),
     guideBush: single.nullable(),
+    /** Absent in make-ups from before it was asked: none. */
+    toolChanger: single.nullable().optional(),
     distanceBetweenCentresMm: optionalSizeMm,
     swingOverBedMm: optionalSizeMm,
     swingOverCrossSlideMm: optionalSizeMm,

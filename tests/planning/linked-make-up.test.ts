@@ -21,6 +21,7 @@ describe('linkMakeUp', () => {
   it('forgets what was taken out, so that no hidden field can be wrong', () => {
     const form = start(1);
     form.spindles.splice(1, 1);
+    form.rotaryAxes.splice(1, 1);
     form.linearAxes.splice(5, 1);
     form.linearAxes.splice(1, 1);
     form.turrets.splice(1, 1);
