@@ -1,5 +1,9 @@
 import * as archive from '@/app/api/archive/route';
 import * as catalogueCodeTest from '@/app/api/catalogue/[code]/[test]/route';
+import * as catalogueOwnId from '@/app/api/catalogue/own/[id]/route';
+import * as catalogueOwnIdVersions from '@/app/api/catalogue/own/[id]/versions/route';
+import * as catalogueOwnIdWithdrawal from '@/app/api/catalogue/own/[id]/withdrawal/route';
+import * as catalogueOwn from '@/app/api/catalogue/own/route';
 import * as catalogue from '@/app/api/catalogue/route';
 import * as customersId from '@/app/api/customers/[id]/route';
 import * as customers from '@/app/api/customers/route';
@@ -50,6 +54,10 @@ import * as welcome from '@/app/api/welcome/route';
 export const describedRoutes = {
   '/api/archive': archive,
   '/api/catalogue/[code]/[test]': catalogueCodeTest,
+  '/api/catalogue/own/[id]/versions': catalogueOwnIdVersions,
+  '/api/catalogue/own/[id]/withdrawal': catalogueOwnIdWithdrawal,
+  '/api/catalogue/own/[id]': catalogueOwnId,
+  '/api/catalogue/own': catalogueOwn,
   '/api/catalogue': catalogue,
   '/api/customers/[id]': customersId,
   '/api/customers': customers,
