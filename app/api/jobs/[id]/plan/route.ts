@@ -6,7 +6,7 @@ import { notFound } from '@/lib/errors';
 import { route } from '@/lib/http/route';
 import { idParams } from '@/lib/schemas/common';
 import { planForm } from '@/lib/schemas/job';
-import { makePlan, proposalsFor } from '@/lib/services/make-plan';
+import { makePlan, proposalsNow } from '@/lib/services/make-plan';
 
 /** The planned sheets in working order; before the plan is made, the proposals. */
 export const GET = route({
@@ -18,7 +18,7 @@ export const GET = route({
     return {
       body: {
         made: job.planMadeAt !== null,
-        proposals: job.planMadeAt ? [] : proposalsFor(job),
+        proposals: job.planMadeAt ? [] : await proposalsNow(trx, job),
         sheets: await listSheets(trx, params.id),
         exclusions: await listExclusions(trx, params.id),
       },
