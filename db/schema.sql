@@ -353,6 +353,7 @@ CREATE TABLE public.jobs (
     version integer DEFAULT 1 NOT NULL,
     created_by uuid,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
+    component_conditions jsonb DEFAULT '{}'::jsonb NOT NULL,
     refuse_unconfirmed boolean DEFAULT false NOT NULL,
     CONSTRAINT jobs_check CHECK (((ends_on IS NULL) OR (ends_on >= starts_on))),
     CONSTRAINT jobs_decision_rule_check CHECK ((decision_rule = ANY (ARRAY['simple'::text, 'guarded'::text]))),
@@ -531,6 +532,22 @@ CREATE TABLE public.passes (
 
 ALTER TABLE ONLY public.passes FORCE ROW LEVEL SECURITY;
 
+CREATE TABLE public.plan_templates (
+    organisation_id uuid NOT NULL,
+    id uuid NOT NULL,
+    manufacturer text NOT NULL,
+    model text NOT NULL,
+    name text NOT NULL,
+    choices jsonb NOT NULL,
+    from_job_id uuid,
+    account_name text NOT NULL,
+    version integer DEFAULT 1 NOT NULL,
+    created_at timestamp with time zone DEFAULT now() NOT NULL,
+    CONSTRAINT plan_templates_name_check CHECK ((name <> ''::text))
+);
+
+ALTER TABLE ONLY public.plan_templates FORCE ROW LEVEL SECURITY;
+
 CREATE TABLE public.reading_operations (
     organisation_id uuid NOT NULL,
     id uuid NOT NULL,
@@ -675,7 +692,12 @@ CREATE TABLE public.sheets (
     remark text,
     version integer DEFAULT 1 NOT NULL,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
-    CONSTRAINT sheets_left_out_reason_check CHECK ((left_out_reason = ANY (ARRAY['not-applicable'::text, 'not-agreed'::text, 'not-possible'::text, 'not-touched'::text])))
+    own_definition jsonb,
+    set_up_together text,
+    minutes integer,
+    working_step integer,
+    CONSTRAINT sheets_left_out_reason_check CHECK ((left_out_reason = ANY (ARRAY['not-applicable'::text, 'not-agreed'::text, 'not-possible'::text, 'not-touched'::text]))),
+    CONSTRAINT sheets_minutes_check CHECK ((minutes > 0))
 );
 
 ALTER TABLE ONLY public.sheets FORCE ROW LEVEL SECURITY;
@@ -868,6 +890,9 @@ ALTER TABLE ONLY public.passes
 ALTER TABLE ONLY public.passes
     ADD CONSTRAINT passes_pkey PRIMARY KEY (organisation_id, id);
 
+ALTER TABLE ONLY public.plan_templates
+    ADD CONSTRAINT plan_templates_pkey PRIMARY KEY (organisation_id, id);
+
 ALTER TABLE ONLY public.reading_operations
     ADD CONSTRAINT reading_operations_pkey PRIMARY KEY (organisation_id, id);
 
@@ -928,6 +953,8 @@ CREATE INDEX machine_owners_customer ON public.machine_owners USING btree (organ
 CREATE INDEX machines_serial_folded ON public.machines USING btree (organisation_id, serial_folded text_pattern_ops);
 
 CREATE INDEX own_definitions_newest ON public.own_definitions USING btree (organisation_id, definition_id, sequence DESC);
+
+CREATE UNIQUE INDEX plan_templates_name ON public.plan_templates USING btree (organisation_id, lower(manufacturer), lower(model), lower(name));
 
 CREATE INDEX reading_operations_pass ON public.reading_operations USING btree (organisation_id, pass_id, sequence);
 
@@ -1057,6 +1084,12 @@ ALTER TABLE ONLY public.passes
 
 ALTER TABLE ONLY public.passes
     ADD CONSTRAINT passes_organisation_id_sheet_id_fkey FOREIGN KEY (organisation_id, sheet_id) REFERENCES public.sheets(organisation_id, id);
+
+ALTER TABLE ONLY public.plan_templates
+    ADD CONSTRAINT plan_templates_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
+
+ALTER TABLE ONLY public.plan_templates
+    ADD CONSTRAINT plan_templates_organisation_id_from_job_id_fkey FOREIGN KEY (organisation_id, from_job_id) REFERENCES public.jobs(organisation_id, id);
 
 ALTER TABLE ONLY public.reading_operations
     ADD CONSTRAINT reading_operations_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
@@ -1331,6 +1364,16 @@ CREATE POLICY passes_read ON public.passes FOR SELECT USING (((organisation_id =
 
 CREATE POLICY passes_remove ON public.passes FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
+ALTER TABLE public.plan_templates ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY plan_templates_add ON public.plan_templates FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
+
+CREATE POLICY plan_templates_change ON public.plan_templates FOR UPDATE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff))) WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
+CREATE POLICY plan_templates_read ON public.plan_templates FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
+
+CREATE POLICY plan_templates_remove ON public.plan_templates FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
+
 ALTER TABLE public.reading_operations ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY reading_operations_add ON public.reading_operations FOR INSERT WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR false)));
@@ -1533,6 +1576,8 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.pass_instruments TO witnessmar
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.pass_results TO witnessmark_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.passes TO witnessmark_app;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.plan_templates TO witnessmark_app;
 
 GRANT SELECT,INSERT ON TABLE public.reading_operations TO witnessmark_app;
 

@@ -12,7 +12,7 @@ export interface OfferedCode {
   subject: string;
 }
 
-/** Codes and editions, each with what it is about. */
+/** Codes and editions, each with what it is about. Choosing an edition takes out the other one of the same code. */
 export function CodeChoice(props: {
   offered: OfferedCode[];
   chosen: TestCodeChoice;
@@ -34,7 +34,11 @@ export function CodeChoice(props: {
             hint={subject}
             checked={chosen.some((one) => sameCode(one, mine))}
             onChange={(event) =>
-              onChoose(event.target.checked ? [...chosen, mine] : chosen.filter((one) => !sameCode(one, mine)))
+              onChoose(
+                event.target.checked
+                  ? [...chosen.filter((one) => one.code !== code), mine]
+                  : chosen.filter((one) => !sameCode(one, mine)),
+              )
             }
           />
         );

@@ -10,6 +10,7 @@ import { useApiForm } from '@/components/forms/use-api-form';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { api } from '@/lib/http/api-client';
+import { newestEditions } from '@/lib/planning/newest-editions';
 import { type TestCodeChoice, testCodes } from '@/lib/schemas/test-codes';
 
 /** The codes that a new job is proposed with. Tolerances of the catalogue are a start, to be confirmed; it says so here. */
@@ -25,7 +26,7 @@ export function CodesForm(props: {
   const [kept, setKept] = useState(false);
   const { form, submit, problem, sending, errorAt } = useApiForm({
     schema: z.object({ codes: testCodes }),
-    defaultValues: { codes: chosen ?? offered.map(({ code, edition }) => ({ code, edition })) },
+    defaultValues: { codes: chosen ?? newestEditions(offered).map(({ code, edition }) => ({ code, edition })) },
     send: (values) => {
       setKept(false);
       return api<{ version: number }>('/api/organisation', { method: 'PATCH', body: values, version });

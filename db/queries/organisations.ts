@@ -11,7 +11,7 @@ export interface Organisation {
   timeZone: string;
   paper: 'A4' | 'Letter';
   setUpDone: boolean;
-  /** What a new job is proposed with; null: every code of the catalogue. */
+  /** What a new job is proposed with; null: the newest edition of every code of the catalogue. */
   codes: TestCodeChoice | null;
   /** Values of tolerances wait for a second person. */
   fourEyes: boolean;

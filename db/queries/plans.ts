@@ -37,6 +37,10 @@ export async function insertPlan(
       tolerance: sheet.tolerance && JSON.stringify(sheet.tolerance),
       direction: sheet.direction,
       set_up: JSON.stringify(sheet.setUp),
+      own_definition: sheet.ownDefinition && JSON.stringify(sheet.ownDefinition),
+      set_up_together: sheet.setUpTogether,
+      minutes: sheet.minutes,
+      working_step: sheet.workingStep,
     });
     await insertPass(db, { sheetId: id, kind: 'as-found', number: 1, linkedTo: null, setUp: sheet.setUp });
   }

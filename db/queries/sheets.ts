@@ -1,6 +1,13 @@
 import type { Db } from '@/db/client';
 import type { LeftOutReason } from '@/lib/schemas/job';
-import type { BoundComponent, CellDefault, DependsOn, Direction, PlannedTolerance } from '@/standards/types';
+import type {
+  BoundComponent,
+  CellDefault,
+  DependsOn,
+  Direction,
+  PlannedTolerance,
+  TestDefinition,
+} from '@/standards/types';
 
 export interface SheetRow {
   id: string;
@@ -14,6 +21,12 @@ export interface SheetRow {
   tolerance: PlannedTolerance | null;
   direction: Direction;
   setUp: Record<string, CellDefault>;
+  /** The organisation's own definition, whole; null: one of the catalogue. */
+  ownDefinition: TestDefinition | null;
+  setUpTogether: string | null;
+  /** null, as the step: planned before these were kept. */
+  minutes: number | null;
+  workingStep: number | null;
   leftOutReason: LeftOutReason | null;
   leftOutText: string | null;
   leftOutBy: string | null;
@@ -34,6 +47,10 @@ export const sheetColumns = {
   tolerance: 'sheets.tolerance',
   direction: 'sheets.direction',
   setUp: 'sheets.set_up',
+  ownDefinition: 'sheets.own_definition',
+  setUpTogether: 'sheets.set_up_together',
+  minutes: 'sheets.minutes',
+  workingStep: 'sheets.working_step',
   leftOutReason: 'sheets.left_out_reason',
   leftOutText: 'sheets.left_out_text',
   leftOutBy: 'sheets.left_out_by',

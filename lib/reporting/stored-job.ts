@@ -3,7 +3,7 @@ import type { LeftOutReason, Purpose } from '@/lib/schemas/job';
 import type { MakeUp } from '@/lib/schemas/make-up';
 import type { SheetOutcome, Verdict } from '@/lib/sheet/types';
 import type { Unit } from '@/lib/units/unit';
-import type { BoundComponent, Direction, PlannedTolerance } from '@/standards/types';
+import type { BoundComponent, Direction, PlannedTolerance, TestDefinition } from '@/standards/types';
 
 /** A job as it is stored, in the shape that check and report are made from; read models satisfy it. */
 export interface StoredJob {
@@ -35,6 +35,7 @@ export interface StoredSheet {
   position: number;
   key: string;
   definition: { id: string; code: string; edition: string; version: number };
+  ownDefinition?: TestDefinition | null;
   title: string;
   component: BoundComponent;
   tolerance: PlannedTolerance | null;

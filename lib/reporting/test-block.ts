@@ -44,7 +44,7 @@ export function testBlock(
   stored: StoredJob,
   context: { timeZone: string; changes: CellChangeText[] },
 ): TestBlock {
-  const definition = definitionOf(sheet.definition);
+  const definition = definitionOf(sheet.definition, sheet.ownDefinition);
   const used = new Set(sheet.passes.flatMap((pass) => pass.instruments.map((entry) => entry.instrumentId)));
   return {
     order: sheet.position,

@@ -33,7 +33,7 @@ export async function judgePass(
 ): Promise<SheetOutcome> {
   const readings = await listReadings(db, [passId]);
   const cells: Cells = Object.fromEntries(readings.map((row) => [row.pointer, { text: row.text, unit: row.unit }]));
-  const outcome = judgeSheet(rulesOf(sheet, decisionRule), definitionOf(sheet.definition), cells);
+  const outcome = judgeSheet(rulesOf(sheet, decisionRule), definitionOf(sheet.definition, sheet.ownDefinition), cells);
   await keepResult(db, passId, outcome);
   return outcome;
 }

@@ -5,6 +5,7 @@ import { ownOrganisation } from '@/db/queries/organisations';
 import { currentOwnDefinitions } from '@/db/queries/own-definitions';
 import type { Viewer } from '@/lib/auth/viewer';
 import { invalid } from '@/lib/errors';
+import { newestEditions } from '@/lib/planning/newest-editions';
 import { offeredCodes } from '@/lib/planning/offered-codes';
 import type { JobForm } from '@/lib/schemas/job';
 import type { MakeUp } from '@/lib/schemas/make-up';
@@ -36,11 +37,11 @@ export async function openJob(db: Db, viewer: Viewer, form: JobForm): Promise<st
   return id;
 }
 
-/** The codes that were chosen, or all; each must be in the catalogue. Own tests are taken also while there are none. */
+/** The codes that were chosen, or the newest edition of each; each must be in the catalogue. Own tests are taken also while there are none. */
 function jobCodes(chosen: TestCodeChoice | null, hasOwnTests: boolean): TestCodeChoice {
   const asChoice = (offered: ReturnType<typeof offeredCodes>) =>
     offered.map(({ code, edition }) => ({ code, edition }));
-  const wanted = chosen ?? asChoice(offeredCodes(hasOwnTests));
+  const wanted = chosen ?? asChoice(newestEditions(offeredCodes(hasOwnTests)));
   const unknown = wanted.filter((one) => !asChoice(offeredCodes(true)).some((other) => sameCode(one, other)));
   if (unknown.length > 0) {
     const names = unknown.map(({ code, edition }) => codeTitle(code, edition)).join(', ');

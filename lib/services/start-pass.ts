@@ -38,7 +38,7 @@ export async function startPass(
 async function carriedSetUp(db: Db, sheet: SheetRow, passId: string): Promise<Record<string, CellDefault>> {
   const readings = await listReadings(db, [passId]);
   const cells: Cells = Object.fromEntries(readings.map((row) => [row.pointer, { text: row.text, unit: row.unit }]));
-  const fields = sheetFields(definitionOf(sheet.definition), cells);
+  const fields = sheetFields(definitionOf(sheet.definition, sheet.ownDefinition), cells);
   const taken = new Set(fields.order);
   return Object.fromEntries(Object.entries(cells).filter(([pointer, cell]) => !taken.has(pointer) && cell.text !== ''));
 }

@@ -2,6 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { GET as getPlan } from '@/app/api/jobs/[id]/plan/route';
 import { POST as postJob } from '@/app/api/jobs/route';
 import { PATCH as changeOrganisation, GET as getOrganisation } from '@/app/api/organisation/route';
+import { newestEditions } from '@/lib/planning/newest-editions';
 import { codes } from '@/standards/registry';
 import { ifMatch } from '@/tests/helpers/call-route';
 import { Workshop } from './workshop';
@@ -13,7 +14,7 @@ beforeAll(async () => {
 afterAll(() => workshop?.close());
 
 const geometric = { code: 'ISO 13041-1', edition: '2020' };
-const all = codes().map(({ code, edition }) => ({ code, edition }));
+const all = newestEditions(codes()).map(({ code, edition }) => ({ code, edition }));
 let number = 0;
 
 function open(chosen?: object) {
@@ -40,7 +41,7 @@ const codesOf = async (jobId: string) => {
 };
 
 describe('codes and editions of a job', () => {
-  it('are those of the catalogue while nobody has chosen', async () => {
+  it('are the newest edition of each code of the catalogue while nobody has chosen', async () => {
     const { body } = await open();
     expect(await codesOf(body.id)).toEqual(all.map(({ code, edition }) => `${code}:${edition}`).sort());
   });
@@ -54,6 +55,12 @@ describe('codes and editions of a job', () => {
     const unknown = await open([{ code: 'ISO 13041-1', edition: '1887' }]);
     expect([unknown.status, unknown.body.errors[0].pointer]).toEqual([422, '/codes']);
     expect((await open([])).status).toBe(422);
+    const twice = await open([geometric, { ...geometric, edition: '2004' }]);
+    expect([twice.status, twice.body.errors[0].pointer, twice.body.errors[0].detail]).toEqual([
+      422,
+      '/codes',
+      'ISO 13041-1 is chosen twice, 2020 and 2004. Choose one edition of each code.',
+    ]);
   });
 
   it('come from the organisation’s own choice; a job keeps what it began with', async () => {

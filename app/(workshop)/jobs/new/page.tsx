@@ -14,6 +14,7 @@ import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
 import type { Viewer } from '@/lib/auth/viewer';
 import { todayIn } from '@/lib/dates';
+import { newestEditions } from '@/lib/planning/newest-editions';
 import { offeredCodes } from '@/lib/planning/offered-codes';
 import { id as isId } from '@/lib/schemas/common';
 import type { TestCodeChoice } from '@/lib/schemas/test-codes';
@@ -78,7 +79,7 @@ function formData(
     lastReference,
     offeredCodes: offered,
     defaults: {
-      codes: organisationCodes ?? offered.map(({ code, edition }) => ({ code, edition })),
+      codes: organisationCodes ?? newestEditions(offered).map(({ code, edition }) => ({ code, edition })),
       machineId: machine.id,
       customerId,
       reference: '',

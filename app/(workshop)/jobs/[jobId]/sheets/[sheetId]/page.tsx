@@ -10,10 +10,11 @@ import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
 import type { Viewer } from '@/lib/auth/viewer';
 import { componentWords } from '@/lib/planning/component-words';
+import { definitionOf } from '@/lib/planning/definition-of';
 import { id as isId } from '@/lib/schemas/common';
 import { closedBecause, rulesOf } from '@/lib/services/keep-readings';
 import { cautionText } from '@/standards/cautions';
-import { codeTitle, findDefinition } from '@/standards/registry';
+import { codeTitle } from '@/standards/registry';
 
 type Params = { params: Promise<{ jobId: string; sheetId: string }> };
 
@@ -43,10 +44,8 @@ export default async function SheetPage({ params }: Params) {
 /** Plain data: from here on the entry screen needs no further rendering by the server. */
 function sheetData(viewer: Viewer, view: SheetView, around: SheetSurroundings): SheetData {
   const { sheet, job, machine } = view;
-  const { id, code, edition, version } = sheet.definition;
-  const definition = findDefinition(id, code, edition, version);
-  if (!definition)
-    throw new Error(`Definition ${id} of ${code} ${edition}, version ${version}, is not in the catalogue`);
+  const { code, edition } = sheet.definition;
+  const definition = definitionOf(sheet.definition, sheet.ownDefinition);
   return {
     sheet: {
       id: sheet.id,
