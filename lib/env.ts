@@ -18,6 +18,8 @@ const rules = {
   S3_SECRET_ACCESS_KEY: z.string().min(1),
   S3_REGION: z.string().min(1).default('eu-central-1'),
   SMTP_URL: z.url({ protocol: /^smtps?$/ }),
+  /** Longest time that one large evaluation may be computed. */
+  EVALUATION_TIME_LIMIT_MS: z.coerce.number().int().min(1).max(600_000).default(10_000),
   MAIL_FROM: z.string().min(3).default('Witnessmark <no-reply@witnessmark.example>'),
 };
 

@@ -1,6 +1,6 @@
-import { type ChildProcess, fork } from 'node:child_process';
 import path from 'node:path';
 import type { RenderAnswer, RenderRequest, ReportToDraw } from './render-child';
+import { WarmProcess } from './warm-process';
 
 export type RenderPoolLimits = {
   /** A process is replaced after this many documents, or when it holds more memory than this. */
@@ -18,44 +18,27 @@ export const defaultRenderLimits: RenderPoolLimits = {
   startTimeoutMs: 60_000,
 };
 
-type Warm = { child: ChildProcess; renders: number; rssBytes: number };
-
-/** Waits for the next answer of the process; its death or the time limit are errors. */
-function nextAnswer(child: ChildProcess, timeoutMs: number, what: string): Promise<RenderAnswer> {
-  return new Promise((resolve, reject) => {
-    const finish = (act: () => void) => {
-      clearTimeout(timer);
-      child.off('message', onMessage).off('exit', onExit).off('error', onError);
-      act();
-    };
-    const onMessage = (message: unknown) => finish(() => resolve(message as RenderAnswer));
-    const onExit = (code: number | null, signal: string | null) =>
-      finish(() => reject(new Error(`The drawing process ended (${signal ?? code}) while ${what}.`)));
-    const onError = (error: Error) => finish(() => reject(error));
-    const timer = setTimeout(
-      () => finish(() => reject(new Error(`The drawing process took more than ${timeoutMs / 1000} s while ${what}.`))),
-      timeoutMs,
-    );
-    child.on('message', onMessage).on('exit', onExit).on('error', onError);
-  });
-}
-
 /** One warm drawing process, one document at a time, replaced before it grows old and after it failed. */
 export class RenderPool {
-  private child: ChildProcess | undefined;
-  private warm: Promise<Warm> | undefined;
+  private readonly process: WarmProcess<RenderRequest, RenderAnswer>;
   private last: Promise<unknown> = Promise.resolve();
   private nextId = 1;
 
   constructor(
-    private readonly childModule: string = path.join(import.meta.dirname, 'render-child.ts'),
+    childModule: string = path.join(import.meta.dirname, 'render-child.ts'),
     private readonly limits: RenderPoolLimits = defaultRenderLimits,
-  ) {}
+  ) {
+    const { maxRenders, maxRssBytes, startTimeoutMs } = limits;
+    this.process = new WarmProcess(childModule, 'The drawing process', {
+      maxRequests: maxRenders,
+      maxRssBytes,
+      startTimeoutMs,
+    });
+  }
 
   /** Starts the process ahead of the first document. */
   warmUp(): void {
-    this.warm ??= this.start();
-    this.warm.catch(() => undefined);
+    this.process.warmUp();
   }
 
   /** Draws one document; a second try in a fresh process after a failure, then the error. */
@@ -68,50 +51,15 @@ export class RenderPool {
   /** Waits for the drawing in hand and ends the process. */
   async close(): Promise<void> {
     await this.last;
-    this.retire();
-  }
-
-  private async start(): Promise<Warm> {
-    const child = fork(this.childModule, { execArgv: ['--import', 'tsx'], serialization: 'advanced' });
-    this.child = child;
-    try {
-      await nextAnswer(child, this.limits.startTimeoutMs, 'starting');
-      return { child, renders: 0, rssBytes: 0 };
-    } catch (error) {
-      child.kill('SIGKILL');
-      throw error;
-    }
-  }
-
-  /** Also ends a process that is still starting. */
-  private retire(): void {
-    this.child?.kill('SIGKILL');
-    this.child = undefined;
-    this.warm = undefined;
+    this.process.end();
   }
 
   private async attempt(model: unknown): Promise<Buffer> {
-    try {
-      this.warmUp();
-      const warm = (await this.warm)!;
-      const request: RenderRequest = { id: this.nextId++, model };
-      const answered = nextAnswer(warm.child, this.limits.renderTimeoutMs, 'drawing');
-      warm.child.send(request);
-      const answer = await answered;
-      if (answer.kind !== 'done') throw new Error(answer.kind === 'failed' ? answer.message : 'Unexpected answer.');
-      this.recycle(warm, answer.rssBytes);
-      return Buffer.from(answer.pdf);
-    } catch (error) {
-      this.retire();
-      throw error;
-    }
-  }
-
-  private recycle(warm: Warm, rssBytes: number): void {
-    warm.renders += 1;
-    if (warm.renders < this.limits.maxRenders && rssBytes <= this.limits.maxRssBytes) return;
-    this.retire();
-    this.warmUp();
+    const answer = await this.process.ask({ id: this.nextId++, model }, this.limits.renderTimeoutMs, 'drawing');
+    if (answer.kind === 'done') return Buffer.from(answer.pdf);
+    // A failed drawing may have left the process in a state that fails the next one too.
+    this.process.end();
+    throw new Error(answer.kind === 'failed' ? answer.message : 'Unexpected answer.');
   }
 }
 

@@ -45,7 +45,17 @@ export const rooms: Room[] = [
   { path: 'lib/seal', uses: leaves, packages: any },
   {
     path: 'lib/queue',
-    uses: ['db', 'lib/services', 'lib/storage', 'lib/mail', 'lib/seal', 'lib/reporting', 'templates', ...leaves],
+    uses: [
+      'db',
+      'lib/services',
+      'lib/storage',
+      'lib/mail',
+      'lib/seal',
+      'lib/reporting',
+      'lib/evaluation/index.ts',
+      'templates',
+      ...leaves,
+    ],
     packages: /^(graphile-worker|pg|zod|node:.*)$/,
   },
   { path: 'lib', uses: ['lib/reporting/format-time.ts', 'package.json'], packages: /^(zod|uuid)$/ },
