@@ -102,6 +102,13 @@ export function JobForm({ data }: { data: JobFormData }) {
           error={errorAt('codes')}
         />
       </div>
+      <div className="sm:col-span-2">
+        <Checkbox
+          label="Take confirmed tolerances only"
+          hint="The plan refuses a test whose tolerance is neither confirmed by you nor given by the contract."
+          {...register('refuseUnconfirmed')}
+        />
+      </div>
       <People members={members} form={form} hint={takenOver.people} />
       <div className="grid gap-4 sm:col-span-2">
         {errorAt('machineId') && <FieldErrorLine>{errorAt('machineId')}</FieldErrorLine>}

@@ -16,6 +16,8 @@ export interface ProposedTest {
   foundBy: string | null;
   provenance: string | null;
   unconfirmed: boolean;
+  /** The job takes confirmed tolerances only, and this one is not. */
+  refused: boolean;
 }
 
 export interface TestChoice {
@@ -43,9 +45,12 @@ export function chooseFor(choices: PlanChoices, keys: string[], change: Partial<
 
 export interface PlanProblem {
   key: string;
-  field: 'reason' | 'tolerance' | 'source';
+  field: 'reason' | 'tolerance' | 'source' | 'unconfirmed';
   message: string;
 }
+
+const refusedWords =
+  'its tolerance is not confirmed, and this job takes confirmed ones only. Confirm it in the catalogue, give the contract’s, or leave the test out.';
 
 /** The form that is sent, and what is still wrong with it; both in the order of the proposals. Pure. */
 export function planOf(
@@ -54,7 +59,7 @@ export function planOf(
 ): { form: z.input<typeof planForm>; problems: PlanProblem[] } {
   const form: Required<z.input<typeof planForm>> = { include: [], exclusions: [], contractTolerances: [] };
   const problems: PlanProblem[] = [];
-  for (const { key } of tests) {
+  for (const { key, refused } of tests) {
     const choice = choices[key];
     if (!choice) continue;
     if (!choice.taken) {
@@ -63,7 +68,10 @@ export function planOf(
       continue;
     }
     form.include.push(key);
-    if (!choice.contract) continue;
+    if (!choice.contract) {
+      if (refused) problems.push({ key, field: 'unconfirmed', message: refusedWords });
+      continue;
+    }
     const toleranceUm = micrometres(choice.contract.tolerance);
     if ('problem' in toleranceUm) problems.push({ key, field: 'tolerance', message: toleranceUm.problem });
     if (choice.contract.source.trim() === '') {

@@ -31,6 +31,9 @@ export function PlanTest(props: {
               {test.foundBy} · <span className={test.unconfirmed ? 'text-brass' : ''}>{test.provenance}</span>
             </p>
           )}
+          {!contract && test.refused && (
+            <p className="font-medium text-brass">Not confirmed: this job takes confirmed tolerances only.</p>
+          )}
           {contract ? (
             <div className="mt-2 grid gap-2 text-base text-ink sm:grid-cols-[8rem_1fr]">
               <Field label="By contract, µm" error={problem('tolerance')}>
@@ -59,6 +62,7 @@ export function PlanTest(props: {
           ) : (
             <button
               type="button"
+              data-place={`unconfirmed ${test.key}`}
               className="min-h-9 text-blue underline"
               onClick={() => onChange({ contract: { tolerance: '', source: '' } })}
             >

@@ -9,3 +9,10 @@ const settled = ({ confirmation, provenance }: Figure) => confirmation !== undef
  */
 export const isSettled = (tolerance: PlannedTolerance | null): boolean =>
   tolerance === null || (settled(tolerance) && (tolerance.also ?? []).every(settled));
+
+/** `confirmed by R. Tamm on 2026-03-10`; null where nobody has. */
+export function confirmationWords({ confirmation }: Pick<PlannedTolerance, 'confirmation'>): string | null {
+  if (!confirmation) return null;
+  const { state, by, on, secondBy } = confirmation;
+  return `${state} by ${by}${secondBy ? ` and ${secondBy}` : ''} on ${on}`;
+}

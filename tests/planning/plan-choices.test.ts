@@ -13,6 +13,7 @@ const test = (key: string, components: string[]): ProposedTest => ({
   foundBy: null,
   provenance: null,
   unconfirmed: false,
+  refused: false,
 });
 const tests = [test('SP-1a:S1', ['S1']), test('SP-1b:S2', ['S2']), test('TU-3:T2:S2', ['T2', 'S2'])];
 
@@ -64,4 +65,15 @@ it('a line of the path names only the components that its title does not', () =>
   expect(componentIds({ turret: 'T1', axis: 'Z1', spindle: 'S1' }, 'Two-collar cutting test, turret T1')).toBe(
     'Z1 · S1',
   );
+});
+
+it('a tolerance that is not confirmed stops a plan that wants it so, until the contract gives one or the test is left out', () => {
+  const [one, other] = [test('SP-1a:S1', ['S1']), { ...test('SP-2a:S1', ['S1']), refused: true }];
+  const problems = (change: Partial<ReturnType<typeof allTaken>[string]>) =>
+    planOf([one, other], chooseFor(allTaken([one, other]), [other.key], change)).problems;
+  expect(problems({})).toEqual([
+    { key: other.key, field: 'unconfirmed', message: expect.stringMatching(/not confirmed/) },
+  ]);
+  expect(problems({ contract: { tolerance: '8', source: 'order 7714' } })).toEqual([]);
+  expect(problems({ taken: false, reason: 'not-agreed' })).toEqual([]);
 });

@@ -1,10 +1,12 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { CodesForm } from '@/components/organisation/codes-form';
+import { ConfirmationForm } from '@/components/organisation/confirmation-form';
 import { OrganisationForm } from '@/components/organisation/organisation-form';
 import { PageTitle, SectionTitle } from '@/components/ui/page-title';
 import { inScope } from '@/db/client';
 import { ownOrganisation } from '@/db/queries/organisations';
+import { currentOwnDefinitions } from '@/db/queries/own-definitions';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
 import { offeredCodes } from '@/lib/planning/offered-codes';
@@ -15,7 +17,10 @@ export const metadata: Metadata = { title: 'Letterhead and defaults' };
 export default async function SettingsPage() {
   const viewer = await requireViewer();
   if (!can(viewer.roles, 'organisation.change')) notFound();
-  const organisation = await inScope(scopeOf(viewer), ownOrganisation);
+  const { organisation, hasOwnTests } = await inScope(scopeOf(viewer), async (trx) => ({
+    organisation: await ownOrganisation(trx),
+    hasOwnTests: (await currentOwnDefinitions(trx)).length > 0,
+  }));
   return (
     <>
       <PageTitle note="Every report that is issued from now on carries it">Letterhead and defaults</PageTitle>
@@ -23,10 +28,12 @@ export default async function SettingsPage() {
       <SectionTitle>Test codes of a new job</SectionTitle>
       <CodesForm
         key={`codes ${organisation.version}`}
-        offered={offeredCodes()}
+        offered={offeredCodes(hasOwnTests)}
         chosen={organisation.codes}
         version={organisation.version}
       />
+      <SectionTitle>Confirmation of tolerances</SectionTitle>
+      <ConfirmationForm key={`confirmation ${organisation.version}`} organisation={organisation} />
     </>
   );
 }

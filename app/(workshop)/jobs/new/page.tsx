@@ -7,7 +7,8 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { Nameplate } from '@/components/ui/nameplate';
 import { PageTitle } from '@/components/ui/page-title';
 import { inScope } from '@/db/client';
-import { ownOrganisation } from '@/db/queries/organisations';
+import { type Organisation, ownOrganisation } from '@/db/queries/organisations';
+import { currentOwnDefinitions } from '@/db/queries/own-definitions';
 import { machineList } from '@/db/read-models/machine-list';
 import { type NewJobView, newJobView } from '@/db/read-models/new-job';
 import { can } from '@/lib/auth/permissions';
@@ -17,7 +18,6 @@ import { todayIn } from '@/lib/dates';
 import { newestEditions } from '@/lib/planning/newest-editions';
 import { offeredCodes } from '@/lib/planning/offered-codes';
 import { id as isId } from '@/lib/schemas/common';
-import type { TestCodeChoice } from '@/lib/schemas/test-codes';
 
 export const metadata: Metadata = { title: 'Open a job' };
 
@@ -26,10 +26,11 @@ export default async function NewJobPage({ searchParams }: { searchParams: Promi
   if (!can(viewer.roles, 'job.manage')) notFound();
   const { machine: asked } = await searchParams;
   const machineId = isId.safeParse(asked).success ? asked! : null;
-  const { view, machines, organisationCodes } = await inScope(scopeOf(viewer), async (trx) => {
+  const { view, machines, organisation, hasOwnTests } = await inScope(scopeOf(viewer), async (trx) => {
     const found = await newJobView(trx, machineId);
     return {
-      organisationCodes: (await ownOrganisation(trx)).codes,
+      organisation: await ownOrganisation(trx),
+      hasOwnTests: (await currentOwnDefinitions(trx)).length > 0,
       view: found,
       machines: found.machine ? [] : (await machineList(trx, { limit: 200 })).items,
     };
@@ -50,7 +51,7 @@ export default async function NewJobPage({ searchParams }: { searchParams: Promi
       <div className="mt-5">
         <PageTitle>Open a job on this machine</PageTitle>
       </div>
-      <JobForm data={formData(viewer, view, machine, organisationCodes)} />
+      <JobForm data={formData(viewer, view, machine, organisation, offeredCodes(hasOwnTests))} />
     </>
   );
 }
@@ -60,9 +61,9 @@ function formData(
   viewer: Viewer,
   view: NewJobView,
   machine: NonNullable<NewJobView['machine']>,
-  organisationCodes: TestCodeChoice | null,
+  organisation: Organisation,
+  offered: ReturnType<typeof offeredCodes>,
 ): JobFormData {
-  const offered = offeredCodes();
   const { lastJob, customers, members, lastReference } = view;
   const from = lastJob ? `From the last job here, ${lastJob.reference}` : undefined;
   const still = new Set(members.map(({ id }) => id));
@@ -79,7 +80,8 @@ function formData(
     lastReference,
     offeredCodes: offered,
     defaults: {
-      codes: organisationCodes ?? newestEditions(offered).map(({ code, edition }) => ({ code, edition })),
+      codes: organisation.codes ?? newestEditions(offered).map(({ code, edition }) => ({ code, edition })),
+      refuseUnconfirmed: organisation.refuseUnconfirmed,
       machineId: machine.id,
       customerId,
       reference: '',

@@ -8,15 +8,16 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { Nameplate } from '@/components/ui/nameplate';
 import { PageTitle } from '@/components/ui/page-title';
 import { inScope } from '@/db/client';
-import { findJob, type JobRow } from '@/db/queries/jobs';
+import { findJob } from '@/db/queries/jobs';
 import { machineHead } from '@/db/read-models/sheet-view';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
 import { groupProposals } from '@/lib/planning/group-proposals';
+import { confirmationWords, isSettled } from '@/lib/planning/is-settled';
 import { provenanceWords } from '@/lib/reporting/record-words';
 import { id as isId } from '@/lib/schemas/common';
 import { purposes } from '@/lib/schemas/job';
-import { proposalsFor } from '@/lib/services/make-plan';
+import { proposalsNow } from '@/lib/services/make-plan';
 import { codeTitle } from '@/standards/registry';
 import type { PlannedSheet } from '@/standards/types';
 
@@ -28,13 +29,13 @@ export default async function PlanPage({ params }: { params: Promise<{ jobId: st
   if (!can(viewer.roles, 'job.manage') || !isId.safeParse(jobId).success) notFound();
   const found = await inScope(scopeOf(viewer), async (trx) => {
     const job = await findJob(trx, jobId);
-    return job && { job, machine: await machineHead(trx, job.machineId) };
+    return job && { job, machine: await machineHead(trx, job.machineId), proposals: await proposalsNow(trx, job) };
   });
   if (!found?.machine) notFound();
-  const { job, machine } = found;
+  const { job, machine, proposals } = found;
   // Once made, the plan stands on the board; single tests are left out on their sheets.
   if (job.planMadeAt) redirect(`/jobs/${jobId}`);
-  const tests = proposedTests(job);
+  const tests = proposedTests(proposals, job.refuseUnconfirmed);
   return (
     <>
       <Nameplate
@@ -64,10 +65,12 @@ export default async function PlanPage({ params }: { params: Promise<{ jobId: st
   );
 }
 
-const proposedTests = (job: JobRow): ProposedTest[] =>
-  groupProposals(proposalsFor(job)).flatMap(({ title, sheets }) => sheets.map((sheet) => proposedTest(title, sheet)));
+const proposedTests = (proposals: PlannedSheet[], refuseUnconfirmed: boolean): ProposedTest[] =>
+  groupProposals(proposals).flatMap(({ title, sheets }) =>
+    sheets.map((sheet) => proposedTest(title, sheet, refuseUnconfirmed)),
+  );
 
-function proposedTest(group: string, sheet: PlannedSheet): ProposedTest {
+function proposedTest(group: string, sheet: PlannedSheet, refuseUnconfirmed: boolean): ProposedTest {
   const { turret, axis, spindle, reference, tailstock } = sheet.component;
   const { tolerance } = sheet;
   return {
@@ -78,7 +81,8 @@ function proposedTest(group: string, sheet: PlannedSheet): ProposedTest {
     code: `${codeTitle(sheet.definition.code, sheet.definition.edition)} · ${sheet.definition.id}`,
     tolerance: toleranceWords(tolerance, sheet.direction),
     foundBy: tolerance?.foundBy ?? null,
-    provenance: tolerance && provenanceWords[tolerance.provenance.kind],
-    unconfirmed: tolerance?.provenance.kind === 'from-memory',
+    provenance: tolerance && (confirmationWords(tolerance) ?? provenanceWords[tolerance.provenance.kind]),
+    unconfirmed: tolerance?.provenance.kind === 'from-memory' && !tolerance.confirmation,
+    refused: refuseUnconfirmed && !isSettled(tolerance),
   };
 }
