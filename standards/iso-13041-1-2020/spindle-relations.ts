@@ -1,11 +1,7 @@
 import type { TestDefinition } from '../types';
 import { workingSteps } from '../working-order';
-import { code, edition, source } from './source';
+import { base, halfMicrometre, sagNote } from './parts';
 import { coaxiality, toolHoleHeight } from './tolerances';
-
-const base = { code, edition, version: 1, source };
-const sagNote =
-  'Write the sag of the bracket: zero it on top of a stiff bar, turn it to the bottom; the sag is half of what it then shows, without its minus.';
 
 export const spindleCoaxiality: TestDefinition = {
   ...base,
@@ -26,7 +22,7 @@ export const spindleCoaxiality: TestDefinition = {
   layout: { kind: 'swept-sections', positionsMm: ['20', '100'], surface: 'outside' },
   tolerance: coaxiality,
   direction: 'either',
-  resolution: { valueUm: '0.5', rule: 'half-even' },
+  resolution: halfMicrometre,
   instruments: ['indicator', 'indicator bracket', 'test mandrel'],
   cautions: [
     'isolate-before-touching',
@@ -39,6 +35,13 @@ export const spindleCoaxiality: TestDefinition = {
   dependsOn: { components: ['reference', 'spindle'], moved: [], positioned: ['spindle-axis'] },
   workingStep: workingSteps['sub-spindle-coaxiality'],
   judgedFigure: 'largest offset of the axes, both planes together',
+  usualMistakes: [
+    'Leaving the sag of the bracket out, which shows as an offset in height.',
+    'Comparing the total reading with a tolerance that is meant for the offset, or the other way round.',
+    'Sweeping at another place of the sub-spindle than the one at which it takes the part over.',
+  ],
+  setUpTogether: 'test mandrel in {spindle}',
+  minutes: 35,
 };
 
 export const toolHole: TestDefinition = {
@@ -79,4 +82,11 @@ export const toolHole: TestDefinition = {
   judgedFigure: 'height of the tool hole over the spindle axis; the offset in X is for information',
   positiveMeans: 'tool hole above the spindle axis',
   negativeMeans: 'tool hole below the spindle axis',
+  usualMistakes: [
+    'Sweeping before the turret is clamped, or with the clamping pressure off.',
+    'Taking the offset in X for the error: references take it up, the height does not change by them.',
+    'Forgetting the sag of a long bracket.',
+  ],
+  setUpTogether: 'indicator on {spindle}',
+  minutes: 20,
 };

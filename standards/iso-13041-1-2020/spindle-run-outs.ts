@@ -1,32 +1,21 @@
-import type { CautionId, SketchSpec, TestDefinition, ToleranceRule } from '../types';
+import type { SketchSpec, TestDefinition, ToleranceRule } from '../types';
 import { workingSteps } from '../working-order';
-import { code, edition, source } from './source';
+import { base, closedTurn, eighths, halfMicrometre, handTurned } from './parts';
 import { boreRunOutAt300, boreRunOutAtNose, noseRunOut } from './tolerances';
-
-const handTurned: CautionId[] = [
-  'isolate-before-touching',
-  'turn-spindle-by-hand',
-  'other-channels-at-rest',
-  'maker-and-local-rules-first',
-];
-const eighths = ['0', '45', '90', '135', '180', '225', '270', '315'];
 
 type Which = { spindle: 'main' | 'sub'; id: string };
 
 /** Main and sub-spindle are measured alike; only the id, the spindle and the place in the working order differ. */
 function common(which: Which) {
   return {
+    ...base,
     id: which.id,
-    code,
-    edition,
-    version: 1,
     appliesTo: { kind: 'spindle' as const, types: [which.spindle] },
     method: 'run-out',
     direction: 'either' as const,
-    resolution: { valueUm: '0.5', rule: 'half-even' as const },
+    resolution: halfMicrometre,
     dependsOn: { components: ['spindle' as const], moved: [], positioned: [] },
     workingStep: which.spindle === 'main' ? workingSteps['spindle-run-out'] : workingSteps['sub-spindle-run-out'],
-    source,
   };
 }
 
@@ -43,16 +32,26 @@ export function noseRunOutOf(which: Which): TestDefinition {
       'Read once more when the spindle is back at 0°: this closing reading should agree with the first within a tenth of the tolerance. If not, look for a loose stand or a drift and take the turn again.',
       'The result is the largest less the smallest reading of the turn.',
     ],
-    layout: { kind: 'turns', insertions: 1, anglesDeg: [...eighths, '360'], insertionLabel: 'turn' },
+    layout: { kind: 'turns', insertions: 1, anglesDeg: closedTurn, insertionLabel: 'turn' },
     tolerance: noseRunOut,
     instruments: ['indicator', 'indicator stand'],
     cautions: handTurned,
     sketch: { scene: 'spindle-nose', anglesDeg: ['0', '90', '180', '270'] },
     judgedFigure: 'largest less smallest reading of the turn, taken directly on the nose',
+    usualMistakes: [
+      'A burr or a chip on the centring diameter, which shows as one sharp peak.',
+      'On a cone, setting the stylus square to the spindle axis instead of to the cone.',
+      'A long, soft stand that swings while the spindle is turned.',
+    ],
+    setUpTogether: 'bare nose of {spindle}',
+    minutes: 12,
   };
 }
 
-function boreRunOut(which: Which, place: { words: string; sketch: SketchSpec; tolerance: ToleranceRule; at: string }) {
+function boreRunOut(
+  which: Which,
+  place: { words: string; sketch: SketchSpec; tolerance: ToleranceRule; at: string; minutes: number },
+) {
   return {
     ...common(which),
     title: `Spindle bore: radial run-out ${place.words}`,
@@ -70,6 +69,13 @@ function boreRunOut(which: Which, place: { words: string; sketch: SketchSpec; to
     cautions: ['support-heavy-parts' as const, ...handTurned],
     sketch: place.sketch,
     judgedFigure: 'mean of the total readings of four insertions',
+    usualMistakes: [
+      'Turning the mandrel in the taper without drawing it out and cleaning both again.',
+      'Counting the angles on the mandrel instead of on the spindle, so that its own error does not cancel.',
+      'Drawing the mandrel home differently hard each time.',
+    ],
+    setUpTogether: 'test mandrel in {spindle}',
+    minutes: place.minutes,
   } satisfies TestDefinition;
 }
 
@@ -78,6 +84,7 @@ export function boreRunOutAtNoseOf(which: Which): TestDefinition {
     words: 'at the nose',
     at: 'close to the nose, or directly in the bore where the taper can be reached',
     tolerance: boreRunOutAtNose,
+    minutes: 20,
     sketch: { scene: 'spindle-bore-mandrel', anglesDeg: ['0', '90', '180', '270'], atMm: '0' },
   });
 }
@@ -87,6 +94,7 @@ export function boreRunOutAt300Of(which: Which): TestDefinition {
     words: 'at 300 mm',
     at: '300 mm from the nose; run-out is never worked out for another length, so a shorter mandrel needs a tolerance of its own by contract',
     tolerance: boreRunOutAt300,
+    minutes: 25,
     sketch: { scene: 'spindle-bore-mandrel', anglesDeg: ['0', '90', '180', '270'], atMm: '300' },
   });
 }

@@ -1,0 +1,43 @@
+import type { TestDefinition } from '../types';
+import { workingSteps } from '../working-order';
+import { base, movingSlide } from './parts';
+import { straightness } from './tolerances';
+
+export const zStraightness: TestDefinition = {
+  ...base,
+  id: 'AX-5',
+  title: 'Straightness of Z motion',
+  boundTitle: 'Straightness of the {axis} motion, in {plane}',
+  procedure: [
+    'Set the straightedge up along Z, supported at its stated points, and let it come to the temperature of the machine. Its working face looks along X for the ZX plane, along Y for the YZ plane.',
+    'Fix the indicator to the moving part, plunger square to the straightedge. Level the straightedge roughly so that both ends read alike; what is left drops out with the reference line.',
+    'At the first position set the indicator to zero. Pushing the plunger in counts positive.',
+    'Move along the whole travel, always approaching from the same side, and read at every position. A laser with straightness optics or a taut wire (not for the vertical) may stand in for the straightedge.',
+    'Come back to the first position: the reading must return within a tenth of the tolerance.',
+    'The result is the width about the minimum-zone line. The local limit over any 300 mm must hold too.',
+  ],
+  appliesTo: { kind: 'longitudinal-axis', planes: ['ZX', 'YZ'] },
+  method: 'straightness',
+  layout: {
+    kind: 'profile',
+    positionsMm: ['0', '50', '100', '150', '200', '250', '300', '350', '400', '450', '500'],
+    localLengthMm: '300',
+    reference: 'minimum-zone',
+  },
+  tolerance: straightness,
+  direction: 'either',
+  resolution: { valueUm: '0.1', rule: 'half-even' },
+  instruments: ['indicator', 'indicator stand', 'straightedge'],
+  cautions: movingSlide,
+  sketch: { scene: 'straightedge-along-motion', positiveMeans: '+ plunger pushed in' },
+  dependsOn: { components: ['bed'], moved: ['axis'], positioned: [] },
+  workingStep: workingSteps.straightness,
+  judgedFigure: 'width about the minimum-zone line; also the local width over any 300 mm',
+  usualMistakes: [
+    'Supporting the straightedge at its ends, where it sags most, instead of at its stated points.',
+    'Reading before the straightedge has taken the temperature of the machine.',
+    'Taking positions too far apart, so that a short hump is never met and the local width looks better than it is.',
+  ],
+  setUpTogether: 'straightedge along {axis}',
+  minutes: 35,
+};
