@@ -4,10 +4,11 @@ import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import { mandrelSagCells } from '@/lib/sheet/mandrel-sag-cells';
 import { sheetFields } from '@/lib/sheet/sheet-fields';
 import type { Cells, SheetOutcome, SheetRules } from '@/lib/sheet/types';
-import { allDefinitions, findDefinition } from '@/standards/registry';
+import { findDefinition } from '@/standards/registry';
+import { newestDefinitions } from './data/newest-definitions';
 import { workedMachine } from './data/worked-machine';
 
-const plan = planSheets(workedMachine, allDefinitions());
+const plan = planSheets(workedMachine, newestDefinitions);
 
 function sheet(key: string) {
   const planned = plan.find((one) => one.key === key)!;

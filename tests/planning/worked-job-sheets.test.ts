@@ -4,11 +4,12 @@ import { planSheets } from '@/lib/planning/plan-sheets';
 import { figures } from '@/lib/sheet/figures';
 import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import type { Cells, SheetRules } from '@/lib/sheet/types';
-import { allDefinitions, findDefinition } from '@/standards/registry';
+import { findDefinition } from '@/standards/registry';
+import { newestDefinitions } from './data/newest-definitions';
 import { type WorkedPass, type WorkedSheet, workedSheets } from './data/worked-job';
 import { workedMachine } from './data/worked-machine';
 
-const plan = planSheets(workedMachine, allDefinitions());
+const plan = planSheets(workedMachine, newestDefinitions);
 
 /** The set-up of a pass, taken from its request: everything but the method, the readings and what the definition lays down. */
 function setUpOf(request: Record<string, unknown>): Cells {
