@@ -138,6 +138,8 @@ export type Layout =
       positionsMm: DecimalText[];
       positionName: 'z' | 'radius' | 'along the face' | 'along the slide' | 'y';
       sag: boolean;
+      /** What is turned to the angles, where it is not the spindle. */
+      turned?: 'mandrel' | 'turret' | 'tool spindle';
     }
   /** Straightness: one reading at each position. */
   | {
@@ -311,6 +313,8 @@ export interface TestDefinition {
   testNumberSource?: Provenance;
   /** Kinds of machine (ids of the make-up) for which it is not, or only, meant; absent: every turning machine. */
   machineKinds?: { only?: string[]; not?: string[] };
+  /** Id of the test of the same code that this one stands in for: another way to measure the same thing. A plan needs one of them. */
+  insteadOf?: string;
   title: string;
   /** Title with the component put in: `{axis}`, `{spindle}`, `{reference}`, `{turret}`, `{plane}`; spindles and turrets in words (`sub-spindle S2`). */
   boundTitle: string;
