@@ -1,10 +1,14 @@
 import * as archive from '@/app/api/archive/route';
 import * as catalogueCodeTest from '@/app/api/catalogue/[code]/[test]/route';
+import * as catalogueCodeTestValues from '@/app/api/catalogue/[code]/[test]/values/route';
 import * as catalogueOwnId from '@/app/api/catalogue/own/[id]/route';
 import * as catalogueOwnIdVersions from '@/app/api/catalogue/own/[id]/versions/route';
 import * as catalogueOwnIdWithdrawal from '@/app/api/catalogue/own/[id]/withdrawal/route';
 import * as catalogueOwn from '@/app/api/catalogue/own/route';
 import * as catalogue from '@/app/api/catalogue/route';
+import * as catalogueValuesIdAgreement from '@/app/api/catalogue/values/[id]/agreement/route';
+import * as catalogueValuesImport from '@/app/api/catalogue/values/import/route';
+import * as catalogueValuesCsv from '@/app/api/catalogue/values.csv/route';
 import * as customersId from '@/app/api/customers/[id]/route';
 import * as customers from '@/app/api/customers/route';
 import * as evaluations from '@/app/api/evaluations/route';
@@ -58,6 +62,10 @@ export const describedRoutes = {
   '/api/catalogue/own/[id]/withdrawal': catalogueOwnIdWithdrawal,
   '/api/catalogue/own/[id]': catalogueOwnId,
   '/api/catalogue/own': catalogueOwn,
+  '/api/catalogue/[code]/[test]/values': catalogueCodeTestValues,
+  '/api/catalogue/values/[id]/agreement': catalogueValuesIdAgreement,
+  '/api/catalogue/values/import': catalogueValuesImport,
+  '/api/catalogue/values.csv': catalogueValuesCsv,
   '/api/catalogue': catalogue,
   '/api/customers/[id]': customersId,
   '/api/customers': customers,
