@@ -66,12 +66,8 @@ export const appliesToChoices: Record<AppliesTo['kind'], Choice> = {
   'tool-changer': { label: 'the tool changer', parts: ['toolChanger'] },
 };
 
-/** Parts that may be named in a title, besides the plane. */
-const inTitle = ['axis', 'spindle', 'reference', 'turret', 'plane'] as const;
-
 /** Names that may stand in braces in the title of a sheet. */
-export const titleParts = (kind: AppliesTo['kind']) =>
-  inTitle.filter((part) => appliesToChoices[kind].parts.includes(part));
+export const titleParts = (kind: AppliesTo['kind']): readonly string[] => appliesToChoices[kind].parts;
 
 export interface RestsOn {
   components: string[];

@@ -10,7 +10,8 @@ import { workingSteps } from '@/standards/working-order';
 import { restsOn, titleParts } from './applies-to-words';
 import { composeDefinition } from './compose-definition';
 import { exampleSheet } from './example-sheet';
-import { findMeasurement, type Measurement } from './measurements';
+import type { Measurement } from './measurement';
+import { findMeasurement } from './measurements';
 
 export interface CompositionProblem {
   /** JSON pointer into the composer's fields. */

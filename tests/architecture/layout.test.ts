@@ -27,8 +27,8 @@ it('the top level is the fixed one', () => {
 
 it('names are in kebab case; folders of routes may hold a parameter or a group', () => {
   const name = /^[a-z0-9]+(?:-[a-z0-9]+)*(?:\.[a-z]+)*$/;
-  // A folder of a route may be named as a file is: `openapi.json`.
-  const folder = /^(?:[a-z0-9]+(?:-[a-z0-9]+)*(?:\.json)?|\([a-z-]+\)|\[(?:\.\.\.)?[a-zA-Z]+\])$/;
+  // A folder of a route may be named as a file is: `openapi.json`, `values.csv`.
+  const folder = /^(?:[a-z0-9]+(?:-[a-z0-9]+)*(?:\.(?:json|csv))?|\([a-z-]+\)|\[(?:\.\.\.)?[a-zA-Z]+\])$/;
   const odd = all
     .filter((file) => file.includes('/') && !/^(public|\.ci)\//.test(file))
     .filter((file) => {
