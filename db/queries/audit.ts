@@ -28,6 +28,8 @@ export const auditActions = [
   'job.opened',
   'job.changed',
   'plan.made',
+  'plan-template.kept',
+  'plan-template.removed',
   'sheet.left-out',
   'sheet.photo-added',
   'sheet.photo-removed',
@@ -52,6 +54,7 @@ export type AuditSubject =
   | 'instrument'
   | 'tolerance'
   | 'own-test'
+  | 'plan-template'
   | 'job'
   | 'sheet'
   | 'report'

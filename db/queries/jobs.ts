@@ -1,5 +1,6 @@
 import type { Db } from '@/db/client';
 import { newId } from '@/lib/id';
+import type { ComponentConditions } from '@/lib/schemas/component-conditions';
 import type { Conditions, JobForm } from '@/lib/schemas/job';
 import type { MakeUp } from '@/lib/schemas/make-up';
 
@@ -21,6 +22,8 @@ export interface JobRow {
   place: string | null;
   hours: string | null;
   conditions: Partial<Conditions>;
+  /** What was opened, by component. */
+  componentConditions: ComponentConditions;
   makeUp: MakeUp;
   planMadeAt: Date | null;
   state: 'open' | 'in-check' | 'issued' | 'closed';
@@ -44,6 +47,7 @@ export const jobColumns = {
   place: 'jobs.place',
   hours: 'jobs.hours',
   conditions: 'jobs.conditions',
+  componentConditions: 'jobs.component_conditions',
   makeUp: 'jobs.make_up',
   planMadeAt: 'jobs.plan_made_at',
   state: 'jobs.state',
@@ -108,6 +112,19 @@ export async function updateConditions(db: Db, id: string, version: number, cond
   const changed = await db('jobs')
     .where({ id, version })
     .update({ conditions: JSON.stringify(conditions), version: version + 1 });
+  return changed === 1;
+}
+
+/** Answers false when somebody else changed the job meanwhile. */
+export async function updateComponentConditions(
+  db: Db,
+  id: string,
+  version: number,
+  conditions: ComponentConditions,
+): Promise<boolean> {
+  const changed = await db('jobs')
+    .where({ id, version })
+    .update({ component_conditions: JSON.stringify(conditions), version: version + 1 });
   return changed === 1;
 }
 

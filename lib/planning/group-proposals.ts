@@ -18,3 +18,16 @@ export function groupProposals(proposals: readonly PlannedSheet[]): ProposalGrou
   }
   return [...groups.values()];
 }
+
+/** Neighbours that are set up together, under its words; a sheet that stands alone is a run of its own, without words. */
+export function setUpRuns<T extends { setUpTogether: string | null }>(
+  sheets: readonly T[],
+): { words: string | null; sheets: T[] }[] {
+  const runs: { words: string | null; sheets: T[] }[] = [];
+  for (const sheet of sheets) {
+    const last = runs.at(-1);
+    if (last && last.words === sheet.setUpTogether) last.sheets.push(sheet);
+    else runs.push({ words: sheet.setUpTogether, sheets: [sheet] });
+  }
+  return runs;
+}

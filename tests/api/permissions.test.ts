@@ -16,6 +16,8 @@ import * as machines from '@/app/api/machines/route';
 import * as member from '@/app/api/members/[id]/route';
 import * as members from '@/app/api/members/route';
 import * as organisation from '@/app/api/organisation/route';
+import * as planTemplate from '@/app/api/plan-templates/[id]/route';
+import * as planTemplates from '@/app/api/plan-templates/route';
 import { type Action, can, permissions, type Role, roles } from '@/lib/auth/permissions';
 import { newId } from '@/lib/id';
 import { callRoute } from '@/tests/helpers/call-route';
@@ -101,6 +103,9 @@ const routes: [string, unknown, Action, { method: string; path?: string; body?: 
   ['GET /api/members', members.GET, 'member.list', { method: 'GET' }],
   ['GET /api/members/{id}', member.GET, 'member.list', { method: 'GET', params }],
   ['PATCH /api/members/{id}', member.PATCH, 'member.manage', { method: 'PATCH', body: {}, params }],
+  ['GET /api/plan-templates', planTemplates.GET, 'job.read', { method: 'GET' }],
+  ['POST /api/plan-templates', planTemplates.POST, 'job.manage', { method: 'POST', body: {} }],
+  ['DELETE /api/plan-templates/{id}', planTemplate.DELETE, 'job.manage', { method: 'DELETE', params }],
   ['GET /api/organisation', organisation.GET, 'member.list', { method: 'GET' }],
   ['PATCH /api/organisation', organisation.PATCH, 'organisation.change', { method: 'PATCH', body: {} }],
 ];

@@ -9,7 +9,7 @@ import type { PlannedSheet } from '@/standards/types';
 import { ifMatch } from '@/tests/helpers/call-route';
 import { type Asked, Workshop } from './workshop';
 
-const lathe = '17-S5O8B';
+const lathe = 'HP25-1I10-S5';
 const worked = 'LK32-0O81-B';
 
 let workshop: Workshop;

@@ -23,6 +23,7 @@ import * as invitationsAccept from '@/app/api/invitations/accept/route';
 import * as invitations from '@/app/api/invitations/route';
 import * as jobsIdAsLeftLinks from '@/app/api/jobs/[id]/as-left-links/route';
 import * as jobsIdCheck from '@/app/api/jobs/[id]/check/route';
+import * as jobsIdComponents from '@/app/api/jobs/[id]/components/route';
 import * as jobsIdConditions from '@/app/api/jobs/[id]/conditions/route';
 import * as jobsIdHandIn from '@/app/api/jobs/[id]/hand-in/route';
 import * as jobsIdPlan from '@/app/api/jobs/[id]/plan/route';
@@ -39,6 +40,8 @@ import * as machines from '@/app/api/machines/route';
 import * as membersId from '@/app/api/members/[id]/route';
 import * as members from '@/app/api/members/route';
 import * as organisation from '@/app/api/organisation/route';
+import * as planTemplatesId from '@/app/api/plan-templates/[id]/route';
+import * as planTemplates from '@/app/api/plan-templates/route';
 import * as ready from '@/app/api/ready/route';
 import * as reportsIdData from '@/app/api/reports/[id]/data/route';
 import * as reportsIdPdf from '@/app/api/reports/[id]/pdf/route';
@@ -81,6 +84,7 @@ export const describedRoutes = {
   '/api/invitations': invitations,
   '/api/jobs/[id]/as-left-links': jobsIdAsLeftLinks,
   '/api/jobs/[id]/check': jobsIdCheck,
+  '/api/jobs/[id]/components': jobsIdComponents,
   '/api/jobs/[id]/conditions': jobsIdConditions,
   '/api/jobs/[id]/hand-in': jobsIdHandIn,
   '/api/jobs/[id]/plan': jobsIdPlan,
@@ -97,6 +101,8 @@ export const describedRoutes = {
   '/api/members/[id]': membersId,
   '/api/members': members,
   '/api/organisation': organisation,
+  '/api/plan-templates/[id]': planTemplatesId,
+  '/api/plan-templates': planTemplates,
   '/api/ready': ready,
   '/api/reports/[id]/data': reportsIdData,
   '/api/reports/[id]/photos/[fileId]': reportsIdPhotosFileid,

@@ -6,19 +6,24 @@ import { notFound } from '@/lib/errors';
 import { route } from '@/lib/http/route';
 import { idParams } from '@/lib/schemas/common';
 import { planForm } from '@/lib/schemas/job';
-import { makePlan, proposalsNow } from '@/lib/services/make-plan';
+import { makePlan } from '@/lib/services/make-plan';
+import { planMaking } from '@/lib/services/plan-making';
 
-/** The planned sheets in working order; before the plan is made, the proposals. */
+/**
+ * The planned sheets in working order. Before the plan is made, the proposals, each with its estimate of time and why it follows from
+ * what was opened, and what the plan can begin from.
+ */
 export const GET = route({
   action: 'job.read',
   params: idParams,
-  async handle({ trx, params }) {
+  async handle({ trx, viewer, params }) {
     const job = await findJob(trx, params.id);
     if (!job) throw notFound('job');
+    const nothing = { proposals: [], estimates: {}, follows: {}, starts: [] };
     return {
       body: {
         made: job.planMadeAt !== null,
-        proposals: job.planMadeAt ? [] : await proposalsNow(trx, job),
+        ...(job.planMadeAt ? nothing : await planMaking(trx, job, viewer.timeZone)),
         sheets: await listSheets(trx, params.id),
         exclusions: await listExclusions(trx, params.id),
       },
