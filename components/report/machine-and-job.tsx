@@ -1,3 +1,4 @@
+import { openedWords } from '@/lib/reporting/opened-words';
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { dateSpan } from '@/lib/reporting/report-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
@@ -35,6 +36,7 @@ export function MachineAndJob({ model }: { model: ReportModel }) {
             words.makeUp,
             machine.components.map(({ id, what }) => (what.includes(id) ? what : `${id} ${what}`)).join(' · '),
           ],
+          [words.opened, openedWords(machine.components)],
           [words.people, job.people.map(({ name, role }) => `${name}, ${role}`).join(' · ')],
         ])}
       />

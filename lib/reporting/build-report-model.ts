@@ -1,7 +1,8 @@
 import { componentName, componentWords } from '@/lib/planning/component-words';
+import { partConditions } from '@/lib/schemas/component-conditions';
 import { type CalibrationFacts, calibrationOn } from '@/lib/schemas/instrument-state';
 import { decisionRules, leftOutReasons, purposes } from '@/lib/schemas/job';
-import { machineKinds } from '@/lib/schemas/make-up';
+import { drivenToolWords, machineKinds } from '@/lib/schemas/make-up';
 import { convert } from '@/lib/units/convert';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
@@ -122,21 +123,39 @@ function toleranceText(um: string): string {
   return formatDecimal(mm.toDecimalPlaces(4, Dec.ROUND_DOWN).toString());
 }
 
-function componentList({ job: { makeUp } }: StoredJob): ReportModel['machine']['components'] {
+function componentList({ job: { makeUp, componentConditions = {} } }: StoredJob): ReportModel['machine']['components'] {
   const programmed = { radius: 'programmed on radius', diameter: 'programmed on diameter' } as const;
   // The id stands in front already: `T1 turret, 12 stations`.
   const words = (id: string, ...rest: (string | null)[]) => ({
     id,
     what: [componentName(id, makeUp).replace(new RegExp(` ?${id}$`), ''), ...rest].filter(Boolean).join(', '),
+    ...condition(id),
   });
+  const condition = (id: string) => {
+    const said = componentConditions[id];
+    return said ? { condition: [partConditions[said.condition], said.text].filter(Boolean).join(', ') } : {};
+  };
   return [
     ...makeUp.spindles.map((spindle) => words(spindle.id, `channel ${spindle.channel}`)),
     ...makeUp.turrets.map((turret) =>
-      words(turret.id, `${turret.stations} stations`, turret.axes.join(' '), `channel ${turret.channel}`),
+      words(
+        turret.id,
+        `${turret.stations} stations`,
+        turret.axes.join(' '),
+        turret.drivenTools && turret.drivenTools !== 'none'
+          ? `driven tools ${drivenToolWords[turret.drivenTools]}`
+          : null,
+        `channel ${turret.channel}`,
+      ),
     ),
     ...makeUp.linearAxes.map((axis) =>
       words(axis.id, `travel ${formatDecimal(axis.travelMm)} mm`, programmed[axis.programmedOn]),
     ),
+    ...makeUp.rotaryAxes.map((axis) => words(axis.id, `rotary axis of ${axis.carries}`, `channel ${axis.channel}`)),
+    ...[makeUp.tailstock, makeUp.guideBush, makeUp.toolChanger].flatMap((part) =>
+      part ? [words(part.id, `channel ${part.channel}`)] : [],
+    ),
+    ...(componentConditions.bed ? [{ id: 'bed', what: 'of the machine', ...condition('bed') }] : []),
   ];
 }
 

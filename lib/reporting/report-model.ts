@@ -29,7 +29,8 @@ export interface ReportModel {
     kind: string;
     sizeClass: string | null;
     site: string | null;
-    components: { id: string; what: string }[];
+    /** `condition`: what the work did to it; absent where nothing is said, and in reports from before it was asked. */
+    components: { id: string; what: string; condition?: string }[];
   };
   customer: { name: string; engineer: string | null; order: string | null };
   job: {

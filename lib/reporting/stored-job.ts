@@ -1,3 +1,4 @@
+import type { ComponentConditions } from '@/lib/schemas/component-conditions';
 import type { CalibrationFacts } from '@/lib/schemas/instrument-state';
 import type { LeftOutReason, Purpose } from '@/lib/schemas/job';
 import type { MakeUp } from '@/lib/schemas/make-up';
@@ -20,6 +21,8 @@ export interface StoredJob {
     place: string | null;
     hours: string | null;
     conditions: Partial<Record<'warmUp' | 'compensation' | 'level' | 'coolant' | 'notes', string | null>>;
+    /** What was opened, by component. */
+    componentConditions?: ComponentConditions;
     makeUp: MakeUp;
     state: string;
   };

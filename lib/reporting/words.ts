@@ -98,6 +98,7 @@ export const REPORT_WORDS = {
     sizeClass: 'Size class',
     site: 'Site',
     makeUp: 'Make-up',
+    opened: 'What was opened',
     engineer: 'Customer’s engineer',
     order: 'Order',
     reference: 'Job',

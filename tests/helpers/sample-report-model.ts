@@ -37,7 +37,7 @@ export function sampleReportModel(change: Partial<ReportModel> = {}): ReportMode
         { id: 'S1', what: 'main spindle, channel 1' },
         { id: 'S2', what: 'sub-spindle, channel 2' },
         { id: 'T1', what: 'turret, 12 stations, X1 Y1 Z1, channel 1' },
-        { id: 'T2', what: 'turret, 8 stations, X2 Z2, channel 2' },
+        { id: 'T2', what: 'turret, 8 stations, X2 Z2, channel 2', condition: 'removed and refitted, casting scraped' },
         { id: 'Z1', what: 'axis Z1, travel 500 mm' },
       ],
     },

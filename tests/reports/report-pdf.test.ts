@@ -43,6 +43,8 @@ function wordsOf(model: ReportModel): string[] {
       machine.sizeClass,
     ],
     ...machine.components.map((component) => `${component.id} ${component.what}`),
+    'What was opened',
+    'T2 removed and refitted, casting scraped',
     ...[
       customer.name,
       customer.engineer,

@@ -1,3 +1,4 @@
+import { openedWords } from '@/lib/reporting/opened-words';
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { dateSpan } from '@/lib/reporting/report-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
@@ -26,6 +27,7 @@ export function machineAndJob(kit: Kit, model: ReportModel): FlowItem[] {
     [words.codes, job.codes.join(', ')],
     [words.decisionRule, job.decisionRule],
     [words.makeUp, machine.components.map(({ id, what }) => `${id} ${what}`).join(' · ')],
+    [words.opened, openedWords(machine.components)],
     [words.people, job.people.map(({ name, role }) => `${name}, ${role}`).join(' · ')],
   ];
   return [
