@@ -1,5 +1,5 @@
 import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
-import { toleranceLines, toleranceNotes } from '@/lib/planning/tolerance-words';
+import { toleranceLines, toleranceNotes, toleranceUnit } from '@/lib/planning/tolerance-words';
 import { provenanceWords } from '@/lib/reporting/record-words';
 import type { Provenance, ToleranceRule } from '@/standards/types';
 
@@ -11,13 +11,13 @@ export function ToleranceTable({ rule }: { rule: ToleranceRule | null }) {
       <Table caption="Tolerances">
         <TableHead>
           <HeadCell>Holds for</HeadCell>
-          <HeadCell figure>Tolerance, mm</HeadCell>
+          <HeadCell figure>Tolerance, {toleranceUnit(rule)}</HeadCell>
         </TableHead>
         <tbody>
-          {toleranceLines(rule).map(({ when, toleranceMm }) => (
+          {toleranceLines(rule).map(({ when, tolerance }) => (
             <Row key={when}>
               <RowHead className="font-normal">{when}</RowHead>
-              <DataCell figure>{toleranceMm}</DataCell>
+              <DataCell figure>{tolerance}</DataCell>
             </Row>
           ))}
         </tbody>

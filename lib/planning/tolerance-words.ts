@@ -3,39 +3,51 @@ import { formatDecimal } from '@/lib/units/format';
 import { sizeClassTables, sizeCriterionWords } from '@/standards/size-classes';
 import type { DecimalText, ToleranceRule } from '@/standards/types';
 
-const mm = (um: DecimalText): string => formatDecimal(convert(um, 'µm', 'mm'));
+const shown = { µm: 'mm', 'µm/m': 'mm/m', '″': '″' } as const;
+
+/** Unit in which the tolerances of a rule are shown: mm as the codes print them, mm/m for slopes, ″ for rotary axes. */
+export const toleranceUnit = ({ unit = 'µm' }: Pick<ToleranceRule, 'unit'>): (typeof shown)[keyof typeof shown] =>
+  shown[unit];
+
+/** A figure of a rule as it is shown. */
+function asShown(figure: DecimalText, { unit = 'µm' }: Pick<ToleranceRule, 'unit'>): string {
+  if (unit === '″') return formatDecimal(figure);
+  return formatDecimal(unit === 'µm' ? convert(figure, 'µm', 'mm') : convert(figure, 'µm/m', 'mm/m'));
+}
 
 export interface ToleranceLine {
   when: string;
-  toleranceMm: string;
+  /** In the unit of `toleranceUnit`. */
+  tolerance: string;
 }
 
-/** The tolerance table of a test, in mm, each line with the sizes for which it holds. */
+/** The tolerance table of a test, each line with the sizes for which it holds. */
 export function toleranceLines(rule: ToleranceRule): ToleranceLine[] {
-  if (rule.by === 'all' && rule.allUm) return [{ when: 'all sizes', toleranceMm: mm(rule.allUm) }];
+  if (rule.by === 'all' && rule.allUm) return [{ when: 'all sizes', tolerance: asShown(rule.allUm, rule) }];
   if (rule.by === 'size-class' && rule.byClassUm) {
     return rule.byClassUm.map((um, index) => ({
       when: `size class ${index + 1}: ${classWords(index + 1)}`,
-      toleranceMm: mm(um),
+      tolerance: asShown(um, rule),
     }));
   }
   return (rule.steps ?? []).map((step) => ({
     when: step.upToMm === null ? `over ${step.overMm} mm` : `over ${step.overMm} up to ${step.upToMm} mm`,
-    toleranceMm: mm(step.toleranceUm),
+    tolerance: asShown(step.toleranceUm, rule),
   }));
 }
 
 /** How it changes with the length that could be measured, and what must hold besides. */
 export function toleranceNotes(rule: ToleranceRule): string[] {
   const { perLength, local, basis } = rule;
+  const figure = (value: DecimalText) => `${asShown(value, rule)} ${toleranceUnit(rule)}`;
   return [
     ...(perLength
       ? [
-          `Given over ${perLength.baseLengthMm} mm; over another length in proportion, never below ${mm(perLength.minimumUm)} mm` +
-            (perLength.maximumUm ? ` and never above ${mm(perLength.maximumUm)} mm.` : '.'),
+          `Given over ${perLength.baseLengthMm} mm; over another length in proportion, never below ${figure(perLength.minimumUm)}` +
+            (perLength.maximumUm ? ` and never above ${figure(perLength.maximumUm)}.` : '.'),
         ]
       : []),
-    ...(local ? [`Besides, ${mm(local.toleranceUm)} mm over any ${local.lengthMm} mm.`] : []),
+    ...(local ? [`Besides, ${figure(local.toleranceUm)} over any ${local.lengthMm} mm.`] : []),
     ...(basis === 'offset' ? ['It counts the offset of the axes, half of the total indicator reading.'] : []),
     ...(basis === 'total-indicator-reading' ? ['It counts the total indicator reading.'] : []),
   ];

@@ -1,11 +1,12 @@
+import { currentOwnDefinitions } from '@/db/queries/own-definitions';
 import { route } from '@/lib/http/route';
-import { catalogue } from '@/lib/planning/catalogue';
+import { catalogueWithOwn } from '@/lib/planning/catalogue-with-own';
 
-/** Codes and editions with their tests. */
+/** Codes and editions with their tests, the organisation's own beside them. */
 export const GET = route({
   action: 'catalogue.read',
-  async handle() {
-    const items = catalogue().map(({ tests, ...code }) => ({
+  async handle({ trx }) {
+    const items = catalogueWithOwn(await currentOwnDefinitions(trx)).map(({ tests, ...code }) => ({
       ...code,
       tests: tests.map(({ id, version, title, direction, tolerance }) => ({
         id,
