@@ -1,7 +1,11 @@
 import { definitions as commonPractice } from './common-practice/definitions';
 import * as commonPracticeSource from './common-practice/source';
-import { definitions as geometric } from './iso-13041-1-2020/definitions';
-import * as geometricSource from './iso-13041-1-2020/source';
+import { definitions as engineLathes } from './iso-1708-1989/definitions';
+import * as engineLathesSource from './iso-1708-1989/source';
+import { definitions as geometric2004 } from './iso-13041-1-2004/definitions';
+import * as geometric2004Source from './iso-13041-1-2004/source';
+import { definitions as geometric2020 } from './iso-13041-1-2020/definitions';
+import * as geometric2020Source from './iso-13041-1-2020/source';
 import { definitions as testPiece } from './iso-13041-6-2009/definitions';
 import * as testPieceSource from './iso-13041-6-2009/source';
 import type { Provenance, TestDefinition } from './types';
@@ -14,7 +18,16 @@ export interface TestCode {
   source: Provenance;
 }
 
-const all: TestDefinition[] = [...geometric, ...commonPractice, ...testPiece];
+/** Every code with its definitions, in the order in which they are offered. */
+const books = [
+  { ...geometric2020Source, definitions: geometric2020 },
+  { ...geometric2004Source, definitions: geometric2004 },
+  { ...engineLathesSource, definitions: engineLathes },
+  { ...commonPracticeSource, definitions: commonPractice },
+  { ...testPieceSource, definitions: testPiece },
+];
+
+const all: TestDefinition[] = books.flatMap(({ definitions }) => definitions);
 
 /** Every version of every definition: old ones stay, because stored sheets are judged by the one that they were made with. */
 export function allDefinitions(): readonly TestDefinition[] {
@@ -35,12 +48,7 @@ export function findDefinition(id: string, code: string, edition: string, versio
 }
 
 export function codes(): TestCode[] {
-  return [geometricSource, commonPracticeSource, testPieceSource].map(({ code, edition, subject, source }) => ({
-    code,
-    edition,
-    subject,
-    source,
-  }));
+  return books.map(({ code, edition, subject, source }) => ({ code, edition, subject, source }));
 }
 
 /** `ISO 13041-1:2020`, `common practice`. */
