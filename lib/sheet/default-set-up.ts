@@ -39,8 +39,7 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
     case 'tool-centre':
       return {
         '/form': cell(layout.form),
-        '/surface': cell(layout.surface),
-        '/up': cell('90', '°'),
+        ...(layout.form === 'sweep' ? { '/surface': cell(layout.surface), '/up': cell('90', '°') } : {}),
         ...positionCells(radiiFor(layout.radiiMm, makeUp), (k) => `/radii/${k}`),
       };
     case 'approach-pairs':
