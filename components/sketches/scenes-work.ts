@@ -7,23 +7,12 @@ import {
   motion,
   spindleAngles,
   subHeadstock,
+  sweptIndicator,
   turretWithHole,
 } from '@/components/sketches/sketch-parts';
-import type { SketchPen } from '@/components/sketches/sketch-pen';
 import { SKETCH_WORDS } from '@/lib/reporting/words';
 
 const TOP = AXIS_Y - 10;
-
-/** Indicator on a bracket of the spindle, swept round something on the axis. */
-function sweptIndicator(pen: SketchPen, face: number, tipX: number): void {
-  const dial = indicator(pen, [tipX, TOP], [0, 1], [tipX + 20, TOP - 25]);
-  pen.line([
-    [face, AXIS_Y - 12],
-    [face + 22, AXIS_Y - 12],
-    [face + 22, dial[1]],
-    [dial[0] - 14, dial[1]],
-  ]);
-}
 
 /** Main and sub-spindle face each other; the main spindle carries the indicator round the other's mandrel. */
 export const twoSpindlesSweep: Scene = (pen, spec, component) => {

@@ -1,13 +1,48 @@
 import type { Drawing } from '@/components/plots/drawing';
 import { wordWidth } from '@/components/plots/drawing-parts';
 import type { Scene } from '@/components/sketches/scene';
+import {
+  angleInstrument,
+  laserAlongMotion,
+  levelOnCarriage,
+  levelSteps,
+  straightedgeTurnedOver,
+  targetAndFound,
+} from '@/components/sketches/scenes-angles';
 import { slideApproach, squareTwoMotions, straightedgeAlongMotion } from '@/components/sketches/scenes-guideway';
+import {
+  axialSlip,
+  driftAtTool,
+  faceRunOut,
+  mandrelHalfTurn,
+  spindleSensors,
+  toolSpindleMandrel,
+} from '@/components/sketches/scenes-nose';
 import {
   discAcrossMotion,
   mandrelAlongMotion,
   spindleBoreMandrel,
   spindleNose,
 } from '@/components/sketches/scenes-spindle';
+import {
+  betweenCentres,
+  checklist,
+  circularGauge,
+  guideBush,
+  rotaryAxis,
+  swivelAxis,
+  tailstockQuill,
+} from '@/components/sketches/scenes-supports';
+import {
+  gangStations,
+  mandrelInTurret,
+  testPieceCylinder,
+  testPieceFace,
+  testPiecePattern,
+  transferPiece,
+  turretFace,
+  turretIndex,
+} from '@/components/sketches/scenes-turret';
 import { toolHoleHeights, toolHoleSweep, twoCollarPiece, twoSpindlesSweep } from '@/components/sketches/scenes-work';
 import { planeSign } from '@/components/sketches/sketch-parts';
 import { SCENE_BOX, SketchPen } from '@/components/sketches/sketch-pen';
@@ -26,6 +61,33 @@ const SCENES: Record<SketchSpec['scene'], Scene> = {
   'tool-hole-heights': toolHoleHeights,
   'slide-approach': slideApproach,
   'two-collar-piece': twoCollarPiece,
+  'face-run-out': faceRunOut,
+  'axial-slip': axialSlip,
+  'level-on-carriage': levelOnCarriage,
+  'level-steps': levelSteps,
+  'angle-instrument': angleInstrument,
+  'straightedge-turned-over': straightedgeTurnedOver,
+  'laser-along-motion': laserAlongMotion,
+  'circular-gauge': circularGauge,
+  'spindle-sensors': spindleSensors,
+  'turret-index': turretIndex,
+  'turret-face': turretFace,
+  'mandrel-in-turret': mandrelInTurret,
+  'tool-spindle-mandrel': toolSpindleMandrel,
+  'tailstock-quill': tailstockQuill,
+  'between-centres': betweenCentres,
+  'guide-bush': guideBush,
+  'rotary-axis': rotaryAxis,
+  'swivel-axis': swivelAxis,
+  'test-piece-cylinder': testPieceCylinder,
+  'test-piece-face': testPieceFace,
+  'test-piece-pattern': testPiecePattern,
+  'transfer-piece': transferPiece,
+  'drift-at-tool': driftAtTool,
+  'target-and-found': targetAndFound,
+  'mandrel-half-turn': mandrelHalfTurn,
+  'gang-stations': gangStations,
+  checklist,
 };
 
 const SIGN_PX = 13;

@@ -71,6 +71,45 @@ export function holder(pen: SketchPen, dial: Point, blockX: number, id?: string)
   if (id) pen.text(blockX + 20, y - 18, id, { anchor: 'middle' });
 }
 
+/** A stand at the right of a dial that looks to the left along the axis. */
+export function stand(pen: SketchPen, dial: Point, blockX: number): void {
+  pen.line([
+    [dial[0] + 14, dial[1]],
+    [blockX, dial[1]],
+  ]);
+  pen.material(blockX, dial[1] - 14, 40, 28, 7);
+}
+
+/** Indicator on a bracket of the spindle, swept round something on the axis. */
+export function sweptIndicator(
+  pen: SketchPen,
+  face: number,
+  tipX: number,
+  words: Point = [tipX + 20, AXIS_Y - 35],
+  anchor: 'start' | 'middle' = 'start',
+): void {
+  const dial = indicator(pen, [tipX, AXIS_Y - 10], [0, 1], words, anchor);
+  pen.line([
+    [face, AXIS_Y - 12],
+    [face + 22, AXIS_Y - 12],
+    [face + 22, dial[1]],
+    [dial[0] - 14, dial[1]],
+  ]);
+}
+
+/** Guideway or bed over the whole width; `y` is its upper face. */
+export function bedway(pen: SketchPen, y: number): void {
+  pen.material(20, y, 320, 18);
+}
+
+/** A level: its body with the vial and the bubble in it. */
+export function level(pen: SketchPen, x: number, y: number, width: number): void {
+  pen.box(x, y, width, 18, PART);
+  const middle = x + width / 2;
+  pen.box(middle - 18, y + 4, 36, 10);
+  pen.circle(middle, y + 9, 3.5);
+}
+
 /** Arrow of a motion with the axis's name at `at`. */
 export function motion(
   pen: SketchPen,

@@ -9,15 +9,33 @@ export function angleWords(anglesDeg: readonly string[] | undefined): string {
   return `${anglesDeg[0]}° to ${anglesDeg.at(-1)}°, ${anglesDeg.length} places`;
 }
 
+/** Set-ups with no indicator in them: nothing has a plunger that could be pushed in. */
+const WITHOUT_PLUNGER: ReadonlySet<SketchSpec['scene']> = new Set([
+  'level-on-carriage',
+  'level-steps',
+  'angle-instrument',
+  'laser-along-motion',
+  'circular-gauge',
+  'spindle-sensors',
+  'rotary-axis',
+  'two-collar-piece',
+  'test-piece-cylinder',
+  'test-piece-face',
+  'test-piece-pattern',
+  'drift-at-tool',
+  'target-and-found',
+  'checklist',
+]);
+
 /** What a set-up sketch shows, for somebody who cannot see it. */
 export function sketchWords(spec: SketchSpec, component: BoundComponent): string {
   const parts = [`${SKETCH_WORDS.setUp}: ${SCENE_WORDS[spec.scene]}`];
   const ids = { ...component, plane: spec.plane ?? component.plane };
-  for (const part of ['spindle', 'axis', 'reference', 'turret', 'plane'] as const) {
+  for (const part of Object.keys(SKETCH_WORDS.parts) as (keyof typeof SKETCH_WORDS.parts)[]) {
     if (ids[part]) parts.push(`${SKETCH_WORDS.parts[part]} ${ids[part]}`);
   }
   if (spec.anglesDeg?.length) parts.push(angleWords(spec.anglesDeg));
-  parts.push(SKETCH_WORDS.plungerInCounts);
+  if (!WITHOUT_PLUNGER.has(spec.scene)) parts.push(SKETCH_WORDS.plungerInCounts);
   if (spec.positiveMeans) parts.push(`positive: ${spec.positiveMeans}`);
   return parts.join(', ');
 }

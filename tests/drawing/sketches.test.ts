@@ -1,12 +1,22 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { setUpSketch } from '@/components/sketches/sketch-geometry';
-import { SCENE_WORDS } from '@/lib/reporting/words';
+import { SCENE_WORDS, SKETCH_WORDS } from '@/lib/reporting/words';
 import type { SketchSpec } from '@/standards/types';
 import { collisions, outside } from '../helpers/drawing-geometry';
 
 const scenes = Object.keys(SCENE_WORDS) as SketchSpec['scene'][];
-const component = { spindle: 'S1', axis: 'Z1', reference: 'S2', turret: 'T2', plane: 'ZX' as const };
+const component = {
+  spindle: 'S1',
+  axis: 'Z1',
+  reference: 'S2',
+  turret: 'T2',
+  station: 14,
+  tailstock: 'TS1',
+  guideBush: 'GB1',
+  rotary: 'C1',
+  plane: 'ZX' as const,
+};
 const place = { widthPx: 360, heightPx: 234 };
 const wordsOf = (spec: SketchSpec) =>
   setUpSketch(spec, component, place).items.flatMap((item) => (item.kind === 'text' ? [item.text] : []));
@@ -40,13 +50,29 @@ describe('set-up sketch', () => {
     expect(wordsOf({ scene: 'slide-approach' })).toEqual(expect.arrayContaining(['Z1 +', 'Z1 −']));
   });
 
+  it('says the sense of a plunger only where there is one', () => {
+    for (const scene of scenes) {
+      const drawing = setUpSketch({ scene }, component, place);
+      const shown = drawing.items.some((item) => item.kind === 'text' && item.text === SKETCH_WORDS.plungerIn);
+      expect(drawing.description.includes(SKETCH_WORDS.plungerInCounts), scene).toBe(shown);
+    }
+  });
+
+  it('names tailstock, guide bush, rotary axis and station where they are what is measured', () => {
+    expect(wordsOf({ scene: 'between-centres' })).toEqual(expect.arrayContaining(['S1', 'TS1', 'Z1']));
+    expect(wordsOf({ scene: 'guide-bush' })).toContain('GB1');
+    expect(wordsOf({ scene: 'rotary-axis' })).toContain('C1');
+    expect(wordsOf({ scene: 'gang-stations' })).toEqual(expect.arrayContaining(['T2', '14']));
+    expect(setUpSketch({ scene: 'tailstock-quill' }, component, place).description).toContain('tailstock TS1');
+  });
+
   it('draws every scene in a way of its own', () => {
     const drawn = scenes.map((scene) => JSON.stringify(setUpSketch({ scene }, {}, place).items));
     expect(new Set(drawn).size).toBe(scenes.length);
   });
 
-  it('hatches material in every scene', () => {
-    for (const scene of scenes) {
+  it('hatches material in every scene that shows some', () => {
+    for (const scene of scenes.filter((one) => one !== 'checklist')) {
       const { items } = setUpSketch({ scene }, component, place);
       expect(items.some((item) => item.kind === 'path' && (item.d.match(/M/g) ?? []).length > 4)).toBe(true);
     }
