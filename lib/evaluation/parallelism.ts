@@ -1,10 +1,13 @@
 import { z } from 'zod';
+import { positiveDecimal } from './decimal-text';
+import { localRange } from './local-range';
 import { reversedMeans, reversedReadings } from './reversed-means';
 
 export const parallelismInput = z.strictObject({
   method: z.literal('parallelism'),
   ...reversedReadings,
   judge: z.enum(['slope', 'range']).optional(),
+  localLength: positiveDecimal.optional(),
 });
 
 /**
@@ -18,6 +21,7 @@ export const parallelismInput = z.strictObject({
  * @param readings µm per angle °, one key or an even number of equally spaced keys, each over the same positions
  * @param measuringLength mm, default the span of the positions
  * @param sag µm per position: fall of the mandrel along the reading direction, added to m
+ * @param localLength mm > 0: `local` is then the largest difference of two means no further apart than that
  * @throws EvaluationError see `reversedMeans`
  * @example L 300: 0° 0, 12; 180° 4, −2 → means 2, 5; deviation +3 µm
  * Source: ISO 230-1:2012 (from memory); reversal and slope common practice.
@@ -35,5 +39,8 @@ export function parallelism(input: z.output<typeof parallelismInput>) {
     difference: difference.toText(),
     range: range.toText(),
     reversed,
+    ...(input.localLength === undefined
+      ? {}
+      : { local: localRange(input.positions, means, input.localLength).toText() }),
   };
 }

@@ -26,8 +26,12 @@ const readings = (layout: Angles, row: number) => layout.anglesDeg.map((angle) =
 
 function readingAt(layout: Angles, cells: Cells, angle: string, row: number): Field {
   const place = placeWords(cells, position(row), layout.positionName, row);
-  return readingField(at(angle, row), `${place}, spindle at ${angle}°`);
+  return readingField(at(angle, row), isTurned(layout) ? `${place}, ${turned(layout)} at ${angle}°` : place);
 }
+
+const turned = (layout: Angles): string => layout.turned ?? 'spindle';
+/** With one angle nothing is turned, and the angle says nothing. */
+const isTurned = ({ anglesDeg }: Angles) => anglesDeg.length > 1;
 
 function fields(layout: Angles, cells: Cells): SheetFields {
   const offered = rowsToOffer(cells, (row) => [position(row), sag(row), ...readings(layout, row)], MAX_ROWS);
@@ -40,9 +44,12 @@ function fields(layout: Angles, cells: Cells): SheetFields {
         title: null,
         columns: [
           { label: layout.positionName, unit: 'mm' },
-          ...layout.anglesDeg.map((angle) => ({ label: `${angle}°`, unit: 'µm' as const })),
+          ...layout.anglesDeg.map((angle) => ({
+            label: isTurned(layout) ? `${angle}°` : 'reading',
+            unit: 'µm' as const,
+          })),
           ...(layout.sag ? [{ label: 'sag of the mandrel', unit: 'µm' as const }] : []),
-          { label: 'mean', unit: 'µm' },
+          ...(isTurned(layout) ? [{ label: 'mean', unit: 'µm' as const }] : []),
         ],
         rows: rows.map((row) => ({
           label: `${row + 1}`,
@@ -50,7 +57,7 @@ function fields(layout: Angles, cells: Cells): SheetFields {
             { field: setUpField(position(row), `${layout.positionName}, row ${row + 1}`, 'mm', true) },
             ...layout.anglesDeg.map((angle) => ({ field: readingAt(layout, cells, angle, row) })),
             ...(layout.sag ? [{ field: setUpField(sag(row), `${place(row)}, sag of the mandrel`, 'µm', true) }] : []),
-            { derived: derivedMean(cells, readings(layout, row)) },
+            ...(isTurned(layout) ? [{ derived: derivedMean(cells, readings(layout, row)) }] : []),
           ],
         })),
       },
@@ -61,7 +68,7 @@ function fields(layout: Angles, cells: Cells): SheetFields {
   };
 }
 
-function assemble(layout: Angles, values: SheetValues, { definition }: AssembleOptions): Assembled {
+function assemble(layout: Angles, values: SheetValues, { definition, localLengthMm }: AssembleOptions): Assembled {
   const existing = existingRows(values, position, MAX_ROWS);
   const withSag = layout.sag && existing.some((row) => values.has(sag(row)));
   const used = existing.filter((row) =>
@@ -73,7 +80,7 @@ function assemble(layout: Angles, values: SheetValues, { definition }: AssembleO
     return {
       input: null,
       reason: some
-        ? `The readings with the spindle at ${missing.join('° and ')}° are still to be taken.`
+        ? `The readings with the ${turned(layout)} at ${missing.join('° and ')}° are still to be taken.`
         : `Two complete positions are needed; ${used.length === 1 ? 'one is' : 'none is'} complete so far.`,
     };
   }
@@ -88,9 +95,12 @@ function assemble(layout: Angles, values: SheetValues, { definition }: AssembleO
       ),
       ...(measuringLength === undefined ? {} : { measuringLength }),
       ...(withSag ? { sag: used.map((row) => values.get(sag(row))!) } : {}),
+      ...(definition.judge === undefined ? {} : { judge: definition.judge }),
+      ...(definition.method === 'parallelism' && localLengthMm !== null ? { localLength: localLengthMm } : {}),
     },
     basedOn: counted(used.length, existing.length, 'positions'),
-    lengthMm: measuringLength ?? span(positions),
+    // A range belongs to the positions that were read, whatever length it is wanted over.
+    lengthMm: definition.judge === 'range' ? span(positions) : (measuringLength ?? span(positions)),
     notes:
       layout.sag && !withSag
         ? [
