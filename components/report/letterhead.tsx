@@ -1,6 +1,7 @@
 import { Nameplate } from '@/components/ui/nameplate';
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { dateSpan, sentence, standingWords } from '@/lib/reporting/report-text';
+import { toleranceSourceWords } from '@/lib/reporting/tolerance-source';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { CountsTable } from './counts-table';
 
@@ -54,6 +55,7 @@ export function Headline({ model }: { model: ReportModel }) {
     job.codes.length ? `${job.codes.join(', ')}.` : '',
     `${REPORT_WORDS.decisionRule}: ${job.decisionRule}.`,
     conditions.airRange ? `${sentence(conditions.airRange)}.` : '',
+    toleranceSourceWords(model.toleranceSources),
   ];
   return (
     <div className="mt-5">

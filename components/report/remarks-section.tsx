@@ -31,24 +31,3 @@ export function RemarksTable({ remarks }: { remarks: ReportModel['remarks'] }) {
     </Table>
   );
 }
-
-/** Tests of the codes that the plan does not have, with the reason. */
-export function NotInPlanTable({ entries }: { entries: ReportModel['notInPlan'] }) {
-  const words = REPORT_WORDS.notInPlan;
-  return (
-    <Table caption={words.heading} className="text-sm">
-      <TableHead>
-        <HeadCell>{words.test}</HeadCell>
-        <HeadCell>{words.reason}</HeadCell>
-      </TableHead>
-      <tbody>
-        {entries.map(({ title, reason }) => (
-          <Row key={title}>
-            <RowHead className="py-1 font-normal">{title}</RowHead>
-            <DataCell className="py-1">{reason}</DataCell>
-          </Row>
-        ))}
-      </tbody>
-    </Table>
-  );
-}

@@ -4,7 +4,8 @@ import { ConditionsSection } from './conditions-section';
 import { InstrumentsSection } from './instruments-section';
 import { Headline, Letterhead } from './letterhead';
 import { MachineAndJob } from './machine-and-job';
-import { NotInPlanTable, RemarksTable } from './remarks-section';
+import { NotInPlanList } from './not-in-plan-list';
+import { RemarksTable } from './remarks-section';
 import { ReportSection } from './report-section';
 import { SignatureList } from './signature-list';
 import { SummaryTable } from './summary-table';
@@ -45,7 +46,7 @@ export function ReportPage(props: { model: ReportModel; photosAt: string }) {
       </ReportSection>
       {model.notInPlan.length > 0 && (
         <ReportSection title={REPORT_WORDS.notInPlan.heading}>
-          <NotInPlanTable entries={model.notInPlan} />
+          <NotInPlanList entries={model.notInPlan} />
         </ReportSection>
       )}
       {model.blocks.map((block) => (

@@ -21,6 +21,7 @@ import type { ReportModel, SignatureBlock, SummaryRow } from './report-model';
 import { sheetState } from './sheet-state';
 import type { StoredJob } from './stored-job';
 import { editionWords, testBlock } from './test-block';
+import { countToleranceSources } from './tolerance-source';
 
 export interface ReportInput {
   stored: StoredJob;
@@ -86,6 +87,9 @@ export function buildReportModel(input: ReportInput): ReportModel {
     instruments: usedInstruments(stored, organisation.timeZone),
     headline: headlineWords(counts.asLeft, outRemarked),
     counts,
+    toleranceSources: countToleranceSources(
+      stored.sheets.filter((sheet) => !sheet.leftOutReason).map((sheet) => sheet.tolerance),
+    ),
     summary: stored.sheets.map((sheet, index): SummaryRow => {
       const state = states[index]!;
       const tolerance = (state.final?.result?.outcome.judgement.toleranceUm ?? sheet.tolerance?.baseUm) || null;

@@ -1,3 +1,4 @@
+import { isSettled } from '@/lib/planning/is-settled';
 import { calibrationOn, isOverdue } from '@/lib/schemas/instrument-state';
 import { Dec } from '@/lib/units/decimal';
 import { formatDay } from './format-time';
@@ -113,7 +114,8 @@ function conditionFindings(stored: StoredJob): CheckFinding[] {
   }
   if (!stored.job.conditions.warmUp) add('no-conditions', 'confirm', 'The warm-up is not described.');
   const unconfirmed = stored.sheets.filter(
-    (sheet) => !sheet.leftOutReason && sheet.tolerance?.provenance.kind === 'from-memory',
+    (sheet) =>
+      !sheet.leftOutReason && sheet.tolerance?.provenance.kind === 'from-memory' && !isSettled(sheet.tolerance),
   ).length;
   if (unconfirmed > 0) {
     add(

@@ -1,5 +1,5 @@
 import type { Judgement, PlotSeries, Verdict } from '@/lib/sheet/types';
-import type { BoundComponent, SketchSpec } from '@/standards/types';
+import type { BoundComponent, ShownIn, SketchSpec } from '@/standards/types';
 
 /**
  * Everything that an acceptance report says, frozen when the report is issued. Figures are stored results, already rounded to the
@@ -62,6 +62,10 @@ export interface ReportModel {
   }[];
   headline: string;
   counts: { asFound: Counts; asLeft: Counts };
+  /** Function checks, counted beside the measured tests; absent where none is planned, and in reports from before there were any. */
+  checks?: CheckCounts;
+  /** On what the tolerances rest; absent in reports from before they could be confirmed. */
+  toleranceSources?: { confirmed: number; replaced: number; contract: number; unconfirmed: number };
   summary: SummaryRow[];
   notInPlan: { title: string; reason: string }[];
   blocks: TestBlock[];
@@ -88,6 +92,15 @@ export interface Counts {
   judged: number;
 }
 
+/** planned = in order + not in order + not done + left out. */
+export interface CheckCounts {
+  planned: number;
+  inOrder: number;
+  notInOrder: number;
+  notDone: number;
+  leftOut: number;
+}
+
 export interface SummaryRow {
   order: number;
   /** The same for the same test of the same component at every visit: `AX-1a:Z1:S1`. */
@@ -105,6 +118,8 @@ export interface SummaryRow {
   /** as left = as found, nothing was done. */
   linked: boolean;
   toleranceMm: string | null;
+  /** Unit of the figures as found and as left and of the tolerance, where it is not mm; `items`: a function check, which has no figures. */
+  unit?: ShownIn;
   leftOut: string | null;
   remarkNo: number | null;
 }
@@ -126,6 +141,8 @@ export interface TestBlock {
   passes: PassBlock[];
   leftOut: { reason: string; text: string | null } | null;
   remark: string | null;
+  /** A function check: items instead of readings, in order or not in order instead of a verdict on a tolerance. */
+  check?: true;
   /** Absent in reports from before photographs could be added. */
   photos?: PhotoBlock[];
 }
@@ -151,12 +168,28 @@ export interface PassBlock {
   tables: { title: string | null; columns: string[]; rows: { label: string; cells: string[] }[] }[];
   resultMm: string | null;
   resultUm: string | null;
+  /** Unit of `resultMm` where it is not mm. */
+  resultUnit?: ShownIn;
+  /** Items of a function check, instead of tables. */
+  items?: CheckedItem[];
   resultWords: string | null;
   judgement: Judgement | null;
   plot: PlotSeries | null;
   /** Further figures of the method, `slope 25.0 µm/m`. */
   figures: { label: string; value: string }[];
   corrections: { field: string; was: string; now: string; by: string; at: string; reason: string | null }[];
+}
+
+/** One item of a function check as it was answered. */
+export interface CheckedItem {
+  question: string;
+  /** `yes`, `no`, `not fitted`; null: not answered. */
+  answer: string | null;
+  /** Figure with its unit, and the limits that it is held to: `4.2 bar (4 to 6)`. */
+  value: string | null;
+  remark: string | null;
+  /** null: not answered, or not fitted. */
+  inOrder: boolean | null;
 }
 
 export interface SignatureBlock {

@@ -7,9 +7,9 @@ import { cautionText } from '@/standards/cautions';
 import type { PlannedTolerance, TestDefinition } from '@/standards/types';
 import type { CellChangeText } from './corrected-readings';
 import { passBlock } from './pass-block';
-import { provenanceWords } from './record-words';
 import type { PhotoBlock, TestBlock } from './report-model';
 import type { StoredJob, StoredPhoto, StoredSheet } from './stored-job';
+import { toleranceSource } from './tolerance-source';
 import { DIRECTION_WORDS } from './words';
 
 const mm = (um: string) => formatDecimal(convert(um, 'µm', 'mm'));
@@ -26,14 +26,6 @@ export function toleranceWords(tolerance: PlannedTolerance | null): string {
   if (tolerance.local)
     parts.push(`and ${mm(tolerance.local.toleranceUm)} mm over any ${formatDecimal(tolerance.local.lengthMm)} mm`);
   return parts.join(', ');
-}
-
-/** Where the tolerance comes from; a memory says that it is one. */
-export function toleranceSource(tolerance: PlannedTolerance | null): string {
-  if (!tolerance) return '';
-  const { kind, text } = tolerance.provenance;
-  const found = tolerance.foundBy && tolerance.foundBy !== 'contract' ? ` (${tolerance.foundBy})` : '';
-  return `${provenanceWords[kind]}: ${text}${found}`;
 }
 
 export const editionWords = (definition: { code: string; edition: string }): string =>
@@ -54,7 +46,7 @@ export function testBlock(
     componentWords: componentWords(sheet.component, stored.job.makeUp),
     sketch: definition.sketch,
     toleranceWords: toleranceWords(sheet.tolerance),
-    toleranceSource: toleranceSource(sheet.tolerance),
+    toleranceSource: toleranceSource(sheet.tolerance, sheet.definition.code),
     directionWords: sheet.direction === 'either' ? null : DIRECTION_WORDS[sheet.direction],
     judgedFigure: definition.judgedFigure,
     instruments: stored.instruments

@@ -1,5 +1,6 @@
 import type { Counts, ReportModel } from '@/lib/reporting/report-model';
 import { dateSpan, sentence } from '@/lib/reporting/report-text';
+import { toleranceSourceWords } from '@/lib/reporting/tolerance-source';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { type FlowItem, slabItem, space } from '@/templates/report/flow/ops';
 import type { Kit } from '@/templates/report/flow/parts';
@@ -14,6 +15,7 @@ export function headline(kit: Kit, model: ReportModel): FlowItem[] {
     job.codes.length ? `${job.codes.join(', ')}.` : '',
     `${REPORT_WORDS.decisionRule}: ${job.decisionRule}.`,
     conditions.airRange ? `${sentence(conditions.airRange)}.` : '',
+    toleranceSourceWords(model.toleranceSources),
   ];
   const restsOn = rests
     .filter((part) => part !== '')
