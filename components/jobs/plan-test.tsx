@@ -2,6 +2,7 @@
 
 import { Field } from '@/components/ui/field';
 import { Checkbox, NumberText, Select, TextInput } from '@/components/ui/inputs';
+import { minutesWords } from '@/lib/planning/estimate-minutes';
 import { type LeftOutReason, leftOutReasons } from '@/lib/schemas/job';
 import type { PlanProblem, ProposedTest, TestChoice } from './plan-choices';
 
@@ -10,19 +11,25 @@ export function PlanTest(props: {
   test: ProposedTest;
   choice: TestChoice;
   problems: PlanProblem[];
+  /** Something is said to have been opened. */
+  opened: boolean;
   onChange: (change: Partial<TestChoice>) => void;
 }) {
-  const { test, choice, problems, onChange } = props;
+  const { test, choice, problems, opened, onChange } = props;
   const problem = (field: PlanProblem['field']) => problems.find((one) => one.field === field)?.message;
   const { contract } = choice;
   return (
     <li className="grid gap-x-6 border-b border-hair py-1 md:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
-      <Checkbox
-        label={test.title}
-        hint={test.code}
-        checked={choice.taken}
-        onChange={(event) => onChange({ taken: event.target.checked, contract: null })}
-      />
+      <div>
+        <Checkbox
+          label={test.title}
+          hint={`${test.code} · ${timeWords(test)}`}
+          checked={choice.taken}
+          onChange={(event) => onChange({ taken: event.target.checked, contract: null })}
+        />
+        {opened && <p className="pb-2 pl-9 text-sm text-ink2">{followsWords(test)}</p>}
+        {test.standsInFor && <p className="pb-2 pl-9 text-sm text-ink2">Another way to measure: {test.standsInFor}</p>}
+      </div>
       {choice.taken ? (
         <div className="py-2 text-[15px] leading-snug text-ink2 max-md:pl-9">
           <p className={contract ? 'line-through' : 'text-ink'}>{test.tolerance}</p>
@@ -36,7 +43,10 @@ export function PlanTest(props: {
           )}
           {contract ? (
             <div className="mt-2 grid gap-2 text-base text-ink sm:grid-cols-[8rem_1fr]">
-              <Field label="By contract, µm" error={problem('tolerance')}>
+              <Field
+                label={`By contract, ${test.contractUnit === 'arcsec' ? '″' : test.contractUnit}`}
+                error={problem('tolerance')}
+              >
                 <NumberText
                   data-place={`tolerance ${test.key}`}
                   value={contract.tolerance}
@@ -59,7 +69,7 @@ export function PlanTest(props: {
                 Keep the catalogue’s tolerance
               </button>
             </div>
-          ) : (
+          ) : test.contractUnit === null ? null : (
             <button
               type="button"
               data-place={`unconfirmed ${test.key}`}
@@ -98,4 +108,13 @@ export function PlanTest(props: {
       )}
     </li>
   );
+}
+
+const timeWords = ({ minutes, fromPasses }: ProposedTest): string =>
+  `${minutesWords(minutes)}, ${fromPasses === null ? 'our estimate' : `median of ${fromPasses} of your own measurements`}`;
+
+/** Why it follows from what was opened. */
+function followsWords({ follows }: ProposedTest): string {
+  if (follows === null) return 'Rests on nothing that was touched.';
+  return follows.length === 0 ? 'Rests on no single component.' : `Follows: ${follows.join('; ')}.`;
 }

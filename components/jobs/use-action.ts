@@ -15,3 +15,12 @@ export function useAction<T = unknown>(path: string, options: { onDone?: (answer
     },
   });
 }
+
+/** Takes one thing away; the page is fetched anew when it is done. */
+export function useRemoval() {
+  const router = useRouter();
+  return useMutation<ApiAnswer<unknown>, ApiProblem, string>({
+    mutationFn: (path) => api(path, { method: 'DELETE' }),
+    onSuccess: () => router.refresh(),
+  });
+}

@@ -1,12 +1,26 @@
+import { componentIds as allComponentIds } from '@/lib/planning/component-words';
+import { estimateOf, type PastDuration } from '@/lib/planning/estimate-minutes';
+import { USUAL_MINUTES } from '@/lib/planning/plan-sheets';
 import { passKindWords } from '@/lib/reporting/record-words';
 import { sheetState } from '@/lib/reporting/sheet-state';
 import type { StoredSheet } from '@/lib/reporting/stored-job';
 import { leftOutReasons } from '@/lib/schemas/job';
 import type { BoundComponent } from '@/standards/types';
+import { workingStepTitle } from '@/standards/working-order';
 import type { PathSheet } from './plan-path';
 
-/** Lines of the path out of the stored sheets, in working order. Pure. */
-export function pathSheets(sheets: StoredSheet[]): PathSheet[] {
+/** A sheet as it is stored; one that was planned before step, set-up and minutes were kept has none of the three. */
+export interface PlannedLine extends StoredSheet {
+  workingStep?: number | null;
+  setUpTogether?: string | null;
+  minutes?: number | null;
+}
+
+/**
+ * Lines of the path out of the stored sheets, in working order. Pure.
+ * @param past what tests took so far, for the time that is still needed
+ */
+export function pathSheets(sheets: PlannedLine[], past: ReadonlyMap<string, PastDuration> = new Map()): PathSheet[] {
   const next = nextSheet(sheets);
   return sheets.map((sheet) => ({
     id: sheet.id,
@@ -14,9 +28,20 @@ export function pathSheets(sheets: StoredSheet[]): PathSheet[] {
     title: sheet.title,
     component: componentIds(sheet.component, sheet.title),
     isNext: sheet.id === next?.id,
+    step: typeof sheet.workingStep === 'number' ? workingStepTitle(sheet.workingStep) : null,
+    setUp: sheet.setUpTogether ?? null,
+    minutesLeft: waits(sheet)
+      ? estimateOf({ definition: sheet.definition, minutes: sheet.minutes ?? USUAL_MINUTES }, past).minutes
+      : 0,
     ...lineOf(sheet),
   }));
 }
+
+/** Minutes of all lines that wait for their readings as found. */
+export const minutesLeft = (lines: readonly PathSheet[]): number =>
+  lines.reduce((sum, line) => sum + line.minutesLeft, 0);
+
+const waits = (sheet: StoredSheet): boolean => sheetState(sheet).state === 'not-measured';
 
 /** The first sheet in working order that waits for readings; after these the first that has none as left. */
 export function nextSheet(sheets: StoredSheet[]): StoredSheet | null {
@@ -45,7 +70,8 @@ function lineOf(sheet: StoredSheet): Pick<PathSheet, 'mark' | 'words' | 'result'
 
 /** `T1 · S1 · Z1`: the ids that the title does not name. */
 export function componentIds(component: BoundComponent, title: string): string {
-  const { turret, axis, spindle, reference, tailstock } = component;
   const named = new Set(title.split(/[^A-Za-z0-9]+/));
-  return [turret, axis, spindle, reference, tailstock].filter((id) => id !== undefined && !named.has(id)).join(' · ');
+  return allComponentIds(component)
+    .filter((id) => !named.has(id))
+    .join(' · ');
 }

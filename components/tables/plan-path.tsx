@@ -1,6 +1,7 @@
 import Link from 'next/link';
 import type { MarkKind } from '@/components/plots/verdict-ink';
 import { VerdictMark } from '@/components/ui/verdict-mark';
+import { minutesWords } from '@/lib/planning/estimate-minutes';
 
 export interface PathSheet {
   id: string;
@@ -15,33 +16,96 @@ export interface PathSheet {
   result: string;
   /** The one to go to next. */
   isNext: boolean;
+  /** Step of the working order; null in plans from before it was kept. */
+  step: string | null;
+  /** What stands set up for it and its neighbours. */
+  setUp: string | null;
+  /** Until its readings as found are taken; 0 afterwards. */
+  minutesLeft: number;
 }
 
 /** The plan as a scribed line with a tick for each sheet, in working order; every line leads to its sheet. */
 export function PlanPath({ jobId, sheets }: { jobId: string; sheets: PathSheet[] }) {
   return (
-    <ol className="relative">
-      <span aria-hidden="true" className="absolute inset-y-0 left-[3.4rem] w-0.5 bg-line" />
-      {sheets.map((sheet) => (
-        <li key={sheet.id} className="relative border-b border-hair">
-          <Link
-            href={`/jobs/${jobId}/sheets/${sheet.id}`}
-            aria-current={sheet.isNext ? 'step' : undefined}
-            className={`grid min-h-12 grid-cols-[2.5rem_1.8rem_minmax(0,1fr)] items-center gap-y-0.5 py-1.5 hover:bg-blue-wash sm:grid-cols-[2.5rem_1.8rem_minmax(0,1fr)_11.5rem_minmax(5.5rem,10rem)] ${sheet.isNext ? 'bg-brass-wash' : ''}`}
-          >
-            <span className="pl-1 font-mono text-[15px] text-ink2">{sheet.position}</span>
-            <span aria-hidden="true" className={`ml-1 h-0.5 w-3.5 ${sheet.isNext ? 'bg-brass' : 'bg-ink'}`} />
-            <span>
-              {sheet.title} <span className="text-[15px] text-ink2">{sheet.component}</span>
-              {sheet.isNext && <span className="sr-only">, next to measure</span>}
-            </span>
-            <span className="max-sm:col-start-3">
-              <VerdictMark verdict={sheet.mark} words={sheet.words} />
-            </span>
-            <span className="pr-1 text-[15px] text-ink2 max-sm:col-start-3">{sheet.result}</span>
-          </Link>
-        </li>
+    <>
+      {stepsOf(sheets).map(({ step, runs }) => (
+        <section key={runs[0]?.sheets[0]?.id} aria-label={step ?? undefined}>
+          {step !== null && (
+            <h2 className="mt-4 flex flex-wrap items-baseline gap-x-3 border-b-[1.5px] border-ink pb-0.5 font-semibold">
+              {step}
+              <span className="text-sm font-normal text-ink2">{countWords(runs.flatMap((run) => run.sheets))}</span>
+            </h2>
+          )}
+          {runs.map(({ setUp, sheets: members }) => (
+            <div key={members[0]?.id}>
+              {setUp !== null && (
+                <h3 className="mt-2 border-l-4 border-line pl-3 text-[15px] font-medium">
+                  Set up together: {setUp} <span className="text-sm font-normal text-ink2">{countWords(members)}</span>
+                </h3>
+              )}
+              <ol className="relative">
+                <span aria-hidden="true" className="absolute inset-y-0 left-[3.4rem] w-0.5 bg-line" />
+                {members.map((sheet) => (
+                  <PathLine key={sheet.id} jobId={jobId} sheet={sheet} />
+                ))}
+              </ol>
+            </div>
+          ))}
+        </section>
       ))}
-    </ol>
+    </>
   );
+}
+
+function PathLine({ jobId, sheet }: { jobId: string; sheet: PathSheet }) {
+  return (
+    <li className="relative border-b border-hair">
+      <Link
+        href={`/jobs/${jobId}/sheets/${sheet.id}`}
+        aria-current={sheet.isNext ? 'step' : undefined}
+        className={`grid min-h-12 grid-cols-[2.5rem_1.8rem_minmax(0,1fr)] items-center gap-y-0.5 py-1.5 hover:bg-blue-wash sm:grid-cols-[2.5rem_1.8rem_minmax(0,1fr)_11.5rem_minmax(5.5rem,10rem)] ${sheet.isNext ? 'bg-brass-wash' : ''}`}
+      >
+        <span className="pl-1 font-mono text-[15px] text-ink2">{sheet.position}</span>
+        <span aria-hidden="true" className={`ml-1 h-0.5 w-3.5 ${sheet.isNext ? 'bg-brass' : 'bg-ink'}`} />
+        <span>
+          {sheet.title} <span className="text-[15px] text-ink2">{sheet.component}</span>
+          {sheet.isNext && <span className="sr-only">, next to measure</span>}
+        </span>
+        <span className="max-sm:col-start-3">
+          <VerdictMark verdict={sheet.mark} words={sheet.words} />
+        </span>
+        <span className="pr-1 text-[15px] text-ink2 max-sm:col-start-3">
+          {sheet.result || (sheet.minutesLeft > 0 && minutesWords(sheet.minutesLeft))}
+        </span>
+      </Link>
+    </li>
+  );
+}
+
+interface Step {
+  step: string | null;
+  runs: { setUp: string | null; sheets: PathSheet[] }[];
+}
+
+/** Neighbours of one step under its heading, in it neighbours that are set up together. */
+function stepsOf(sheets: PathSheet[]): Step[] {
+  const steps: Step[] = [];
+  for (const sheet of sheets) {
+    let last = steps.at(-1);
+    if (!last || last.step !== sheet.step) {
+      last = { step: sheet.step, runs: [] };
+      steps.push(last);
+    }
+    const run = last.runs.at(-1);
+    if (run && run.setUp === sheet.setUp) run.sheets.push(sheet);
+    else last.runs.push({ setUp: sheet.setUp, sheets: [sheet] });
+  }
+  return steps;
+}
+
+/** `6 tests · 45 min to measure`. */
+function countWords(sheets: PathSheet[]): string {
+  const minutes = sheets.reduce((sum, { minutesLeft }) => sum + minutesLeft, 0);
+  const count = sheets.length === 1 ? '1 test' : `${sheets.length} tests`;
+  return minutes > 0 ? `${count} · ${minutesWords(minutes)} to measure` : count;
 }

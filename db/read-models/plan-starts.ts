@@ -1,12 +1,11 @@
 import type { Db } from '@/db/client';
 import { listPlanTemplates } from '@/db/queries/plan-templates';
-import { listExclusions } from '@/db/queries/plans';
-import { listSheets } from '@/db/queries/sheets';
-import { choicesOfPlan } from '@/lib/planning/choices-of-plan';
+import { type Exclusion, listExclusions } from '@/db/queries/plans';
+import { listSheets, type SheetRow } from '@/db/queries/sheets';
 import type { PlanForm } from '@/lib/schemas/job';
 
-/** Something that a new plan can begin from; it only preselects. */
-export interface PlanStart {
+/** A template of the model, or the plan of an earlier job. */
+export interface PlanStartSource {
   kind: 'template' | 'same-machine' | 'same-model';
   id: string;
   /** Name of the template, reference of the job. */
@@ -14,13 +13,13 @@ export interface PlanStart {
   /** Serial number, where it is another machine. */
   serialNumber: string | null;
   on: Date;
-  choices: PlanForm;
+  plan: PlanForm | { sheets: SheetRow[]; exclusions: Exclusion[] };
 }
 
 const MOST_JOBS = 3;
 
 /** Templates of the machine's model, then plans of earlier jobs: of the machine itself, then of others of its model. Newest first. */
-export async function planStarts(db: Db, job: { id: string; machineId: string }): Promise<PlanStart[]> {
+export async function planStarts(db: Db, job: { id: string; machineId: string }): Promise<PlanStartSource[]> {
   const machine: { manufacturer: string; model: string } | undefined = await db('machines')
     .where({ id: job.machineId })
     .first('manufacturer', 'model');
@@ -37,16 +36,15 @@ export async function planStarts(db: Db, job: { id: string; machineId: string })
         ]),
     )),
   ];
-  const starts: PlanStart[] = templates.map(({ id, name, createdAt, choices }) => ({
+  const starts: PlanStartSource[] = templates.map(({ id, name, createdAt, choices }) => ({
     kind: 'template',
     id,
     name,
     serialNumber: null,
     on: createdAt,
-    choices,
+    plan: choices,
   }));
   for (const { id, reference, serialNumber, machineId, planMadeAt } of earlier) {
-    const plan = { sheets: await listSheets(db, id), exclusions: await listExclusions(db, id) };
     const same = machineId === job.machineId;
     starts.push({
       kind: same ? 'same-machine' : 'same-model',
@@ -54,7 +52,7 @@ export async function planStarts(db: Db, job: { id: string; machineId: string })
       name: reference,
       serialNumber: same ? null : serialNumber,
       on: planMadeAt,
-      choices: choicesOfPlan(plan),
+      plan: { sheets: await listSheets(db, id), exclusions: await listExclusions(db, id) },
     });
   }
   return starts;

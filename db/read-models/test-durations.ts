@@ -1,5 +1,13 @@
 import type { Db } from '@/db/client';
-import { FEWEST_PASSES, type PastDuration, pastKey } from '@/lib/planning/estimate-minutes';
+
+export interface TestDuration {
+  code: string;
+  /** Definition id. */
+  id: string;
+  /** Sets of readings that it is the median of. */
+  passes: number;
+  minutes: number;
+}
 
 /** The newest sets of readings say how long a test takes today; older ones are not looked at. */
 const NEWEST_PASSES = 3000;
@@ -10,7 +18,7 @@ const LONGEST_SET_UP_MINUTES = 60;
  * How long each test took in the organisation's own past: the median over its sets of readings of the time from the first reading to the
  * last, and of the gap to the set before it on the same job and day as the time for setting up. Times are those of the devices.
  */
-export async function testDurations(db: Db, timeZone: string): Promise<Map<string, PastDuration>> {
+export async function testDurations(db: Db, timeZone: string): Promise<TestDuration[]> {
   const { rows } = await db.raw(
     `with newest as (
        select id, sheet_id from passes
@@ -30,13 +38,8 @@ export async function testDurations(db: Db, timeZone: string): Promise<Map<strin
        percentile_cont(0.5) within group (order by
          extract(epoch from last - first) / 60 + case when gap > 0 and gap < ? then gap else 0 end
        )::float as minutes
-     from timed group by 1, 2 having count(*) >= ?`,
-    [NEWEST_PASSES, timeZone, LONGEST_SET_UP_MINUTES, FEWEST_PASSES],
+     from timed group by 1, 2`,
+    [NEWEST_PASSES, timeZone, LONGEST_SET_UP_MINUTES],
   );
-  return new Map(
-    (rows as { code: string; id: string; passes: number; minutes: number }[]).map(({ passes, minutes, ...one }) => [
-      pastKey(one),
-      { passes, minutes: Math.max(1, Math.ceil(minutes)) },
-    ]),
-  );
+  return rows;
 }

@@ -16,7 +16,13 @@ export interface Estimate {
   fromPasses: number | null;
 }
 
-export const pastKey = (definition: { code: string; id: string }): string => `${definition.code} ${definition.id}`;
+const pastKey = ({ code, id }: { code: string; id: string }): string => `${code} ${id}`;
+
+/** By code and id, editions of a code together; whole minutes, upwards. */
+export const pastDurations = (
+  durations: readonly (PastDuration & { code: string; id: string })[],
+): ReadonlyMap<string, PastDuration> =>
+  new Map(durations.map((one) => [pastKey(one), { minutes: Math.max(1, Math.ceil(one.minutes)), passes: one.passes }]));
 
 /** Minutes that a sheet will take: from the organisation's past where it is long enough, else the estimate of the definition. */
 export function estimateOf(

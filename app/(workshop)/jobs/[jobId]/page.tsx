@@ -4,17 +4,22 @@ import { notFound } from 'next/navigation';
 import { cache } from 'react';
 import { JobConditions } from '@/components/jobs/job-conditions';
 import { JobPeople, JobReports, NotInPlan } from '@/components/jobs/job-side';
+import { KeepTemplate } from '@/components/jobs/keep-template';
+import { OpenedParts } from '@/components/jobs/opened-parts';
 import { TemperatureLog } from '@/components/jobs/temperature-log';
 import { WaitingForYou } from '@/components/jobs/waiting-for-you';
-import { nextSheet, pathSheets } from '@/components/tables/path-sheets';
-import { PlanPath } from '@/components/tables/plan-path';
+import { minutesLeft, nextSheet, pathSheets } from '@/components/tables/path-sheets';
+import { type PathSheet, PlanPath } from '@/components/tables/plan-path';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Nameplate } from '@/components/ui/nameplate';
 import { inScope } from '@/db/client';
 import { type JobBoard, jobBoard } from '@/db/read-models/job-board';
+import { testDurations } from '@/db/read-models/test-durations';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
 import { dayIn, dayWords, todayIn } from '@/lib/dates';
+import { minutesWords, pastDurations } from '@/lib/planning/estimate-minutes';
+import { machineParts } from '@/lib/planning/machine-parts';
 import { checkFindings } from '@/lib/reporting/check-findings';
 import { formatTime } from '@/lib/reporting/format-time';
 import { sheetState } from '@/lib/reporting/sheet-state';
@@ -26,9 +31,12 @@ type Params = { params: Promise<{ jobId: string }> };
 const load = cache(async (jobId: string) => {
   const viewer = await requireViewer();
   if (!can(viewer.roles, 'job.read') || !isId.safeParse(jobId).success) notFound();
-  const board = await inScope(scopeOf(viewer), (trx) => jobBoard(trx, jobId));
+  const { board, durations } = await inScope(scopeOf(viewer), async (trx) => ({
+    board: await jobBoard(trx, jobId),
+    durations: await testDurations(trx, viewer.timeZone),
+  }));
   if (!board) notFound();
-  return { viewer, board };
+  return { viewer, board, past: pastDurations(durations) };
 });
 
 export async function generateMetadata({ params }: Params): Promise<Metadata> {
@@ -37,7 +45,8 @@ export async function generateMetadata({ params }: Params): Promise<Metadata> {
 }
 
 export default async function JobPage({ params }: Params) {
-  const { viewer, board } = await load((await params).jobId);
+  const { viewer, board, past } = await load((await params).jobId);
+  const lines = pathSheets(board.sheets, past);
   const { job, machine, customer, sheets } = board;
   const may = {
     measure: can(viewer.roles, 'sheet.measure'),
@@ -87,6 +96,13 @@ export default async function JobPage({ params }: Params) {
               conditions={job.conditions}
               mayChange={may.manage && open}
             />
+            <OpenedParts
+              jobId={job.id}
+              version={job.version}
+              parts={machineParts(job.makeUp)}
+              conditions={job.componentConditions}
+              mayChange={may.manage && open}
+            />
             <TemperatureLog
               jobId={job.id}
               mayAdd={may.measure && open}
@@ -99,15 +115,18 @@ export default async function JobPage({ params }: Params) {
             />
             <JobPeople people={board.people} />
             <JobFacts board={board} />
+            {may.manage && job.planMadeAt !== null && (
+              <KeepTemplate jobId={job.id} model={`${machine.manufacturer} ${machine.model}`} />
+            )}
           </div>
         </div>
         <div className="max-lg:order-2 lg:row-span-2 lg:row-start-1">
           <div className="mb-1 flex flex-wrap items-baseline gap-x-4">
             <h1 className="text-2xl font-semibold">The plan, in working order</h1>
-            {sheets.length > 0 && <p className="text-sm text-ink2">{progressWords(board, viewer.timeZone)}</p>}
+            {sheets.length > 0 && <p className="text-sm text-ink2">{progressWords(board, lines, viewer.timeZone)}</p>}
           </div>
           {sheets.length > 0 ? (
-            <PlanPath jobId={job.id} sheets={pathSheets(sheets)} />
+            <PlanPath jobId={job.id} sheets={lines} />
           ) : (
             <EmptyState title="No plan yet">
               The plan is made from the machine’s make-up: every test that fits, for every component, with its tolerance
@@ -133,14 +152,16 @@ function linkableSheets({ job, sheets }: JobBoard): string[] {
     .map(({ id }) => id);
 }
 
-/** `31 of 47 measured · day 3`. */
-function progressWords({ job, sheets }: JobBoard, timeZone: string): string {
+/** `31 of 47 measured · day 3 · about 4 h 30 min to measure`. */
+function progressWords({ job, sheets }: JobBoard, lines: PathSheet[], timeZone: string): string {
   const states = sheets.map((sheet) => sheetState(sheet).state);
   const planned = states.filter((state) => state !== 'left-out').length;
   const measured = states.filter((state) => state === 'found' || state === 'left').length;
   const day = Math.floor((Date.parse(todayIn(timeZone)) - Date.parse(job.startsOn)) / 86_400_000) + 1;
   const running = job.state === 'open' && day >= 1 ? ` · day ${day}` : '';
-  return `${measured} of ${planned} measured${running}`;
+  const minutes = minutesLeft(lines);
+  const left = job.state === 'open' && minutes > 0 ? ` · about ${minutesWords(minutes)} to measure` : '';
+  return `${measured} of ${planned} measured${running}${left}`;
 }
 
 function JobFacts({ board: { job } }: { board: JobBoard }) {

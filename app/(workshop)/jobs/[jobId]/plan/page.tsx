@@ -1,8 +1,7 @@
 import type { Metadata } from 'next';
 import { notFound, redirect } from 'next/navigation';
-import type { ProposedTest } from '@/components/jobs/plan-choices';
+import { OpenedParts } from '@/components/jobs/opened-parts';
 import { PlanMaker } from '@/components/jobs/plan-maker';
-import { toleranceWords } from '@/components/sheet/tolerance-words';
 import { LinkButton } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Nameplate } from '@/components/ui/nameplate';
@@ -12,14 +11,13 @@ import { findJob } from '@/db/queries/jobs';
 import { machineHead } from '@/db/read-models/sheet-view';
 import { can } from '@/lib/auth/permissions';
 import { requireViewer, scopeOf } from '@/lib/auth/session';
-import { groupProposals } from '@/lib/planning/group-proposals';
-import { confirmationWords, isSettled } from '@/lib/planning/is-settled';
-import { provenanceWords } from '@/lib/reporting/record-words';
+import { machineParts } from '@/lib/planning/machine-parts';
+import { anyTouched } from '@/lib/planning/what-follows';
 import { id as isId } from '@/lib/schemas/common';
 import { purposes } from '@/lib/schemas/job';
-import { proposalsNow } from '@/lib/services/make-plan';
-import { codeTitle } from '@/standards/registry';
-import type { PlannedSheet } from '@/standards/types';
+import { closedBecause } from '@/lib/services/keep-readings';
+import { planMaking } from '@/lib/services/plan-making';
+import { proposedTests, startChoices } from './proposed-tests';
 
 export const metadata: Metadata = { title: 'Make the plan' };
 
@@ -29,13 +27,15 @@ export default async function PlanPage({ params }: { params: Promise<{ jobId: st
   if (!can(viewer.roles, 'job.manage') || !isId.safeParse(jobId).success) notFound();
   const found = await inScope(scopeOf(viewer), async (trx) => {
     const job = await findJob(trx, jobId);
-    return job && { job, machine: await machineHead(trx, job.machineId), proposals: await proposalsNow(trx, job) };
+    if (!job) return undefined;
+    const machine = await machineHead(trx, job.machineId);
+    return { job, machine, making: job.planMadeAt ? null : await planMaking(trx, job, viewer.timeZone) };
   });
   if (!found?.machine) notFound();
-  const { job, machine, proposals } = found;
+  const { job, machine, making } = found;
   // Once made, the plan stands on the board; single tests are left out on their sheets.
-  if (job.planMadeAt) redirect(`/jobs/${jobId}`);
-  const tests = proposedTests(proposals, job.refuseUnconfirmed);
+  if (!making) redirect(`/jobs/${jobId}`);
+  const tests = proposedTests(making, job.refuseUnconfirmed);
   return (
     <>
       <Nameplate
@@ -59,30 +59,22 @@ export default async function PlanPage({ params }: { params: Promise<{ jobId: st
           Its make-up names no spindle or axis that a test of the catalogue is for.
         </EmptyState>
       ) : (
-        <PlanMaker jobId={jobId} tests={tests} />
+        <>
+          <OpenedParts
+            jobId={jobId}
+            version={job.version}
+            parts={machineParts(job.makeUp)}
+            conditions={job.componentConditions}
+            mayChange={closedBecause(job.state) === null}
+          />
+          <PlanMaker
+            jobId={jobId}
+            tests={tests}
+            starts={startChoices(making, viewer.timeZone)}
+            opened={anyTouched(job.componentConditions)}
+          />
+        </>
       )}
     </>
   );
-}
-
-const proposedTests = (proposals: PlannedSheet[], refuseUnconfirmed: boolean): ProposedTest[] =>
-  groupProposals(proposals).flatMap(({ title, sheets }) =>
-    sheets.map((sheet) => proposedTest(title, sheet, refuseUnconfirmed)),
-  );
-
-function proposedTest(group: string, sheet: PlannedSheet, refuseUnconfirmed: boolean): ProposedTest {
-  const { turret, axis, spindle, reference, tailstock } = sheet.component;
-  const { tolerance } = sheet;
-  return {
-    key: sheet.key,
-    group,
-    title: sheet.title,
-    components: [turret, axis, spindle, reference, tailstock].filter((one) => one !== undefined),
-    code: `${codeTitle(sheet.definition.code, sheet.definition.edition)} · ${sheet.definition.id}`,
-    tolerance: toleranceWords(tolerance, sheet.direction),
-    foundBy: tolerance?.foundBy ?? null,
-    provenance: tolerance && (confirmationWords(tolerance) ?? provenanceWords[tolerance.provenance.kind]),
-    unconfirmed: tolerance?.provenance.kind === 'from-memory' && !tolerance.confirmation,
-    refused: refuseUnconfirmed && !isSettled(tolerance),
-  };
 }
