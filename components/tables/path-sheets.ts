@@ -1,4 +1,3 @@
-import { componentIds as allComponentIds } from '@/lib/planning/component-words';
 import { estimateOf, type PastDuration } from '@/lib/planning/estimate-minutes';
 import { USUAL_MINUTES } from '@/lib/planning/plan-sheets';
 import { passKindWords } from '@/lib/reporting/record-words';
@@ -71,7 +70,8 @@ function lineOf(sheet: StoredSheet): Pick<PathSheet, 'mark' | 'words' | 'result'
 /** `T1 · S1 · Z1`: the ids that the title does not name. */
 export function componentIds(component: BoundComponent, title: string): string {
   const named = new Set(title.split(/[^A-Za-z0-9]+/));
-  return allComponentIds(component)
-    .filter((id) => !named.has(id))
+  const { turret, axis, spindle, reference, tailstock, guideBush, toolChanger, rotary } = component;
+  return [turret, axis, spindle, reference, tailstock, guideBush, toolChanger, rotary]
+    .filter((id) => id !== undefined && !named.has(id))
     .join(' · ');
 }
