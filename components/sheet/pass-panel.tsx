@@ -5,6 +5,7 @@ import { FieldTables, SetUpFields } from './field-tables';
 import { LivePlot, LiveResult } from './live-result';
 import { useEvaluated, useOpenPass } from './sheet-context';
 import type { SheetData } from './sheet-data';
+import { TextImportButton } from './text-import/text-import-button';
 import { useEntry } from './use-entry';
 
 /** Methods whose result carries a sign: their limit rule has zero in the middle, also while it is empty. */
@@ -34,6 +35,7 @@ export function PassPanel(props: {
   return (
     <div role="tabpanel" id={panelId} aria-labelledby={tabId}>
       {linked && <p className="py-2 text-ink2">As left is declared to be as found, reading for reading:</p>}
+      {!linked && <TextImportButton definition={data.definition} say={say} />}
       <div {...entry}>
         <SetUpFields />
         <div className={places[place]}>

@@ -114,9 +114,13 @@ export class SheetSession {
     this.write(passId, changed, source);
   }
 
-  /** Fills fields at once: a pasted column, one undo. */
-  fill(passId: string, fills: readonly { pointer: CellPointer; text: string }[], source: Change['source']): void {
-    for (const { pointer, text } of fills) this.show(passId, pointer, text);
+  /** Fills fields at once: a pasted column, a whole text; one undo. `unit`: where the field may not be there yet. */
+  fill(
+    passId: string,
+    fills: readonly { pointer: CellPointer; text: string; unit?: Unit | null }[],
+    source: Change['source'],
+  ): void {
+    for (const { pointer, text, unit } of fills) this.show(passId, pointer, text, unit);
     this.commit(
       passId,
       fills.map(({ pointer }) => pointer),
@@ -161,12 +165,18 @@ export class SheetSession {
     return made;
   }
 
-  private evaluate(passId: string): Evaluated {
+  /** Everything that stands in the fields of a set of readings. */
+  cellsOf(passId: string): Cells {
     const cells: Cells = {};
     for (const pointer of this.passes.get(passId) ?? []) {
       const cell = this.current.get(cellKey(passId, pointer));
       if (cell && cell.text !== '') cells[pointer] = cell;
     }
+    return cells;
+  }
+
+  private evaluate(passId: string): Evaluated {
+    const cells = this.cellsOf(passId);
     const fields = sheetFields(this.definition, cells);
     const outcome = judgeSheet(this.rules, this.definition, cells);
     const problems = new Map(outcome.problems.map((problem) => [problem.pointer, problem]));
@@ -194,8 +204,8 @@ export class SheetSession {
     void this.log.commit(
       this.sheet,
       pointers.map((pointer) => {
-        const text = this.textOf(passId, pointer);
-        const change: Change = { passId, cellId: pointer, text, unit: this.unitFor(passId, pointer, text), source };
+        const { text, unit } = this.cellAt(passId, pointer);
+        const change: Change = { passId, cellId: pointer, text, unit, source };
         return { change, known: this.known.get(cellKey(passId, pointer)) };
       }),
     );

@@ -10,15 +10,19 @@ export function Dialog(props: {
   onOpenChange: (open: boolean) => void;
   title: string;
   description?: string;
+  /** For tables: as wide as a tablet held upright allows, and wider on a desk. */
+  wide?: boolean;
   children: ReactNode;
 }) {
-  const { open, onOpenChange, title, description, children } = props;
+  const { open, onOpenChange, title, description, wide, children } = props;
   return (
     <Primitive.Root open={open} onOpenChange={onOpenChange}>
       <Primitive.Portal>
         <Primitive.Overlay className="fixed inset-0 z-40 bg-[rgb(16_22_28/0.55)]" />
         <Primitive.Content
-          className="fixed left-1/2 top-[8vh] z-50 max-h-[84vh] w-[min(36rem,calc(100vw-2rem))] -translate-x-1/2 overflow-y-auto rounded border-[1.5px] border-ink bg-paper p-6"
+          className={`fixed left-1/2 top-[8vh] z-50 max-h-[84vh] -translate-x-1/2 overflow-y-auto rounded border-[1.5px] border-ink bg-paper p-6 ${
+            wide ? 'w-[min(68rem,calc(100vw-2rem))]' : 'w-[min(36rem,calc(100vw-2rem))]'
+          }`}
           {...(description ? {} : { 'aria-describedby': undefined })}
         >
           <div className="mb-4 flex items-start justify-between gap-4">
