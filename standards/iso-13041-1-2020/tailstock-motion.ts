@@ -105,7 +105,7 @@ export function quillMotion(plane: LathePlane): TestDefinition {
     usualMistakes: [
       'Reading with the quill unclamped, where it hangs in its bore.',
       'Counting the positions from the free end, so that the sign comes out the other way round.',
-      'A worn place of the quill just where the clamp sits, taken for an error of the bore.',
+      'A worn place of the quill where the clamp sits, taken for an error of the bore.',
     ],
     setUpTogether: 'indicator on the {axis} slide at {tailstock}',
     minutes: 15,
