@@ -3,11 +3,19 @@ import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
 import type { PlannedSheet, TestDefinition } from '@/standards/types';
 import { planSheets } from './plan-sheets';
 
+export interface ExampleMachine {
+  title: string;
+  makeUp: MakeUp;
+}
+
 /** A sheet on which a definition can be shown: on one of the given machines, else on one of those to start from; null: on none. */
-export function exampleSheet(definition: TestDefinition, machines: readonly MakeUp[] = []): PlannedSheet | null {
-  for (const makeUp of [...machines, ...startingMakeUps.map((start) => start.makeUp)]) {
-    const [first] = planSheets(makeUp, [definition]);
-    if (first) return first;
+export function exampleSheet(
+  definition: TestDefinition,
+  machines: readonly ExampleMachine[] = [],
+): { sheet: PlannedSheet; machine: ExampleMachine } | null {
+  for (const machine of [...machines, ...startingMakeUps]) {
+    const [sheet] = planSheets(machine.makeUp, [definition]);
+    if (sheet) return { sheet, machine };
   }
   return null;
 }

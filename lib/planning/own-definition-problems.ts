@@ -170,8 +170,9 @@ function placeProblems(form: OwnDefinitionForm): CompositionProblem[] {
  */
 function trialProblems(definition: TestDefinition): CompositionProblem[] {
   const wrong = (detail: string): CompositionProblem[] => [{ pointer: '/layout', detail }];
-  const sheet = exampleSheet(definition);
-  if (!sheet) return [];
+  const example = exampleSheet(definition);
+  if (!example) return [];
+  const { sheet } = example;
   const fields = sheetFields(definition, sheet.setUp);
   const all = allFields(fields);
   if (fields.order.length === 0) return wrong('The sheet has no field to be read.');

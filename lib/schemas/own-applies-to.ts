@@ -1,6 +1,8 @@
 import { z } from 'zod';
 
 const plane = z.enum(['ZX', 'YZ', 'XY'], 'Choose a plane.');
+/** Empty: none. */
+const optionalPlane = z.union([z.literal('').transform(() => undefined), plane]).optional();
 const planes = z.array(plane).min(1, 'Choose at least one plane.').max(3);
 const turretTypes = z.array(z.enum(['turret', 'tool-post', 'gang-slide'])).max(3);
 const spindleTypes = z
@@ -36,7 +38,7 @@ export const ownAppliesTo = z.discriminatedUnion(
     }),
     z.strictObject({ kind: z.literal('turret'), types: some(turretTypes) }),
     z.strictObject({ kind: z.literal('turret-and-spindle') }),
-    z.strictObject({ kind: z.literal('turret-and-axis'), role, plane: plane.optional(), types: some(turretTypes) }),
+    z.strictObject({ kind: z.literal('turret-and-axis'), role, plane: optionalPlane, types: some(turretTypes) }),
     z.strictObject({ kind: z.literal('turret-axis-and-spindle'), role }),
     z.strictObject({ kind: z.literal('turning-turret-and-spindle') }),
     z.strictObject({
@@ -48,8 +50,8 @@ export const ownAppliesTo = z.discriminatedUnion(
     z.strictObject({ kind: z.literal('tool-spindle') }),
     z.strictObject({ kind: z.literal('tool-spindle-and-spindle') }),
     z.strictObject({ kind: z.literal('tailstock') }),
-    z.strictObject({ kind: z.literal('tailstock-and-axis'), plane: plane.optional() }),
-    z.strictObject({ kind: z.literal('tailstock-and-spindle'), plane: plane.optional() }),
+    z.strictObject({ kind: z.literal('tailstock-and-axis'), plane: optionalPlane }),
+    z.strictObject({ kind: z.literal('tailstock-and-spindle'), plane: optionalPlane }),
     z.strictObject({ kind: z.literal('guide-bush') }),
     z.strictObject({ kind: z.literal('guide-bush-and-spindle') }),
     z.strictObject({ kind: z.literal('guide-bush-and-axis'), plane }),

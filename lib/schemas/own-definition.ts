@@ -66,4 +66,5 @@ export type OwnDefinitionInput = z.input<typeof ownDefinitionFields>;
 export type OwnDefinitionForm = z.output<typeof ownDefinitionFields>;
 
 export const newOwnDefinition = z.strictObject({ id: ownId, form: ownDefinitionFields });
+export const newOwnVersion = z.strictObject({ form: ownDefinitionFields });
 export const ownDefinitionParams = z.object({ id: ownId });

@@ -22,7 +22,7 @@ import type { TestDefinition } from '@/standards/types';
  * @throws DomainError 409 where the id is taken, also by a test that was withdrawn; 422 at the fields that do not hold together
  */
 export async function composeOwnTest(db: Db, viewer: Viewer, id: string, form: OwnDefinitionForm) {
-  refuseProblems(form, '/form');
+  refuseProblems(form);
   await lockOwnDefinitions(db);
   if ((await ownDefinitionHistory(db, id)).length > 0) {
     const detail = `There is an own test ${id} already. Choose another id, or make a new version of it.`;
@@ -45,7 +45,7 @@ export async function composeOwnVersion(
   basedOn: number,
   form: OwnDefinitionForm,
 ): Promise<TestDefinition> {
-  refuseProblems(form, '');
+  refuseProblems(form);
   await lockOwnDefinitions(db);
   const newest = await newestVersion(db, id);
   if (newest.version !== basedOn) throw changedMeanwhile();
@@ -97,8 +97,8 @@ async function proposeOwnTests(db: Db): Promise<void> {
   if (!(await updateOrganisation(db, version, { codes: next }))) throw changedMeanwhile();
 }
 
-function refuseProblems(form: OwnDefinitionForm, at: string): void {
+function refuseProblems(form: OwnDefinitionForm): void {
   const problems = ownDefinitionProblems(form);
   if (problems.length > 0)
-    throw invalid(problems.map(({ pointer, detail }) => ({ pointer: `${at}${pointer}`, detail })));
+    throw invalid(problems.map(({ pointer, detail }) => ({ pointer: `/form${pointer}`, detail })));
 }

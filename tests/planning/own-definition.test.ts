@@ -51,7 +51,7 @@ describe('a composed test', () => {
     expect(definition.cautions).toContain('maker-and-local-rules-first');
     // Plain data: it comes back from the database as it went in.
     expect(JSON.parse(JSON.stringify(definition))).toEqual(definition);
-    const sheet = exampleSheet(definition)!;
+    const { sheet } = exampleSheet(definition)!;
     const outcome = judgeSheet(
       { definition: sheet.definition, tolerance: sheet.tolerance, direction: 'either', decisionRule: 'simple' },
       definition,
@@ -150,7 +150,7 @@ describe.each(Object.keys(appliesToChoices) as AppliesTo['kind'][])('done on %s'
     const found = startingMakeUps.flatMap(({ makeUp }) => bind({ kind, ...extras } as unknown as AppliesTo, makeUp));
     for (const component of found)
       for (const part of parts) if (part !== 'channel') expect(component[part], `${kind} ${part}`).toBeDefined();
-    expect(titleParts(kind).every((part) => parts.includes(part))).toBe(true);
+    expect(titleParts(kind)).toEqual(parts);
     const { can, usual } = restsOn(kind);
     for (const list of ['components', 'moved', 'positioned'] as const)
       for (const one of usual[list]) expect(can[list]).toContain(one);
