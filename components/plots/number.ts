@@ -9,12 +9,15 @@ export function coordinate(text: string): number {
 }
 
 /**
- * A limit as it is written beside a drawing: at most a tenth of a micrometre, cut off and never rounded up, so that it never looks
+ * A limit as it is written beside a drawing: at most a tenth (two figures where it is below one), cut off and never rounded up, so that it never looks
  * wider than it is.
  */
 export function shortLimit(limitUm: string): string {
   const parts = /^(-?\d+)\.(\d)\d*$/.exec(limitUm);
   if (!parts) return limitUm;
+  // Below one a tenth would be coarse, or nothing at all: two figures after the zeros.
+  const small = /^-?0\.0*\d{1,2}/.exec(limitUm);
+  if (small && /[1-9]/.test(small[0])) return small[0].replace(/0+$/, '');
   return parts[2] === '0' ? (parts[1] ?? '') : `${parts[1]}.${parts[2]}`;
 }
 

@@ -16,13 +16,9 @@ export interface Reading {
   xText: string;
 }
 
-/** Lines of one plot are told apart by dash and marker, never by colour alone. */
-export const LINE_STYLES: { dash?: number[]; marker: Marker }[] = [
-  { marker: 'plus' },
-  { marker: 'cross', dash: [7, 3] },
-  { marker: 'square', dash: [2, 3] },
-  { marker: 'triangle', dash: [7, 3, 2, 3] },
-];
+/** Lines of one plot are told apart by dash and marker, never by colour alone: sixteen pairs before one comes again. */
+const MARKERS: Marker[] = ['plus', 'cross', 'square', 'triangle'];
+const DASHES: (number[] | undefined)[] = [undefined, [7, 3], [2, 3], [7, 3, 2, 3]];
 
 type Marker = 'plus' | 'cross' | 'square' | 'triangle';
 
@@ -40,8 +36,9 @@ export function readingsBySeries(series: PlotSeries): { name: string | null; rea
   return [...groups].map(([name, readings]) => ({ name, readings }));
 }
 
-export function styleOf(index: number) {
-  return LINE_STYLES[index % LINE_STYLES.length] as (typeof LINE_STYLES)[number];
+export function styleOf(index: number): { marker: Marker; dash?: number[] } {
+  const dash = DASHES[(index + Math.floor(index / MARKERS.length)) % DASHES.length];
+  return { marker: MARKERS[index % MARKERS.length] as Marker, ...(dash ? { dash } : {}) };
 }
 
 /** A small mark at a reading. */

@@ -3,6 +3,8 @@ import { polyline, text, wordWidth } from '@/components/plots/drawing-parts';
 import { LABEL_PX, marker, styleOf } from '@/components/plots/plot-frame';
 
 const ROW_PX = 18;
+/** One row has room in the height that a plot is given; for more rows the plot grows. */
+const ONE_ROW_PX = ROW_PX + 2;
 const SAMPLE_PX = 22;
 
 /** Names of the series of a plot with their dash and marker, in as many rows as it takes, below the unit. */
@@ -32,4 +34,9 @@ export function plotLegend(
     x += width + 14;
   });
   return { items, heightPx: y - 28 + ROW_PX + 2 };
+}
+
+/** By how much a plot has to be higher than asked, so that a legend of several rows takes nothing from what is drawn. */
+export function legendGrowth(names: (string | null)[], widthPx: number): number {
+  return Math.max(0, plotLegend(names, 0, widthPx).heightPx - ONE_ROW_PX);
 }

@@ -69,13 +69,31 @@ function trace(
   r: (value: number) => number,
 ): DrawingItem[] {
   const style = styleOf(index);
-  const turn = readings.filter(
-    (reading, at) => readings.findIndex((other) => (other.x - reading.x) % 360 === 0) === at,
-  );
-  const sorted = [...turn].sort((a, b) => a.x - b.x);
+  const { readings: sorted, whole } = inOneTurn(readings);
   const points = sorted.map((reading) => onCircle(cx, cy, r(reading.y), -reading.x));
-  const marks = points.length > 40 ? [] : points.flatMap((point) => marker(style.marker, point));
-  return [polyline(points, { stroke: 'blue', widthPx: 2, dash: style.dash, closed: true }), ...marks];
+  const marks = points.length > MARKED_READINGS ? [] : points.flatMap((point) => marker(style.marker, point));
+  return [polyline(points, { stroke: 'blue', widthPx: 2, dash: style.dash, closed: whole }), ...marks];
+}
+
+/** More readings than this are a line only: markers would hide it. */
+const MARKED_READINGS = 40;
+/** A gap between two angles so many times as wide as any other: the trace is an arc that begins behind it. */
+const GAP = 1.5;
+
+/** Readings of one turn in the order of their angles, each angle once; of an arc from its beginning to its end. */
+function inOneTurn(readings: Reading[]): { readings: Reading[]; whole: boolean } {
+  const byAngle = new Map<number, Reading>();
+  for (const reading of readings) {
+    const angle = ((reading.x % 360) + 360) % 360;
+    if (!byAngle.has(angle)) byAngle.set(angle, reading);
+  }
+  const turn = [...byAngle].sort((a, b) => a[0] - b[0]);
+  const gaps = turn.map(([angle], at) => (turn[at + 1]?.[0] ?? (turn[0]?.[0] ?? 0) + 360) - angle);
+  const widest = gaps.indexOf(Math.max(...gaps));
+  const others = gaps.filter((_, at) => at !== widest);
+  const whole = turn.length < 3 || (gaps[widest] ?? 0) <= GAP * Math.max(...others);
+  const ordered = whole ? turn : [...turn.slice(widest + 1), ...turn.slice(0, widest + 1)];
+  return { readings: ordered.map(([, reading]) => reading), whole };
 }
 
 function angleNames([cx, cy]: readonly [number, number], radius: number): DrawingItem[] {

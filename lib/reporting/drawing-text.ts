@@ -65,6 +65,9 @@ export function limitRuleWords(rule: {
   return parts.join(', ');
 }
 
+/** Unit at the end of an axis's name: `deviation, ″`. */
+export const axisUnit = (label: string): string => label.match(/, ([^,]+)$/)?.[1]?.trim() ?? 'µm';
+
 /** What a plot shows, for somebody who cannot see it. */
 export function plotWords(series: PlotSeries, toleranceUm: string | null): string {
   const names = [...new Set(series.points.flatMap((point) => (point.series ? [point.series] : [])))];
@@ -73,6 +76,6 @@ export function plotWords(series: PlotSeries, toleranceUm: string | null): strin
   ];
   if (names.length) parts.push(names.join(', '));
   if (series.fit) parts.push('fitted line dashed');
-  if (toleranceUm !== null) parts.push(`tolerance ${toleranceUm} µm`);
+  if (toleranceUm !== null) parts.push(`tolerance ${toleranceUm} ${axisUnit(series.yLabel)}`);
   return parts.join('; ');
 }

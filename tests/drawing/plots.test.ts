@@ -148,3 +148,78 @@ it('draws nothing without readings and refuses what is not a figure', () => {
     /Not a figure/,
   );
 });
+
+describe('plots of new kinds of readings', () => {
+  const round = (angles: number[], y: (deg: number) => string, series?: string): PlotSeries['points'] =>
+    angles.map((deg) => ({ x: `${deg}`, y: y(deg), ...(series ? { series } : {}) }));
+  const angles = (count: number, over = 360) => Array.from({ length: count }, (_, k) => (k * over) / count);
+  const polar = (points: PlotSeries['points']): PlotSeries => ({
+    kind: 'polar',
+    xLabel: 'angle, °',
+    yLabel: 'radius, µm',
+    points,
+  });
+  const closed = (series: PlotSeries) =>
+    pathsOf(series, null).filter((item) => item.widthPx === 2 && item.stroke === 'blue' && item.d.endsWith('Z')).length;
+
+  it.each([4, 36, 360])('closes a whole turn of %i readings', (count) => {
+    expect(closed(polar(round(angles(count), (deg) => `${deg % 7}`)))).toBe(1);
+  });
+
+  it('leaves an arc open, and begins it behind the gap also where it goes over 0°', () => {
+    expect(closed(polar(round(angles(12, 100), (deg) => `${deg % 7}`)))).toBe(0);
+    const over = polar(round([300, 330, 0, 30, 60], () => '-3'));
+    expect(closed(over)).toBe(0);
+    const trace = segmentsOf(pathsOf(over, null).find((item) => item.widthPx === 2)!.d);
+    // 300° lies low at the right, 60° high: four pieces in a row, none across the middle.
+    expect(trace).toHaveLength(4);
+    expect(trace[0]![1]).toBeGreaterThan(trace[3]![3]);
+  });
+
+  it('draws two traces of 360 readings with negative figures inside the box, told apart by dash', () => {
+    const points = [
+      ...round(angles(360), (deg) => (-5 + 3 * Math.sin(deg)).toFixed(2), 'clockwise'),
+      ...round(angles(360), (deg) => (-5 - 3 * Math.sin(deg)).toFixed(2), 'counterclockwise'),
+    ];
+    const drawing = plotDrawing(polar(points), { ...size, toleranceUm: '10' });
+    expect(outside(drawing)).toEqual([]);
+    const traces = drawing.items.filter((item) => item.kind === 'path' && item.widthPx === 2);
+    expect(new Set(traces.map((item) => (item.kind === 'path' ? String(item.dash) : ''))).size).toBe(2);
+  });
+
+  it('grows with its legend: twelve series leave what is drawn as high as two', () => {
+    const of = (count: number): PlotSeries => ({
+      ...line,
+      points: Array.from({ length: count }, (_, row) =>
+        line.points.map((point) => ({ ...point, series: `y ${row * 50} mm` })),
+      ).flat(),
+    });
+    const drawn = (count: number) => plotDrawing(of(count), { widthPx: 270, heightPx: 190, toleranceUm: '10' });
+    const extent = (count: number) => {
+      const ys = drawn(count).items.flatMap((item) =>
+        item.kind === 'path' && item.stroke === 'hair' ? segmentsOf(item.d).map(([, y]) => y) : [],
+      );
+      return Math.max(...ys) - Math.min(...ys);
+    };
+    expect(extent(12)).toBeCloseTo(extent(2), 5);
+    expect(drawn(12).heightPx).toBeGreaterThan(190);
+    expect(outside(drawn(12))).toEqual([]);
+    const texts = { ...drawn(12), items: drawn(12).items.filter((item) => item.kind === 'text') };
+    expect(collisions(texts)).toEqual([]);
+    const styles = drawn(12)
+      .items.filter((item) => item.kind === 'path' && item.widthPx === 2)
+      .map((item) => (item.kind === 'path' ? String(item.dash) : ''));
+    expect(new Set(styles).size).toBe(4);
+  });
+
+  it('draws and names the tolerance in the unit of the axis', () => {
+    const seconds: PlotSeries = { ...line, yLabel: 'deviation, ″' };
+    const drawing = plotDrawing(seconds, { ...size, toleranceUm: '24.2406840554767604' });
+    const texts = drawing.items.flatMap((item) => (item.kind === 'text' ? [item.text] : []));
+    expect(texts).toContain('T 5');
+    expect(drawing.description).toContain('tolerance 5 ″');
+    const slopes = plotDrawing({ ...line, yLabel: 'pitch, mm/m' }, { ...size, toleranceUm: '40' });
+    expect(slopes.description).toContain('tolerance 0.04 mm/m');
+    expect(slopes.items.some((item) => item.kind === 'text' && item.text === 'T 0.04')).toBe(true);
+  });
+});
