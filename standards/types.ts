@@ -101,8 +101,8 @@ export type AppliesTo =
   | { kind: 'turret-axis-and-spindle'; role: 'longitudinal' | 'cross' | 'vertical' }
   /** Every station of a gang slide or post with each work spindle. */
   | { kind: 'station-and-spindle'; types: TurretType[] }
-  /** Turrets with driven tools. */
-  | { kind: 'driven-tools' }
+  /** Turrets with driven tools; `points`: only those whose driven tools point that way. */
+  | { kind: 'driven-tools'; points?: 'axial' | 'radial' }
   /** Turret with driven tools and each work spindle it works at. */
   | { kind: 'driven-tools-and-spindle' }
   /** Rotary axes by letter; component: rotary, and spindle or turret that it turns. */

@@ -6,8 +6,10 @@ export const turretsOf = (types: readonly TurretType[] | undefined, makeUp: Make
   makeUp.turrets.filter(({ type }) => !types || types.includes(type));
 
 /** Make-ups from before driven tools were asked for have none. */
-export const withDrivenTools = (makeUp: MakeUp): Turret[] =>
-  makeUp.turrets.filter(({ drivenTools = 'none' }) => drivenTools !== 'none');
+export const withDrivenTools = (makeUp: MakeUp, points?: 'axial' | 'radial'): Turret[] =>
+  makeUp.turrets.filter(({ drivenTools = 'none' }) =>
+    points === undefined ? drivenTools !== 'none' : drivenTools === points || drivenTools === 'both',
+  );
 
 export const alone = (turrets: Turret[]): BoundComponent[] =>
   turrets.map(({ id, channel }) => ({ turret: id, channel }));

@@ -60,7 +60,7 @@ export function bind(appliesTo: AppliesTo, makeUp: MakeUp): BoundComponent[] {
     case 'station-and-spindle':
       return stationsAtEachSpindle(turretsOf(appliesTo.types, makeUp));
     case 'driven-tools':
-      return alone(withDrivenTools(makeUp));
+      return alone(withDrivenTools(makeUp, appliesTo.points));
     case 'driven-tools-and-spindle':
       return atEachSpindle(withDrivenTools(makeUp));
     case 'rotary-axis':

@@ -40,7 +40,7 @@ export function toolAxis(kind: ToolSpindleKind, along: Along, plane: Plane, id: 
       'Turn the tool spindle by 180° by hand and read the same positions again. The mean of both drops run-out and tilt of the mandrel.',
       'The result is the least-squares slope of the means times the measuring length.',
     ],
-    appliesTo: kind.appliesTo,
+    appliesTo: kind === drivenTool ? { kind: 'driven-tools', points: way } : kind.appliesTo,
     method: 'parallelism',
     layout: {
       kind: 'angles-by-position',

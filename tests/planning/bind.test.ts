@@ -57,6 +57,8 @@ describe('what a test is bound to', () => {
       ['T:T1:S1:st1', 'T:T1:S1:st2', 'T:T1:S1:st3', 'T:T1:S1:st4', 'T:T1:S1:st5', 'T:T1:S1:st6'],
     ],
     [{ kind: 'driven-tools' }, channels, ['T:T1', 'T:T2', 'T:T3']],
+    [{ kind: 'driven-tools', points: 'axial' }, channels, ['T:T1', 'T:T2']],
+    [{ kind: 'driven-tools', points: 'radial' }, channels, ['T:T1', 'T:T3']],
     [{ kind: 'driven-tools-and-spindle' }, machine('turning-centre-sub-spindle'), ['T:T1:S1', 'T:T1:S2']],
     // A make-up that was stored before driven tools were asked for.
     [{ kind: 'driven-tools' }, workedMachine, []],

@@ -32,6 +32,26 @@ describe('linkMakeUp', () => {
     expect(linked.turrets[0]).toMatchObject({ worksAt: ['S1'], axes: ['X1', 'Z1'] });
   });
 
+  it('lets only a tool spindle ride on a turret, and only on one that the machine has', () => {
+    const form = start(0);
+    const spindle = { channel: 1, carriedBy: null };
+    form.spindles[0]!.onTurret = 'T1';
+    form.spindles.push(
+      { ...spindle, id: 'S3', type: 'tool', onTurret: 't1' },
+      { ...spindle, id: 'S4', type: 'tool', onTurret: 'T7' },
+      { ...spindle, id: 'S5', type: 'tool', onTurret: '', carriedBy: 'Z1' },
+      { ...spindle, id: 'S6', type: 'tool', carriedBy: 'Y9' },
+    );
+    const linked = makeUp.parse(linkMakeUp(form));
+    expect(linked.spindles.map(({ onTurret = null, carriedBy }) => [onTurret, carriedBy])).toEqual([
+      [null, null],
+      ['T1', null],
+      [null, null],
+      [null, 'Z1'],
+      [null, null],
+    ]);
+  });
+
   it('has a spindle carried by its Z-like axis first', () => {
     const linked = linkMakeUp(start(2));
     expect(linked.spindles.map(({ id, carriedBy }) => [id, carriedBy])).toEqual([

@@ -83,6 +83,36 @@ describe('make-up', () => {
       /Z2 is said to carry T2, not S2/,
     ],
     [
+      'a tool spindle on a turret that is none',
+      (m) => void m.spindles.push({ id: 'S3', type: 'tool', channel: 1, carriedBy: null, onTurret: 'T9' }),
+      'spindles.2.onTurret',
+      /T9, which is no turret/,
+    ],
+    [
+      'a work spindle on a turret',
+      (m) => {
+        m.spindles[1]!.onTurret = 'T2';
+      },
+      'spindles.1.onTurret',
+      /only a tool spindle/,
+    ],
+    [
+      'a tool changer by a name that is taken',
+      (m) => {
+        m.toolChanger = { id: 'T1', channel: 1 };
+      },
+      'toolChanger.id',
+      /T1 is already taken/,
+    ],
+    [
+      'a tool changer on an unknown channel',
+      (m) => {
+        m.toolChanger = { id: 'TC1', channel: 7 };
+      },
+      'toolChanger.channel',
+      /no channel 7/,
+    ],
+    [
       'an unknown channel',
       (m) => {
         m.spindles[0]!.channel = 3;
