@@ -236,4 +236,33 @@ export const startingMakeUps: { kind: MachineKind; title: string; makeUp: MakeUp
       barDiameterMm: '65',
     },
   },
+  {
+    kind: 'turning-centre',
+    title: 'Turning centre with one spindle and tailstock',
+    makeUp: {
+      kind: 'turning-centre',
+      sizeClass: { criterion: 'chuck-diameter', valueMm: '250' },
+      channels: [1],
+      linearAxes: [axis('X1', 'T1', '240'), axis('Z1', 'T1', '850')],
+      rotaryAxes: [],
+      spindles: [{ id: 'S1', type: 'main', channel: 1, carriedBy: null }],
+      turrets: [
+        {
+          id: 'T1',
+          type: 'turret',
+          channel: 1,
+          stations: 12,
+          axes: ['X1', 'Z1'],
+          worksAt: ['S1'],
+          drivenTools: 'none',
+        },
+      ],
+      tailstock: { id: 'TS1', channel: 1 },
+      guideBush: null,
+      toolChanger: null,
+      ...noSizes,
+      distanceBetweenCentresMm: '800',
+      chuckDiameterMm: '250',
+    },
+  },
 ];

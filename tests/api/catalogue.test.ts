@@ -3,7 +3,7 @@ import { GET as getTest } from '@/app/api/catalogue/[code]/[test]/route';
 import { GET as getCatalogue } from '@/app/api/catalogue/route';
 import { exampleComponent } from '@/lib/planning/catalogue';
 import { toleranceLines, toleranceUnit } from '@/lib/planning/tolerance-words';
-import { allDefinitions } from '@/standards/registry';
+import { allDefinitions, codes, codeTitle } from '@/standards/registry';
 import type { TestDefinition } from '@/standards/types';
 import { callRoute } from '@/tests/helpers/call-route';
 import { openTestWorkshop, type TestWorkshop } from '@/tests/helpers/test-workshop';
@@ -19,7 +19,9 @@ describe('the catalogue', () => {
     const { body } = await callRoute<{
       items: { slug: string; title: string; tests: Pick<TestDefinition, 'id' | 'tolerance'>[] }[];
     }>(getCatalogue, { as: workshop.people.customer });
-    expect(body.items.map(({ title }) => title)).toEqual(['ISO 13041-1:2020', 'common practice', 'ISO 13041-6:2009']);
+    expect(body.items.map(({ title }) => title)).toEqual(codes().map(({ code, edition }) => codeTitle(code, edition)));
+    expect(new Set(body.items.map(({ slug }) => slug)).size).toBe(body.items.length);
+    for (const { title, tests } of body.items) expect(tests.length, title).toBeGreaterThan(0);
     const tests = body.items.flatMap(({ tests }) => tests);
     expect(new Set(tests.map(({ id }) => id))).toEqual(new Set(allDefinitions().map(({ id }) => id)));
     for (const { id, tolerance } of tests) {
@@ -35,6 +37,11 @@ describe('the catalogue', () => {
       });
       expect(body.definition).toMatchObject({ id: 'AX-1a', method: 'parallelism', edition: '2020' });
     }
+    const older = await callRoute<{ definition: TestDefinition }>(getTest, {
+      as: workshop.people.inspector,
+      params: { code: 'iso-13041-1-2004', test: 'ax-1a' },
+    });
+    expect(older.body.definition).toMatchObject({ id: 'AX-1a', edition: '2004', testNumber: 'G3 a)' });
     const missing = await callRoute(getTest, {
       as: workshop.people.inspector,
       params: { code: 'iso-13041-1-2020', test: 'WP-1' },

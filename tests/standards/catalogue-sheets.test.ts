@@ -1,19 +1,19 @@
 import { describe, expect, it } from 'vitest';
 import { planSheets } from '@/lib/planning/plan-sheets';
+import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
 import { figures } from '@/lib/sheet/figures';
 import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import { allFields, sheetFields } from '@/lib/sheet/sheet-fields';
 import type { Cells, Field } from '@/lib/sheet/types';
 import { codes, currentDefinitions, findDefinition } from '@/standards/registry';
 import type { PlannedSheet, TestDefinition } from '@/standards/types';
-import { makeUps } from './whole-catalogue';
 
 /** Every sheet that any of the make-ups asks for, edition by edition, with the definition it is made from. */
-const planned = makeUps.flatMap(({ kind, makeUp }) =>
+const planned = startingMakeUps.flatMap(({ title, makeUp }) =>
   codes().flatMap(({ code, edition }) => {
     const tests = currentDefinitions().filter((one) => one.code === code && one.edition === edition);
     return planSheets(makeUp, tests).map((sheet) => ({
-      name: `${kind} ${code} ${edition} ${sheet.key}`,
+      name: `${sheet.key} of ${code} ${edition}, ${title}`,
       sheet,
       definition: definitionOf(sheet),
     }));
