@@ -27,7 +27,7 @@ export function StartFrom({ initial }: { initial: number }) {
   return (
     <fieldset>
       <legend className="font-semibold">Start from the kind that is nearest</legend>
-      <div className="mt-2 grid gap-2 sm:grid-cols-2 lg:grid-cols-5">
+      <div className="mt-2 grid gap-2 sm:grid-cols-2 lg:grid-cols-3">
         {startingMakeUps.map(({ title }, index) => (
           <button
             key={title}
