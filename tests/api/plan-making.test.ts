@@ -7,7 +7,10 @@ import { GET as getTemplates, POST as postTemplate } from '@/app/api/plan-templa
 import { POST as takeOperations } from '@/app/api/sheets/[id]/operations/route';
 import { PATCH as patchSheet } from '@/app/api/sheets/[id]/route';
 import { setJobState } from '@/db/queries/jobs';
+import { reportSource } from '@/db/read-models/report-source';
 import { newId } from '@/lib/id';
+import { openedWords } from '@/lib/reporting/opened-words';
+import { buildReport } from '@/lib/services/build-report';
 import type { PlannedSheet } from '@/standards/types';
 import { ifMatch } from '@/tests/helpers/call-route';
 import { type Asked, Workshop } from './workshop';
@@ -98,6 +101,29 @@ describe('what was opened', () => {
     const bed = (await planOf(jobId)).follows;
     expect(bed['AX-1a:Z1:S1']).toEqual(['Z1 moves on the bed, which was repaired']);
     expect(bed[nose]).toBeUndefined();
+  });
+
+  it('prints beside the component', async () => {
+    const { jobId } = await workshop.plannedJob(worked, [nose]);
+    const draft = async () => {
+      const source = await workshop.as('inspector', (trx) => reportSource(trx, jobId));
+      return buildReport(source!, null).machine.components;
+    };
+    expect((await draft()).every((component) => !('condition' in component))).toBe(true);
+    await say(jobId, await versionOf(jobId), {
+      T2: { condition: 'refitted', text: 'after the collision' },
+      C1: { condition: 'untouched', text: null },
+      bed: { condition: 'repaired', text: 'scraped' },
+    });
+    const printed = await draft();
+    expect(printed.find(({ id }) => id === 'T2')).toMatchObject({
+      what: expect.stringContaining('turret'),
+      condition: 'removed and refitted, after the collision',
+    });
+    expect(openedWords(printed)).toBe(
+      'T2 removed and refitted, after the collision · C1 untouched · bed repaired, scraped',
+    );
+    expect(printed.find(({ id }) => id === 'S1')).not.toHaveProperty('condition');
   });
 
   it('is of a component that the machine has, said over the version that was seen, until the report is out', async () => {
