@@ -29,7 +29,7 @@ function subSpindleParallel(plane: Extract<Plane, 'ZX' | 'YZ'>): TestDefinition 
       kind: 'angles-by-position',
       anglesDeg: ['0', '180'],
       positionsMm: ['20', '80', '140', '200', '260'],
-      positionName: 'z',
+      positionName: 'along the mandrel',
       sag: !zx,
     },
     tolerance: zx ? zParallelInZx : zParallelInYz,

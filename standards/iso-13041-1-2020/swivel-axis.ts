@@ -105,7 +105,7 @@ function atStop(id: string, stop: '0' | '90'): TestDefinition {
       kind: 'angles-by-position',
       anglesDeg: ['0', '180'],
       positionsMm: ['20', '90', '160', '230', '300'],
-      positionName: 'z',
+      positionName: 'along the mandrel',
       sag: false,
       turned: 'tool spindle',
     },

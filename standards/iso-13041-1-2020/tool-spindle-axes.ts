@@ -46,7 +46,7 @@ export function toolAxis(kind: ToolSpindleKind, along: Along, plane: Plane, id: 
       kind: 'angles-by-position',
       anglesDeg: ['0', '180'],
       positionsMm: ['10', '35', '60', '85', '110'],
-      positionName: 'z',
+      positionName: 'along the mandrel',
       sag: !inZx,
       turned: 'tool spindle',
     },

@@ -74,7 +74,7 @@ export function toolHoleParallel(plane: Extract<Plane, 'ZX' | 'YZ'>): TestDefini
       kind: 'angles-by-position',
       anglesDeg: ['0', '180'],
       positionsMm: ['10', '35', '60', '85', '110'],
-      positionName: 'z',
+      positionName: 'along the mandrel',
       sag: !zx,
       turned: 'mandrel',
     },
