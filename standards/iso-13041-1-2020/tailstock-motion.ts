@@ -91,7 +91,7 @@ export function quillMotion(plane: LathePlane): TestDefinition {
       kind: 'angles-by-position',
       anglesDeg: ['0'],
       positionsMm: ['0', '50', '100'],
-      positionName: 'along the slide',
+      positionName: 'along the quill',
       sag: false,
     },
     tolerance: plane === 'ZX' ? quillMotionZx : quillMotionYz,
