@@ -136,7 +136,14 @@ export type Layout =
       kind: 'angles-by-position';
       anglesDeg: DecimalText[];
       positionsMm: DecimalText[];
-      positionName: 'z' | 'radius' | 'along the face' | 'along the slide' | 'along the mandrel' | 'along the quill' | 'y';
+      positionName:
+        | 'z'
+        | 'radius'
+        | 'along the face'
+        | 'along the slide'
+        | 'along the mandrel'
+        | 'along the quill'
+        | 'y';
       sag: boolean;
       /** What is turned to the angles, where it is not the spindle. */
       turned?: 'mandrel' | 'turret' | 'tool spindle';

@@ -38,7 +38,9 @@ export function toolAxis(kind: ToolSpindleKind, along: Along, plane: Plane, id: 
       'Positions count from the nose along the mandrel to its free end. At the first one set the indicator near zero.',
       `Move in ${along} only, always approaching from the same side, and read at every position. Back at the first position the reading must return within a tenth of the tolerance.`,
       'Turn the tool spindle by 180° by hand and read the same positions again. The mean of both drops run-out and tilt of the mandrel.',
-      'The result is the least-squares slope of the means times the measuring length.',
+      inZx
+        ? 'The result is the least-squares slope of the means times the measuring length.'
+        : 'Write the sag of the mandrel where it is long; it is added to the means. The result is the least-squares slope of the means times the measuring length.',
     ],
     appliesTo: kind === drivenTool ? { kind: 'driven-tools', points: way } : kind.appliesTo,
     method: 'parallelism',
@@ -69,7 +71,9 @@ export function toolAxis(kind: ToolSpindleKind, along: Along, plane: Plane, id: 
     usualMistakes: [
       'Reading at one angle only, so that the run-out of a mandrel in a collet is taken for tilt.',
       'Moving another axis than the one the tool points along.',
-      'Measuring one holder and taking its error for that of the turret.',
+      kind === drivenTool
+        ? 'Measuring one holder and taking its error for that of the turret.'
+        : 'Leaving the swivel axis unclamped, or clamped otherwise than in work.',
     ],
     setUpTogether: `test mandrel in ${kind.bound}`,
     minutes: 20,
