@@ -4,6 +4,7 @@ import type { Viewer } from '@/lib/auth/viewer';
 import { env } from '@/lib/env';
 import { newId } from '@/lib/id';
 import worked from './data/worked-job.json';
+import { addCatalogueWork } from './demo-catalogue';
 import { addDemoJob, type DemoJob } from './demo-jobs';
 import { addPeople, brackwaterMembers, type DemoOrganisation, quillmereMembers } from './demo-people';
 import { addInstruments, addMachines, type DemoInstrument } from './demo-register';
@@ -196,6 +197,8 @@ async function fillQuillmere(viewers: Map<string, Viewer>, customers: Map<string
     for (const job of drifting) await addDemoJob(trx, job, instruments, { inspector, reviewer });
     await addWorkedJob(trx, machine('LK32-0O81-B'), instruments, { inspector, reviewer, customer });
     for (const job of jobs.slice(drifting.length)) await addDemoJob(trx, job, instruments, { inspector, reviewer });
+    // After the jobs: what is confirmed today does not speak for a plan that was made before.
+    await addCatalogueWork(trx, member('admin@quillmere.example'));
   });
 }
 
