@@ -56,18 +56,6 @@ beforeAll(async () => {
       html_body: 'h',
       message_id: 'm',
     });
-    await trx('tolerance_values').insert({
-      organisation_id: ours,
-      id: newId(),
-      ...{ code: 'c', edition: 'e', definition_id: 'd', version: 1, cell: 'all', state: 'confirmed', figure: '8' },
-      ...{ unit: 'µm', of_edition: 'e', clause: 'p. 1', account_id: newId(), account_name: 'A', needs_second: false },
-    });
-    await trx('own_definitions').insert({
-      organisation_id: ours,
-      id: newId(),
-      ...{ definition_id: 'OWN-99', version: 1, definition: '{}', composed: '{}', account_id: newId() },
-      account_name: 'A',
-    });
     await trx('files').insert({
       organisation_id: ours,
       id: newId(),
