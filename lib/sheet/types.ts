@@ -1,6 +1,6 @@
 import type { EvaluationInput, MeasuredResult } from '@/lib/evaluation';
 import type { Unit } from '@/lib/units/unit';
-import type { DecimalText, Direction, PlannedTolerance } from '@/standards/types';
+import type { DecimalText, Direction, PlannedTolerance, ShownIn } from '@/standards/types';
 
 /**
  * A sheet's fields are addressed by the JSON pointer of the place that they fill in the evaluation's input
@@ -70,6 +70,17 @@ export interface Judgement {
   direction: Direction;
   /** A local tolerance, where the definition has one. */
   local: { deviationUm: DecimalText; toleranceUm: DecimalText; lengthMm: DecimalText; verdict: Verdict } | null;
+  /** Further figures of the same readings that have a limit of their own; absent where the definition has none. */
+  also?: FurtherJudgement[];
+}
+
+/** One further figure judged: key in the method's result, its name, unrounded figure and limit in the judgement's unit, verdict. */
+export interface FurtherJudgement {
+  figure: string;
+  label: string;
+  deviationUm: DecimalText;
+  toleranceUm: DecimalText;
+  verdict: Verdict;
 }
 
 export interface DisplayedResult {
@@ -77,6 +88,8 @@ export interface DisplayedResult {
   textUm: string;
   /** The same in mm, no figure lost: `-0.0245`. */
   textMm: string;
+  /** Unit in which `textMm` stands; absent: mm. */
+  unit?: ShownIn;
   extraDigits: number;
 }
 
