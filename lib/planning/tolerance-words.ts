@@ -1,6 +1,6 @@
 import { convert } from '@/lib/units/convert';
 import { formatDecimal } from '@/lib/units/format';
-import { sizeClassTables, sizeCriterionWords } from '@/standards/size-classes';
+import { limitsInWords, sizeClassTables, sizeCriterionWords } from '@/standards/size-classes';
 import type { DecimalText, ToleranceRule } from '@/standards/types';
 
 const shown = { µm: 'mm', 'µm/m': 'mm/m', '″': '″' } as const;
@@ -30,8 +30,9 @@ export function toleranceLines(rule: ToleranceRule): ToleranceLine[] {
       tolerance: asShown(um, rule),
     }));
   }
+  const length = rule.by === 'travel' ? 'travel' : 'distance between centres';
   return (rule.steps ?? []).map((step) => ({
-    when: step.upToMm === null ? `over ${step.overMm} mm` : `over ${step.overMm} up to ${step.upToMm} mm`,
+    when: `${length} ${limitsInWords(step)} mm`,
     tolerance: asShown(step.toleranceUm, rule),
   }));
 }

@@ -65,5 +65,12 @@ describe('the catalogue', () => {
     }
     const nose = allDefinitions().find(({ id }) => id === 'SP-1a')?.tolerance;
     expect(nose && toleranceLines(nose).map(({ tolerance }) => tolerance)).toEqual(['0.005', '0.008', '0.012']);
+    const carriage = allDefinitions().find(({ id, code }) => id === 'AX-5' && code === 'ISO 1708')?.tolerance;
+    expect(carriage && toleranceLines(carriage).map(({ when }) => when)).toEqual([
+      'distance between centres up to 500 mm',
+      'distance between centres over 500 up to 1000 mm',
+      'distance between centres over 1000 up to 2000 mm',
+      'distance between centres over 2000 mm',
+    ]);
   });
 });
