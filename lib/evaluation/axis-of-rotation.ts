@@ -40,7 +40,7 @@ export function axisOfRotation(input: Input) {
   const { values: all, unit } = seriesFromTexts(turns.flat());
   const columns = directions.map((_, k) => turns.map((_, i) => all[i * count + k]!));
   const means = { values: columns.map((column) => column.reduce((a, b) => a + b)), unit: unit * BigInt(turns.length) };
-  const fit = harmonicFit(directions, means, 1)!;
+  const fit = harmonicFit(directions, means, 1) ?? refuse(['angles'], 'the angles stand too close together');
   const [, a, b] = fit.coefficients;
   const { amplitude } = polar({ a: a!.toDec(), b: b!.toDec() });
   const residual = plain(residualRange(fit, directions, means, 1).toDec());

@@ -1,7 +1,6 @@
 import { divideHalfEven, Fraction, integerSquareRoot } from '@/lib/units/fraction';
 import { refuse } from './evaluation-error';
 import { harmonicFit } from './harmonic-fit';
-import { minimumZone } from './roundness';
 import { largestOf, type Series, smallestOf } from './series';
 import { type Direction, TRIG_ONE } from './trigonometry';
 
@@ -9,9 +8,9 @@ import { type Direction, TRIG_ONE } from './trigonometry';
 const BITS = 160n;
 export const ONE_UM = 1n << BITS;
 /** The centre counts as found when it moves less than 2^-100 µm, far below the contract's 10^-9 µm. */
-const STILL = 1n << (BITS - 100n);
-const MOST_STEPS = 60;
-const NO_CIRCLE = 'the points do not determine a circle';
+export const STILL = 1n << (BITS - 100n);
+export const MOST_STEPS = 60;
+export const NO_CIRCLE = 'the points do not determine a circle';
 
 /** Points in the plane of the circle, µm over 2^160. */
 export type PlanePoint = { readonly x: bigint; readonly y: bigint };
@@ -24,7 +23,7 @@ export function planePoint(radius: Fraction, { cos, sin }: Direction): PlanePoin
   return { x: scale(cos), y: scale(sin) };
 }
 
-/** Radii and directions of the points as seen from a centre. */
+/** Radii and directions of the points as seen from a centre. @throws EvaluationError where a point lies in it */
 export function seenFrom(points: readonly PlanePoint[], centre: PlanePoint): Seen {
   const values: bigint[] = [];
   const directions: Direction[] = [];
@@ -48,7 +47,7 @@ export function leastSquaresCircle(points: readonly PlanePoint[]): CircleFit {
   let centre: PlanePoint = { x: 0n, y: 0n };
   for (let step = 0; ; step++) {
     const seen = seenFrom(points, centre);
-    const [c, a, b] = harmonicFit(seen.directions, seen.radii, 1)!.coefficients;
+    const [c, a, b] = harmonicFit(seen.directions, seen.radii, 1)?.coefficients ?? refuse([], NO_CIRCLE);
     const move = { x: toFixed(a!), y: toFixed(b!) };
     if (step === MOST_STEPS) return refuse([], NO_CIRCLE);
     if (size(move.x) < STILL && size(move.y) < STILL) {
@@ -58,44 +57,14 @@ export function leastSquaresCircle(points: readonly PlanePoint[]): CircleFit {
   }
 }
 
-/**
- * Least radial distance of two concentric circles that hold all points: the linear programme of `minimumZone` on the
- * radii seen from the centre, the centre moved, again until it stands still; a step that does not help is halved.
- */
-export function minimumZoneWidth(points: readonly PlanePoint[], start: PlanePoint): Fraction {
-  let centre = start;
-  let seen = seenFrom(points, centre);
-  let width = widthOf(seen);
-  for (let step = 0; step < MOST_STEPS; step++) {
-    const zone = minimumZone(seen.directions, seen.radii);
-    let move = { x: toFixed(zone.a), y: toFixed(zone.b) };
-    let isBetter = false;
-    while (!isBetter && (size(move.x) >= STILL || size(move.y) >= STILL)) {
-      const nextCentre = { x: centre.x + move.x, y: centre.y + move.y };
-      const nextSeen = seenFrom(points, nextCentre);
-      const nextWidth = widthOf(nextSeen);
-      isBetter = nextWidth.compare(width) < 0;
-      if (isBetter) {
-        centre = nextCentre;
-        seen = nextSeen;
-        width = nextWidth;
-      } else {
-        move = { x: move.x / 2n, y: move.y / 2n };
-      }
-    }
-    if (!isBetter) return width;
-  }
-  return width;
-}
-
-function widthOf({ radii }: Seen): Fraction {
+export function widthOf({ radii }: Seen): Fraction {
   return Fraction.of(largestOf(radii.values) - smallestOf(radii.values), radii.unit);
 }
 
-function toFixed({ n, d }: Fraction): bigint {
+export function toFixed({ n, d }: Fraction): bigint {
   return (n * ONE_UM) / d;
 }
 
-function size(value: bigint): bigint {
+export function size(value: bigint): bigint {
   return value < 0n ? -value : value;
 }

@@ -2,17 +2,11 @@ import { z } from 'zod';
 import { plain } from '@/lib/units/decimal';
 import { Fraction } from '@/lib/units/fraction';
 import { circleDirections } from './circle-angles';
-import {
-  leastSquaresCircle,
-  minimumZoneWidth,
-  ONE_UM,
-  type PlanePoint,
-  planePoint,
-  type Seen,
-} from './circle-geometry';
+import { leastSquaresCircle, ONE_UM, type PlanePoint, planePoint, type Seen } from './circle-geometry';
 import { decimalText, positiveDecimal, tooFew } from './decimal-text';
 import { refuse } from './evaluation-error';
 import { harmonicFit } from './harmonic-fit';
+import { minimumZoneCircle } from './minimum-zone-circle';
 
 const circle = z.array(z.strictObject({ angle: decimalText, radius: decimalText })).min(5, tooFew(5, 'points'));
 
@@ -61,7 +55,7 @@ export function circular(input: Input) {
   const all = leastSquaresCircle(allPoints);
   const isBoth = ways.length === 2;
   if (judge === 'Gb' && !isBoth) refuse(['judge'], 'Gb needs both directions');
-  const Gb = isBoth ? text(minimumZoneWidth(allPoints, all.centre)) : null;
+  const Gb = isBoth ? text(minimumZoneCircle(allPoints, all.centre).width) : null;
   const byGb = Gb !== null && judge !== 'G';
   const largestG = text(Fraction.max(ways.map((way) => way.G)));
   const deviations = ways.flatMap((way) => way.readings.map((reading) => Fraction.from(reading.radius)));
@@ -102,7 +96,7 @@ function pointsOf(readings: NonNullable<Input[Way]>, nominal: Fraction, way: Way
 
 function oneWay(points: PlanePoint[], readings: NonNullable<Input[Way]>) {
   const fit = leastSquaresCircle(points);
-  const G = minimumZoneWidth(points, fit.centre);
+  const G = minimumZoneCircle(points, fit.centre).width;
   const deviations = readings.map((reading) => Fraction.from(reading.radius));
   const figures = {
     G: text(G),
@@ -128,7 +122,7 @@ function secondHarmonics(all: Seen, ways: readonly FittedWay[], radiusMm: Fracti
 }
 
 function secondHarmonic({ directions, radii }: Seen): [Fraction, Fraction] {
-  const { coefficients } = harmonicFit(directions, radii, 2)!;
+  const { coefficients } = harmonicFit(directions, radii, 2) ?? refuse([], 'the angles stand too close together');
   return [coefficients[3]!, coefficients[4]!];
 }
 

@@ -3,6 +3,7 @@ import { plain } from '@/lib/units/decimal';
 import { Fraction } from '@/lib/units/fraction';
 import { circleDirections } from './circle-angles';
 import { decimalText, tooFew } from './decimal-text';
+import { refuse } from './evaluation-error';
 import { harmonicFit, residualRange } from './harmonic-fit';
 import { narrowestSlab } from './narrowest-slab';
 import { type Series, seriesFromTexts } from './series';
@@ -40,7 +41,7 @@ export function roundness(input: z.output<typeof roundnessInput>) {
     (i) => ['points', i, 'angle'],
   );
   const readings = seriesFromTexts(points.map((p) => p.reading));
-  const fit = harmonicFit(directions, readings, 1)!;
+  const fit = harmonicFit(directions, readings, 1) ?? tooClose();
   const zone = minimumZone(directions, readings);
   const leastSquares = text(residualRange(fit, directions, readings, 1));
   const minimum = text(zone.width);
@@ -65,13 +66,19 @@ export function minimumZone(directions: readonly Direction[], readings: Series) 
     x: directions.map(({ cos }) => cos >> shift),
     y: directions.map(({ sin }) => sin >> shift),
     z: readings.values,
-  })!;
+  });
+  if (!slab) return tooClose();
   const unit = slab.d * readings.unit;
   return {
     width: Fraction.of(slab.width, unit),
     a: Fraction.of(slab.b << ZONE_BITS, unit),
     b: Fraction.of(slab.c << ZONE_BITS, unit),
   };
+}
+
+/** Angles that differ by less than the last place of their cosines. */
+function tooClose(): never {
+  return refuse([], 'the angles stand too close together');
 }
 
 /** Cosines are cut off, so a result is given to 30 digits even where it would be a finite decimal of many more. */
