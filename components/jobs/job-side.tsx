@@ -26,24 +26,44 @@ export function JobPeople({ people }: { people: { name: string; role: keyof type
   );
 }
 
-/** Tests that fit the machine and were not taken into the plan, each with its reason. */
-export function NotInPlan(props: {
-  exclusions: { key: string; title: string; reason: LeftOutReason; text: string | null }[];
-}) {
-  const { exclusions } = props;
+interface NotPlanned {
+  key: string;
+  title: string;
+  reason: LeftOutReason;
+  text: string | null;
+}
+
+/** So many lines stand open; more of them behind their count. */
+const SHORT_LIST = 8;
+
+/** Tests that fit the machine and were not taken into the plan, by reason, each with what was said of it. */
+export function NotInPlan({ exclusions }: { exclusions: NotPlanned[] }) {
   if (exclusions.length === 0) return null;
+  const reasons = Object.entries(leftOutReasons)
+    .map(([reason, words]) => ({ words, members: exclusions.filter((one) => one.reason === reason) }))
+    .filter(({ members }) => members.length > 0);
   return (
     <section aria-labelledby="not-in-plan" className="mt-8">
       <h2 id="not-in-plan" className="font-semibold">
         Not in the plan
       </h2>
-      <ul className="mt-1 text-[15px] leading-snug">
-        {exclusions.map(({ key, title, reason, text }) => (
-          <li key={key} className="border-b border-hair py-1.5">
-            {title} <span className="text-ink2">· {[leftOutReasons[reason], text].filter(Boolean).join(': ')}</span>
-          </li>
-        ))}
-      </ul>
+      {reasons.map(({ words, members }) => (
+        <details key={words} open={members.length <= SHORT_LIST}>
+          <summary className="flex min-h-12 items-center border-b border-hair">
+            <span aria-hidden="true" className="mr-2">
+              ▸
+            </span>
+            {words}: {members.length === 1 ? '1 test' : `${members.length} tests`}
+          </summary>
+          <ul className="text-[15px] leading-snug">
+            {members.map(({ key, title, text }) => (
+              <li key={key} className="border-b border-hair py-1.5">
+                {title} {text && <span className="text-ink2">· {text}</span>}
+              </li>
+            ))}
+          </ul>
+        </details>
+      ))}
     </section>
   );
 }

@@ -100,7 +100,7 @@ function OpenedDialog(props: OpenedPartsData & { onClose: () => void }) {
           {parts.map(({ id, words }, index) => (
             <li
               key={id}
-              className="grid items-center gap-x-3 gap-y-1 border-b border-hair py-1.5 sm:grid-cols-[9rem_12rem_1fr]"
+              className="grid items-center gap-x-3 gap-y-1 border-b border-hair py-1.5 sm:grid-cols-[8rem_14rem_1fr]"
             >
               <span>{words}</span>
               <Select aria-label={`${words}: what was done`} {...form.register(`rows.${index}.condition`)}>

@@ -42,7 +42,7 @@ export function PlanGroup(props: {
       </div>
       {setUpRuns(tests.map((test) => ({ ...test, setUpTogether: test.setUp }))).map(({ words, sheets }) => (
         <div key={sheets[0]?.key}>
-          {words !== null && (
+          {words !== null && sheets.length > 1 && (
             <h3 className="mt-3 border-l-4 border-line pl-3 text-[15px] font-medium">
               Set up together: {words}{' '}
               <span className="font-normal text-ink2">

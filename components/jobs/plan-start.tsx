@@ -27,7 +27,7 @@ export function PlanStart(props: { starts: StartChoice[]; keys: string[]; onTake
   return (
     <div className="border-t border-line py-3">
       <div className="grid items-end gap-3 sm:grid-cols-[minmax(0,1fr)_auto_auto]">
-        <Field label="Begin from" hint="Only preselects: everything can still be changed.">
+        <Field label="Begin from">
           <Select value={chosen} onChange={(event) => setChosen(event.target.value)}>
             <option value="">Every test that fits</option>
             {starts.map(({ id, words }) => (
@@ -57,6 +57,7 @@ export function PlanStart(props: { starts: StartChoice[]; keys: string[]; onTake
           </Button>
         )}
       </div>
+      <p className="mt-1 text-sm text-ink2">It only preselects: everything can still be changed.</p>
       {removal.error && <p className="mt-2 text-oxide">{removal.error.message}</p>}
       {taken && (
         <Notice title={`Taken over: ${taken.words}`} live className="mt-3">

@@ -19,7 +19,7 @@ export function PlanTest(props: {
   const problem = (field: PlanProblem['field']) => problems.find((one) => one.field === field)?.message;
   const { contract } = choice;
   return (
-    <li className="grid gap-x-6 border-b border-hair py-1 md:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
+    <li className="grid gap-x-6 border-b border-hair py-1 md:grid-cols-[minmax(0,1fr)_minmax(0,20rem)] lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
       <div>
         <Checkbox
           label={test.title}

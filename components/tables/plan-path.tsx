@@ -1,5 +1,10 @@
+'use client';
+
 import Link from 'next/link';
+import { useState } from 'react';
 import type { MarkKind } from '@/components/plots/verdict-ink';
+import { Field } from '@/components/ui/field';
+import { TextInput } from '@/components/ui/inputs';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import { minutesWords } from '@/lib/planning/estimate-minutes';
 
@@ -24,11 +29,28 @@ export interface PathSheet {
   minutesLeft: number;
 }
 
+/** A plan of more lines than this can be searched. */
+const LONG_PLAN = 20;
+
 /** The plan as a scribed line with a tick for each sheet, in working order; every line leads to its sheet. */
 export function PlanPath({ jobId, sheets }: { jobId: string; sheets: PathSheet[] }) {
+  const [filter, setFilter] = useState('');
+  const shown = filterLines(sheets, filter);
   return (
     <>
-      {stepsOf(sheets).map(({ step, runs }) => (
+      {sheets.length > LONG_PLAN && (
+        <div data-print="no" className="grid items-end gap-x-4 sm:grid-cols-[minmax(0,22rem)_1fr]">
+          <Field label="Show only tests with" optional>
+            <TextInput type="search" value={filter} onChange={(event) => setFilter(event.target.value)} />
+          </Field>
+          <p role="status" className="pb-3 text-ink2">
+            {shown.length === sheets.length
+              ? `${sheets.length} tests`
+              : `${shown.length} of ${sheets.length} tests are shown`}
+          </p>
+        </div>
+      )}
+      {stepsOf(shown).map(({ step, runs }) => (
         <section key={runs[0]?.sheets[0]?.id} aria-label={step ?? undefined}>
           {step !== null && (
             <h2 className="mt-4 flex flex-wrap items-baseline gap-x-3 border-b-[1.5px] border-ink pb-0.5 font-semibold">
@@ -38,7 +60,7 @@ export function PlanPath({ jobId, sheets }: { jobId: string; sheets: PathSheet[]
           )}
           {runs.map(({ setUp, sheets: members }) => (
             <div key={members[0]?.id}>
-              {setUp !== null && (
+              {setUp !== null && members.length > 1 && (
                 <h3 className="mt-2 border-l-4 border-line pl-3 text-[15px] font-medium">
                   Set up together: {setUp} <span className="text-sm font-normal text-ink2">{countWords(members)}</span>
                 </h3>
@@ -85,6 +107,17 @@ function PathLine({ jobId, sheet }: { jobId: string; sheet: PathSheet }) {
 interface Step {
   step: string | null;
   runs: { setUp: string | null; sheets: PathSheet[] }[];
+}
+
+/** Lines that hold every word of the text in number, title, component, step, set-up, or in what is shown of the result. */
+export function filterLines(sheets: PathSheet[], text: string): PathSheet[] {
+  const words = text.toLowerCase().split(/\s+/).filter(Boolean);
+  if (words.length === 0) return sheets;
+  return sheets.filter((sheet) => {
+    const { position, title, component, step, setUp, mark, result } = sheet;
+    const held = [position, title, component, step, setUp, sheet.words ?? mark.replaceAll('-', ' '), result];
+    return words.every((word) => held.join(' ').toLowerCase().includes(word));
+  });
 }
 
 /** Neighbours of one step under its heading, in it neighbours that are set up together. */

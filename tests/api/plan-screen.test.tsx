@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { proposedTests, startChoices } from '@/app/(workshop)/jobs/[jobId]/plan/proposed-tests';
 import { firstChoices } from '@/components/jobs/plan-choices';
 import { PlanGroup } from '@/components/jobs/plan-group';
-import { type PathSheet, PlanPath } from '@/components/tables/plan-path';
+import { filterLines, type PathSheet, PlanPath } from '@/components/tables/plan-path';
 import { planSheets } from '@/lib/planning/plan-sheets';
 import { startingMakeUps } from '@/lib/schemas/starting-make-ups';
 import type { PlanMaking } from '@/lib/services/plan-making';
@@ -49,7 +49,11 @@ describe('the proposals of a machine with three channels', () => {
     const text = plain(html);
     expect(step).not.toBe('');
     expect(html.match(/<h2/g)).toHaveLength(1);
-    const together = [...new Set(members.flatMap(({ setUp }) => setUp ?? []))];
+    // A set-up for one test alone needs no heading.
+    const together = [...new Set(members.flatMap(({ setUp }) => setUp ?? []))].filter(
+      (words) => members.filter(({ setUp }) => setUp === words).length > 1,
+    );
+    expect(together.length).toBeGreaterThan(0);
     expect(html.match(/<h3/g)).toHaveLength(together.length);
     for (const words of together) expect(text).toContain(`Set up together: ${words}`);
     expect(text).toContain(`${members.length} of ${members.length} taken`);
@@ -113,6 +117,22 @@ describe('the plan of a job', () => {
     expect(text).toContain('Set up together: test mandrel in main spindle S1 2 tests · 20 min to measure');
     expect(text).toContain('Y to X 1 test · 20 min to measure');
     expect(html.match(/href="\/jobs\/j\/sheets\//g)).toHaveLength(4);
+  });
+
+  it('can be searched when it is long, by everything that a line shows', () => {
+    const many = Array.from({ length: 60 }, (_, index) =>
+      line(index + 1, index === 7 ? { title: 'Lost motion of Z2' } : {}),
+    );
+    many[9] = line(10, { mark: 'out-of-tolerance', result: '0.0240' });
+    const html = renderToStaticMarkup(<PlanPath jobId="j" sheets={many} />);
+    expect(plain(html)).toContain('60 tests');
+    expect(html).toContain('type="search"');
+    expect(renderToStaticMarkup(<PlanPath jobId="j" sheets={many.slice(0, 20)} />)).not.toContain('type="search"');
+    const found = (text: string) => filterLines(many, text).map(({ position }) => position);
+    expect(found('lost z2')).toEqual([8]);
+    expect(found('out of')).toEqual([10]);
+    expect(found('MANDREL')).toHaveLength(60);
+    expect(found('laser')).toEqual([]);
   });
 
   it('is one list without headings where a plan is from before they were kept', () => {
