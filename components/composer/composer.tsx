@@ -11,6 +11,7 @@ import { SectionTitle } from '@/components/ui/page-title';
 import { api as request } from '@/lib/http/api-client';
 import type { ExampleMachine } from '@/lib/planning/example-sheet';
 import { findMeasurement, measurements } from '@/lib/planning/measurements';
+import { newComposition } from '@/lib/planning/new-composition';
 import { DIRECTION_WORDS, SCENE_WORDS } from '@/lib/reporting/words';
 import { cautions } from '@/standards/cautions';
 import { sketchScenes } from '@/standards/sketch-scenes';
@@ -80,7 +81,9 @@ export function Composer(props: {
           </Button>
         </div>
       </form>
-      <ComposerPreview api={api} machines={machines} />
+      <div className="[&_[data-at-foot]]:static xl:sticky xl:top-4 xl:max-h-[calc(100vh-2rem)] xl:overflow-y-auto">
+        <ComposerPreview api={api} machines={machines} />
+      </div>
     </div>
   );
 }
@@ -89,14 +92,11 @@ function WhatAndWhere({ api, isNew }: { api: ComposerForm; isNew: boolean }) {
   const { form } = api;
   const measurement = findMeasurement(form.watch(at('measurement')) ?? '');
   const choose = (id: string) => {
-    const chosen = findMeasurement(id);
-    if (!chosen) return;
-    form.setValue(at('layout'), chosen.layout as unknown as string);
-    form.setValue(at('scene'), chosen.scene);
-    form.setValue(at('judge'), '');
-    form.setValue(at('direction'), 'either');
-    form.setValue(at('judgedFigure'), chosen.gives);
-    form.setValue(at('tolerance'), { by: 'none' } as unknown as string);
+    const usual = newComposition(id);
+    for (const field of ['layout', 'scene', 'judge', 'direction', 'judgedFigure', 'tolerance', 'appliesTo'] as const)
+      form.setValue(at(field), usual[field] as unknown as string);
+    form.setValue(at('workingStep'), String(usual.workingStep));
+    form.setValue(at('dependsOn'), undefined as unknown as string);
   };
   return (
     <div className="grid gap-4 sm:grid-cols-2">

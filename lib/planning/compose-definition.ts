@@ -11,6 +11,8 @@ import { findMeasurement } from './measurements';
 export function composeDefinition(form: OwnDefinitionForm, id: string, version: number): TestDefinition {
   const measurement = findMeasurement(form.measurement);
   const layout = layoutOf(form.layout);
+  // A sign says nothing of a figure that has none.
+  const signed = measurement?.signed === true && form.judge !== 'range';
   const rests = form.dependsOn ?? restsOn(form.appliesTo.kind).usual;
   return {
     id,
@@ -33,12 +35,12 @@ export function composeDefinition(form: OwnDefinitionForm, id: string, version: 
     ...(form.setUpTogether ? { setUpTogether: form.setUpTogether } : {}),
     minutes: form.minutes,
     cautions: [...new Set([...form.cautions, 'maker-and-local-rules-first'])] as CautionId[],
-    sketch: sketchOf(form, layout),
+    sketch: sketchOf(form, layout, signed),
     dependsOn: rests as TestDefinition['dependsOn'],
     workingStep: form.workingStep,
     judgedFigure: form.judgedFigure,
-    ...(form.positiveMeans ? { positiveMeans: form.positiveMeans } : {}),
-    ...(form.negativeMeans ? { negativeMeans: form.negativeMeans } : {}),
+    ...(signed && form.positiveMeans ? { positiveMeans: form.positiveMeans } : {}),
+    ...(signed && form.negativeMeans ? { negativeMeans: form.negativeMeans } : {}),
     source: ownTests.source,
   };
 }
@@ -87,13 +89,13 @@ function toleranceOf(given: OwnDefinitionForm['tolerance']): ToleranceRule | nul
   };
 }
 
-function sketchOf(form: OwnDefinitionForm, layout: Layout): SketchSpec {
+function sketchOf(form: OwnDefinitionForm, layout: Layout, signed: boolean): SketchSpec {
   const anglesDeg = 'anglesDeg' in layout ? layout.anglesDeg.filter((angle) => Number(angle) < 360).slice(0, 4) : null;
   const { appliesTo } = form;
   return {
     scene: form.scene as SketchSpec['scene'],
     ...(anglesDeg && anglesDeg.length > 1 ? { anglesDeg } : {}),
     ...('plane' in appliesTo && appliesTo.plane ? { plane: appliesTo.plane } : {}),
-    ...(form.positiveMeans ? { positiveMeans: form.positiveMeans } : {}),
+    ...(signed && form.positiveMeans ? { positiveMeans: form.positiveMeans } : {}),
   };
 }

@@ -1,5 +1,6 @@
 import type { OwnDefinitionInput } from '@/lib/schemas/own-definition';
 import type { Layout, ShownIn, SketchSpec, ToleranceRule } from '@/standards/types';
+import type { WorkingStepName } from '@/standards/working-order';
 
 /** Something that can be measured on a sheet, by the name that the trade has for it. */
 export interface Measurement {
@@ -17,6 +18,9 @@ export interface Measurement {
   /** A tolerance given over a length is scaled to the length really measured. */
   perLength: boolean;
   scene: SketchSpec['scene'];
+  /** Where such a test stands in the working order, and on what it is done, most often. */
+  step: WorkingStepName;
+  usualComponent: OwnDefinitionInput['appliesTo'];
   /** Fields to begin with, as the composer shows them. */
   layout: OwnDefinitionInput['layout'];
   /** Layouts of the method that differ in more than figures from what stands in `layout`. */

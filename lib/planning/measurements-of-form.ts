@@ -13,6 +13,8 @@ export const measurementsOfForm: Measurement[] = [
       { value: 'largest', label: 'largest of the turns' },
     ],
     scene: 'spindle-nose',
+    step: 'spindle-run-out',
+    usualComponent: { kind: 'spindle', types: ['main'] },
     layout: { kind: 'turns', insertions: 1, anglesDeg: '0 45 90 135 180 225 270 315 360', insertionLabel: 'turn' },
   },
   {
@@ -22,6 +24,8 @@ export const measurementsOfForm: Measurement[] = [
     gives: 'the largest total indicator reading of the circles',
     method: 'axial-run-out',
     scene: 'face-run-out',
+    step: 'spindle-run-out',
+    usualComponent: { kind: 'spindle', types: ['main'] },
     layout: { kind: 'circles', names: 'near the edge', anglesDeg: '0 45 90 135 180 225 270 315' },
   },
   {
@@ -32,6 +36,8 @@ export const measurementsOfForm: Measurement[] = [
     method: 'straightness',
     perLength: true,
     scene: 'straightedge-along-motion',
+    step: 'straightness',
+    usualComponent: { kind: 'linear-axis' },
     layout: { kind: 'profile', positionsMm: '0 50 100 150 200 250 300', reference: 'minimum-zone', localLengthMm: '' },
   },
   {
@@ -42,6 +48,8 @@ export const measurementsOfForm: Measurement[] = [
     method: 'straightness-reversal',
     perLength: true,
     scene: 'straightedge-turned-over',
+    step: 'straightness',
+    usualComponent: { kind: 'linear-axis' },
     layout: { kind: 'two-runs', positionsMm: '0 50 100 150 200 250 300', reference: 'minimum-zone' },
   },
   {
@@ -52,6 +60,8 @@ export const measurementsOfForm: Measurement[] = [
     method: 'straightness-from-angles',
     perLength: true,
     scene: 'level-steps',
+    step: 'level',
+    usualComponent: { kind: 'longitudinal-axis', planes: ['YZ'] },
     layout: { kind: 'angle-steps', stepLengthMm: '100', steps: 6, returnRun: true, reference: 'minimum-zone' },
   },
   {
@@ -61,6 +71,8 @@ export const measurementsOfForm: Measurement[] = [
     gives: 'the breadth of the surface that was measured',
     method: 'flatness',
     scene: 'straightedge-along-motion',
+    step: 'level',
+    usualComponent: { kind: 'machine' },
     layout: { kind: 'grid', xMm: '0 100 200', yMm: '0 80 160', reference: 'minimum-zone' },
   },
   {
@@ -76,6 +88,8 @@ export const measurementsOfForm: Measurement[] = [
     ],
     perLength: true,
     scene: 'mandrel-along-motion',
+    step: 'z-parallel-to-spindle',
+    usualComponent: { kind: 'longitudinal-axis-and-spindle', plane: 'ZX' },
     layout: {
       kind: 'angles-by-position',
       anglesDeg: '0 180',
@@ -93,6 +107,8 @@ export const measurementsOfForm: Measurement[] = [
     signed: true,
     perLength: true,
     scene: 'disc-across-motion',
+    step: 'x-square-to-spindle',
+    usualComponent: { kind: 'cross-axis-and-spindle' },
     layout: {
       kind: 'angles-by-position',
       anglesDeg: '0 180',
@@ -110,6 +126,8 @@ export const measurementsOfForm: Measurement[] = [
     signed: true,
     perLength: true,
     scene: 'square-two-motions',
+    step: 'y-square',
+    usualComponent: { kind: 'y-and-x' },
     layout: { kind: 'square-reversed', referencePositionsMm: '0 50 100', measuredPositionsMm: '0 50 100' },
   },
   {
@@ -119,6 +137,8 @@ export const measurementsOfForm: Measurement[] = [
     gives: 'the largest offset of the axes',
     method: 'coaxiality',
     scene: 'two-spindles-sweep',
+    step: 'sub-spindle-coaxiality',
+    usualComponent: { kind: 'main-and-sub-spindle' },
     layout: { kind: 'swept-sections', positionsMm: '0 150', surface: 'outside' },
   },
   {
@@ -129,6 +149,8 @@ export const measurementsOfForm: Measurement[] = [
     method: 'centre-height',
     signed: true,
     scene: 'tool-hole-sweep',
+    step: 'turret',
+    usualComponent: { kind: 'turret-and-spindle' },
     layout: { kind: 'tool-centre', form: 'sweep', surface: 'bore', radiiMm: '5 16' },
   },
 ];

@@ -13,6 +13,8 @@ export const measurementsOfMotion: Measurement[] = [
     gives: 'the largest mean difference between coming from plus and from minus',
     method: 'lost-motion',
     scene: 'slide-approach',
+    step: 'lost-motion',
+    usualComponent: { kind: 'linear-axis' },
     layout: { kind: 'approach-pairs', places: 'middle of the travel', feeds: ['cutting-feed'], pairs: 5 },
   },
   {
@@ -22,6 +24,8 @@ export const measurementsOfMotion: Measurement[] = [
     gives: 'how far the slide stands from its target',
     method: 'reference-shift',
     scene: 'target-and-found',
+    step: 'reference-points',
+    usualComponent: { kind: 'linear-axis' },
     layout: { kind: 'target-and-found', basis: null },
   },
   {
@@ -32,6 +36,8 @@ export const measurementsOfMotion: Measurement[] = [
     method: 'positioning',
     judges: ['A', 'E', 'R', 'B', 'M'].map((value) => ({ value, label: value })),
     scene: 'laser-along-motion',
+    step: 'positioning',
+    usualComponent: { kind: 'linear-axis' },
     layout: { kind: 'target-cycles', quantity: 'linear', cycles: 5, targets: '0 50 100 150 200' },
     fits: (layout) => (rotary(layout) ? 'Choose the positioning of a rotary axis for targets in degrees.' : null),
   },
@@ -45,6 +51,8 @@ export const measurementsOfMotion: Measurement[] = [
     toleranceUnit: '″',
     shownIn: '″',
     scene: 'rotary-axis',
+    step: 'positioning',
+    usualComponent: { kind: 'rotary-axis', letters: ['A', 'B', 'C'] },
     layout: { kind: 'target-cycles', quantity: 'rotary', cycles: 3, targets: '0 45 90 135 180 225 270 315' },
     fits: (layout) => (rotary(layout) ? null : 'Choose the positioning of a linear axis for targets in mm.'),
   },
@@ -57,6 +65,8 @@ export const measurementsOfMotion: Measurement[] = [
     toleranceUnit: 'µm/m',
     shownIn: 'mm/m',
     scene: 'angle-instrument',
+    step: 'straightness',
+    usualComponent: { kind: 'linear-axis' },
     layout: { kind: 'angular-runs', positionsMm: '0 50 100 150 200', quantity: 'pitch', bothDirections: true },
   },
   {
@@ -70,6 +80,8 @@ export const measurementsOfMotion: Measurement[] = [
       { value: 'G', label: 'G, the larger of the two' },
     ],
     scene: 'circular-gauge',
+    step: 'circular',
+    usualComponent: { kind: 'axis-pair', plane: 'ZX' },
     layout: {
       kind: 'circle-trace',
       anglesDeg: '0 30 60 90 120 150 180 210 240 270 300 330',
@@ -89,6 +101,8 @@ export const measurementsOfMotion: Measurement[] = [
       { value: 'asynchronous', label: 'asynchronous' },
     ],
     scene: 'spindle-sensors',
+    step: 'spindle-error-motion',
+    usualComponent: { kind: 'spindle', types: ['main'] },
     layout: { kind: 'rotation-turns', turns: 3, anglesDeg: '0 45 90 135 180 225 270 315', direction: 'radial' },
     fits: (layout) => (tilt(layout) ? 'Tilt is an angle: measure it radially in two planes instead.' : null),
   },
@@ -103,6 +117,8 @@ export const measurementsOfMotion: Measurement[] = [
       { value: 'accuracy', label: 'departure from the mean of the stations' },
     ],
     scene: 'turret-index',
+    step: 'turret',
+    usualComponent: { kind: 'turret' },
     layout: { kind: 'stations', stations: '', repeats: 3, radiusMm: '' },
   },
   {
@@ -114,6 +130,8 @@ export const measurementsOfMotion: Measurement[] = [
     signed: true,
     perLength: true,
     scene: 'two-collar-piece',
+    step: 'cutting-test',
+    usualComponent: { kind: 'turning-turret-and-spindle' },
     layout: { kind: 'two-collars', distanceMm: '150' },
   },
   {
@@ -123,6 +141,8 @@ export const measurementsOfMotion: Measurement[] = [
     gives: 'largest less smallest diameter',
     method: 'diameter-consistency',
     scene: 'test-piece-cylinder',
+    step: 'cutting-test',
+    usualComponent: { kind: 'turning-turret-and-spindle' },
     layout: { kind: 'diameters', positionsMm: '20 80 140' },
   },
   {
@@ -132,6 +152,8 @@ export const measurementsOfMotion: Measurement[] = [
     gives: 'the breadth of the ring that holds the profile',
     method: 'roundness',
     scene: 'test-piece-cylinder',
+    step: 'cutting-test',
+    usualComponent: { kind: 'turning-turret-and-spindle' },
     layout: { kind: 'round-trace', anglesDeg: '0 30 60 90 120 150 180 210 240 270 300 330', surface: 'outside' },
   },
   {
@@ -141,6 +163,8 @@ export const measurementsOfMotion: Measurement[] = [
     gives: 'largest less smallest reading',
     method: 'drift',
     scene: 'drift-at-tool',
+    step: 'thermal',
+    usualComponent: { kind: 'turning-turret-and-spindle' },
     layout: { kind: 'time-series', minutes: '0 10 20 30 40 50 60', temperature: true },
   },
   {
@@ -151,6 +175,8 @@ export const measurementsOfMotion: Measurement[] = [
     method: 'function-check',
     shownIn: 'items',
     scene: 'checklist',
+    step: 'level',
+    usualComponent: { kind: 'machine' },
     layout: { kind: 'check-list', items: [{ question: '', value: null }] },
   },
 ];
