@@ -130,7 +130,7 @@ describe('the plan of a job', () => {
     expect(renderToStaticMarkup(<PlanPath jobId="j" sheets={many.slice(0, 20)} />)).not.toContain('type="search"');
     const found = (text: string) => filterLines(many, text).map(({ position }) => position);
     expect(found('lost z2')).toEqual([8]);
-    expect(found('out of')).toEqual([10]);
+    expect(found('tolerance 0.0240')).toEqual([10]);
     expect(found('MANDREL')).toHaveLength(60);
     expect(found('laser')).toEqual([]);
   });
