@@ -42,13 +42,15 @@ export function narrowestSlab(cloud: Cloud): Slab | null {
 
 /** Three points not on one line, the first of them on both sides: a slab of height nothing to begin with. */
 function firstSupports({ x, y }: Cloud): Support[] | null {
-  for (let k = 2; k < x.length; k++) {
-    const cross = (x[1]! - x[0]!) * (y[k]! - y[0]!) - (y[1]! - y[0]!) * (x[k]! - x[0]!);
+  const other = x.findIndex((value, k) => value !== x[0]! || y[k]! !== y[0]!);
+  if (other < 0) return null;
+  for (let k = other + 1; k < x.length; k++) {
+    const cross = (x[other]! - x[0]!) * (y[k]! - y[0]!) - (y[other]! - y[0]!) * (x[k]! - x[0]!);
     if (cross !== 0n) {
       return [
         { point: 0, side: 1n },
         { point: 0, side: -1n },
-        { point: 1, side: 1n },
+        { point: other, side: 1n },
         { point: k, side: 1n },
       ];
     }
