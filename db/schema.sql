@@ -954,6 +954,8 @@ CREATE INDEX machines_serial_folded ON public.machines USING btree (organisation
 
 CREATE INDEX own_definitions_newest ON public.own_definitions USING btree (organisation_id, definition_id, sequence DESC);
 
+CREATE INDEX passes_newest ON public.passes USING btree (organisation_id, taken_at DESC) WHERE ((taken_at IS NOT NULL) AND (linked_to IS NULL));
+
 CREATE UNIQUE INDEX plan_templates_name ON public.plan_templates USING btree (organisation_id, lower(manufacturer), lower(model), lower(name));
 
 CREATE INDEX reading_operations_pass ON public.reading_operations USING btree (organisation_id, pass_id, sequence);

@@ -10,7 +10,7 @@ export interface TestDuration {
 }
 
 /** The newest sets of readings say how long a test takes today; older ones are not looked at. */
-const NEWEST_PASSES = 3000;
+const NEWEST_PASSES = 1500;
 /** A longer gap to the reading before was a break, or other work. */
 const LONGEST_SET_UP_MINUTES = 60;
 

@@ -31,10 +31,11 @@ type Params = { params: Promise<{ jobId: string }> };
 const load = cache(async (jobId: string) => {
   const viewer = await requireViewer();
   if (!can(viewer.roles, 'job.read') || !isId.safeParse(jobId).success) notFound();
-  const { board, durations } = await inScope(scopeOf(viewer), async (trx) => ({
-    board: await jobBoard(trx, jobId),
-    durations: await testDurations(trx, viewer.timeZone),
-  }));
+  const { board, durations } = await inScope(scopeOf(viewer), async (trx) => {
+    const board = await jobBoard(trx, jobId);
+    // How long it will take matters while something waits to be measured.
+    return { board, durations: board?.job.state === 'open' ? await testDurations(trx, viewer.timeZone) : [] };
+  });
   if (!board) notFound();
   return { viewer, board, past: pastDurations(durations) };
 });
