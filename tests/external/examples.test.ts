@@ -19,6 +19,7 @@ import zener from './data/jcgm106-zener.json';
 import trees from './data/ls-plane-trees.json';
 import exponential from './data/minimax-exp-line-analytic.json';
 import williams from './data/minimax-line-williams.json';
+import noInt1 from './data/nist-linear-noint1.json';
 import norris from './data/nist-linear-norris.json';
 import lew from './data/nist-univariate-lew.json';
 import lottery from './data/nist-univariate-lottery.json';
@@ -33,8 +34,8 @@ import npl from './data/thermal-npl-faq.json';
 
 /**
  * Worked examples from outside the project. Each data file keeps its source and whether that text was read or is
- * recalled; both stand beside the check too. Three more examples were looked at and do not fit: a minimum circumscribed
- * circle (no method here gives one), a regression through the origin, a list of expansion coefficients.
+ * recalled; both stand beside the check too. Two more examples were looked at and do not fit: a minimum circumscribed
+ * circle (Rosetta Code; no method here gives one) and a list of typical expansion coefficients (Swyt 1994; nothing is computed).
  */
 function expectNear(actual: string | undefined, expected: Dec | string | number, within: Dec | string | number): void {
   const difference = new Dec(actual!).minus(expected).abs();
@@ -73,6 +74,20 @@ describe('statistics', () => {
     );
     expectDigits(slopeUmPerM(line).dividedBy(Fraction.of(1000)).toText(), norris.expected.B1, 13);
     expectDigits(line.intercept.toText(), norris.expected.B0, 13);
+  });
+
+  // NIST/ITL StRD linear regression, file NoInt1.dat, certified value. READ. A line through the origin is the line through the points
+  // and their mirror images in the origin.
+  it('NIST StRD NoInt1: least-squares line through the origin', () => {
+    const pairs = noInt1.data.y_x_decimal_strings as [string, string][];
+    const mirrored = [...pairs, ...pairs.map(([y, x]) => [`-${y}`, `-${x}`] as [string, string])];
+    const line = fitLine(
+      seriesFromTexts(mirrored.map(([, x]) => x)),
+      seriesFromTexts(mirrored.map(([y]) => y)),
+      'least-squares',
+    );
+    expectDigits(slopeUmPerM(line).dividedBy(Fraction.of(1000)).toText(), noInt1.expected.B1, 14);
+    expect(line.intercept.sign()).toBe(0);
   });
 
   // JCGM 100:2008, 4.4.3 and Table 1. RECALLED.

@@ -1,5 +1,6 @@
 import solver from 'javascript-lp-solver';
 import { jStat } from 'jstat';
+import { lusolve, multiply, transpose } from 'mathjs';
 import { SimpleLinearRegression } from 'ml-regression-simple-linear';
 import { linearRegression, mean, sampleStandardDeviation } from 'simple-statistics';
 import { describe, expect, it } from 'vitest';
@@ -22,7 +23,14 @@ function generator(seed: number): () => number {
 const hundredths = (value: number) => (Math.round(value * 100) / 100).toString();
 
 /** Least upper − lower with lower ≤ reading − Σ terms ≤ upper, as a linear programme. */
-function narrowest(rows: { terms: Record<string, number>; reading: number }[]): number {
+function narrowest(rows: Row[]): number {
+  return narrowestWith(rows).width!;
+}
+
+type Row = { terms: Record<string, number>; reading: number };
+
+/** The same with the factors of the terms. */
+function narrowestWith(rows: Row[]): Record<string, number> {
   const names = Object.keys(rows[0]!.terms);
   const constraints: Record<string, { min?: number; max?: number }> = {};
   const columns: Record<string, Record<string, number>> = { upper: { width: 1 }, lower: { width: -1 } };
@@ -47,9 +55,10 @@ function narrowest(rows: { terms: Record<string, number>; reading: number }[]): 
   const answer = solver.Solve({ optimize: 'width', opType: 'min', constraints, variables } as never) as {
     feasible: boolean;
     result: number;
-  };
+  } & Record<string, number | undefined>;
   expect(answer.feasible).toBe(true);
-  return answer.result;
+  const factor = (name: string) => (answer[`${name}Plus`] ?? 0) - (answer[`${name}Minus`] ?? 0);
+  return { width: answer.result, ...Object.fromEntries(names.map((name) => [name, factor(name)])) };
 }
 
 describe('linear programming (javascript-lp-solver)', () => {
@@ -99,6 +108,108 @@ describe('linear programming (javascript-lp-solver)', () => {
         }),
       );
       expect(Number(ours)).toBeCloseTo(theirs, 6);
+    }
+  });
+
+  // The circle is not linear: the programme is solved for the radii seen from a centre, the centre moved, until it stands still.
+  it('circular test, minimum zone by true geometry', () => {
+    const random = generator(107);
+    for (let run = 0; run < 20; run++) {
+      const nominal = [20, 50, 150][run % 3]!;
+      const arc = run % 4 === 3 ? 120 : 360;
+      const count = 6 + Math.floor(random() * 14);
+      const trace = Array.from({ length: count }, (_, i) => ({
+        angle: hundredths(((i + random() * 0.8) * arc) / count),
+        radius: hundredths(random() * 12 - 6),
+      }));
+      const ours = evaluate({
+        method: 'circular',
+        nominalRadius: String(nominal),
+        arc: String(arc),
+        clockwise: trace,
+      }).clockwise!.G;
+      const points = trace.map(({ angle, radius }) => {
+        const [at, r] = [(Number(angle) * Math.PI) / 180, nominal * 1000 + Number(radius)];
+        return { x: r * Math.cos(at), y: r * Math.sin(at) };
+      });
+      let centre = { x: 0, y: 0 };
+      let theirs = Number.POSITIVE_INFINITY;
+      for (let step = 0; step < 6; step++) {
+        const seen = points.map(({ x, y }) => ({
+          angle: Math.atan2(y - centre.y, x - centre.x),
+          r: Math.hypot(x - centre.x, y - centre.y),
+        }));
+        const rows = seen.map(({ angle, r }) => ({
+          terms: { a: Math.cos(angle), b: Math.sin(angle) },
+          reading: r - nominal * 1000,
+        }));
+        const { width, a, b } = narrowestWith(rows);
+        centre = { x: centre.x + a!, y: centre.y + b! };
+        theirs = width!;
+      }
+      expect(Number(ours)).toBeCloseTo(theirs, 5);
+    }
+  });
+});
+
+describe('least squares with more coefficients (mathjs)', () => {
+  /** Solution of the normal equations. */
+  const solve = (rows: number[][], right: number[]): number[] => {
+    const across = transpose(rows);
+    const answer = lusolve(multiply(across, rows), multiply(across, right)) as number[][];
+    return answer.map(([value]) => value!);
+  };
+
+  it('plane of a flatness', () => {
+    const random = generator(108);
+    for (let run = 0; run < 40; run++) {
+      const points = Array.from({ length: 4 + Math.floor(random() * 30) }, (_, i) => ({
+        x: hundredths((i % 6) * 40 + random() * 20),
+        y: hundredths(Math.floor(i / 6) * 40 + random() * 20 + (i % 2)),
+        reading: hundredths(random() * 30 - 15),
+      }));
+      const ours = evaluate({ method: 'flatness', reference: 'least-squares', points });
+      const [a, b, c] = solve(
+        points.map((p) => [1, Number(p.x), Number(p.y)]),
+        points.map((p) => Number(p.reading)),
+      ) as [number, number, number];
+      expect(Number(ours.a)).toBeCloseTo(a, 7);
+      expect(Number(ours.b) / 1000).toBeCloseTo(b, 8);
+      expect(Number(ours.c) / 1000).toBeCloseTo(c, 8);
+      const residuals = points.map((p) => Number(p.reading) - a - b * Number(p.x) - c * Number(p.y));
+      expect(Number(ours.deviation)).toBeCloseTo(Math.max(...residuals) - Math.min(...residuals), 7);
+    }
+  });
+
+  it('first harmonic of a run-out, at any angles', () => {
+    const random = generator(109);
+    for (let run = 0; run < 40; run++) {
+      const count = 3 + Math.floor(random() * 20);
+      const angles = Array.from({ length: count }, (_, i) => hundredths(((i + random() * 0.7) * 360) / count));
+      const readings = angles.map(() => hundredths(random() * 20 - 10));
+      const { perInsertion, eccentricity, phase } = evaluate({ method: 'run-out', angles, insertions: [{ readings }] });
+      const radians = angles.map((angle) => (Number(angle) * Math.PI) / 180);
+      const [, a, b] = solve(
+        radians.map((angle) => [1, Math.cos(angle), Math.sin(angle)]),
+        readings.map(Number),
+      ) as [number, number, number];
+      expect(Number(eccentricity)).toBeCloseTo(Math.hypot(a, b), 8);
+      const turned = Math.abs(Number(phase) - (Math.atan2(b, a) * 180) / Math.PI);
+      expect(Math.min(turned, Math.abs(turned - 360))).toBeLessThan(1e-7);
+      expect(perInsertion[0]!.eccentricity).toBe(eccentricity);
+      const roundness = evaluate({
+        method: 'roundness',
+        reference: 'least-squares',
+        points: [...angles.map((angle, i) => ({ angle, reading: readings[i]! })), { angle: '359.995', reading: '0' }],
+      });
+      const all = [...radians, (359.995 * Math.PI) / 180];
+      const rows = all.map((angle) => [1, Math.cos(angle), Math.sin(angle)]);
+      const values = [...readings.map(Number), 0];
+      const fit = solve(rows, values);
+      const residuals = rows.map((row, i) => values[i]! - row.reduce((sum, part, k) => sum + part * fit[k]!, 0));
+      expect(Number(roundness.leastSquares)).toBeCloseTo(Math.max(...residuals) - Math.min(...residuals), 7);
+      expect(Number(roundness.centre.x)).toBeCloseTo(fit[1]!, 7);
+      expect(Number(roundness.centre.y)).toBeCloseTo(fit[2]!, 7);
     }
   });
 });
