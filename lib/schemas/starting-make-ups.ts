@@ -231,7 +231,7 @@ export const startingMakeUps: { kind: MachineKind; title: string; makeUp: MakeUp
       ],
       tailstock: null,
       guideBush: null,
-      toolChanger: null,
+      toolChanger: { id: 'TC1', channel: 3 },
       ...noSizes,
       barDiameterMm: '65',
     },
