@@ -1,6 +1,14 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import * as archive from '@/app/api/archive/route';
+import * as values from '@/app/api/catalogue/[code]/[test]/values/route';
+import * as ownTest from '@/app/api/catalogue/own/[id]/route';
+import * as versions from '@/app/api/catalogue/own/[id]/versions/route';
+import * as withdrawal from '@/app/api/catalogue/own/[id]/withdrawal/route';
+import * as ownTests from '@/app/api/catalogue/own/route';
 import * as catalogue from '@/app/api/catalogue/route';
+import * as agreement from '@/app/api/catalogue/values/[id]/agreement/route';
+import * as valuesImport from '@/app/api/catalogue/values/import/route';
+import * as valuesCsv from '@/app/api/catalogue/values.csv/route';
 import * as customer from '@/app/api/customers/[id]/route';
 import * as customers from '@/app/api/customers/route';
 import * as calibrations from '@/app/api/instruments/[id]/calibrations/route';
@@ -79,6 +87,16 @@ const params = { id: newId() };
 const routes: [string, unknown, Action, { method: string; path?: string; body?: unknown; params?: typeof params }][] = [
   ['GET /api/archive', archive.GET, 'archive.search', { method: 'GET', path: '/api/archive?q=x' }],
   ['GET /api/catalogue', catalogue.GET, 'catalogue.read', { method: 'GET' }],
+  ['GET values', values.GET, 'catalogue.read', { method: 'GET', params }],
+  ['POST values', values.POST, 'catalogue.confirm', { method: 'POST', body: {}, params }],
+  ['POST agreement', agreement.POST, 'catalogue.agree', { method: 'POST', params }],
+  ['GET values.csv', valuesCsv.GET, 'catalogue.read', { method: 'GET' }],
+  ['POST import of values', valuesImport.POST, 'catalogue.confirm', { method: 'POST', body: {} }],
+  ['GET own tests', ownTests.GET, 'catalogue.read', { method: 'GET' }],
+  ['POST own tests', ownTests.POST, 'catalogue.compose', { method: 'POST', body: {} }],
+  ['GET own test', ownTest.GET, 'catalogue.read', { method: 'GET', params: { id: 'OWN-1' } }],
+  ['POST version', versions.POST, 'catalogue.compose', { method: 'POST', body: {}, params: { id: 'OWN-1' } }],
+  ['POST withdrawal', withdrawal.POST, 'catalogue.compose', { method: 'POST', params: { id: 'OWN-1' } }],
   ['GET /api/customers', customers.GET, 'customer.list', { method: 'GET' }],
   ['POST /api/customers', customers.POST, 'customer.manage', { method: 'POST', body: {} }],
   ['GET /api/customers/{id}', customer.GET, 'customer.list', { method: 'GET', params }],

@@ -43,6 +43,10 @@ async function addresses(page: Page): Promise<string[]> {
     `/instruments/${instruments.items[0].id}`,
     '/customers',
     '/catalogue',
+    '/catalogue?show=unconfirmed',
+    '/catalogue/iso-13041-1-2020/SP-2b',
+    '/catalogue/values',
+    '/catalogue/own/OWN-1',
     '/archive',
     '/archive?q=LK32',
   ];
@@ -86,7 +90,12 @@ describe('every page', () => {
 
   it('of the administrator and of the public side too', async () => {
     const visit = await visitor(browser, 'admin@quillmere.example');
-    for (const address of ['/', '/team', '/settings']) {
+    const pages = ['/', '/team', '/settings', '/catalogue', '/catalogue/iso-13041-1-2020/SP-2b', '/catalogue/values'];
+    const own = ['/catalogue/own/OWN-1', '/catalogue/own/OWN-1/new-version', '/catalogue/own/new'];
+    const composing = ['parallelism', 'positioning', 'function-check'].map(
+      (measure) => `/catalogue/own/new?measure=${measure}`,
+    );
+    for (const address of [...pages, ...own, ...composing]) {
       await visit.page.goto(address);
       await expectRoom(visit.page, address);
       await expectAccessible(visit.page, address);
