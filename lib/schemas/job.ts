@@ -82,12 +82,15 @@ export const temperatureForm = z
     error: 'Give the air or the machine temperature.',
   });
 
+/** A machine with many stations is proposed a test for each of them. */
+const MOST_PROPOSALS = 3000;
+
 /** The plan: which proposals are taken, why the others are not, and contract tolerances. */
 export const planForm = z.object({
-  include: z.array(z.string().min(1).max(120)).min(1, 'Take at least one test into the plan.').max(500),
+  include: z.array(z.string().min(1).max(120)).min(1, 'Take at least one test into the plan.').max(MOST_PROPOSALS),
   exclusions: z
     .array(z.object({ key: z.string().min(1).max(120), reason: leftOutReason, text: optionalText('The remark', 400) }))
-    .max(500)
+    .max(MOST_PROPOSALS)
     .default([]),
   contractTolerances: z
     .array(
@@ -97,7 +100,7 @@ export const planForm = z.object({
         source: line('The contract item', 300),
       }),
     )
-    .max(500)
+    .max(MOST_PROPOSALS)
     .default([]),
 });
 export type PlanForm = z.output<typeof planForm>;
