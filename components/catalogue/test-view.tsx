@@ -8,7 +8,10 @@ import { appliesToChoices } from '@/lib/planning/applies-to-words';
 import { exampleComponent } from '@/lib/planning/catalogue';
 import { DIRECTION_WORDS } from '@/lib/reporting/words';
 import { cautionText } from '@/standards/cautions';
-import type { TestDefinition } from '@/standards/types';
+import type { ShownIn, TestDefinition } from '@/standards/types';
+
+/** Unit in which the step of a result is given; a count of items has none. */
+const stepUnits: Record<ShownIn, string | null> = { mm: 'µm', 'mm/m': 'µm/m', '″': '″', items: null };
 
 /** One test of the catalogue, whole. `children`: what the organisation says of its tolerances, and further sections. */
 export function TestView(props: {
@@ -19,6 +22,7 @@ export function TestView(props: {
   children?: ReactNode;
 }) {
   const { test, codeTitle, action, notice, children } = props;
+  const step = stepUnits[test.shownIn ?? 'mm'];
   return (
     <>
       <p className="mb-1 text-sm text-ink2">
@@ -57,8 +61,14 @@ export function TestView(props: {
             <ProvenanceLine provenance={test.source} />
             <SectionTitle>What is judged</SectionTitle>
             <p>
-              {test.judgedFigure}; permissible {DIRECTION_WORDS[test.direction]}; shown in steps of{' '}
-              <span className="font-mono">{test.resolution.valueUm}</span> µm.
+              {test.judgedFigure}
+              {step && (
+                <>
+                  ; permissible {DIRECTION_WORDS[test.direction]}; shown in steps of{' '}
+                  <span className="font-mono">{test.resolution.valueUm}</span> {step}
+                </>
+              )}
+              .
             </p>
             {test.positiveMeans && <p className="mt-1">A positive figure means: {test.positiveMeans}.</p>}
             {test.negativeMeans && <p>A negative one: {test.negativeMeans}.</p>}

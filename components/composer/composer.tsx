@@ -56,6 +56,8 @@ export function Composer(props: {
       router.refresh();
     },
   });
+  // Items are in order or not: there is no figure that could have a tolerance or a step.
+  const judgesFigure = findMeasurement(api.form.watch(at('measurement')) ?? '')?.method !== 'function-check';
   const failed = api.form.formState.submitCount > 0 && !api.form.formState.isValid && !api.sending;
   return (
     <div className="grid items-start gap-x-10 gap-y-8 xl:grid-cols-[minmax(0,1fr)_minmax(0,1fr)]">
@@ -63,8 +65,12 @@ export function Composer(props: {
         <WhatAndWhere api={api} isNew={basedOn === null} />
         <SectionTitle>Fields of the sheet</SectionTitle>
         <LayoutFields api={api} />
-        <SectionTitle>Tolerance</SectionTitle>
-        <ToleranceFields api={api} />
+        {judgesFigure && (
+          <>
+            <SectionTitle>Tolerance</SectionTitle>
+            <ToleranceFields api={api} />
+          </>
+        )}
         <Judged api={api} />
         <Texts api={api} />
         <SectionTitle note="For what is to be measured again after a correction">What the result rests on</SectionTitle>
@@ -156,7 +162,14 @@ function Judged({ api }: { api: ComposerForm }) {
         </>
       )}
       <ComposerField api={api} path="judgedFigure" label="What is judged, in words" className="sm:col-span-2" />
-      <ComposerField api={api} path="resolutionUm" label="Result shown in steps of, µm" figure />
+      {measurement?.shownIn !== 'items' && (
+        <ComposerField
+          api={api}
+          path="resolutionUm"
+          label={`Result shown in steps of, ${measurement?.toleranceUnit}`}
+          figure
+        />
+      )}
     </div>
   );
 }

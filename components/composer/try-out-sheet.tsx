@@ -34,7 +34,7 @@ export function TryOutSheet({ data }: { data: SheetData }) {
       <div className="mt-3 max-w-96">
         <SetUpSketch spec={definition.sketch} component={sheet.component} />
       </div>
-      <p className="mt-2 font-semibold">{toleranceWords(rules.tolerance, rules.direction)}</p>
+      <p className="mt-2 font-semibold">{toleranceWords(rules.tolerance, rules.direction, definition.shownIn)}</p>
       <p id="try-out-tab" className="sr-only">
         Readings that are tried out
       </p>
