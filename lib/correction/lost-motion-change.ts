@@ -22,6 +22,7 @@ export const lostMotionChangeInput = z.strictObject({
  * @param cuttingFeed, rapid present counts, lostMotion µm at the slide, + = uncompensated; at least one of the two
  * @param limit µm: above it the mechanics are looked at first
  * @returns per feed change and newValue (unrounded counts), newCount (half-even); mechanicsFirst where a limit is given
+ * @throws EvaluationError neither feed given, a unit not above zero
  * @example present 19, lostMotion −8 µm, 1 µm per count on diameter → change −16, new 3
  * Source: common practice; the sign of a control's value is verified by measuring again.
  */

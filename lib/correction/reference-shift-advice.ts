@@ -9,6 +9,8 @@ export const referenceShiftAdviceInput = z.strictObject({
 
 /**
  * Advice for the shift of a reference, figures as the method `reference-shift`.
+ * @param input target, found mm as shown; basis, controlFactor as the method
+ * @throws EvaluationError another factor than 1 or 2
  * @example target 39.998, found 40.058 on diameter, factor 2 → shift −30, controlShift −60 µm
  * Source: common practice.
  */

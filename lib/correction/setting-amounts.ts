@@ -17,6 +17,7 @@ export const twoJackPointsInput = z.strictObject({
 /**
  * Difference to raise between two jack points A and B: raise = |slopeChange|·span/1000.
  * @param slopeChange µm/m wanted, + = B must rise against A; @param span mm between the points
+ * @throws EvaluationError a span not above zero
  * @example 50 µm/m over 400 mm → raise B by 20 µm
  * Source: common practice.
  */
@@ -44,6 +45,7 @@ export const pivotAndPushScrewInput = z.strictObject({
  * Movement at a push screw about a pivot that takes a slope out: movement = −slope·distance/1000.
  * @param slope µm/m, the error; @param distance mm from pivot to screw
  * @returns movement µm at the screw, + in the direction of a positive slope
+ * @throws EvaluationError a distance not above zero
  * @example slope 40 µm/m, 500 mm → −20 µm, minus
  * Source: common practice.
  */
@@ -73,6 +75,7 @@ export const shimInput = z.strictObject({
  * Shim under a base: thickness = −heightError.
  * @param heightError µm, + = too high
  * @returns thickness µm, + add, − remove
+ * @throws EvaluationError an error that is no figure
  * @example heightError −22.5 → add 22.5 µm
  * Source: common practice.
  */
@@ -135,6 +138,7 @@ export const headstockForTaperInput = z.strictObject({
  * movement = −slope·distance/1000.
  * @param D1 near the headstock, D2 far, length collar to collar, distance pivot to screw, all mm
  * @returns slope µm/m, movement µm at the screw, direction the free end must go
+ * @throws EvaluationError a diameter or length not above zero
  * @example D1 30.012, D2 30.007, length 100, distance 400 → slope 25 µm/m, movement −10 µm, away from the tool
  * Source: common practice.
  */

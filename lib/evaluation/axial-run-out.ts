@@ -13,6 +13,7 @@ export const axialRunOutInput = z.strictObject({
  * Axial or face run-out on one or more circles: max − min of each, the largest is judged.
  * @param circles readings µm of one turn each, at least 2
  * @returns perCircle µm in the order given, largest = deviation µm
+ * @throws EvaluationError no circle, fewer than 2 readings of one
  * @example readings 0, 2, 1 → 2 µm
  * Source: ISO 230-1:2012 (from memory).
  */

@@ -17,6 +17,7 @@ export const indexingInput = z.strictObject({
  *
  * @param stations name, readings µm (at least 2); @param radius mm of the readings from the axis
  * @returns ranges, worst, worstStation, departures, largestDeparture µm; worstAngle, largestDepartureAngle µm/m
+ * @throws EvaluationError no station, fewer than 2 readings of one, a radius not above zero
  * @example stations 0, 2 and 5, 6 → ranges 2, 1; departures −2.25, 2.25
  * Source: common practice; tests after ISO 13041-1:2020 (from memory).
  */

@@ -23,6 +23,8 @@ export const lostMotionInput = z.strictObject({
  *
  * @param places feed, name, pairs of readings µm at the same target (at least one pair)
  * @param sense what the axis moving in + does to the plunger; `plus-releases` turns the sign of every reading
+ * @returns per place mean, spread µm; per feed mean, lostMotion, spread µm; deviation µm
+ * @throws EvaluationError no place, a place without a pair
  * @example forward 0, backward −2 → mean 2, lostMotion −2
  * Source: reversal value after ISO 230-2:2014 (from memory); sign of lostMotion common practice.
  */

@@ -24,6 +24,7 @@ export const referenceShiftInput = z.strictObject({ method: z.literal('reference
  *
  * @param target, found mm as shown; @param controlFactor 1 | 2 (1)
  * @returns shift, controlShift µm (signed), deviation µm
+ * @throws EvaluationError another factor than 1 or 2
  * @example target 39.998, found 40.046 on diameter, factor 2 → shift −24, controlShift −48 µm
  * Source: common practice.
  */

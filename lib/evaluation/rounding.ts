@@ -11,6 +11,8 @@ export const roundingInput = z.strictObject({
 
 /**
  * Nearest multiple of a resolution, see `round`.
+ * @param value, resolution decimal strings in the same unit; rule half-even (default) | half-away-from-zero
+ * @throws EvaluationError a resolution not above zero
  * @example 0.0125 at 0.001: half-even 0.012, half-away-from-zero 0.013
  * Source: ISO 80000-1 Annex B, rules A and B (from memory).
  */

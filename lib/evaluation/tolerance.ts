@@ -15,6 +15,7 @@ export const toleranceInput = z.strictObject({
  * Tolerance for another measuring length: T(L) = min(max(T0·L/L0, Tmin), Tmax). Only for tests given per length, never
  * for run-out, indexing, or an offset at a fixed place.
  * @param base, minimum (0), maximum µm; baseLength, length mm
+ * @throws EvaluationError a base, length, base length or maximum not above zero, a minimum below zero
  * @example base 15 over 300, length 240, minimum 5 → 12 µm
  * Source: ISO 230-1:2012 (from memory); floor of 5 µm for turning machines from memory, given by the caller.
  */

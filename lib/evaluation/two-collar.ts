@@ -22,6 +22,7 @@ export function taperDirection(taper: Fraction) {
  *
  * @param D1 diameter near the headstock, mm; @param D2 far collar, mm; @param distance collar to collar, mm
  * @returns slope µm/m, diameterDifference µm, direction, deviation µm (signed)
+ * @throws EvaluationError a diameter or distance not above zero
  * @example D1 30.012, D2 30.007, L 100 → slope 25 µm/m, deviation 2.5 µm
  * Source: common practice; test after ISO 13041-6:2009 (from memory).
  */

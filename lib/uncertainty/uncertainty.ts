@@ -42,7 +42,7 @@ const NORMAL_FACTOR: Record<Coverage, string> = { '0.95': '1.959964', '0.99': '2
  * ν = u⁴/Σ((c_i·u_i)⁴/ν_i), left out where all are infinite; coverage factor = two-sided Student t at ν rounded to one
  * decimal and then cut down to a whole number, at least 1; expanded = factor · standard.
  *
- * @param components value: half-width (rectangular √3, triangular √6, u-shaped √2) or, normal, the standard uncertainty
+ * @param components value (one unit for all, µm as a rule): half-width (rectangular √3, triangular √6, u-shaped √2) or, normal, the standard uncertainty
  *   (a certificate's U at k = 2: divisor 2); sensitivity (1); degreesOfFreedom (infinite)
  * @param coverage 0.95 | 0.99
  * @throws EvaluationError a negative value, a divisor or degrees of freedom not above zero, another coverage
