@@ -18,6 +18,8 @@ export interface ProposedTest {
   unconfirmed: boolean;
   /** The job takes confirmed tolerances only, and this one is not. */
   refused: boolean;
+  /** Page of the test in the catalogue. */
+  href: string;
   /** What stands set up while it is measured; null: it is set up on its own. */
   setUp: string | null;
   minutes: number;

@@ -1,5 +1,6 @@
 'use client';
 
+import Link from 'next/link';
 import { Field } from '@/components/ui/field';
 import { Checkbox, NumberText, Select, TextInput } from '@/components/ui/inputs';
 import { minutesWords } from '@/lib/planning/estimate-minutes';
@@ -39,7 +40,12 @@ export function PlanTest(props: {
             </p>
           )}
           {!contract && test.refused && (
-            <p className="font-medium text-brass">Not confirmed: this job takes confirmed tolerances only.</p>
+            <p className="font-medium text-brass">
+              Not confirmed: this job takes confirmed tolerances only.{' '}
+              <Link href={test.href} className="underline">
+                Look at it in the catalogue
+              </Link>
+            </p>
           )}
           {contract ? (
             <div className="mt-2 grid gap-2 text-base text-ink sm:grid-cols-[8rem_1fr]">

@@ -1,7 +1,7 @@
-import { ownTests } from '@/standards/own-tests';
+import { isOwnTest, ownTests } from '@/standards/own-tests';
 import { codeTitle } from '@/standards/registry';
 import type { TestDefinition } from '@/standards/types';
-import { type CatalogueCode, catalogue, findCatalogueTest } from './catalogue';
+import { type CatalogueCode, catalogue, findCatalogueTest, slugOf } from './catalogue';
 
 /** Short, because own tests have pages and addresses of their own: `/catalogue/own/OWN-1`. */
 export const ownSlug = 'own';
@@ -29,3 +29,7 @@ export function findTestWithOwn(
   const definition = ownDefinitions.find(({ id }) => id === test.toUpperCase());
   return definition ? { code: ownCode(ownDefinitions), test: definition } : null;
 }
+
+/** Address of the page of a test, of the catalogue or an own one. */
+export const testHref = (test: Pick<TestDefinition, 'code' | 'edition' | 'id'>): string =>
+  `/catalogue/${isOwnTest(test) ? ownSlug : slugOf(test.code, test.edition)}/${test.id}`;

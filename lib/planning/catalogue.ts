@@ -12,7 +12,7 @@ export interface CatalogueCode extends TestCode {
   tests: TestDefinition[];
 }
 
-const slugOf = (code: string, edition: string): string =>
+export const slugOf = (code: string, edition: string): string =>
   `${code} ${edition}`
     .trim()
     .toLowerCase()

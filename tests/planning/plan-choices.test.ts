@@ -23,6 +23,7 @@ const test = (key: string, components: string[], change: Partial<ProposedTest> =
   provenance: null,
   unconfirmed: false,
   refused: false,
+  href: '/catalogue/iso-13041-1-2020/SP-1a',
   setUp: null,
   minutes: 15,
   fromPasses: null,

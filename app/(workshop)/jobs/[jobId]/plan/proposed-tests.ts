@@ -3,6 +3,7 @@ import type { StartChoice } from '@/components/jobs/plan-start';
 import { toleranceWords } from '@/components/sheet/tolerance-words';
 import { dayIn } from '@/lib/dates';
 import { standsInFor } from '@/lib/planning/alternatives';
+import { testHref } from '@/lib/planning/catalogue-with-own';
 import { componentIds } from '@/lib/planning/component-words';
 import { definitionOf } from '@/lib/planning/definition-of';
 import { confirmationWords, isSettled } from '@/lib/planning/is-settled';
@@ -31,6 +32,7 @@ function proposedTest(sheet: PlannedSheet, making: PlanMaking, refuseUnconfirmed
     provenance: tolerance && (confirmationWords(tolerance) ?? provenanceWords[tolerance.provenance.kind]),
     unconfirmed: tolerance?.provenance.kind === 'from-memory' && !tolerance.confirmation,
     refused: refuseUnconfirmed && !isSettled(tolerance),
+    href: testHref(sheet.definition),
     setUp: sheet.setUpTogether,
     minutes: estimate?.minutes ?? sheet.minutes,
     fromPasses: estimate?.fromPasses ?? null,
