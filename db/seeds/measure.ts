@@ -7,6 +7,7 @@ import { definitionOf } from '@/lib/planning/definition-of';
 import type { ReadingOperation } from '@/lib/schemas/operation';
 import { keepReadings } from '@/lib/services/keep-readings';
 import { startPass } from '@/lib/services/start-pass';
+import { allFields, sheetFields } from '@/lib/sheet/sheet-fields';
 import type { Unit } from '@/lib/units/unit';
 import { simulatedReadings } from './simulated-readings';
 
@@ -71,16 +72,22 @@ export async function simulatePass(db: Db, sheet: SheetRow, pass: SimulatedPass,
   const cells: { pointer: string; text: string; unit: Unit | null }[] = await db('readings')
     .where({ pass_id: passId })
     .select('pointer', 'text', 'unit');
+  const definition = definitionOf(sheet.definition);
+  const setUp = Object.fromEntries(cells.map((cell) => [cell.pointer, { text: cell.text, unit: cell.unit }]));
   const readings = simulatedReadings({
-    definition: definitionOf(sheet.definition),
-    setUp: Object.fromEntries(cells.map((cell) => [cell.pointer, { text: cell.text, unit: cell.unit }])),
+    definition,
+    setUp,
     tolerance: sheet.tolerance,
     share: pass.share,
-    stepUm: Number(definitionOf(sheet.definition).resolution.valueUm) <= 0.5 ? 0.2 : 1,
+    stepUm: Number(definition.resolution.valueUm) <= 0.5 ? 0.2 : 1,
     seed: `${sheet.key} ${pass.kind} ${pass.at.toISOString()}`,
   });
-  const unit: Unit = definitionOf(sheet.definition).layout.kind === 'two-collars' ? 'mm' : 'µm';
-  const all: Typed[] = Object.entries(readings).map(([pointer, text]) => ({ pointer, text, unit }));
+  const units = new Map(allFields(sheetFields(definition, setUp)).map(({ pointer, unit }) => [pointer, unit]));
+  const all: Typed[] = Object.entries(readings).map(([pointer, text]) => ({
+    pointer,
+    text,
+    unit: units.get(pointer) ?? null,
+  }));
   const taken = all.slice(0, Math.ceil(all.length * (pass.part ?? 1)));
   const third = taken[2];
   const typed =

@@ -2,6 +2,7 @@ import { scaleTolerance } from '@/lib/sheet/scale-tolerance';
 import { sheetFields } from '@/lib/sheet/sheet-fields';
 import type { Cells } from '@/lib/sheet/types';
 import type { PlannedTolerance, TestDefinition } from '@/standards/types';
+import { checkAnswers, foundAt, furtherReading } from './simulated-models';
 
 /** Noise that is the same at every start, so that pictures and tests of the demo scenario stay the same. */
 export function noise(seed: string): () => number {
@@ -14,7 +15,7 @@ export function noise(seed: string): () => number {
   };
 }
 
-interface Simulation {
+export interface Simulation {
   definition: TestDefinition;
   setUp: Cells;
   tolerance: PlannedTolerance | null;
@@ -35,9 +36,16 @@ export function simulatedReadings(simulation: Simulation): Record<string, string
     const rounded = Math.round((um + random() * stepUm * 1.2) / stepUm) * stepUm;
     return rounded.toFixed(stepUm < 1 ? 1 : 0).replace(/^-0(\.0)?$/, '0$1');
   };
+  const { layout } = definition;
   const order = sheetFields(definition, setUp).order;
   const model = readingModel(simulation, random);
-  if (definition.layout.kind === 'two-collars') return model.collars(order);
+  if (layout.kind === 'two-collars') return model.collars(order);
+  if (layout.kind === 'check-list') return checkAnswers(layout, simulation.share);
+  if (layout.kind === 'target-and-found') return foundAt(simulation);
+  if (layout.kind === 'diameters')
+    return Object.fromEntries(
+      order.map((pointer) => [pointer, (40 + Math.round(model.at(pointer)) / 1000).toFixed(3)]),
+    );
   return Object.fromEntries(order.map((pointer) => [pointer, step(model.at(pointer))]));
 }
 
@@ -48,7 +56,13 @@ function readingModel(simulation: Simulation, random: () => number) {
     Object.keys(setUp)
       .filter((pointer) => pointer.startsWith(list) && setUp[pointer]?.text)
       .map((pointer) => number(pointer));
-  const along = [...positions('/positions/'), ...positions('/points/'), ...positions('/first/measuredArm/')];
+  const along = [
+    ...positions('/positions/'),
+    ...positions('/points/'),
+    ...positions('/first/measuredArm/'),
+    ...positions('/targets/'),
+    ...positions('/sections/'),
+  ];
   const [from, to] = along.length > 1 ? [Math.min(...along), Math.max(...along)] : [0, 1];
   const span = to - from;
   const limit = tolerance ? Number(scaleTolerance(tolerance, String(span)).toleranceUm) : 5;
@@ -94,6 +108,8 @@ function readingModel(simulation: Simulation, random: () => number) {
         return parts[4] === 'backward' ? size : 0;
       case 'two-collars':
         return 0;
+      default:
+        return furtherReading(definition.layout, parts, { size, phase, limit, number, from, span });
     }
   };
 

@@ -1,6 +1,6 @@
 import type { MakeUp } from '@/lib/schemas/make-up';
-import type { Unit } from '@/lib/units/unit';
-import type { BoundComponent, CellDefault, Layout, TestDefinition } from '@/standards/types';
+import type { BoundComponent, CellDefault, TestDefinition } from '@/standards/types';
+import { cell, circleCells, foundCells, gridCells, listed, stationCells, targetCells } from './default-rows';
 
 type SetUp = Record<string, CellDefault>;
 
@@ -18,7 +18,7 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
     case 'angles-by-position':
       return positionCells(within(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
     case 'profile':
-      return positionCells(alongTravel(layout, travel(component.axis)), (row) => `/points/${row}/position`);
+      return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/points/${row}/position`);
     case 'square-reversed':
       return {
         ...positionCells(
@@ -46,16 +46,38 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
       return { '/sense': cell('plus-pushes-in') };
     case 'two-collars':
       return { '/distance': cell(within(['0', layout.distanceMm], travel(component.axis)).at(-1)!, 'mm') };
+    case 'angle-steps':
+      return { '/stepLength': cell(layout.stepLengthMm, 'mm') };
+    case 'two-runs':
+      return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
+    case 'angular-runs':
+      return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
+    case 'grid':
+      return gridCells(layout);
+    case 'target-cycles':
+      return targetCells(layout, component, travel(component.axis));
+    case 'circle-trace':
+      return circleCells(layout, [travel(component.axis), travel(component.reference)]);
+    case 'rotation-turns':
+      return listed(layout.anglesDeg, '°', (row) => `/angles/${row}`);
+    case 'stations':
+      return stationCells(layout, component, makeUp);
+    case 'diameters':
+      return positionCells(within(layout.positionsMm, travel(component.axis)), (row) => `/sections/${row}/position`);
+    case 'round-trace':
+      return { '/surface': cell(layout.surface), ...listed(layout.anglesDeg, '°', (row) => `/points/${row}/angle`) };
+    case 'time-series':
+      return listed(layout.minutes, 'min', (row) => `/points/${row}/minutes`);
+    case 'target-and-found':
+      return foundCells(layout, component, makeUp);
+    case 'circles':
+    case 'check-list':
+      return {};
   }
 }
 
-function cell(text: string, unit: Unit | null = null): CellDefault {
-  return { text, unit };
-}
-
-function positionCells(positions: string[], pointer: (row: number) => string): SetUp {
-  return Object.fromEntries(positions.map((position, row) => [pointer(row), cell(position, 'mm')]));
-}
+const positionCells = (positions: string[], pointer: (row: number) => string): SetUp =>
+  listed(positions, 'mm', pointer);
 
 /** The positions as they stand where the travel reaches; otherwise as many, evenly, over what it reaches. */
 function within(positions: string[], travelMm: string | null): string[] {
@@ -67,8 +89,8 @@ function within(positions: string[], travelMm: string | null): string[] {
   return positions.map((_, row) => String(Math.round((first + row * rounded) * 10) / 10));
 }
 
-function alongTravel(layout: Extract<Layout, { kind: 'profile' }>, travelMm: string | null): string[] {
-  if (travelMm === null) return layout.positionsMm;
+function alongTravel(positionsMm: string[], travelMm: string | null): string[] {
+  if (travelMm === null) return positionsMm;
   const travel = Number(travelMm);
   const step = STEPS_MM.find((candidate) => travel / candidate <= MOST_STEPS) ?? STEPS_MM.at(-1)!;
   const count = Math.floor(travel / step);

@@ -1,7 +1,7 @@
 import type { MeasuredResult, ResultOf } from '@/lib/evaluation';
-import { formatDecimal } from '@/lib/units/format';
 import { Fraction } from '@/lib/units/fraction';
-import { round } from '@/lib/units/round';
+import { shown, slope, um } from './figure-text';
+import { circularFigures, indexingFigures, positioningFigures, rotationFigures } from './further-figures';
 import type { Judgement, SheetOutcome } from './types';
 
 export interface Figure {
@@ -13,6 +13,7 @@ export interface Figure {
 export function figures(outcome: SheetOutcome): Figure[] {
   if (outcome.state !== 'partial' && outcome.state !== 'complete') return [];
   const { result, judgement, input } = outcome;
+  if (result.method === 'function-check') return [];
   const own = figuresOf(result, judgement, input);
   const local = judgement.local;
   if (!local) return own;
@@ -57,10 +58,70 @@ function figuresOf(result: MeasuredResult, judgement: Judgement, input: unknown)
         { label: 'slope', value: slope(result.slope) },
         { label: 'difference of the diameters', value: um(result.diameterDifference) },
       ];
+    case 'positioning':
+      return positioningFigures(result);
+    case 'circular':
+      return circularFigures(result);
+    case 'axis-of-rotation':
+      return rotationFigures(result, (input as { direction: string }).direction === 'tilt');
+    case 'indexing':
+      return indexingFigures(result, stationNames(input));
+    case 'straightness-from-angles':
+      return [
+        { label: 'slope of the reference line', value: slope(result.slope) },
+        ...(result.closure === undefined ? [] : [{ label: 'closure of the two runs', value: um(result.closure) }]),
+      ];
+    case 'straightness-reversal':
+      return [
+        { label: 'straightness of the motion', value: um(result.machineStraightness) },
+        { label: 'straightness of the straightedge', value: um(result.straightedgeStraightness) },
+      ];
+    case 'flatness':
+      return [{ label: 'slope of the plane', value: `x ${slope(result.b)}, y ${slope(result.c)}` }];
+    case 'angular-deviation':
+      return result.hysteresis === undefined
+        ? []
+        : [
+            {
+              label: 'largest difference out and back',
+              value: `${slope(result.hysteresis)} at ${result.hysteresisAt} mm`,
+            },
+          ];
+    case 'roundness':
+      return [
+        { label: 'about the minimum-zone centre', value: um(result.minimumZone) },
+        { label: 'about the least-squares centre', value: um(result.leastSquares) },
+      ];
+    case 'diameter-consistency':
+      return [
+        { label: 'taper, near the headstock less far end', value: um(result.taper) },
+        { label: 'slope of the radius', value: slope(result.slope) },
+      ];
+    case 'drift':
+      return [
+        { label: 'range in the first hour', value: um(result.firstHour) },
+        { label: 'rate', value: `${shown(result.rate, '0.01')} µm/h` },
+        ...(result.temperatureRange === undefined
+          ? []
+          : [{ label: 'range of the temperature', value: `${shown(result.temperatureRange, '0.1')} °C` }]),
+      ];
+    case 'reference-shift':
+      return [
+        { label: 'way that the slide lacks in +', value: um(result.shift) },
+        { label: 'shift as the control counts it', value: um(result.controlShift) },
+      ];
+    case 'axial-run-out':
+      return circleNames(input).map((label, k) => ({ label, value: um(result.perCircle[k]!) }));
     default:
       return [];
   }
 }
+
+const stationNames = (input: unknown): string[] =>
+  (input as { stations: { name: string }[] }).stations.map(({ name }) => name);
+
+const circleNames = (input: unknown): string[] =>
+  (input as { circles: { name?: string }[] }).circles.map(({ name }, k) => name ?? `circle ${k + 1}`);
 
 function runOutFigures(result: ResultOf<'run-out'>, judgement: Judgement): Figure[] {
   const { perInsertion, eccentricity, phase, spread } = result;
@@ -129,18 +190,6 @@ function sectionPositions(input: unknown): string[] {
 
 function radiiOf(input: unknown): string[] {
   return (input as { radii?: string[] }).radii ?? [];
-}
-
-function shown(value: string, resolution: string): string {
-  return formatDecimal(round(value, resolution, 'half-even'));
-}
-
-function um(value: string, resolution = '0.1'): string {
-  return `${shown(value, resolution)} µm`;
-}
-
-function slope(value: string): string {
-  return `${shown(value, '0.1')} µm/m`;
 }
 
 function times(value: string, factor: number): Fraction {

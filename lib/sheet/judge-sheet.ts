@@ -1,13 +1,14 @@
 import { EvaluationError, type EvaluationInput, evaluateUnknown, type MeasuredResult } from '@/lib/evaluation';
 import type { TestDefinition } from '@/standards/types';
 import { directionWords, displayResult, judgeResult } from './judge-result';
+import { checkResult, unreadableValues } from './layouts/check-list';
 import { engineOf } from './layouts/engine-of';
-import type { Assembled } from './layouts/layout-engine';
-import { isFilled } from './layouts/parts';
+import type { Assembled, SheetValues } from './layouts/layout-engine';
+import { counted, isFilled } from './layouts/parts';
 import { readCells } from './read-cells';
 import { scaleTolerance } from './scale-tolerance';
 import { allFields, sheetFields } from './sheet-fields';
-import type { CellProblem, Cells, SheetFields, SheetOutcome, SheetRules } from './types';
+import type { CellProblem, Cells, Judgement, SheetFields, SheetOutcome, SheetRules } from './types';
 
 /**
  * One pass of a sheet, from what was typed to the verdict. Pure; quick enough to run at every keystroke, and the same in browser and
@@ -27,6 +28,9 @@ export function judgeSheet(rules: SheetRules, definition: TestDefinition, cells:
   };
   const unreadable = problems.find(({ severity }) => severity === 'cannot-read');
   if (unreadable) return notYet(`${capital(labelOf(fields, unreadable))}: ${unreadable.message}`);
+
+  if (definition.layout.kind === 'check-list')
+    return judgeChecks(definition, definition.layout, values, cells, { filled, total, problems });
 
   const assembled = engine.assemble(definition.layout, values, {
     definition,
@@ -68,6 +72,50 @@ function tryEvaluate(input: NonNullable<Assembled['input']>): Evaluated {
     if (!(error instanceof EvaluationError)) throw error;
     return { reason: error.issues.map(({ detail }) => `${capital(detail)}.`).join(' ') };
   }
+}
+
+/** A function check: in order when every item that is fitted is; what is not answered yet is said so. */
+function judgeChecks(
+  definition: TestDefinition,
+  layout: Extract<TestDefinition['layout'], { kind: 'check-list' }>,
+  values: SheetValues,
+  cells: Cells,
+  counts: { filled: number; total: number; problems: CellProblem[] },
+): SheetOutcome {
+  const unreadable = unreadableValues(layout, cells).map((each) => ({ ...each, severity: 'cannot-read' as const }));
+  const problems = [...counts.problems, ...unreadable];
+  if (unreadable[0]) return { ...counts, state: 'not-yet', reason: unreadable[0].message, problems, plot: null };
+  const result = checkResult(layout, values);
+  const answered = result.items.length;
+  if (answered === 0)
+    return { ...counts, state: 'not-yet', reason: 'A figure that has limits is asked for.', problems, plot: null };
+  const judgement: Judgement = {
+    verdict: result.deviation === '0' ? 'within-tolerance' : 'out-of-tolerance',
+    signed: false,
+    toleranceUm: null,
+    toleranceArithmetic: null,
+    limitUm: null,
+    marginUm: null,
+    direction: 'either',
+    local: null,
+  };
+  return {
+    ...counts,
+    state: answered === layout.items.length ? 'complete' : 'partial',
+    problems,
+    basedOn: counted(answered, layout.items.length, 'items'),
+    input: null,
+    result,
+    judgement,
+    displayed: {
+      textUm: result.deviation,
+      textMm: result.deviation,
+      extraDigits: 0,
+      unit: definition.shownIn ?? 'items',
+    },
+    directionWords: null,
+    plot: null,
+  };
 }
 
 function labelOf(fields: SheetFields, problem: CellProblem): string {

@@ -25,8 +25,16 @@ export function readCells(fields: SheetFields, cells: Cells, toleranceUm: Decima
     if ('value' in outcome) values.set(field.pointer, outcome.value);
     else problems.push({ pointer: field.pointer, severity: 'cannot-read', message: outcome.message });
   }
-  const groups = fields.tables.map((table) => fieldsOfTable(table).filter(({ role }) => role === 'reading'));
+  const groups = fields.tables.flatMap((table) => alike(fieldsOfTable(table).filter(({ role }) => role === 'reading')));
   return { values, problems: [...problems, ...groups.flatMap((group) => unusualReadings(group, values, toleranceUm))] };
+}
+
+/** Readings that can be compared with each other: of one table and in one unit of length or slope. */
+function alike(readings: Field[]): Field[][] {
+  const units = [...new Set(readings.map(({ unit }) => unit))];
+  return units
+    .filter((unit) => unit === 'µm' || unit === 'mm' || unit === 'µm/m')
+    .map((unit) => readings.filter((field) => field.unit === unit));
 }
 
 function readField(field: Field, cells: Cells): { value: string } | { message: string } | null {

@@ -1,6 +1,7 @@
-import type { EvaluationInput, MeasuredResult } from '@/lib/evaluation';
+import type { EvaluationInput } from '@/lib/evaluation';
 import type { Unit } from '@/lib/units/unit';
 import type { DecimalText, Direction, PlannedTolerance, ShownIn } from '@/standards/types';
+import type { SheetResult } from './check-result';
 
 /**
  * A sheet's fields are addressed by the JSON pointer of the place that they fill in the evaluation's input
@@ -81,6 +82,9 @@ export interface FurtherJudgement {
   deviationUm: DecimalText;
   toleranceUm: DecimalText;
   verdict: Verdict;
+  /** The figure rounded once, as in DisplayedResult. */
+  textMm?: string;
+  unit?: ShownIn;
 }
 
 export interface DisplayedResult {
@@ -122,8 +126,9 @@ export type SheetOutcome =
       problems: CellProblem[];
       /** partial: what the result rests on, `by 4 of 5 positions`; null when complete. */
       basedOn: string | null;
-      input: EvaluationInput;
-      result: MeasuredResult;
+      /** null: a function check, which goes to no method. */
+      input: EvaluationInput | null;
+      result: SheetResult;
       judgement: Judgement;
       displayed: DisplayedResult;
       /** In words: `concave`, `free end leans toward the tool`; null where the sign says nothing. */

@@ -16,12 +16,13 @@ export function unusualReadings(fields: Field[], values: SheetValues, toleranceU
     return text === undefined ? [] : [{ pointer: field.pointer, value: Fraction.from(text).times(inUm) }];
   });
   if (present.length < 2) return [];
+  const unit = fields[0]?.unit === 'µm/m' ? 'µm/m' : 'µm';
   const tolerance = toleranceUm === null ? null : Fraction.from(toleranceUm);
   const middle = median(present.map(({ value }) => value));
   const usual = median(present.map(({ value }) => value.abs()));
   return present.flatMap(({ pointer, value }, k) => {
     const neighbour = present.length === 2 ? present[1 - k]!.value : middle;
-    const message = unusual(value, neighbour, present.length > 2 ? usual : null, tolerance);
+    const message = unusual(value, neighbour, present.length > 2 ? usual : null, tolerance, unit);
     return message === null ? [] : [{ pointer, severity: 'unusual' as const, message }];
   });
 }
@@ -31,10 +32,11 @@ function unusual(
   neighbour: Fraction,
   usual: Fraction | null,
   tolerance: Fraction | null,
+  unit: string,
 ): string | null {
   const away = value.minus(neighbour).abs();
   if (tolerance && away.compare(tolerance.times(TIMES_TOLERANCE)) >= 0)
-    return `${away.toText()} µm away from its neighbours, over 20 times the tolerance. Look at the figure and its unit.`;
+    return `${away.toText()} ${unit} away from its neighbours, over 20 times the tolerance. Look at the figure and its unit.`;
   if (!usual || usual.sign() === 0 || (tolerance && away.compare(tolerance) < 0)) return null;
   const isInch = [value.abs().dividedBy(usual), ...(value.sign() === 0 ? [] : [usual.dividedBy(value.abs())])].some(
     (ratio) => ratio.compare(INCH_LOW) >= 0 && ratio.compare(INCH_HIGH) <= 0,

@@ -16,6 +16,7 @@ const SPELLINGS: Readonly<Record<string, Unit>> = {
   'um/m': 'µm/m',
   'mm/m': 'mm/m',
   arcsec: 'arcsec',
+  min: 'min',
 };
 
 const MAX_LENGTH = 60;

@@ -9,7 +9,7 @@ const at = (insertion: number, angle: number) => `/insertions/${insertion}/readi
 const isClosing = (angleDeg: string) => Fraction.from(angleDeg).equals(Fraction.of(360));
 const indices = (length: number) => Array.from({ length }, (_, k) => k);
 const columnName = (layout: Turns, k: number) =>
-  layout.insertions === 1 ? 'reading' : `${layout.insertionLabel} ${k + 1}`;
+  layout.names?.[k] ?? (layout.insertions === 1 ? 'reading' : `${layout.insertionLabel} ${k + 1}`);
 
 function field(layout: Turns, insertion: number, angle: number): Field {
   const turn = layout.insertions === 1 ? '' : `${columnName(layout, insertion)}, `;
@@ -48,6 +48,8 @@ function fields(layout: Turns, cells: Cells): SheetFields {
 
 /** A turn counts when every angle but the closing one was read; an incomplete turn is left out whole. */
 function assemble(layout: Turns, values: SheetValues, options: AssembleOptions): Assembled {
+  const { judge } = options.definition;
+  const judged = judge === undefined ? {} : { judge };
   const angles = indices(layout.anglesDeg.length);
   const needed = angles.filter((a) => !isClosing(layout.anglesDeg[a]!));
   const complete = indices(layout.insertions).filter((k) => needed.every((a) => values.has(at(k, a))));
@@ -63,8 +65,17 @@ function assemble(layout: Turns, values: SheetValues, options: AssembleOptions):
   const closingMissing = whole ? null : 'without the closing reading';
   return {
     input: whole
-      ? { method: 'run-out', angles: layout.anglesDeg, insertions: insertions.map(({ readings }) => ({ readings })) }
-      : { method: 'run-out', insertions: insertions.map(({ readings, angles: own }) => ({ readings, angles: own })) },
+      ? {
+          method: 'run-out',
+          ...judged,
+          angles: layout.anglesDeg,
+          insertions: insertions.map(({ readings }) => ({ readings })),
+        }
+      : {
+          method: 'run-out',
+          ...judged,
+          insertions: insertions.map(({ readings, angles: own }) => ({ readings, angles: own })),
+        },
     basedOn: counted(complete.length, layout.insertions, `${layout.insertionLabel}s`) ?? closingMissing,
     lengthMm: null,
     notes: complete.flatMap((k) => closingNote(layout, values, k, options.toleranceUm)),

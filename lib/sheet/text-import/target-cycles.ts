@@ -8,10 +8,10 @@ type TargetCycles = Extract<Layout, { kind: 'target-cycles' }>;
 /** No travel needs more targets than these. */
 const MOST_TARGETS = 2000;
 const lists: Record<Way, string> = { first: '/forward', second: '/backward' };
-const words: Record<Way, string> = { first: 'forward', second: 'backward' };
+const words: Record<Way, string> = { first: 'in the + direction', second: 'in the − direction' };
 
 const unitsOf = ({ quantity }: TargetCycles): { target: Unit; deviation: Unit } =>
-  quantity === 'linear' ? { target: 'mm', deviation: 'µm' } : { target: '°', deviation: 'arcsec' };
+  quantity === 'linear' ? { target: 'mm', deviation: 'µm' } : { target: '°', deviation: 'µm/m' };
 
 function columns(layout: TargetCycles): ColumnKind[] {
   const { target, deviation } = unitsOf(layout);
@@ -22,19 +22,19 @@ function columns(layout: TargetCycles): ColumnKind[] {
     { role: 'deviation', label: 'deviation', holds: 'figure', unit: deviation, hint: /dev|error/i },
     {
       role: 'first',
-      label: 'deviation, forward',
+      label: 'deviation, + direction',
       holds: 'figure',
       unit: deviation,
       several: true,
-      hint: /forw|fwd|↑/i,
+      hint: /forw|fwd|↑|\+/i,
     },
     {
       role: 'second',
-      label: 'deviation, backward',
+      label: 'deviation, − direction',
       holds: 'figure',
       unit: deviation,
       several: true,
-      hint: /back|bwd|↓/i,
+      hint: /back|bwd|↓|[-−]$/i,
     },
   ];
 }
@@ -57,7 +57,7 @@ function map(input: MappingInput<TargetCycles>): Mapped {
   ]);
   const isLong = choices.columns.includes('deviation');
   if (isLong && (choices.columns.includes('first') || choices.columns.includes('second'))) {
-    const message = 'One column of deviations with their direction, or columns forward and backward: not both.';
+    const message = 'One column of deviations with their direction, or columns for the + and the − direction: not both.';
     mapped.problems.push({ line: null, message });
   }
   if (mapped.problems.length > 0) return mapped;

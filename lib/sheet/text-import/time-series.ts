@@ -9,7 +9,7 @@ function columns({ temperature }: TimeSeries): ColumnKind[] {
     { role: 'temperature', label: 'temperature', holds: 'figure', unit: '°C', hint: /temp|°C/i },
   ];
   return [
-    { role: 'minutes', label: 'minutes', holds: 'figure', unit: null, hint: /min|time/i },
+    { role: 'minutes', label: 'minutes', holds: 'figure', unit: 'min', hint: /min|time/i },
     { role: 'reading', label: 'reading', holds: 'figure', unit: 'µm', hint: /read|drift|dev/i },
     ...(temperature ? degrees : []),
   ];
