@@ -2,12 +2,15 @@ import { DrawingSvg } from '@/components/plots/drawing-svg';
 import { driftDrawing } from '@/components/plots/drift-geometry';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { Verdict } from '@/lib/sheet/types';
+import type { ShownIn } from '@/standards/types';
 
 interface DriftTest {
   key: string;
   title: string;
   component: string;
   toleranceMm: string | null;
+  /** Unit of its figures; null: mm. */
+  unit: ShownIn | null;
   points: { reportId: string; measuredOn: string; asLeftMm: string; verdict: Verdict | null }[];
 }
 
@@ -20,8 +23,13 @@ export function DriftPlots({ tests }: { tests: DriftTest[] }) {
         return (
           <li key={test.key} className="border-t border-hair pt-2">
             <p className="font-medium leading-snug">{test.title}</p>
-            <p className="text-sm text-ink2">{test.component}</p>
-            <DrawingSvg drawing={driftDrawing(test.points, test.toleranceMm, test.title)} className="mt-1" />
+            <p className="text-sm text-ink2">
+              {[test.component, test.unit ?? ''].filter((part) => part !== '').join(' · ')}
+            </p>
+            <DrawingSvg
+              drawing={driftDrawing(test.points, test.toleranceMm, test.title, test.unit ?? 'mm')}
+              className="mt-1"
+            />
             {verdict && <VerdictMark verdict={verdict} className="text-sm" />}
           </li>
         );

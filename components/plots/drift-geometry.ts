@@ -2,10 +2,12 @@ import type { Drawing, DrawingItem } from '@/components/plots/drawing';
 import { type Point, polyline, text } from '@/components/plots/drawing-parts';
 import { coordinate } from '@/components/plots/number';
 import { extentOf, figure, marker } from '@/components/plots/plot-frame';
+import { withUnit } from '@/lib/sheet/shown-unit';
+import type { ShownIn } from '@/standards/types';
 
 export interface DriftPointInput {
   measuredOn: string;
-  /** mm as it stands in the report; a typographic minus is understood. */
+  /** As it stands in the report, in the unit of the test; a typographic minus is understood. */
   asLeftMm: string;
 }
 
@@ -17,7 +19,12 @@ const letterPx = 14;
  * As-left deviations of one test over the years: a mark a report, the tolerance as a dashed line on the side or sides where it is, zero
  * as a thin line. Figures stand as they were issued; only the marks' places are computed.
  */
-export function driftDrawing(points: DriftPointInput[], toleranceMm: string | null, title: string): Drawing {
+export function driftDrawing(
+  points: DriftPointInput[],
+  toleranceMm: string | null,
+  title: string,
+  unit: ShownIn = 'mm',
+): Drawing {
   const dates = points.map(({ measuredOn }) => Date.parse(measuredOn));
   const values = points.map(({ asLeftMm }) => place(asLeftMm));
   const tolerance = toleranceMm === null ? null : place(toleranceMm);
@@ -45,7 +52,7 @@ export function driftDrawing(points: DriftPointInput[], toleranceMm: string | nu
     );
   return {
     ...size,
-    description: words(points, toleranceMm, title),
+    description: words(points, toleranceMm, title, unit),
     items: [
       across(0),
       ...bounds.map((bound) => across(bound, [6, 4])),
@@ -98,7 +105,8 @@ function yearLabels(points: DriftPointInput[], places: number[]): DrawingItem[] 
     : [...label(first, places[0], 'start'), ...label(last, places.at(-1), 'end')];
 }
 
-function words(points: DriftPointInput[], toleranceMm: string | null, title: string): string {
-  const readings = points.map(({ measuredOn, asLeftMm }) => `${measuredOn.slice(0, 4)} ${asLeftMm} mm`).join(', ');
-  return `${title}, as left: ${readings}${toleranceMm === null ? '' : `; tolerance ${toleranceMm} mm`}`;
+function words(points: DriftPointInput[], toleranceMm: string | null, title: string, unit: ShownIn): string {
+  const figure = (text: string) => withUnit(text, unit);
+  const readings = points.map(({ measuredOn, asLeftMm }) => `${measuredOn.slice(0, 4)} ${figure(asLeftMm)}`).join(', ');
+  return `${title}, as left: ${readings}${toleranceMm === null ? '' : `; tolerance ${figure(toleranceMm)}`}`;
 }

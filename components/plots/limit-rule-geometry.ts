@@ -4,8 +4,10 @@ import { allowedSign, type RuleScale, ruleScale } from '@/components/plots/limit
 import { coordinate, decimalsOf, micrometresAsMm, shortLimit } from '@/components/plots/number';
 import { MARK_INK } from '@/components/plots/verdict-ink';
 import { limitRuleWords } from '@/lib/reporting/drawing-text';
+import { toleranceShown } from '@/lib/sheet/shown-unit';
 import type { Verdict } from '@/lib/sheet/types';
-import type { Direction } from '@/standards/types';
+import { formatDecimal } from '@/lib/units/format';
+import type { Direction, ShownIn } from '@/standards/types';
 
 export interface LimitRuleInput {
   /** Result, µm; null: nothing measured yet, the rule stands empty. */
@@ -16,8 +18,10 @@ export interface LimitRuleInput {
   /** The figure carries a sign (a slope, an offset) and is judged both ways where the direction is `either`. */
   signed: boolean;
   verdict: Verdict | null;
-  /** The deviation as it is printed, mm. */
+  /** The deviation as it is printed, in `unit`. */
   shown: string | null;
+  /** Unit of what is printed: mm where absent. The tolerance is kept in µm, of angles in µm/m. */
+  unit?: ShownIn;
   expandedUncertaintyUm?: string | null;
   /** Guarded acceptance: g, or the limit T − g itself. */
   guardUm?: string | null;
@@ -49,7 +53,10 @@ export function limitRule(input: LimitRuleInput): Drawing {
   return {
     widthPx: input.widthPx,
     heightPx: scale.heightPx,
-    description: limitRuleWords({ ...input, toleranceUm: input.toleranceUm && shortLimit(input.toleranceUm) }),
+    description: limitRuleWords({
+      ...input,
+      toleranceUm: input.toleranceUm && (input.unit === '″' ? input.toleranceUm : shortLimit(input.toleranceUm)),
+    }),
     items,
   };
 }
@@ -167,13 +174,25 @@ function figures(scale: RuleScale, input: LimitRuleInput, value: number | null, 
   if (input.toleranceUm === null) return items;
   const places = input.shown ? decimalsOf(input.shown) : 0;
   for (const tenth of scale.notches) {
-    const limitUm = shortLimit(input.toleranceUm);
-    const signed = tenth < 0 ? `-${limitUm}` : limitUm;
-    const words = `T ${micrometresAsMm(signed, places, scale.bothWays)}`;
+    const words = `T ${limitFigure(input.toleranceUm, tenth < 0, places, scale.bothWays, input.unit)}`;
     const x = keepInside(scale.x(tenth * scale.tenthUm), wordWidth(words, LABEL_PX, true), input.widthPx);
     items.push(text(x, labelY, words, { ...label, ink: 'ink' }));
   }
   return items;
+}
+
+/** A limit beside its notch, cut off and never rounded up, in the unit of the result. */
+function limitFigure(
+  toleranceUm: string,
+  negative: boolean,
+  places: number,
+  signed: boolean,
+  unit: ShownIn = 'mm',
+): string {
+  const limit = unit === '″' ? shortLimit(toleranceShown(toleranceUm, unit)) : shortLimit(toleranceUm);
+  const text = negative ? `-${limit}` : limit;
+  if (unit === 'mm' || unit === 'mm/m') return micrometresAsMm(text, places, signed);
+  return formatDecimal(text, { decimals: Math.max(decimalsOf(text), places), signed });
 }
 
 const onRule = (scale: RuleScale, x: number) => Math.min(Math.max(x, scale.left), scale.right);

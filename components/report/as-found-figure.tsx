@@ -1,7 +1,8 @@
 import { DrawingSvg } from '@/components/plots/drawing-svg';
 import { verdictMark } from '@/components/plots/verdict-mark-geometry';
 import type { SummaryRow } from '@/lib/reporting/report-model';
-import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { verdictText } from '@/lib/reporting/result-text';
+import { REPORT_WORDS } from '@/lib/reporting/words';
 
 const fine = ['within-tolerance', 'for-information'];
 
@@ -12,11 +13,14 @@ export const wasNotFine = (row: SummaryRow): boolean =>
 /** A figure as found, with the mark before it where it was not within tolerance. */
 export function AsFoundFigure({ row }: { row: SummaryRow }) {
   const verdict = row.asFoundVerdict;
-  if (row.asFound === null || !verdict || !wasNotFine(row)) return row.asFound ?? REPORT_WORDS.none;
+  if (!verdict || !wasNotFine(row)) return row.asFound ?? REPORT_WORDS.none;
   return (
     <span className="inline-flex items-center gap-1.5">
       <DrawingSvg drawing={verdictMark(verdict)} fixed decorative className="h-3 w-auto shrink-0" />
-      <span className="sr-only">{VERDICT_WORDS[verdict]}: </span>
+      <span className="sr-only">
+        {verdictText(verdict, row.unit)}
+        {row.asFound && ': '}
+      </span>
       {row.asFound}
     </span>
   );

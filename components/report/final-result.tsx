@@ -1,36 +1,45 @@
-import { shortLimit } from '@/components/plots/number';
+import { FurtherLimits } from '@/components/ui/further-limits';
 import { LimitRule } from '@/components/ui/limit-rule';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { TestBlock } from '@/lib/reporting/report-model';
 import { sentence } from '@/lib/reporting/report-text';
+import {
+  furtherFigures,
+  judgedFigureText,
+  limitText,
+  passResultText,
+  ruleDeviation,
+} from '@/lib/reporting/result-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
 import { ByWidth } from './by-width';
-import { finalPass, inMicrometres } from './final-pass';
+import { finalPass } from './final-pass';
 
 /** The limit rule of the final result over the whole width, the verdict in words below it. */
 export function FinalResult({ block }: { block: TestBlock }) {
   const pass = finalPass(block);
-  if (!pass?.judgement || pass.resultMm === null) return null;
+  // A function check has no limit that a rule could show; its verdict stands below its items.
+  if (!pass?.judgement || pass.resultMm === null || block.check) return null;
   const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
   // A figure without a sign never has words for its direction, and is never below zero.
   const signed = block.passes.some((each) => each.judgement?.signed);
   const words = REPORT_WORDS.block;
   const beside = [
     pass.resultWords ?? '',
-    marginUm === null ? '' : `${inMicrometres(marginUm, pass)} µm ${words.margin}`,
+    marginUm === null ? '' : `${judgedFigureText(marginUm, pass)} ${words.margin}`,
     local
-      ? `${words.local} ${inMicrometres(local.deviationUm, pass)} µm ${words.over} ${local.lengthMm} mm, T ${shortLimit(local.toleranceUm)} µm, ${VERDICT_WORDS[local.verdict]}`
+      ? `${words.local} ${judgedFigureText(local.deviationUm, pass)} ${words.over} ${local.lengthMm} mm, T ${limitText(local.toleranceUm, pass.resultUnit)}, ${VERDICT_WORDS[local.verdict]}`
       : '',
   ].filter((part) => part !== '');
   const rule = (widthPx: number) => (
     <LimitRule
-      deviationUm={pass.resultUm === null ? null : pass.resultUm.replace('−', '-')}
+      deviationUm={ruleDeviation(pass)}
       toleranceUm={toleranceUm}
       limitUm={limitUm}
       direction={direction}
       signed={signed}
       verdict={verdict}
       shown={pass.resultMm}
+      unit={pass.resultUnit}
       widthPx={widthPx}
     />
   );
@@ -38,12 +47,10 @@ export function FinalResult({ block }: { block: TestBlock }) {
     <div className="mt-4 break-inside-avoid">
       <ByWidth wide={rule(900)} medium={rule(620)} narrow={rule(300)} />
       <p className="mt-1 flex flex-wrap items-center gap-x-4">
-        <VerdictMark
-          verdict={verdict}
-          words={`${sentence(pass.kindWords)} ${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`}
-        />
+        <VerdictMark verdict={verdict} words={`${sentence(pass.kindWords)} ${passResultText(pass)}`} />
         <span className="text-ink2">{beside.join(' · ')}</span>
       </p>
+      <FurtherLimits limits={furtherFigures(pass.judgement)} name={`${block.title}, ${words.further}`} />
     </div>
   );
 }

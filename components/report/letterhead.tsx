@@ -1,4 +1,5 @@
 import { Nameplate } from '@/components/ui/nameplate';
+import { checkCountWords } from '@/lib/reporting/record-words';
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { dateSpan, sentence, standingWords } from '@/lib/reporting/report-text';
 import { toleranceSourceWords } from '@/lib/reporting/tolerance-source';
@@ -67,6 +68,7 @@ export function Headline({ model }: { model: ReportModel }) {
           .replaceAll('..', '.')}
       </p>
       <CountsTable counts={model.counts} />
+      {model.checks && <p className="mt-2 font-semibold">{checkCountWords(model.checks)}</p>}
     </div>
   );
 }

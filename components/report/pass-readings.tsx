@@ -1,7 +1,9 @@
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { PassBlock } from '@/lib/reporting/report-model';
 import { longDate } from '@/lib/reporting/report-text';
-import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { passResultText } from '@/lib/reporting/result-text';
+import { REPORT_WORDS } from '@/lib/reporting/words';
+import { CheckItems } from './check-items';
 import { ReadingTables } from './reading-tables';
 
 /** Passes with readings of their own beside each other where they fit; adjusting ones, and an as left that is as found, in a line each. */
@@ -40,6 +42,7 @@ function FullPass({ pass, of }: { pass: PassBlock; of: string }) {
           {REPORT_WORDS.block.setUp}: {pass.setUp.map(({ label, value }) => `${label} ${value}`).join(' · ')}
         </p>
       )}
+      {pass.items && <CheckItems items={pass.items} name={`${of}, ${pass.kindWords}`} />}
       <ReadingTables tables={pass.tables} name={`${of}, ${pass.kindWords}`} />
       <p className="mt-1.5 text-sm">
         <PassResult pass={pass} />
@@ -53,10 +56,9 @@ function FullPass({ pass, of }: { pass: PassBlock; of: string }) {
 
 function PassResult({ pass }: { pass: PassBlock }) {
   const verdict = pass.judgement?.verdict ?? 'not-measured';
-  if (pass.resultMm === null) return <VerdictMark verdict={verdict} words={REPORT_WORDS.block.noResult} />;
   return (
     <>
-      <VerdictMark verdict={verdict} words={`${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`} />
+      <VerdictMark verdict={verdict} words={passResultText(pass)} />
       {pass.resultWords && <span className="text-ink2"> · {pass.resultWords}</span>}
     </>
   );

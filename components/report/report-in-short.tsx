@@ -1,3 +1,4 @@
+import { checkCountWords } from '@/lib/reporting/record-words';
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { VERDICT_WORDS } from '@/lib/reporting/words';
 import { CountsTable } from './counts-table';
@@ -13,9 +14,15 @@ export function ReportInShort({ model }: { model: ReportModel }) {
     <>
       <p className="mb-4 text-xl font-semibold leading-7">{model.headline}</p>
       <CountsTable counts={model.counts} />
-      <h3 className="mb-1 mt-6 font-semibold">Out of tolerance, undecided, left out</h3>
+      {model.checks && <p className="mt-2 font-semibold">{checkCountWords(model.checks)}</p>}
+      <h3 className="mb-1 mt-6 font-semibold">
+        {model.checks ? 'Out of tolerance, not in order, undecided, left out' : 'Out of tolerance, undecided, left out'}
+      </h3>
       {deviating.length === 0 ? (
-        <p>None: every planned test is {VERDICT_WORDS['within-tolerance']}, or for information.</p>
+        <p>
+          None: every planned test is {VERDICT_WORDS['within-tolerance']}, or for information
+          {model.checks ? '; every function check is in order.' : '.'}
+        </p>
       ) : (
         <SummaryTable
           rows={deviating}

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { SummaryRow } from '@/lib/reporting/report-model';
+import { summaryTolerance } from '@/lib/reporting/result-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { AsFoundFigure, asLeftWords } from './as-found-figure';
 import { SummaryTitle } from './summary-title';
@@ -24,7 +25,7 @@ export function SummaryList({ rows, linkOf }: { rows: SummaryRow[]; linkOf?: (ro
                 <AsFoundFigure row={row} />
               </Figure>
               <Figure name={words.asLeft}>{asLeftWords(row)}</Figure>
-              <Figure name={words.tolerance}>{row.toleranceMm ?? REPORT_WORDS.none}</Figure>
+              <Figure name={words.tolerance}>{summaryTolerance(row)}</Figure>
             </dl>
           </div>
         </li>

@@ -1,6 +1,7 @@
 import { DataCell, HeadCell, Row, Table, TableHead } from '@/components/ui/table';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { SummaryRow } from '@/lib/reporting/report-model';
+import { summaryTolerance } from '@/lib/reporting/result-text';
 import { REPORT_WORDS } from '@/lib/reporting/words';
 import { AsFoundFigure, asLeftWords, wasNotFine } from './as-found-figure';
 import { ByWidth } from './by-width';
@@ -62,7 +63,7 @@ function WideTable({ rows, caption, linkOf }: SummaryProps) {
             <DataCell figure className="whitespace-nowrap">
               {asLeftWords(row)}
             </DataCell>
-            <DataCell figure>{row.toleranceMm ?? REPORT_WORDS.none}</DataCell>
+            <DataCell figure>{summaryTolerance(row)}</DataCell>
             <DataCell className={row.leftOut ? 'min-w-40 align-top' : 'whitespace-nowrap align-top'}>
               <VerdictMark verdict={finalVerdict(row)} words={verdictWords(row)} className="leading-6" />
             </DataCell>

@@ -1,6 +1,7 @@
 import type { MarkKind } from '@/components/plots/verdict-ink';
 import type { SummaryRow } from '@/lib/reporting/report-model';
-import { REPORT_WORDS, SHORT_VERDICT_WORDS } from '@/lib/reporting/words';
+import { verdictText } from '@/lib/reporting/result-text';
+import { REPORT_WORDS } from '@/lib/reporting/words';
 
 /** What counts in the end: as left, else as it was found. */
 export const finalVerdict = (row: SummaryRow): MarkKind =>
@@ -9,7 +10,7 @@ export const finalVerdict = (row: SummaryRow): MarkKind =>
 /** `out, remark 1`; `left out: not agreed`. */
 export function verdictWords(row: SummaryRow): string {
   const parts = [
-    row.leftOut ? `${SHORT_VERDICT_WORDS['left-out']}: ${row.leftOut}` : SHORT_VERDICT_WORDS[finalVerdict(row)],
+    [verdictText(finalVerdict(row), row.unit, true), row.leftOut ?? ''].filter((part) => part !== '').join(': '),
     row.remarkNo === null ? '' : `${REPORT_WORDS.summary.remark} ${row.remarkNo}`,
   ];
   return parts.filter((part) => part !== '').join(', ');

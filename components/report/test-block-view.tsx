@@ -45,7 +45,7 @@ function LeftOut({ leftOut }: { leftOut: NonNullable<TestBlock['leftOut']> }) {
 function Measured({ block }: { block: TestBlock }) {
   const words = REPORT_WORDS.block;
   // A method with many tables takes the whole width below its pictures.
-  const many = block.passes.some((pass) => pass.tables.length > 2);
+  const many = block.passes.some((pass) => pass.tables.length > 2 || isWide(pass));
   const arithmetic = finalPass(block)?.judgement?.toleranceArithmetic;
   return (
     <>
@@ -77,6 +77,9 @@ function Measured({ block }: { block: TestBlock }) {
     </>
   );
 }
+
+/** A table of many columns would scroll beside the sketch. */
+const isWide = (pass: PassBlock) => pass.tables.some((table) => table.columns.length > 7);
 
 const plotOf = (pass: PassBlock, widthPx: number, heightPx: number) =>
   pass.plot && (

@@ -2,6 +2,7 @@ import type { CellPointer, Field } from '@/lib/sheet/types';
 import type { Evaluated } from './sheet-session';
 
 export const notReadYet = 'Not read yet.';
+export const notAnsweredYet = 'Not answered yet.';
 
 /**
  * What is said at a field, and in the same words in the summary. The first letter tells the kind: `!` cannot be read, `?` unusual,
@@ -16,8 +17,12 @@ export function problemAt(
   if (problem?.severity === 'cannot-read') return `!${problem.message}`;
   if (problem && !options.confirmed.has(pointer)) return `?${problem.message}`;
   const missing = options.checked && options.text.trim() === '' && fields.order.includes(pointer);
-  return missing && outcome.filled < outcome.total ? `-${notReadYet}` : '';
+  if (!missing || outcome.filled >= outcome.total) return '';
+  return `-${isAnswer(pointer) ? notAnsweredYet : notReadYet}`;
 }
+
+/** A field that holds the answer to an item of a function check. */
+const isAnswer = (pointer: CellPointer) => /^\/items\/[^/]+\/answer$/.test(pointer);
 
 export const problemId = (passId: string, pointer: CellPointer) => `problem-${passId}${pointer.replaceAll('/', '-')}`;
 export const fieldId = (passId: string, pointer: CellPointer) => `field-${passId}${pointer.replaceAll('/', '-')}`;

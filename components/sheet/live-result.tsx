@@ -1,11 +1,14 @@
 'use client';
 
 import { Plot } from '@/components/plots/plot';
+import { FurtherLimits } from '@/components/ui/further-limits';
 import { LimitRule } from '@/components/ui/limit-rule';
 import { VerdictMark } from '@/components/ui/verdict-mark';
+import { furtherFigures } from '@/lib/reporting/result-text';
 import { VERDICT_WORDS } from '@/lib/reporting/words';
+import { shownUnit, toleranceShown, withUnit } from '@/lib/sheet/shown-unit';
 import type { SheetRules } from '@/lib/sheet/types';
-import { convert } from '@/lib/units/convert';
+import type { ShownIn } from '@/standards/types';
 import { isJudged, resultWords } from './result-words';
 import { useEvaluated, useOpenPass } from './sheet-context';
 import { useWidth } from './use-width';
@@ -27,34 +30,41 @@ export function LivePlot({ heightPx }: { heightPx: number }) {
 }
 
 /** Limit rule, verdict in words and the distance to the limit. */
-export function LiveResult({ rules, signed }: { rules: SheetRules; signed: boolean }) {
+export function LiveResult(props: { rules: SheetRules; signed: boolean; shownIn: ShownIn }) {
+  const { rules, signed, shownIn } = props;
   const { session, passId } = useOpenPass();
   const outcome = useEvaluated(session, passId, (evaluated) => evaluated.outcome);
   const judged = isJudged(outcome) ? outcome : null;
-  const words = resultWords(outcome);
+  const words = resultWords(outcome, shownIn);
   const local = judged?.judgement.local;
+  const unit = judged ? shownUnit(judged.displayed) : shownIn;
   const { box, widthPx } = useWidth(600);
+  const check = shownIn === 'items';
   return (
     <div ref={box} className="grid gap-1">
-      <LimitRule
-        deviationUm={judged?.result.deviation ?? null}
-        toleranceUm={judged ? judged.judgement.toleranceUm : (rules.tolerance?.baseUm ?? null)}
-        direction={judged?.judgement.direction ?? (signed ? rules.direction : 'either')}
-        signed={judged?.result.signed ?? signed}
-        verdict={judged?.judgement.verdict ?? null}
-        shown={judged?.displayed.textMm ?? null}
-        widthPx={Math.min(widthPx, 680)}
-      />
+      {!check && (
+        <LimitRule
+          deviationUm={judged?.result.deviation ?? null}
+          toleranceUm={judged ? judged.judgement.toleranceUm : (rules.tolerance?.baseUm ?? null)}
+          direction={judged?.judgement.direction ?? (signed ? rules.direction : 'either')}
+          signed={judged?.result.signed ?? signed}
+          verdict={judged?.judgement.verdict ?? null}
+          shown={judged?.displayed.textMm ?? null}
+          unit={unit}
+          widthPx={Math.min(widthPx, 680)}
+        />
+      )}
       <p className="flex flex-wrap items-baseline gap-x-4 gap-y-1">
         <VerdictMark verdict={words.mark} words={words.verdict} className="text-lg leading-6" />
         <span className="text-ink2">{words.beside}</span>
       </p>
       {local && (
         <p className="text-sm text-ink2">
-          Over any {local.lengthMm} mm: {convert(local.deviationUm, 'µm', 'mm')} mm of{' '}
-          {convert(local.toleranceUm, 'µm', 'mm')} mm, {VERDICT_WORDS[local.verdict]}
+          Over any {local.lengthMm} mm: {withUnit(toleranceShown(local.deviationUm, unit), unit)} of{' '}
+          {withUnit(toleranceShown(local.toleranceUm, unit), unit)}, {VERDICT_WORDS[local.verdict]}
         </p>
       )}
+      {judged && <FurtherLimits limits={furtherFigures(judged.judgement)} name="Further limits" />}
       {judged?.judgement.toleranceArithmetic && (
         <p className="text-sm text-ink2">
           T, µm: <span className="font-mono">{judged.judgement.toleranceArithmetic}</span>

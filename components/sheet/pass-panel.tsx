@@ -1,6 +1,8 @@
 'use client';
 
 import type { SheetFields } from '@/lib/sheet/types';
+import type { TestDefinition } from '@/standards/types';
+import { CheckList } from './check-list';
 import { FieldTables, SetUpFields } from './field-tables';
 import { LivePlot, LiveResult } from './live-result';
 import { useEvaluated, useOpenPass } from './sheet-context';
@@ -10,6 +12,8 @@ import { useEntry } from './use-entry';
 
 /** Methods whose result carries a sign: their limit rule has zero in the middle, also while it is empty. */
 const signedMethods = new Set(['parallelism', 'squareness-to-axis', 'squareness', 'centre-height', 'two-collar']);
+const isSigned = ({ method, negativeMeans }: TestDefinition) =>
+  signedMethods.has(method) || negativeMeans !== undefined;
 /** How many columns of fields leave room for the plot beside the table: on a tablet, on a desk. */
 const besideOnTablet = 3;
 const besideOnDesk = 5;
@@ -31,24 +35,33 @@ export function PassPanel(props: {
   const { data, panelId, tabId, linked, onEnd, say } = props;
   const { session, passId, readOnly, keypad } = useOpenPass();
   const entry = useEntry({ session, passId, readOnly, onEnd, say });
+  const { layout } = data.definition;
   const place = useEvaluated(session, passId, ({ fields }) => placeOfPlot(fields));
   return (
     <div role="tabpanel" id={panelId} aria-labelledby={tabId}>
       {linked && <p className="py-2 text-ink2">As left is declared to be as found, reading for reading:</p>}
       {!linked && <TextImportButton definition={data.definition} say={say} />}
-      <div {...entry}>
-        <SetUpFields />
-        <div className={places[place]}>
-          <div className="min-w-0 pt-2">
-            <FieldTables />
-          </div>
-          <div className={place === 'below' ? '' : 'pt-6'}>
-            <LivePlot heightPx={place === 'below' ? 230 : 290} />
+      {layout.kind === 'check-list' ? (
+        <CheckList items={layout.items} say={say} />
+      ) : (
+        <div {...entry}>
+          <SetUpFields />
+          <div className={places[place]}>
+            <div className="min-w-0 pt-2">
+              <FieldTables />
+            </div>
+            <div className={place === 'below' ? '' : 'pt-6'}>
+              <LivePlot heightPx={place === 'below' ? 230 : 290} />
+            </div>
           </div>
         </div>
-      </div>
+      )}
       <div data-at-foot className={`bg-paper py-2 sm:bottom-[4.4rem] sm:z-10 ${keypad ? 'lg:sticky' : 'sm:sticky'}`}>
-        <LiveResult rules={data.rules} signed={signedMethods.has(data.definition.method)} />
+        <LiveResult
+          rules={data.rules}
+          signed={isSigned(data.definition)}
+          shownIn={layout.kind === 'check-list' ? 'items' : (data.definition.shownIn ?? 'mm')}
+        />
       </div>
     </div>
   );

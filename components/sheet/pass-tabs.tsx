@@ -1,7 +1,8 @@
 'use client';
 
 import { Tabs } from '@/components/ui/tabs';
-import { VERDICT_WORDS } from '@/lib/reporting/words';
+import { verdictText } from '@/lib/reporting/result-text';
+import { shownUnit } from '@/lib/sheet/shown-unit';
 import { isJudged } from './result-words';
 import { useEvaluated } from './sheet-context';
 import { passWords, type SheetPass } from './sheet-data';
@@ -36,11 +37,18 @@ function PassFigure({ session, passId, linked }: { session: SheetSession; passId
   if (linked) return <span className="text-sm">= as found</span>;
   if (!isJudged(outcome)) return null;
   const { verdict } = outcome.judgement;
+  const unit = shownUnit(outcome.displayed);
   const ink = verdict === 'out-of-tolerance' ? 'text-oxide' : verdict === 'undecided' ? 'text-brass' : 'text-blue';
   return (
     <>
-      <span className={`font-mono font-medium ${ink}`}>{outcome.displayed.textMm.replace('-', '−')}</span>
-      <span className="sr-only">, {VERDICT_WORDS[verdict]}</span>
+      {unit === 'items' ? (
+        <span className={`text-sm font-medium ${ink}`}>{verdictText(verdict, unit)}</span>
+      ) : (
+        <>
+          <span className={`font-mono font-medium ${ink}`}>{outcome.displayed.textMm.replace('-', '−')}</span>
+          <span className="sr-only">, {verdictText(verdict, unit)}</span>
+        </>
+      )}
     </>
   );
 }

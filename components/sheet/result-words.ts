@@ -1,10 +1,12 @@
 import { decimalsOf } from '@/components/plots/number';
 import type { MarkKind } from '@/components/plots/verdict-ink';
+import { verdictText } from '@/lib/reporting/result-text';
 import { VERDICT_WORDS } from '@/lib/reporting/words';
+import { shownUnit, toleranceShown, withUnit } from '@/lib/sheet/shown-unit';
 import type { SheetOutcome } from '@/lib/sheet/types';
-import { convert } from '@/lib/units/convert';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
+import type { ShownIn } from '@/standards/types';
 
 export type Judged = Extract<SheetOutcome, { state: 'partial' | 'complete' }>;
 
@@ -19,7 +21,9 @@ export interface ResultWords {
   beside: string;
 }
 
-export function resultWords(outcome: SheetOutcome): ResultWords {
+/** @param unit in which the test shows its results; `items`: a function check */
+export function resultWords(outcome: SheetOutcome, unit: ShownIn = 'mm'): ResultWords {
+  if (unit === 'items') return checkWords(outcome);
   if (outcome.state === 'empty') return { mark: 'not-measured', verdict: 'not measured', beside: 'No reading yet.' };
   if (!isJudged(outcome)) {
     return { mark: 'not-measured', verdict: `${outcome.filled} of ${outcome.total} readings`, beside: outcome.reason };
@@ -33,22 +37,38 @@ export function resultWords(outcome: SheetOutcome): ResultWords {
   };
 }
 
+/** `6 of 8 answered, all in order`; `8 of 8 answered, 2 not in order`. */
+function checkWords(outcome: SheetOutcome): ResultWords {
+  if (outcome.state === 'empty')
+    return { mark: 'not-measured', verdict: verdictText('not-measured', 'items'), beside: 'No item is answered yet.' };
+  if (!isJudged(outcome))
+    return { mark: 'not-measured', verdict: answered(outcome.filled, outcome.total), beside: outcome.reason };
+  const { result, judgement, displayed } = outcome;
+  const done = result.method === 'function-check' ? result.items.length : outcome.filled;
+  const order = displayed.textMm === '0' ? 'all in order' : `${displayed.textMm} not in order`;
+  return { mark: judgement.verdict, verdict: `${answered(done, outcome.total)}, ${order}`, beside: '' };
+}
+
+const answered = (done: number, total: number) => `${done} of ${total} answered`;
+
 /**
- * How far it is to the limit, mm: between the limit and the result as it is shown, so that the reader's own subtraction agrees. A result
+ * How far it is to the limit, in the unit of the result: between the limit and the result as it is shown, so that the reader's own subtraction agrees. A result
  * beyond its limit is shown with as many figures as it takes to see it.
  */
 export function distanceWords({ judgement, displayed, result }: Judged): string {
   const { limitUm, marginUm, direction } = judgement;
   if (limitUm === null || marginUm === null) return '';
   const beyond = marginUm.startsWith('-');
-  const shownUm = new Dec(displayed.textUm).abs();
+  const unit = shownUnit(displayed);
+  const shown = new Dec(displayed.textMm).abs();
   // A one-sided figure is held from both ends: by its limit and by zero, and the nearer one counts.
   const byZero = direction !== 'either' && unsigned(marginUm) === unsigned(result.deviation);
-  const distanceUm = byZero ? shownUm : new Dec(limitUm).minus(shownUm).abs();
-  const mm = formatDecimal(convert(distanceUm.toFixed(), 'µm', 'mm'), { decimals: decimalsOf(displayed.textMm) });
-  if (beyond) return byZero ? `${mm} on the side that is not allowed` : `${mm} beyond the limit`;
-  if (!/[1-9]/.test(mm)) return 'at the limit';
-  return byZero ? `${mm} to zero, the other side is not allowed` : `${mm} to the limit`;
+  const distance = byZero ? shown : new Dec(toleranceShown(limitUm, unit)).minus(shown).abs();
+  const figure = formatDecimal(distance.toFixed(), { decimals: decimalsOf(displayed.textMm) });
+  const words = unit === 'mm' ? figure : withUnit(figure, unit);
+  if (beyond) return byZero ? `${words} on the side that is not allowed` : `${words} beyond the limit`;
+  if (!/[1-9]/.test(figure)) return 'at the limit';
+  return byZero ? `${words} to zero, the other side is not allowed` : `${words} to the limit`;
 }
 
 const unsigned = (figure: string) => figure.replace('-', '');

@@ -4,7 +4,8 @@ import { type RefObject, useMemo } from 'react';
 import { LinkButton } from '@/components/ui/button';
 import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
 import { VerdictMark } from '@/components/ui/verdict-mark';
-import { convert } from '@/lib/units/convert';
+import { toleranceShown } from '@/lib/sheet/shown-unit';
+import type { ShownIn } from '@/standards/types';
 import { isJudged, resultWords } from './result-words';
 import { useEvaluated, useOpenPass } from './sheet-context';
 import { passWords, type SheetData, type SheetPass } from './sheet-data';
@@ -34,6 +35,7 @@ export function SheetCheck(props: {
         remark,
         textOf: (pointer) => session.textOf(passId, pointer),
         today: data.readAt,
+        check: isCheck(data),
       }),
     [evaluated, pass, passes, data, confirmed, remark, session, passId],
   );
@@ -54,7 +56,7 @@ export function SheetCheck(props: {
       <Findings findings={missing} ink="border-oxide" />
       {look.length > 0 && <p className="mt-2 font-medium text-brass">To be looked at</p>}
       <Findings findings={look} ink="border-brass" />
-      <PassResults session={session} passes={passes} />
+      <PassResults session={session} passes={passes} shownIn={shownIn(data)} />
       {missing.length === 0 && <GoOn data={data} />}
     </section>
   );
@@ -103,20 +105,25 @@ function Findings({ findings, ink }: { findings: SheetFinding[]; ink: string }) 
   );
 }
 
-function PassResults({ session, passes }: { session: SheetSession; passes: SheetPass[] }) {
+const isCheck = ({ definition }: SheetData) => definition.layout.kind === 'check-list';
+const shownIn = (data: SheetData): ShownIn => (isCheck(data) ? 'items' : (data.definition.shownIn ?? 'mm'));
+
+function PassResults(props: { session: SheetSession; passes: SheetPass[]; shownIn: ShownIn }) {
+  const { session, passes, shownIn: unit } = props;
+  const check = unit === 'items';
   return (
     <div className="mt-4">
       <Table caption="What every set of readings comes to">
         <TableHead>
           <HeadCell>Set of readings</HeadCell>
-          <HeadCell figure>result, mm</HeadCell>
-          <HeadCell figure>T, mm</HeadCell>
-          <HeadCell figure>readings</HeadCell>
+          {!check && <HeadCell figure>result, {unit}</HeadCell>}
+          {!check && <HeadCell figure>T, {unit}</HeadCell>}
+          <HeadCell figure>{check ? 'answered' : 'readings'}</HeadCell>
           <HeadCell>verdict</HeadCell>
         </TableHead>
         <tbody>
           {passes.map((pass) => (
-            <PassResult key={pass.id} session={session} pass={pass} />
+            <PassResult key={pass.id} session={session} pass={pass} unit={unit} />
           ))}
         </tbody>
       </Table>
@@ -124,17 +131,20 @@ function PassResults({ session, passes }: { session: SheetSession; passes: Sheet
   );
 }
 
-function PassResult({ session, pass }: { session: SheetSession; pass: SheetPass }) {
+function PassResult({ session, pass, unit }: { session: SheetSession; pass: SheetPass; unit: ShownIn }) {
   const outcome = useEvaluated(session, pass.linkedTo ?? pass.id, (evaluated) => evaluated.outcome);
   const judged = isJudged(outcome) ? outcome : null;
-  const words = resultWords(outcome);
+  const words = resultWords(outcome, unit);
+  const check = unit === 'items';
   return (
     <Row>
       <RowHead>{pass.linkedTo ? `${passWords(pass)} = as found` : passWords(pass)}</RowHead>
-      <DataCell figure>{judged ? judged.displayed.textMm.replace('-', '−') : '–'}</DataCell>
-      <DataCell figure>
-        {judged?.judgement.toleranceUm ? convert(judged.judgement.toleranceUm, 'µm', 'mm') : '–'}
-      </DataCell>
+      {!check && <DataCell figure>{judged ? judged.displayed.textMm.replace('-', '−') : '–'}</DataCell>}
+      {!check && (
+        <DataCell figure>
+          {judged?.judgement.toleranceUm ? toleranceShown(judged.judgement.toleranceUm, unit) : '–'}
+        </DataCell>
+      )}
       <DataCell figure>
         {outcome.filled} of {outcome.total}
       </DataCell>

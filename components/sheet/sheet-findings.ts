@@ -1,7 +1,7 @@
 import { isOverdue } from '@/lib/schemas/instrument-state';
 import { allFields } from '@/lib/sheet/sheet-fields';
 import type { CellPointer } from '@/lib/sheet/types';
-import { notReadYet, problemAt } from './field-problem';
+import { notAnsweredYet, notReadYet, problemAt } from './field-problem';
 import { type Instrument, passWords, type SheetPass } from './sheet-data';
 import type { Evaluated } from './sheet-session';
 
@@ -25,6 +25,8 @@ export function sheetFindings(input: {
   remark: string | null;
   textOf: (pointer: CellPointer) => string;
   today: string;
+  /** A function check: it needs no instrument and no temperature. */
+  check?: boolean;
 }): SheetFinding[] {
   const { evaluated, confirmed, textOf } = input;
   const atFields = allFields(evaluated.fields).flatMap((field): SheetFinding[] => {
@@ -41,8 +43,9 @@ export function sheetFindings(input: {
 /** A sheet on which nothing was read yet says so once, not at every field. */
 function gathered(findings: SheetFinding[], filled: number): SheetFinding[] {
   if (filled > 0) return findings;
-  const first = findings.find(({ message }) => message === notReadYet);
-  const others = findings.filter(({ message }) => message !== notReadYet);
+  const bare = ({ message }: SheetFinding) => message === notReadYet || message === notAnsweredYet;
+  const first = findings.find(bare);
+  const others = findings.filter((finding) => !bare(finding));
   return first ? [{ ...first, label: `${first.label} and all after it` }, ...others] : others;
 }
 
@@ -52,7 +55,7 @@ function aroundPass(input: Parameters<typeof sheetFindings>[0]): SheetFinding[] 
   const add = (weight: SheetFinding['weight'], label: string, message: string) =>
     found.push({ weight, pointer: null, label, message });
   const measuredOn = (pass.takenAt ?? today).slice(0, 10);
-  if (pass.linkedTo === null) {
+  if (pass.linkedTo === null && !input.check) {
     if (pass.instruments.length === 0) add('missing', 'Instruments', 'No instrument is named.');
     for (const used of pass.instruments) {
       const one = instruments.find(({ id }) => id === used.instrumentId);
@@ -66,7 +69,9 @@ function aroundPass(input: Parameters<typeof sheetFindings>[0]): SheetFinding[] 
     add(
       'look',
       passWords({ kind: 'as-left', number: 1 }),
-      'No readings as left: measure again, or declare as left = as found.',
+      input.check
+        ? 'Not checked as left: check again, or declare as left = as found.'
+        : 'No readings as left: measure again, or declare as left = as found.',
     );
   }
   return found;

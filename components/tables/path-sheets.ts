@@ -1,9 +1,11 @@
 import { estimateOf, type PastDuration } from '@/lib/planning/estimate-minutes';
 import { USUAL_MINUTES } from '@/lib/planning/plan-sheets';
 import { passKindWords } from '@/lib/reporting/record-words';
+import { verdictText } from '@/lib/reporting/result-text';
 import { sheetState } from '@/lib/reporting/sheet-state';
 import type { StoredSheet } from '@/lib/reporting/stored-job';
 import { leftOutReasons } from '@/lib/schemas/job';
+import { shownUnit, withUnit } from '@/lib/sheet/shown-unit';
 import type { BoundComponent } from '@/standards/types';
 import { workingStepTitle } from '@/standards/working-order';
 import type { PathSheet } from './plan-path';
@@ -58,9 +60,13 @@ function lineOf(sheet: StoredSheet): Pick<PathSheet, 'mark' | 'words' | 'result'
   }
   const result = state.final?.result;
   if (!result) return { mark: 'not-measured', result: '' };
-  const figure = result.displayedMm.replace('-', '−');
-  const words = result.outcome.directionWords;
+  const unit = shownUnit(result.outcome.displayed);
   const found = state.state === 'found' ? ', as found' : '';
+  if (unit === 'items')
+    return { mark: result.verdict, words: verdictText(result.verdict, unit), result: found.slice(2) };
+  const shown = result.displayedMm.replace('-', '−');
+  const figure = unit === 'mm' ? shown : withUnit(shown, unit);
+  const words = result.outcome.directionWords;
   return {
     mark: result.verdict,
     result: `${words && words.length < 12 ? `${words} ` : ''}${figure}${found}`,

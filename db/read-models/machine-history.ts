@@ -1,6 +1,7 @@
 import type { Db } from '@/db/client';
 import type { Purpose } from '@/lib/schemas/job';
 import type { Verdict } from '@/lib/sheet/types';
+import type { ShownIn } from '@/standards/types';
 
 export type ReportState = 'draft' | 'checked' | 'issued' | 'signed' | 'signed-with-remarks' | 'refused' | 'superseded';
 
@@ -30,7 +31,7 @@ export interface DriftPoint {
   reportId: string;
   number: string;
   measuredOn: string;
-  /** mm as it stands in the report, sign included. */
+  /** As it stands in the report, in the unit of its line, sign included. */
   asLeftMm: string;
   verdict: Verdict | null;
 }
@@ -41,6 +42,8 @@ export interface Drift {
   title: string;
   component: string;
   toleranceMm: string | null;
+  /** Unit of the figures; null: mm. */
+  unit: ShownIn | null;
   points: DriftPoint[];
 }
 
@@ -81,18 +84,20 @@ async function machineDrift(db: Db, machineId: string): Promise<Drift[]> {
         order by r.job_id, r.revision desc)
      select s.id as "reportId", s.number, s.measured_on as "measuredOn", t.entry ->> 'key' as key, t.entry ->> 'title' as title,
             t.entry ->> 'component' as component, t.entry ->> 'asLeft' as "asLeftMm", t.entry ->> 'asLeftVerdict' as verdict,
-            t.entry ->> 'toleranceMm' as "toleranceMm"
+            t.entry ->> 'toleranceMm' as "toleranceMm", t.entry ->> 'unit' as unit
        from signed s cross join lateral jsonb_array_elements(s.model::jsonb -> 'summary') with ordinality as t(entry, place)
       where t.entry ->> 'asLeft' is not null
       order by s.measured_on, s.id, t.place`,
     [machineId],
   );
   const tests = new Map<string, Drift>();
-  for (const { key, title, component, toleranceMm, ...point } of rows) {
-    const test: Drift = tests.get(key) ?? { key, title, component, toleranceMm, points: [] };
+  for (const { key, title, component, toleranceMm, unit, ...point } of rows) {
+    // Figures in another unit are no continuation: they begin a line of their own.
+    const line = unit ? `${key} ${unit}` : key;
+    const test: Drift = tests.get(line) ?? { key: line, title, component, toleranceMm, unit, points: [] };
     test.points.push(point);
     test.toleranceMm = toleranceMm;
-    tests.set(key, test);
+    tests.set(line, test);
   }
   return [...tests.values()];
 }

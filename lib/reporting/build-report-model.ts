@@ -1,13 +1,15 @@
 import { componentName, componentWords } from '@/lib/planning/component-words';
+import { definitionOf } from '@/lib/planning/definition-of';
 import { partConditions } from '@/lib/schemas/component-conditions';
 import { type CalibrationFacts, calibrationOn } from '@/lib/schemas/instrument-state';
 import { decisionRules, leftOutReasons, purposes } from '@/lib/schemas/job';
 import { drivenToolWords, machineKinds } from '@/lib/schemas/make-up';
-import { convert } from '@/lib/units/convert';
+import { toleranceShown } from '@/lib/sheet/shown-unit';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
+import type { ShownIn } from '@/standards/types';
 import type { CellChangeText } from './corrected-readings';
-import { countVerdicts } from './count-verdicts';
+import { countChecks, countVerdicts } from './count-verdicts';
 import { formatDay, formatTime } from './format-time';
 import {
   conditionLabels,
@@ -19,9 +21,11 @@ import {
 } from './record-words';
 import type { ReportModel, SignatureBlock, SummaryRow } from './report-model';
 import { sheetState } from './sheet-state';
-import type { StoredJob } from './stored-job';
-import { editionWords, testBlock } from './test-block';
+import type { StoredJob, StoredPass } from './stored-job';
+import { editionWords, sheetUnit, testBlock } from './test-block';
 import { countToleranceSources } from './tolerance-source';
+
+type StoredResult = NonNullable<StoredPass['result']>;
 
 export interface ReportInput {
   stored: StoredJob;
@@ -53,10 +57,16 @@ export interface ReportInput {
 export function buildReportModel(input: ReportInput): ReportModel {
   const { stored, machine, organisation } = input;
   const { job } = stored;
-  const states = stored.sheets.map((sheet) => sheetState(sheet));
+  const sheets = stored.sheets.map((sheet) => {
+    const definition = definitionOf(sheet.definition, sheet.ownDefinition);
+    return { sheet, state: sheetState(sheet), unit: sheetUnit(sheet, definition) };
+  });
+  const measured = sheets.filter(({ unit }) => unit !== 'items');
+  const states = measured.map(({ state }) => state);
+  const checks = countChecks(sheets.filter(({ unit }) => unit === 'items').map(({ state }) => state));
   const counts = { asFound: countVerdicts(states, 'asFound'), asLeft: countVerdicts(states, 'asLeft') };
-  const outRemarked = stored.sheets.filter(
-    (sheet, index) => states[index]?.verdict === 'out-of-tolerance' && sheet.remark,
+  const outRemarked = measured.filter(
+    ({ sheet, state }) => state.verdict === 'out-of-tolerance' && sheet.remark,
   ).length;
   const context = { timeZone: organisation.timeZone, changes: input.changes };
   return {
@@ -87,25 +97,28 @@ export function buildReportModel(input: ReportInput): ReportModel {
     instruments: usedInstruments(stored, organisation.timeZone),
     headline: headlineWords(counts.asLeft, outRemarked),
     counts,
+    ...(checks ? { checks } : {}),
     toleranceSources: countToleranceSources(
       stored.sheets.filter((sheet) => !sheet.leftOutReason).map((sheet) => sheet.tolerance),
     ),
-    summary: stored.sheets.map((sheet, index): SummaryRow => {
-      const state = states[index]!;
+    summary: sheets.map(({ sheet, state, unit }): SummaryRow => {
+      const figure = (result: StoredResult | null | undefined) =>
+        result && unit !== 'items' ? formatDecimal(result.displayedMm) : null;
       const tolerance = (state.final?.result?.outcome.judgement.toleranceUm ?? sheet.tolerance?.baseUm) || null;
       return {
         order: sheet.position,
         key: sheet.key,
         title: sheet.title,
         component: componentWords(sheet.component, job.makeUp),
-        asFound: state.asFound?.result ? formatDecimal(state.asFound.result.displayedMm) : null,
+        asFound: figure(state.asFound?.result),
         asFoundUm: state.asFound?.result?.outcome.result.deviation ?? null,
         asFoundVerdict: state.asFound?.result?.verdict ?? null,
-        asLeft: state.asLeft?.result ? formatDecimal(state.asLeft.result.displayedMm) : null,
+        asLeft: figure(state.asLeft?.result),
         asLeftUm: state.asLeft?.result?.outcome.result.deviation ?? null,
         asLeftVerdict: state.asLeft?.result?.verdict ?? null,
         linked: state.linked,
-        toleranceMm: tolerance && toleranceText(tolerance),
+        toleranceMm: tolerance && unit !== 'items' ? toleranceText(tolerance, unit) : null,
+        ...(unit === 'mm' ? {} : { unit }),
         leftOut: sheet.leftOutReason ? leftOutReasons[sheet.leftOutReason] : null,
         remarkNo: input.remarks.find((remark) => remark.sheetOrder === sheet.position)?.no ?? null,
       };
@@ -121,10 +134,10 @@ export function buildReportModel(input: ReportInput): ReportModel {
   };
 }
 
-/** At most four decimals in mm, cut off downward, so that a scaled tolerance never looks wider than it is. */
-function toleranceText(um: string): string {
-  const mm = new Dec(convert(um, 'µm', 'mm'));
-  return formatDecimal(mm.toDecimalPlaces(4, Dec.ROUND_DOWN).toString());
+/** At most four decimals, cut off downward, so that a scaled tolerance never looks wider than it is. */
+function toleranceText(um: string, unit: ShownIn): string {
+  const shown = new Dec(toleranceShown(um, unit));
+  return formatDecimal(shown.toDecimalPlaces(4, Dec.ROUND_DOWN).toString());
 }
 
 function componentList({ job: { makeUp, componentConditions = {} } }: StoredJob): ReportModel['machine']['components'] {

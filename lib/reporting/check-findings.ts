@@ -1,6 +1,9 @@
+import { definitionOf } from '@/lib/planning/definition-of';
 import { isSettled } from '@/lib/planning/is-settled';
 import { calibrationOn, isOverdue } from '@/lib/schemas/instrument-state';
+import { shownUnit, withUnit } from '@/lib/sheet/shown-unit';
 import { Dec } from '@/lib/units/decimal';
+import { checkedItems } from './checked-items';
 import { formatDay } from './format-time';
 import { sheetState } from './sheet-state';
 import type { StoredInstrument, StoredJob, StoredPass, StoredSheet } from './stored-job';
@@ -44,16 +47,43 @@ function sheetFindings(sheet: StoredSheet, instruments: StoredInstrument[], time
   const add = (kind: CheckFinding['kind'], weight: CheckFinding['weight'], text: string) =>
     found.push({ kind, weight, sheetId: sheet.id, position: sheet.position, text });
   if (state.state === 'left-out') return [];
+  const check = isCheck(sheet);
   if (!state.final) {
-    add('not-measured', 'blocks', 'Not measured. Measure it, or leave it out with a reason.');
+    const words = check ? 'Not every item is answered. Answer them' : 'Not measured. Measure it';
+    add('not-measured', 'blocks', `${words}, or leave it out with a reason.`);
     return found;
   }
-  if (!state.asLeft) add('no-as-left', 'blocks', 'No readings as left. Measure again, or declare as left = as found.');
-  if (state.verdict === 'out-of-tolerance')
-    add('out-of-tolerance', 'confirm', `Out of tolerance: ${state.final.result?.displayedMm} mm.`);
-  if (state.verdict === 'undecided') add('undecided', 'confirm', `Undecided: ${state.final.result?.displayedMm} mm.`);
+  if (!state.asLeft)
+    add(
+      'no-as-left',
+      'blocks',
+      check
+        ? 'Not checked as left. Check again, or declare as left = as found.'
+        : 'No readings as left. Measure again, or declare as left = as found.',
+    );
+  if (check) {
+    if (state.verdict === 'out-of-tolerance') add('out-of-tolerance', 'confirm', notInOrderWords(sheet, state.final));
+    return found;
+  }
+  const { result } = state.final;
+  const figure = result ? withUnit(result.displayedMm, shownUnit(result.outcome.displayed)) : '';
+  if (state.verdict === 'out-of-tolerance') add('out-of-tolerance', 'confirm', `Out of tolerance: ${figure}.`);
+  if (state.verdict === 'undecided') add('undecided', 'confirm', `Undecided: ${figure}.`);
   for (const pass of judgedPasses(sheet)) found.push(...instrumentFindings(sheet, pass, instruments, timeZone));
   return found;
+}
+
+const layoutOf = (sheet: StoredSheet) => definitionOf(sheet.definition, sheet.ownDefinition).layout;
+
+const isCheck = (sheet: StoredSheet): boolean => layoutOf(sheet).kind === 'check-list';
+
+/** A check that is not in order names its items; one that stands for another set reads that one's. */
+function notInOrderWords(sheet: StoredSheet, final: StoredPass): string {
+  const layout = layoutOf(sheet);
+  const read = sheet.passes.find(({ id }) => id === final.linkedTo) ?? final;
+  const items = layout.kind === 'check-list' ? checkedItems(layout, read.cells) : [];
+  const bad = items.filter(({ inOrder }) => inOrder === false).map(({ question }) => question);
+  return `Not in order: ${bad.join('; ')}`;
 }
 
 const judgedPasses = (sheet: StoredSheet) =>

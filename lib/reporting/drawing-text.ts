@@ -1,6 +1,7 @@
 import { DIRECTION_WORDS, PLOT_WORDS, SCENE_WORDS, SKETCH_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { toleranceShown, withUnit } from '@/lib/sheet/shown-unit';
 import type { PlotSeries, Verdict } from '@/lib/sheet/types';
-import type { BoundComponent, Direction, SketchSpec } from '@/standards/types';
+import type { BoundComponent, Direction, ShownIn, SketchSpec } from '@/standards/types';
 
 /** `0° 180°`; more than four: the first, the last and how many. */
 export function angleWords(anglesDeg: readonly string[] | undefined): string {
@@ -44,20 +45,24 @@ export function sketchWords(spec: SketchSpec, component: BoundComponent): string
 export const signWords = (positiveMeans: string) =>
   positiveMeans.startsWith('+') ? positiveMeans : `+ ${positiveMeans}`;
 
+const ruleTolerance = (toleranceUm: string, unit: ShownIn) =>
+  unit === 'mm' ? `${toleranceUm} µm` : withUnit(toleranceShown(toleranceUm, unit), unit);
+
 /** What a limit rule says, for somebody who cannot see it. */
 export function limitRuleWords(rule: {
   shown: string | null;
   toleranceUm: string | null;
   direction: Direction;
   verdict: Verdict | null;
+  unit?: ShownIn;
   expandedUncertaintyUm?: string | null;
   guardUm?: string | null;
 }): string {
+  const unit = rule.unit ?? 'mm';
+  const tolerance = rule.toleranceUm === null ? '' : ruleTolerance(rule.toleranceUm, unit);
   const parts = [
-    rule.shown === null ? 'Limit rule, nothing measured yet' : `Deviation ${rule.shown} mm`,
-    rule.toleranceUm === null
-      ? 'no tolerance given'
-      : `tolerance ${rule.toleranceUm} µm, ${DIRECTION_WORDS[rule.direction]}`,
+    rule.shown === null ? 'Limit rule, nothing measured yet' : `Deviation ${withUnit(rule.shown, unit)}`,
+    tolerance ? `tolerance ${tolerance}, ${DIRECTION_WORDS[rule.direction]}` : 'no tolerance given',
   ];
   if (rule.expandedUncertaintyUm) parts.push(`expanded uncertainty ${rule.expandedUncertaintyUm} µm`);
   if (rule.guardUm) parts.push(`guard ${rule.guardUm} µm`);

@@ -1,16 +1,18 @@
 import { figures } from '@/lib/sheet/figures';
 import { sheetFields } from '@/lib/sheet/sheet-fields';
+import { shownUnit } from '@/lib/sheet/shown-unit';
 import type { Field, FieldTableCell } from '@/lib/sheet/types';
 import { convert, convertible } from '@/lib/units/convert';
 import { formatDecimal } from '@/lib/units/format';
 import { parseNumber } from '@/lib/units/parse-number';
 import type { Unit } from '@/lib/units/unit';
-import type { TestDefinition } from '@/standards/types';
+import type { ShownIn, TestDefinition } from '@/standards/types';
+import { checkedItems } from './checked-items';
 import { type CellChangeText, correctedReadings } from './corrected-readings';
 import { formatTime } from './format-time';
 import { linkedWords, passKindWords } from './record-words';
 import type { PassBlock } from './report-model';
-import type { StoredPass } from './stored-job';
+import type { JudgedOutcome, StoredPass } from './stored-job';
 
 interface PassContext {
   definition: TestDefinition;
@@ -36,25 +38,36 @@ export function passBlock(pass: StoredPass, context: PassContext): PassBlock {
       : fields.setUp
           .filter((field) => shown(field) !== '')
           .map((field) => ({ label: field.label, value: field.unit ? `${shown(field)} ${field.unit}` : shown(field) })),
-    tables: pass.linkedTo
-      ? []
-      : fields.tables
-          .map((table) => ({
-            title: table.title,
-            columns: table.columns.map((column) => (column.unit ? `${column.label}, ${column.unit}` : column.label)),
-            rows: table.rows
-              .map((row) => ({ label: row.label, cells: row.cells.map((cell) => cellText(cell, shown)) }))
-              .filter((row) => row.cells.some((text) => text !== '')),
-          }))
-          .filter((table) => table.rows.length > 0),
+    tables:
+      pass.linkedTo || definition.layout.kind === 'check-list'
+        ? []
+        : fields.tables
+            .map((table) => ({
+              title: table.title,
+              columns: table.columns.map((column) => (column.unit ? `${column.label}, ${column.unit}` : column.label)),
+              rows: table.rows
+                .map((row) => ({ label: row.label, cells: row.cells.map((cell) => cellText(cell, shown)) }))
+                .filter((row) => row.cells.some((text) => text !== '')),
+            }))
+            .filter((table) => table.rows.length > 0),
     resultMm: outcome && formatDecimal(outcome.displayed.textMm),
     resultUm: outcome && formatDecimal(outcome.displayed.textUm),
+    ...unitOf(definition, outcome),
+    ...(definition.layout.kind === 'check-list' && !pass.linkedTo
+      ? { items: checkedItems(definition.layout, pass.cells) }
+      : {}),
     resultWords: outcome?.directionWords ?? null,
     judgement: outcome?.judgement ?? null,
     plot: pass.linkedTo ? null : (outcome?.plot ?? null),
     figures: outcome && !pass.linkedTo ? figures(outcome) : [],
     corrections: pass.linkedTo ? [] : corrections(pass, fieldLabels(fields), context),
   };
+}
+
+function unitOf(definition: TestDefinition, outcome: JudgedOutcome | null): { resultUnit?: ShownIn } {
+  if (definition.layout.kind === 'check-list') return { resultUnit: 'items' };
+  const unit = shownUnit(outcome?.displayed);
+  return unit === 'mm' ? {} : { resultUnit: unit };
 }
 
 const cellText = (cell: FieldTableCell | null, shown: (field: Field) => string): string => {

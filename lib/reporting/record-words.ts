@@ -1,4 +1,4 @@
-import type { Counts } from './report-model';
+import type { CheckCounts, Counts } from './report-model';
 import type { StoredPass } from './stored-job';
 
 /** Words of the report that depend on what was found; the fixed ones stand in words.ts. Another language is another file of this shape. */
@@ -29,6 +29,18 @@ function outWords(out: number, remarked: number, accepted: number): string {
   const all = (count: number) => (count === out ? '' : `${count} `);
   if (accepted > 0) return `${out} out of tolerance, ${all(accepted)}accepted with remark`;
   return `${out} out of tolerance${remarked > 0 ? `, ${all(remarked)}with remark` : ''}`;
+}
+
+/** `Function checks: 5 of 7 in order, 1 not in order, 1 left out.`; '' where none is planned. */
+export function checkCountWords(checks: CheckCounts | undefined): string {
+  if (!checks) return '';
+  const parts = [
+    `${checks.inOrder} of ${checks.planned} in order`,
+    ...(checks.notInOrder > 0 ? [`${checks.notInOrder} not in order`] : []),
+    ...(checks.leftOut > 0 ? [`${checks.leftOut} left out`] : []),
+    ...(checks.notDone > 0 ? [`${checks.notDone} not done`] : []),
+  ];
+  return `Function checks: ${parts.join(', ')}.`;
 }
 
 export const conditionLabels = {

@@ -1,10 +1,10 @@
 import { componentWords } from '@/lib/planning/component-words';
 import { definitionOf } from '@/lib/planning/definition-of';
 import { leftOutReasons } from '@/lib/schemas/job';
-import { convert } from '@/lib/units/convert';
+import { shownUnit, toleranceShown, withUnit } from '@/lib/sheet/shown-unit';
 import { formatDecimal } from '@/lib/units/format';
 import { cautionText } from '@/standards/cautions';
-import type { PlannedTolerance, TestDefinition } from '@/standards/types';
+import type { PlannedTolerance, ShownIn, TestDefinition } from '@/standards/types';
 import type { CellChangeText } from './corrected-readings';
 import { passBlock } from './pass-block';
 import type { PhotoBlock, TestBlock } from './report-model';
@@ -12,19 +12,20 @@ import type { StoredJob, StoredPhoto, StoredSheet } from './stored-job';
 import { toleranceSource } from './tolerance-source';
 import { DIRECTION_WORDS } from './words';
 
-const mm = (um: string) => formatDecimal(convert(um, 'µm', 'mm'));
-
-/** `0.015 mm over 300 mm, never below 0.005 mm`. */
-export function toleranceWords(tolerance: PlannedTolerance | null): string {
+/** `0.015 mm over 300 mm, never below 0.005 mm`; in the unit in which the result is shown. */
+export function toleranceWords(tolerance: PlannedTolerance | null, unit: ShownIn = 'mm'): string {
+  if (unit === 'items') return 'every item in order';
   if (!tolerance) return 'no tolerance given: for information';
-  const parts = [`${mm(tolerance.baseUm)} mm`];
+  const figure = (um: string) => withUnit(formatDecimal(toleranceShown(um, unit)), unit);
+  const parts = [figure(tolerance.baseUm)];
   if (tolerance.perLength) {
     parts[0] += ` over ${formatDecimal(tolerance.perLength.baseLengthMm)} mm`;
-    parts.push(`never below ${mm(tolerance.perLength.minimumUm)} mm`);
-    if (tolerance.perLength.maximumUm) parts.push(`never above ${mm(tolerance.perLength.maximumUm)} mm`);
+    parts.push(`never below ${figure(tolerance.perLength.minimumUm)}`);
+    if (tolerance.perLength.maximumUm) parts.push(`never above ${figure(tolerance.perLength.maximumUm)}`);
   }
   if (tolerance.local)
-    parts.push(`and ${mm(tolerance.local.toleranceUm)} mm over any ${formatDecimal(tolerance.local.lengthMm)} mm`);
+    parts.push(`and ${figure(tolerance.local.toleranceUm)} over any ${formatDecimal(tolerance.local.lengthMm)} mm`);
+  for (const { label, toleranceUm } of tolerance.also ?? []) parts.push(`${label} ${figure(toleranceUm)}`);
   return parts.join(', ');
 }
 
@@ -45,7 +46,7 @@ export function testBlock(
     component: sheet.component,
     componentWords: componentWords(sheet.component, stored.job.makeUp),
     sketch: definition.sketch,
-    toleranceWords: toleranceWords(sheet.tolerance),
+    toleranceWords: toleranceWords(sheet.tolerance, sheetUnit(sheet, definition)),
     toleranceSource: toleranceSource(sheet.tolerance, sheet.definition.code),
     directionWords: sheet.direction === 'either' ? null : DIRECTION_WORDS[sheet.direction],
     judgedFigure: definition.judgedFigure,
@@ -60,8 +61,16 @@ export function testBlock(
           .map((pass) => passBlock(pass, { definition, ...context })),
     leftOut: sheet.leftOutReason ? { reason: leftOutReasons[sheet.leftOutReason], text: sheet.leftOutText } : null,
     remark: sheet.remark,
+    ...(definition.layout.kind === 'check-list' ? { check: true as const } : {}),
     ...(sheet.photos.length > 0 ? { photos: sheet.photos.map((photo) => photoBlock(photo, definition)) } : {}),
   };
+}
+
+/** Unit of a sheet's results: that of the stored ones, else that of its definition. */
+export function sheetUnit(sheet: StoredSheet, definition: TestDefinition): ShownIn {
+  const stored = sheet.passes.findLast(({ result }) => result !== null)?.result;
+  if (stored) return shownUnit(stored.outcome.displayed);
+  return definition.layout.kind === 'check-list' ? 'items' : (definition.shownIn ?? 'mm');
 }
 
 function photoBlock(photo: StoredPhoto, { layout }: TestDefinition): PhotoBlock {

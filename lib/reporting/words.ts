@@ -24,6 +24,17 @@ export const SHORT_VERDICT_WORDS: Record<keyof typeof VERDICT_WORDS, string> = {
   'out-of-tolerance': 'out',
 };
 
+/** A function check has no tolerance: its items are in order, or not. */
+export const CHECK_VERDICT_WORDS: Record<keyof typeof VERDICT_WORDS, string> = {
+  ...VERDICT_WORDS,
+  'within-tolerance': 'in order',
+  'out-of-tolerance': 'not in order',
+  'not-measured': 'not done',
+};
+
+/** Answers to an item of a function check, by what stands in its field. */
+export const CHECK_ANSWERS = { yes: 'yes', no: 'no', 'not-fitted': 'not fitted' } as const;
+
 export const DIRECTION_WORDS: Record<Direction, string> = {
   either: 'either way',
   'concave-only': 'concave only',
@@ -226,6 +237,13 @@ export const REPORT_WORDS = {
     at: 'at',
     reason: 'reason',
     noResult: 'no result',
+    items: 'Item',
+    answer: 'Answer',
+    value: 'Figure',
+    further: 'Further figures',
+    limitOf: 'limit',
+    verdict: 'verdict',
+    notAnswered: 'not answered',
   },
   remarks: {
     heading: 'Remarks and points',

@@ -20,7 +20,7 @@ export function MeaningChoices(props: {
   const isLong = choices.columns.some((role) => role === 'deviation' || role === 'radius');
   const wayWords = (by: DirectionBy): string => {
     if (by === 'column') return 'as its column says';
-    if (by === 'travel') return 'forward where the target rises from line to line';
+    if (by === 'travel') return `${ways?.first ?? ''} where the target rises from line to line`;
     return `all lines ${ways?.[by] ?? ''}`;
   };
   return (

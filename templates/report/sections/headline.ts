@@ -1,3 +1,4 @@
+import { checkCountWords } from '@/lib/reporting/record-words';
 import type { Counts, ReportModel } from '@/lib/reporting/report-model';
 import { dateSpan, sentence } from '@/lib/reporting/report-text';
 import { toleranceSourceWords } from '@/lib/reporting/tolerance-source';
@@ -17,6 +18,7 @@ export function headline(kit: Kit, model: ReportModel): FlowItem[] {
     conditions.airRange ? `${sentence(conditions.airRange)}.` : '',
     toleranceSourceWords(model.toleranceSources),
   ];
+  const checks = checkCountWords(model.checks);
   const restsOn = rests
     .filter((part) => part !== '')
     .join(' ')
@@ -30,6 +32,7 @@ export function headline(kit: Kit, model: ReportModel): FlowItem[] {
     slabItem(kit.type.paragraph(restsOn, TYPE.quiet, kit.widthPt)),
     space(10),
     counts(kit, model),
+    ...(checks ? [space(5), slabItem(kit.type.paragraph(checks, TYPE.strong, kit.widthPt))] : []),
   ];
 }
 

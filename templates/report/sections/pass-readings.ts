@@ -1,6 +1,7 @@
 import type { PassBlock } from '@/lib/reporting/report-model';
 import { longDate } from '@/lib/reporting/report-text';
-import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
+import { passResultText } from '@/lib/reporting/result-text';
+import { REPORT_WORDS } from '@/lib/reporting/words';
 import {
   asSlab,
   beside,
@@ -12,6 +13,7 @@ import {
   space,
 } from '@/templates/report/flow/ops';
 import { type Kit, markedWords } from '@/templates/report/flow/parts';
+import { checkItems } from '@/templates/report/sections/check-items';
 import { passTables, passWidth } from '@/templates/report/sections/pass-tables';
 import { TYPE } from '@/templates/report/theme';
 
@@ -23,7 +25,7 @@ const BESIDE_PT = 320;
 export function passReadings(kit: Kit, passes: readonly PassBlock[]): FlowItem[] {
   const full = passes.filter((pass) => pass.kind !== 'adjusting' && !pass.linkedWords);
   const half = (kit.widthPt - GAP_PT) / 2;
-  const narrow = full.every((pass) => passWidth(kit, pass) <= half);
+  const narrow = full.every((pass) => !pass.items && passWidth(kit, pass) <= half);
   const columns = full.map((pass) => onePass(kit, pass, half));
   const sideBySide = full.length === 2 && narrow && Math.max(...columns.map(heightOf)) <= BESIDE_PT;
   const readings = sideBySide
@@ -52,14 +54,19 @@ function onePass(kit: Kit, pass: PassBlock, widthPt: number): FlowItem[] {
       slabItem(type.paragraph(`${REPORT_WORDS.block.setUp}: ${setUp}`, TYPE.small, widthPt), { keepWithNext: true }),
     );
   }
-  return [...items, ...passTables(kit, pass, widthPt), space(4), slabItem(resultLine(kit, pass, widthPt))];
+  return [
+    ...items,
+    ...passTables(kit, pass, widthPt),
+    ...checkItems(kit, pass, widthPt),
+    space(4),
+    slabItem(resultLine(kit, pass, widthPt)),
+  ];
 }
 
 /** Mark, verdict and figure of one pass; its further figures below. */
 function resultLine(kit: Kit, pass: PassBlock, widthPt: number): Slab {
   const verdict = pass.judgement?.verdict ?? 'not-measured';
-  const words = pass.resultMm === null ? REPORT_WORDS.block.noResult : `${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`;
-  const line = markedWords(kit, verdict, words, TYPE.strong, widthPt);
+  const line = markedWords(kit, verdict, passResultText(pass), TYPE.strong, widthPt);
   if (!pass.figures.length) return line;
   const figures = pass.figures.map(({ label, value }) => `${label} ${value}`).join(' · ');
   const below = kit.type.paragraph(figures, TYPE.small, widthPt);
@@ -69,8 +76,7 @@ function resultLine(kit: Kit, pass: PassBlock, widthPt: number): Slab {
 /** What was done in a line: result, when, by whom. */
 function shortPass(kit: Kit, pass: PassBlock): Slab {
   const verdict = pass.judgement?.verdict ?? 'not-measured';
-  const result =
-    pass.resultMm === null ? REPORT_WORDS.block.noResult : `${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`;
+  const result = passResultText(pass);
   const taken = [pass.takenAt ? longDate(pass.takenAt) : '', pass.by ?? ''];
   const details = pass.linkedWords ? [pass.linkedWords] : taken.filter((part) => part !== '');
   const name = kit.type.line(pass.kindWords, TYPE.strong);

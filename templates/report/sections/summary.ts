@@ -1,8 +1,9 @@
 import type { MarkKind } from '@/components/plots/verdict-ink';
 import { verdictMark } from '@/components/plots/verdict-mark-geometry';
 import type { ReportModel, SummaryRow } from '@/lib/reporting/report-model';
+import { summaryTolerance, verdictText } from '@/lib/reporting/result-text';
 import { titleWithComponent } from '@/lib/reporting/title-with-component';
-import { REPORT_WORDS, SHORT_VERDICT_WORDS } from '@/lib/reporting/words';
+import { REPORT_WORDS } from '@/lib/reporting/words';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
 import { type FlowItem, moved, type Slab, slabItem, space } from '@/templates/report/flow/ops';
 import { heading, type Kit, markedWords } from '@/templates/report/flow/parts';
@@ -12,10 +13,11 @@ import { TYPE } from '@/templates/report/theme';
 /** One row a planned test: as found, as left, tolerance, verdict as a mark and a word. */
 export function summary(kit: Kit, model: ReportModel): FlowItem[] {
   const words = REPORT_WORDS.summary;
+  const otherUnits = model.summary.some(({ unit }) => unit !== undefined && unit !== 'items');
   const fixed: Column[] = [
     { head: words.asFound, widthPt: 66, align: 'decimal', style: TYPE.figure },
     { head: words.asLeft, widthPt: 52, align: 'decimal', style: TYPE.figure },
-    { head: words.tolerance, widthPt: 42, align: 'decimal', style: TYPE.figure },
+    { head: words.tolerance, widthPt: otherUnits ? 58 : 42, align: 'decimal', style: TYPE.figure },
     { head: words.verdict, widthPt: 112 },
   ];
   const number: Column = { head: words.number, widthPt: 24, style: TYPE.figure };
@@ -28,7 +30,7 @@ export function summary(kit: Kit, model: ReportModel): FlowItem[] {
     titleWithComponent(row.title, row.component),
     asFoundCell(kit, row, fixed[0] as Column, decimals),
     row.asLeft === null ? REPORT_WORDS.none : row.linked ? `${words.linkedSign} ${row.asLeft}` : row.asLeft,
-    row.toleranceMm ?? REPORT_WORDS.none,
+    summaryTolerance(row),
     verdictCell(kit, row, fixed[3] as Column),
   ]);
   const notes = [
@@ -41,12 +43,13 @@ export function summary(kit: Kit, model: ReportModel): FlowItem[] {
 
 const FINE: readonly MarkKind[] = ['within-tolerance', 'for-information'];
 
-/** The component after the title, unless the title names it. */
 /** A figure as found, with the mark before it where it was not within tolerance. */
 function asFoundCell(kit: Kit, row: SummaryRow, column: Column, decimals: number): TableCell {
   const verdict = row.asFoundVerdict;
-  if (row.asFound === null || !verdict || FINE.includes(verdict)) return row.asFound ?? REPORT_WORDS.none;
+  if (!verdict || FINE.includes(verdict)) return row.asFound ?? REPORT_WORDS.none;
   const mark = drawingSlab(kit.type, verdictMark(verdict), 20);
+  // A function check has no figure: the mark stands alone.
+  if (row.asFound === null) return { heightPt: TYPE.figure.leadPt, ops: [moved(mark, 0, 0)] };
   const own = row.asFound.match(/[.,](\d+)/)?.[1]?.length ?? 0;
   const right = column.widthPt - 6 - (decimals - own) * kit.type.width('0', TYPE.figure);
   const figure = kit.type.line(row.asFound, TYPE.figure, right, 'end');
@@ -55,10 +58,9 @@ function asFoundCell(kit: Kit, row: SummaryRow, column: Column, decimals: number
 
 function verdictCell(kit: Kit, row: SummaryRow, column: Column): Slab {
   // What was only measured as found counts as it was found.
-  const kind: MarkKind =
-    row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? row.asFoundVerdict ?? 'not-measured');
+  const kind = row.leftOut !== null ? 'left-out' : (row.asLeftVerdict ?? row.asFoundVerdict ?? 'not-measured');
   const parts = [
-    row.leftOut ? `${SHORT_VERDICT_WORDS['left-out']}: ${row.leftOut}` : SHORT_VERDICT_WORDS[kind],
+    [verdictText(kind, row.unit, true), row.leftOut ?? ''].filter((part) => part !== '').join(': '),
     row.remarkNo === null ? '' : `${REPORT_WORDS.summary.remark} ${row.remarkNo}`,
   ];
   return markedWords(kit, kind, parts.filter((part) => part !== '').join(', '), TYPE.strong, column.widthPt - 6);

@@ -1,9 +1,8 @@
 import { limitRule } from '@/components/plots/limit-rule-geometry';
-import { decimalsOf, shortLimit } from '@/components/plots/number';
 import type { PassBlock, TestBlock } from '@/lib/reporting/report-model';
 import { longDate, sentence } from '@/lib/reporting/report-text';
+import { judgedFigureText, limitText, passResultText, ruleDeviation } from '@/lib/reporting/result-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
-import { formatDecimal } from '@/lib/units/format';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
 import {
   asSlab,
@@ -18,6 +17,7 @@ import {
 } from '@/templates/report/flow/ops';
 import { flowingText, heading, type Kit, markedWords, pairs } from '@/templates/report/flow/parts';
 import { type Column, table, tableWidth } from '@/templates/report/flow/table';
+import { furtherLimits } from '@/templates/report/sections/further-limits';
 import { passReadings } from '@/templates/report/sections/pass-readings';
 import { testPhotos } from '@/templates/report/sections/test-photos';
 import { plotsSlab, sketchSlab } from '@/templates/report/sections/test-pictures';
@@ -55,7 +55,7 @@ function measured(kit: Kit, block: TestBlock): FlowItem[] {
   const main: Kit = { ...kit, widthPt: kit.widthPt - SIDE_PT - GUTTER_PT };
   const plots = plotsSlab(main, block);
   const readings = passReadings(main, block.passes);
-  const narrow = heightOf(readings) <= READINGS_BESIDE_PT;
+  const narrow = !block.check && heightOf(readings) <= READINGS_BESIDE_PT;
   const pictured = (left: readonly Slab[], right: readonly Slab[]) =>
     beside([
       { slab: stack(left, 4), x: 0 },
@@ -92,26 +92,29 @@ function finalPass(block: TestBlock): PassBlock | null {
 function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
   const pass = finalPass(block);
   if (!pass?.judgement || pass.resultMm === null) return [];
+  // A function check has no limit that a rule could show; its verdict stands below its items.
+  if (block.check) return [];
   const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
   // A figure without a sign never has words for its direction, and is never below zero.
   const signed = block.passes.some((each) => each.judgement?.signed);
   const rule = limitRule({
-    deviationUm: pass.resultUm === null ? null : pass.resultUm.replace('−', '-'),
+    deviationUm: ruleDeviation(pass),
     toleranceUm,
     limitUm,
     direction,
     signed,
     verdict,
     shown: pass.resultMm,
+    unit: pass.resultUnit,
     widthPx: 880,
   });
   const words = REPORT_WORDS.block;
   const parts = [
-    `${sentence(pass.kindWords)} ${pass.resultMm} mm, ${VERDICT_WORDS[verdict]}`,
+    `${sentence(pass.kindWords)} ${passResultText(pass)}`,
     pass.resultWords ?? '',
-    marginUm === null ? '' : `${inMicrometres(marginUm, pass)} µm ${words.margin}`,
+    marginUm === null ? '' : `${judgedFigureText(marginUm, pass)} ${words.margin}`,
     local
-      ? `${words.local} ${inMicrometres(local.deviationUm, pass)} µm ${words.over} ${local.lengthMm} mm, T ${shortLimit(local.toleranceUm)} µm, ${VERDICT_WORDS[local.verdict]}`
+      ? `${words.local} ${judgedFigureText(local.deviationUm, pass)} ${words.over} ${local.lengthMm} mm, T ${limitText(local.toleranceUm, pass.resultUnit)}, ${VERDICT_WORDS[local.verdict]}`
       : '',
   ];
   const line = markedWords(
@@ -126,12 +129,8 @@ function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
     slabItem(drawingSlab(kit.type, rule, kit.widthPt), { keepWithNext: true }),
     space(2),
     slabItem(line),
+    ...furtherLimits(kit, pass),
   ];
-}
-
-/** A figure of the judgement in the resolution of the result; at least a tenth, so that a small margin is not lost. */
-function inMicrometres(um: string, pass: PassBlock): string {
-  return formatDecimal(um, { decimals: Math.max(1, decimalsOf(pass.resultUm ?? '')) });
 }
 
 /** Only what is known, each with its name. */

@@ -78,7 +78,9 @@ export default async function MachinePage({ params }: { params: Promise<{ machin
           )}
           {drifting.length > 0 && (
             <>
-              <SectionTitle note="As left, mm, from the signed reports">How its geometry moved</SectionTitle>
+              <SectionTitle note="As left, mm where no other unit stands, from the signed reports">
+                How its geometry moved
+              </SectionTitle>
               <DriftPlots tests={drifting} />
             </>
           )}
