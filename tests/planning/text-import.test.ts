@@ -72,7 +72,7 @@ describe('positioning, a deviation a line', () => {
       '/backward/0/0': '-1.9',
       '/forward/0/1': '-0.1',
     });
-    expect(mapped.notes).toEqual([{ line: null, message: 'Target 105 has 1 of 2 runs forward.' }]);
+    expect(mapped.notes).toEqual([{ line: null, message: 'Target 105 has 1 of 2 runs in the + direction.' }]);
   });
 
   it('words and arrows are what the person says that they are', () => {
@@ -129,7 +129,7 @@ describe('positioning, a deviation a line', () => {
     expect(problems).toEqual([
       { line: 3, message: 'The target position is missing.' },
       { line: 4, message: 'The number of the run is missing.' },
-      { line: 2, message: 'Run 1 forward at this target stands in line 1 already.' },
+      { line: 2, message: 'Run 1 in the + direction at this target stands in line 1 already.' },
     ]);
   });
 
@@ -172,7 +172,7 @@ describe('positioning, runs side by side', () => {
       '/forward/1/2': '5',
       '/backward/1/0': '-2',
     });
-    expect(mapped.notes.map(({ message }) => message)).toEqual(['Target 0 has 2 of 3 runs forward.']);
+    expect(mapped.notes.map(({ message }) => message)).toEqual(['Target 0 has 2 of 3 runs in the + direction.']);
   });
 
   it('columns that contradict each other are refused', () => {
