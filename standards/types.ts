@@ -180,7 +180,14 @@ export type Layout =
   /** Pitch, yaw or roll over the travel, out and back. */
   | { kind: 'angular-runs'; positionsMm: DecimalText[]; quantity: 'pitch' | 'yaw' | 'roll'; bothDirections: boolean }
   /** ISO 230-2: targets, cycles, both directions. Targets of a linear axis are proposed from its travel. */
-  | { kind: 'target-cycles'; quantity: 'linear' | 'rotary'; cycles: number; targets: DecimalText[] }
+  | {
+      kind: 'target-cycles';
+      quantity: 'linear' | 'rotary';
+      cycles: number;
+      targets: DecimalText[];
+      /** Only going in the + direction. */
+      oneWay?: true;
+    }
   /** Circular test: radius over the angle, clockwise and counterclockwise. */
   | { kind: 'circle-trace'; anglesDeg: DecimalText[]; nominalRadiusMm: DecimalText; arcDeg: DecimalText }
   /** Axis of rotation: several turns, the same angles in each. */
@@ -188,7 +195,13 @@ export type Layout =
   /** Indexing: stations, each indexed several times. Names come from the turret's stations where `stations` is null. */
   | { kind: 'stations'; stations: string[] | null; repeats: number; radiusMm: DecimalText | null }
   /** Face run-out: circles read at several angles; the largest counts. */
-  | { kind: 'circles'; names: string[]; anglesDeg: DecimalText[] }
+  | {
+      kind: 'circles';
+      names: string[];
+      anglesDeg: DecimalText[];
+      /** What is turned to the angles, where it is not the spindle. */
+      turned?: 'tool spindle' | 'screw' | 'swivel axis';
+    }
   /** Diameters of a turned piece along its axis. */
   | { kind: 'diameters'; positionsMm: DecimalText[] }
   /** Roundness: one reading at each angle. */

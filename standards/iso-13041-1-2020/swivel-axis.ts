@@ -33,6 +33,7 @@ export const swivelInZx: TestDefinition = {
     kind: 'circles',
     names: ['close to the nose', '100 mm from the nose'],
     anglesDeg: ['0', '-45', '45', '90'],
+    turned: 'swivel axis',
   },
   tolerance: swivelPlane,
   resolution: halfMicrometre,

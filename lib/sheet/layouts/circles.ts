@@ -5,6 +5,7 @@ import { counted, derivedRange, readingField } from './parts';
 type Circles = LayoutOf<'circles'>;
 
 const at = (circle: number, k: number) => `/circles/${circle}/readings/${k}`;
+const turned = (layout: Circles): string => layout.turned ?? 'spindle';
 const indices = (length: number) => Array.from({ length }, (_, k) => k);
 
 function fields(layout: Circles, cells: Cells): SheetFields {
@@ -20,7 +21,10 @@ function fields(layout: Circles, cells: Cells): SheetFields {
           ...angles.map((k) => ({
             label: `${layout.anglesDeg[k]}°`,
             cells: circles.map((circle) => ({
-              field: readingField(at(circle, k), `${layout.names[circle]}, spindle at ${layout.anglesDeg[k]}°`),
+              field: readingField(
+                at(circle, k),
+                `${layout.names[circle]}, ${turned(layout)} at ${layout.anglesDeg[k]}°`,
+              ),
             })),
           })),
           {
@@ -67,7 +71,7 @@ function plot(layout: Circles, values: SheetValues): PlotSeries | null {
       return y === undefined ? [] : [{ x, y, series }];
     }),
   );
-  return points.length ? { kind: 'polar', xLabel: 'spindle angle, °', yLabel: 'reading, µm', points } : null;
+  return points.length ? { kind: 'polar', xLabel: `${turned(layout)} angle, °`, yLabel: 'reading, µm', points } : null;
 }
 
 export const circles: LayoutEngine<Circles> = { fields, assemble, plot };

@@ -9,7 +9,7 @@ type TargetCycles = LayoutOf<'target-cycles'>;
 type Way = 'forward' | 'backward';
 
 const MAX_TARGETS = 60;
-const ways: Way[] = ['forward', 'backward'];
+const waysOf = ({ oneWay }: TargetCycles): Way[] => (oneWay ? ['forward'] : ['forward', 'backward']);
 const target = (row: number) => `/targets/${row}`;
 const at = (way: Way, row: number, cycle: number) => `/${way}/${row}/${cycle}`;
 const indices = (length: number) => Array.from({ length }, (_, k) => k);
@@ -29,7 +29,10 @@ const unitsOf = ({ quantity }: TargetCycles): { place: Unit; reading: Unit } =>
 /** Cycle by cycle: all targets going up, then all going down, as the machine moves. */
 function fields(layout: TargetCycles, cells: Cells): SheetFields {
   const cycles = indices(layout.cycles);
-  const pointers = (row: number) => [target(row), ...ways.flatMap((way) => cycles.map((cycle) => at(way, row, cycle)))];
+  const pointers = (row: number) => [
+    target(row),
+    ...waysOf(layout).flatMap((way) => cycles.map((cycle) => at(way, row, cycle))),
+  ];
   const rows = indices(rowsToOffer(cells, pointers, MAX_TARGETS));
   const placed = rows.filter((row) => isFilled(cells, target(row))).sort((a, b) => byTarget(cells, a, b));
   return {
@@ -37,10 +40,10 @@ function fields(layout: TargetCycles, cells: Cells): SheetFields {
       layout.quantity === 'linear'
         ? temperature.map(({ pointer, label, unit }) => setUpField(pointer, label, unit, true))
         : [],
-    tables: ways.map((way) => table(layout, cells, way, rows)),
+    tables: waysOf(layout).map((way) => table(layout, cells, way, rows)),
     order: cycles.flatMap((cycle) => [
       ...placed.map((row) => at('forward', row, cycle)),
-      ...[...placed].reverse().map((row) => at('backward', row, cycle)),
+      ...(layout.oneWay ? [] : [...placed].reverse().map((row) => at('backward', row, cycle))),
     ]),
   };
 }
@@ -128,7 +131,7 @@ function assemble(layout: TargetCycles, values: SheetValues, { definition }: Ass
     basedOn:
       counted(used.length, existing.length, 'targets') ??
       counted(cycles, layout.cycles, 'runs') ??
-      (backward === 0 ? 'the + direction alone' : null),
+      (backward === 0 && !layout.oneWay ? 'the + direction alone' : null),
     lengthMm: layout.quantity === 'linear' ? span(targets) : null,
     notes: [],
   };
