@@ -1332,7 +1332,7 @@ CREATE POLICY own_definitions_add ON public.own_definitions FOR INSERT WITH CHEC
 
 CREATE POLICY own_definitions_change ON public.own_definitions FOR UPDATE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff))) WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
-CREATE POLICY own_definitions_read ON public.own_definitions FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR true)));
+CREATE POLICY own_definitions_read ON public.own_definitions FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR (( SELECT public.app_customer() AS app_customer) IS NOT NULL))));
 
 CREATE POLICY own_definitions_remove ON public.own_definitions FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
@@ -1476,7 +1476,7 @@ CREATE POLICY tolerance_values_add ON public.tolerance_values FOR INSERT WITH CH
 
 CREATE POLICY tolerance_values_change ON public.tolerance_values FOR UPDATE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff))) WITH CHECK (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 
-CREATE POLICY tolerance_values_read ON public.tolerance_values FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR true)));
+CREATE POLICY tolerance_values_read ON public.tolerance_values FOR SELECT USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND (( SELECT public.app_is_staff() AS app_is_staff) OR (( SELECT public.app_customer() AS app_customer) IS NOT NULL))));
 
 CREATE POLICY tolerance_values_remove ON public.tolerance_values FOR DELETE USING (((organisation_id = ( SELECT public.app_organisation() AS app_organisation)) AND ( SELECT public.app_is_staff() AS app_is_staff)));
 

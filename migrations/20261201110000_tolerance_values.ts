@@ -38,7 +38,7 @@ export async function up(knex: Knex): Promise<void> {
       check (state = 'withdrawn' or (of_edition <> '' and clause <> '')),
       check (second_account_id is null or (needs_second and second_account_id <> account_id)),
       check ((second_account_id is null) = (second_at is null) and (second_account_id is null) = (second_account_name is null))`,
-    customerReads: 'true',
+    customerReads: '(select app_customer()) is not null',
     grants: 'select, insert, update (second_account_id, second_account_name, second_at)',
   });
   await knex.raw(`

@@ -18,7 +18,7 @@ export async function up(knex: Knex): Promise<void> {
       recorded_at timestamptz not null default now(),
       unique (organisation_id, definition_id, version, withdrawn),
       check (withdrawn = (definition is null) and withdrawn = (composed is null))`,
-    customerReads: 'true',
+    customerReads: '(select app_customer()) is not null',
     grants: 'select, insert',
   });
   await knex.raw(
