@@ -10,6 +10,8 @@ export const ONE_UM = 1n << BITS;
 /** The centre counts as found when it moves less than 2^-100 µm, far below the contract's 10^-9 µm. */
 export const STILL = 1n << (BITS - 100n);
 export const MOST_STEPS = 60;
+/** Steps after that, so that a figure that is exactly nothing comes out below the cut-off of the square roots. */
+const MORE_STEPS = 3;
 export const NO_CIRCLE = 'the points do not determine a circle';
 
 /** Points in the plane of the circle, µm over 2^160. */
@@ -45,14 +47,17 @@ export function seenFrom(points: readonly PlanePoint[], centre: PlanePoint): See
  */
 export function leastSquaresCircle(points: readonly PlanePoint[]): CircleFit {
   let centre: PlanePoint = { x: 0n, y: 0n };
+  let more = MORE_STEPS;
   for (let step = 0; ; step++) {
     const seen = seenFrom(points, centre);
     const [c, a, b] = harmonicFit(seen.directions, seen.radii, 1)?.coefficients ?? refuse([], NO_CIRCLE);
     const move = { x: toFixed(a!), y: toFixed(b!) };
-    if (step === MOST_STEPS) return refuse([], NO_CIRCLE);
-    if (size(move.x) < STILL && size(move.y) < STILL) {
+    const isStill = size(move.x) < STILL && size(move.y) < STILL;
+    if (isStill && (more === 0 || (move.x === 0n && move.y === 0n))) {
       return { centre, radius: c!, width: widthOf(seen), seen };
     }
+    if (isStill) more -= 1;
+    else if (step >= MOST_STEPS) return refuse([], NO_CIRCLE);
     centre = { x: centre.x + move.x, y: centre.y + move.y };
   }
 }

@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { guessChoices, guessWays, importText, mappingOf, unitsFor } from '@/lib/sheet/text-import/import-text';
+import { judgeSheet } from '@/lib/sheet/judge-sheet';
+import {
+  changeChoices,
+  guessChoices,
+  guessWays,
+  importText,
+  mappingOf,
+  unitsFor,
+} from '@/lib/sheet/text-import/import-text';
 import type { ImportChoices, Mapped, MappingInput } from '@/lib/sheet/text-import/types';
 import { readFigure, readTextTable } from '@/lib/sheet/text-table';
 import type { Cells } from '@/lib/sheet/types';
@@ -250,6 +258,88 @@ describe('other sheets', () => {
   });
 });
 
+describe('from a text to the verdict', () => {
+  const base = currentDefinitions()[0]!;
+  const judged = (layout: Layout, method: string, text: string, change: Partial<ImportChoices>) => {
+    const definition: TestDefinition = { ...base, layout, method, direction: 'either', tolerance: null };
+    const made = importText(definition, {}, text, { ...guessChoices(layout, text), positions: 'replace', ...change });
+    expect(made.problems).toEqual([]);
+    const cells = Object.fromEntries(
+      made.fills.map(({ pointer, text: written, unit }) => [pointer, { text: written, unit }]),
+    );
+    const { id, code, edition, version } = definition;
+    const rules = { definition: { id, code, edition, version }, tolerance: null, direction: 'either' as const };
+    const outcome = judgeSheet({ ...rules, decisionRule: 'simple' }, definition, cells);
+    if (outcome.state !== 'complete' && outcome.state !== 'partial') throw new Error(JSON.stringify(outcome));
+    return outcome;
+  };
+
+  // The reference vector of five targets and five runs each way, written as somebody's spreadsheet would.
+  const targets = ['0', '105', '198', '311', '402'];
+  const forward = [
+    '.2 -.1 .3 0 .1',
+    '1.4 1.1 1.6 1.3 1.1',
+    '2.9 2.6 3.1 2.8 2.6',
+    '2.2 2.5 2 2.4 2.4',
+    '4.1 3.8 4.4 4 4.2',
+  ];
+  const backward = [
+    '-1.9 -2.2 -1.8 -2.1 -2',
+    '-.6 -1 -.7 -.9 -.8',
+    '.9 .5 1 .7 .9',
+    '.4 .1 .6 .3 .1',
+    '2.2 1.8 2.3 2 2.2',
+  ];
+  const runs = (list: string[]) => list.map((row) => row.split(' '));
+
+  it('positioning, a line each, decimal commas, µm', () => {
+    const lines = ['Ziel;Lauf;Richtung;Abweichung'];
+    for (let run = 0; run < 5; run++) {
+      for (const [i, target] of targets.entries()) lines.push(`${target};${run + 1};↑;${runs(forward)[i]![run]}`);
+      for (const [i, target] of targets.entries()) lines.push(`${target};${run + 1};↓;${runs(backward)[i]![run]}`);
+    }
+    const text = lines.join('\r\n').replaceAll('.', ',');
+    const outcome = judged(targetCycles, 'positioning', text, {
+      columns: ['position', 'run', 'direction', 'deviation'],
+      directionBy: 'column',
+      ways: guessWays(['↑', '↓']),
+    });
+    expect(outcome.state).toBe('complete');
+    expect(outcome.result).toMatchObject({ B: '2.1', meanB: '2.04', M: '4.05', E: '6.1', cycles: '5' });
+    expect((outcome.result as { A: string }).A.slice(0, 6)).toBe('6.8634');
+  });
+
+  it('positioning, runs side by side, mm', () => {
+    const mm = (row: string[]) => row.map((um) => (Number(um) / 1000).toFixed(4)).join('\t');
+    const text = targets
+      .map((target, i) => `${target}\t${mm(runs(forward)[i]!)}\t${mm(runs(backward)[i]!)}`)
+      .join('\n');
+    const outcome = judged(targetCycles, 'positioning', text, {
+      columns: ['position', ...Array(5).fill('first'), ...Array(5).fill('second')],
+      units: { first: 'mm', second: 'mm' },
+    });
+    expect(outcome.result).toMatchObject({ B: '2.1', meanB: '2.04', M: '4.05', E: '6.1', cycles: '5' });
+  });
+
+  it('circular test, 1,000 lines', () => {
+    const text = Array.from(
+      { length: 1000 },
+      (_, i) => `${((i % 500) * 0.72).toFixed(2)},${i % 2 ? '1.5' : '-1.5'},${i < 500 ? '+' : '-'}`,
+    );
+    const outcome = judged(circle, 'circular', `angle,radius,dir\n${text.join('\n')}`, {});
+    expect(outcome.result).toMatchObject({ Gb: '3', Fmax: '1.5', Fmin: '-1.5', D: '0' });
+  });
+
+  it('turns of a spindle and drift', () => {
+    const turns = judged(turning, 'axis-of-rotation', '0 0 0\n90 1 1.5\n180 0.5 0\n270 -1 -1\n', {
+      columns: ['angle', 'reading', 'reading'],
+    });
+    expect(turns.result).toMatchObject({ asynchronous: '0.5' });
+    const over = judged(drift, 'drift', 'min temp reading\n0 20 0\n60 21 2\n120 22 3\n', {});
+    expect(over.result).toMatchObject({ firstHour: '2', range: '3', rate: '1.5', temperatureRange: '2' });
+  });
+});
+
 describe('a whole sheet', () => {
   const definition = currentDefinitions().find(({ layout }) => layout.kind === 'profile') as TestDefinition;
   const text = 'position;reading\n0;0,0012\n100;-0,0005\n200;0,002\n';
@@ -287,6 +377,17 @@ describe('a whole sheet', () => {
     const { problems, fills } = importText(definition, {}, long, { ...choices, skipLines: 0 });
     expect(problems.every(({ message }) => message === 'The sheet has no field left for this line.')).toBe(true);
     expect(fills.length + problems.length).toBe(10_000);
+  });
+
+  it('a direction column that is named is used, and what it holds is proposed', () => {
+    const written = '0;+;1\n0;x;2';
+    const before = guessChoices(targetCycles, written);
+    expect(before.directionBy).toBe('first');
+    const named = changeChoices(written, before, { columns: ['position', 'direction', 'deviation'] });
+    expect(named).toMatchObject({ directionBy: 'column', ways: { '+': 'first' } });
+    const said = changeChoices(written, named, { ways: { '+': 'second', x: 'first' } });
+    expect(said.ways).toEqual({ '+': 'second', x: 'first' });
+    expect(changeChoices(written, said, { columns: ['position', null, 'deviation'] }).directionBy).toBe('first');
   });
 
   it('a comma that would be both is refused', () => {

@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Checkbox } from '@/components/ui/inputs';
 import { Notice } from '@/components/ui/notice';
-import { directionWords, guessChoices, guessWays, importText } from '@/lib/sheet/text-import/import-text';
+import { changeChoices, guessChoices, importText } from '@/lib/sheet/text-import/import-text';
 import type { ImportChoices } from '@/lib/sheet/text-import/types';
 import type { TestDefinition } from '@/standards/types';
 import { useOpenPass } from '../sheet-context';
@@ -42,8 +42,7 @@ export function TextImportDialog(props: {
   };
   const choose = (change: Partial<ImportChoices>) => {
     if (!choices) return;
-    const next = { ...choices, ...change };
-    setChoices({ ...next, ways: { ...guessWays(directionWords(text, next)), ...next.ways } });
+    setChoices(changeChoices(text, choices, change));
     setLeavesOut(false);
     setOverwrites(false);
   };

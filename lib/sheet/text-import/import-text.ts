@@ -54,6 +54,14 @@ export function guessChoices(layout: Layout, text: string): ImportChoices {
   return { ...choices, ways: guessWays(directionWords(text, choices)) };
 }
 
+/** Choices after one of them was changed: what follows from it is proposed again, what the person said stays. */
+export function changeChoices(text: string, before: ImportChoices, change: Partial<ImportChoices>): ImportChoices {
+  const next = { ...before, ...change };
+  const [had, has] = [before, next].map(({ columns }) => columns.includes('direction'));
+  if (change.columns && had !== has) next.directionBy = has ? 'column' : 'first';
+  return { ...next, ways: { ...guessWays(directionWords(text, next)), ...next.ways } };
+}
+
 /** Numbers of the columns of a text, from 0. */
 export function columnsOf(text: string, shape: TextShape): number[] {
   const most = readTextTable(text, shape).reduce((count, { cells }) => Math.max(count, cells.length), 0);

@@ -57,7 +57,8 @@ function map(input: MappingInput<TargetCycles>): Mapped {
   ]);
   const isLong = choices.columns.includes('deviation');
   if (isLong && (choices.columns.includes('first') || choices.columns.includes('second'))) {
-    const message = 'One column of deviations with their direction, or columns for the + and the − direction: not both.';
+    const message =
+      'One column of deviations with their direction, or columns for the + and the − direction: not both.';
     mapped.problems.push({ line: null, message });
   }
   if (mapped.problems.length > 0) return mapped;
