@@ -7,6 +7,11 @@ const provenance: Provenance = {
   confidence: 'medium',
 };
 
+const chuckProvenance: Provenance = {
+  ...provenance,
+  text: `${provenance.text}; a weaker memory has chuck classes up to 250, 500 and 1000 in some edition`,
+};
+
 export const sizeCriterionWords: Record<SizeCriterion, string> = {
   'swing-over-bed': 'swing over bed',
   'bar-diameter': 'nominal bar diameter',
@@ -40,7 +45,7 @@ export const sizeClassTables: SizeClassTable[] = [
       { class: 2, overMm: '125', upToMm: '250' },
       { class: 3, overMm: '250', upToMm: null },
     ],
-    provenance,
+    provenance: chuckProvenance,
   },
 ];
 
