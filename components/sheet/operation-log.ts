@@ -55,13 +55,17 @@ export function nextSequence(log: OperationLog, last: number, nowMs: number): nu
  * when the earlier one is answered, before the new one is ever sent.
  */
 export function baseVersion(log: OperationLog, known: KnownCell | undefined, passId: string, cellId: string): number {
-  const before = ownEntries(log, cellKey(passId, cellId)).at(-1);
-  return before ? before.operation.baseVersion + 1 : (known?.version ?? 0);
+  return versionAfter(newestOwn(log).get(cellKey(passId, cellId)), known);
+}
+
+/** As `baseVersion`, where the newest own change of the cell is at hand. */
+export function versionAfter(newest: LoggedOperation | undefined, known: KnownCell | undefined): number {
+  return newest ? newest.operation.baseVersion + 1 : (known?.version ?? 0);
 }
 
 /** What stands in a cell: the newest own text that has not been refused, over what the server holds. */
 export function textOver(log: OperationLog, known: KnownCell | undefined, passId: string, cellId: string): KnownCell {
-  const own = ownEntries(log, cellKey(passId, cellId)).at(-1)?.operation;
+  const own = newestOwn(log).get(cellKey(passId, cellId))?.operation;
   if (own) return { text: own.text, unit: own.unit, version: known?.version ?? 0 };
   return known ?? { text: '', unit: null, version: 0 };
 }
@@ -168,6 +172,17 @@ export interface LogCounts {
 export function countLog(log: OperationLog): LogCounts {
   const count = (state: LoggedOperation['state']) => log.filter((entry) => entry.state === state).length;
   return { waiting: count('waiting'), conflicts: count('conflict'), rejected: count('rejected') };
+}
+
+const newestOf = new WeakMap<OperationLog, ReadonlyMap<string, LoggedOperation>>();
+
+/** The newest own change of each cell (`cellKey`) that has not been refused. A log never changes, so it is gone through once. */
+export function newestOwn(log: OperationLog): ReadonlyMap<string, LoggedOperation> {
+  const ready = newestOf.get(log);
+  if (ready) return ready;
+  const made = new Map(log.flatMap((entry) => (entry.state === 'rejected' ? [] : [[keyOf(entry), entry] as const])));
+  newestOf.set(log, made);
+  return made;
 }
 
 const ownEntries = (log: OperationLog, key: string) =>

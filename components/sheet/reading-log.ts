@@ -5,17 +5,19 @@ import type { SheetOutcome } from '@/lib/sheet/types';
 import { type DeviceStore, isFull } from './device-store';
 import {
   applyAnswers,
-  baseVersion,
   type CellUpdate,
+  cellKey,
   countLog,
   decideConflict,
   type KnownCell,
   type LoggedOperation,
+  newestOwn,
   nextBatch,
   nextSequence,
   type OperationLog,
   rejectOperations,
   sortedLog,
+  versionAfter,
   withoutOperation,
 } from './operation-log';
 import type { SaveState } from './save-words';
@@ -130,22 +132,25 @@ export class ReadingLog {
   /** One committed change of a field. Shown as waiting at once, as kept when the device has it; sent after that. */
   commit(sheet: SheetPlace, changes: readonly { change: Change; known: KnownCell | undefined }[]): Promise<void> {
     const added: LoggedOperation[] = [];
+    const newest = new Map(newestOwn(this.log));
     for (const { change, known } of changes) {
+      const key = cellKey(change.passId, change.cellId);
       this.lastSequence = nextSequence(this.log, this.lastSequence, Date.now());
       const entry: LoggedOperation = {
         ...sheet,
         state: 'waiting',
         operation: {
           opId: newId(),
-          baseVersion: baseVersion(this.log, known, change.passId, change.cellId),
+          baseVersion: versionAfter(newest.get(key), known),
           deviceTime: new Date().toISOString(),
           seq: this.lastSequence,
           ...change,
         },
       };
-      this.log = [...this.log, entry];
+      newest.set(key, entry);
       added.push(entry);
     }
+    this.log = [...this.log, ...added];
     return this.keep(added, []).then(() => this.sendNow());
   }
 
@@ -229,7 +234,8 @@ export class ReadingLog {
   }
 
   private keepDifference(before: OperationLog): Promise<void> {
-    const changed = this.log.filter((entry) => !before.includes(entry));
+    const stood = new Set(before);
+    const changed = this.log.filter((entry) => !stood.has(entry));
     const now = new Set(this.log.map((entry) => entry.operation.opId));
     return this.keep(
       changed,
