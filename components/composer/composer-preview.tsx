@@ -53,13 +53,23 @@ function withTexts(typed: Typed): Typed {
 
 function preview(typed: Typed, machines: ExampleMachine[]): { data: SheetData } | { missing: string[] } {
   const parsed = ownDefinitionFields.safeParse(withTexts(typed));
-  if (!parsed.success) return { missing: distinct(parsed.error.issues.map(({ message }) => message)) };
+  if (!parsed.success) return { missing: firstOfEach(parsed.error.issues) };
   const problems = ownDefinitionProblems(parsed.data);
   if (problems.length > 0) return { missing: distinct(problems.map(({ detail }) => detail)) };
   const definition = composeDefinition(parsed.data, 'OWN', 1);
   const example = exampleSheet(definition, machines);
   if (!example) return { missing: ['No machine here has what it is done on, so it cannot be shown.'] };
   return { data: exampleData(definition, example) };
+}
+
+/** One message a field is enough. */
+function firstOfEach(issues: { path: PropertyKey[]; message: string }[]): string[] {
+  const byPlace = new Map<string, string>();
+  for (const { path, message } of issues) {
+    const place = path.join('/');
+    if (!byPlace.has(place)) byPlace.set(place, message);
+  }
+  return distinct([...byPlace.values()]);
 }
 
 const distinct = (texts: string[]) => [...new Set(texts)];

@@ -22,7 +22,9 @@ export function CodesForm(props: {
 }) {
   const { offered, chosen, goOnTo } = props;
   const router = useRouter();
-  const [version, setVersion] = useState(props.version);
+  const [saved, setVersion] = useState(props.version);
+  // Another form of the page may have saved meanwhile; what is typed here stays.
+  const version = Math.max(saved, props.version);
   const [kept, setKept] = useState(false);
   const { form, submit, problem, sending, errorAt } = useApiForm({
     schema: z.object({ codes: testCodes }),

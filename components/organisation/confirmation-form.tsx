@@ -22,7 +22,9 @@ const fields = z.object({ fourEyes: z.boolean(), refuseUnconfirmed: z.boolean() 
 /** Whether a confirmed tolerance waits for a second person, and whether a new job takes confirmed ones only. */
 export function ConfirmationForm({ organisation }: { organisation: Settings }) {
   const router = useRouter();
-  const [version, setVersion] = useState(organisation.version);
+  const [saved, setVersion] = useState(organisation.version);
+  // Another form of the page may have saved meanwhile; what is typed here stays.
+  const version = Math.max(saved, organisation.version);
   const [kept, setKept] = useState(false);
   const { form, submit, problem, sending } = useApiForm({
     schema: fields,

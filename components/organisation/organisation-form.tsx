@@ -25,7 +25,9 @@ interface Letterhead {
 export function OrganisationForm(props: { organisation: Letterhead; timeZones: string[]; goOnTo?: string }) {
   const router = useRouter();
   const { organisation, timeZones, goOnTo } = props;
-  const [version, setVersion] = useState(organisation.version);
+  const [saved, setVersion] = useState(organisation.version);
+  // Another form of the page may have saved meanwhile; what is typed here stays.
+  const version = Math.max(saved, organisation.version);
   const [kept, setKept] = useState(false);
   const { form, submit, problem, sending, errorAt } = useApiForm({
     schema: organisationFields,

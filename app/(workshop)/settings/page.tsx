@@ -24,16 +24,11 @@ export default async function SettingsPage() {
   return (
     <>
       <PageTitle note="Every report that is issued from now on carries it">Letterhead and defaults</PageTitle>
-      <OrganisationForm key={organisation.version} organisation={organisation} timeZones={timeZones()} />
+      <OrganisationForm organisation={organisation} timeZones={timeZones()} />
       <SectionTitle>Test codes of a new job</SectionTitle>
-      <CodesForm
-        key={`codes ${organisation.version}`}
-        offered={offeredCodes(hasOwnTests)}
-        chosen={organisation.codes}
-        version={organisation.version}
-      />
+      <CodesForm offered={offeredCodes(hasOwnTests)} chosen={organisation.codes} version={organisation.version} />
       <SectionTitle>Confirmation of tolerances</SectionTitle>
-      <ConfirmationForm key={`confirmation ${organisation.version}`} organisation={organisation} />
+      <ConfirmationForm organisation={organisation} />
     </>
   );
 }
