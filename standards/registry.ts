@@ -1,13 +1,23 @@
 import { definitions as commonPractice } from './common-practice/definitions';
 import * as commonPracticeSource from './common-practice/source';
+import { definitions as rotation } from './iso-230-7-2015/definitions';
+import * as rotationSource from './iso-230-7-2015/source';
 import { definitions as engineLathes } from './iso-1708-1989/definitions';
 import * as engineLathesSource from './iso-1708-1989/source';
 import { definitions as geometric2004 } from './iso-13041-1-2004/definitions';
 import * as geometric2004Source from './iso-13041-1-2004/source';
 import { definitions as geometric2020 } from './iso-13041-1-2020/definitions';
 import * as geometric2020Source from './iso-13041-1-2020/source';
+import { definitions as positioning } from './iso-13041-4-2004/definitions';
+import * as positioningSource from './iso-13041-4-2004/source';
+import { definitions as feedsAndSpeeds } from './iso-13041-5-2006/definitions';
+import * as feedsAndSpeedsSource from './iso-13041-5-2006/source';
 import { definitions as testPiece } from './iso-13041-6-2009/definitions';
 import * as testPieceSource from './iso-13041-6-2009/source';
+import { definitions as contouring } from './iso-13041-7-2004/definitions';
+import * as contouringSource from './iso-13041-7-2004/source';
+import { definitions as thermal } from './iso-13041-8-2004/definitions';
+import * as thermalSource from './iso-13041-8-2004/source';
 import type { Provenance, TestDefinition } from './types';
 
 export interface TestCode {
@@ -24,7 +34,12 @@ const books = [
   { ...geometric2004Source, definitions: geometric2004 },
   { ...engineLathesSource, definitions: engineLathes },
   { ...commonPracticeSource, definitions: commonPractice },
+  { ...positioningSource, definitions: positioning },
+  { ...feedsAndSpeedsSource, definitions: feedsAndSpeeds },
   { ...testPieceSource, definitions: testPiece },
+  { ...contouringSource, definitions: contouring },
+  { ...thermalSource, definitions: thermal },
+  { ...rotationSource, definitions: rotation },
 ];
 
 const all: TestDefinition[] = books.flatMap(({ definitions }) => definitions);

@@ -1,5 +1,6 @@
 import type { MeasuredResult, ResultOf } from '@/lib/evaluation';
 import { Fraction } from '@/lib/units/fraction';
+import type { CheckResult } from './check-result';
 import { shown, slope, um } from './figure-text';
 import { circularFigures, indexingFigures, positioningFigures, rotationFigures } from './further-figures';
 import type { Judgement, SheetOutcome } from './types';
@@ -13,7 +14,7 @@ export interface Figure {
 export function figures(outcome: SheetOutcome): Figure[] {
   if (outcome.state !== 'partial' && outcome.state !== 'complete') return [];
   const { result, judgement, input } = outcome;
-  if (result.method === 'function-check') return [];
+  if (result.method === 'function-check') return checkFigures(result);
   const own = figuresOf(result, judgement, input);
   const local = judgement.local;
   if (!local) return own;
@@ -194,4 +195,12 @@ function radiiOf(input: unknown): string[] {
 
 function times(value: string, factor: number): Fraction {
   return Fraction.from(value).times(Fraction.of(factor));
+}
+
+function checkFigures({ items, notFitted }: CheckResult): Figure[] {
+  const inOrder = items.filter((item) => item.inOrder).length;
+  return [
+    { label: 'items in order', value: `${inOrder} of ${items.length - notFitted}` },
+    ...(notFitted > 0 ? [{ label: 'not fitted', value: String(notFitted) }] : []),
+  ];
 }

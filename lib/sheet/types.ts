@@ -82,9 +82,6 @@ export interface FurtherJudgement {
   deviationUm: DecimalText;
   toleranceUm: DecimalText;
   verdict: Verdict;
-  /** The figure rounded once, as in DisplayedResult. */
-  textMm?: string;
-  unit?: ShownIn;
 }
 
 export interface DisplayedResult {

@@ -43,6 +43,13 @@ export const definitions: TestDefinition[] = [
     dependsOn: { components: [], moved: ['axis'], positioned: [] },
     workingStep: workingSteps['lost-motion'],
     judgedFigure: 'largest amount of the mean difference of a place',
+    usualMistakes: [
+      'Coming to the first target without having moved a good way toward it: the play is then not taken up yet.',
+      'Indicator on a stand that gives way with the slide: its own play is read.',
+      'Setting a new value in the control from one pair, or from one place of a worn screw.',
+    ],
+    setUpTogether: 'indicator at the slide of {axis}',
+    minutes: 20,
     source,
   },
 ];

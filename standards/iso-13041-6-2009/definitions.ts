@@ -1,5 +1,6 @@
 import type { TestDefinition } from '../types';
 import { workingSteps } from '../working-order';
+import { milledFeatures, turnedPieces } from './finished-pieces';
 import { code, edition, source } from './source';
 import { twoCollars } from './tolerances';
 
@@ -36,8 +37,17 @@ export const definitions: TestDefinition[] = [
     dependsOn: { components: ['spindle', 'turret'], moved: ['axis'], positioned: ['turret-cross-axis'] },
     workingStep: workingSteps['cutting-test'],
     judgedFigure: 'half the difference of diameters over the distance',
+    usualMistakes: [
+      'A blunt tool or a thin piece: the free end then bends away and comes out thicker.',
+      'Moving X between the collars, or measuring the piece while it is still warm.',
+      'Correcting the taper by a wear value in the program, which hides the geometry.',
+    ],
+    setUpTogether: 'test piece in {spindle}',
+    minutes: 30,
     positiveMeans: 'larger near the headstock: free end leans toward the tool',
     negativeMeans: 'larger at the far end: free end leans away from the tool',
     source,
   },
+  ...turnedPieces,
+  ...milledFeatures,
 ];

@@ -88,13 +88,14 @@ describe.each(cases)('$name', ({ definition, rule }) => {
     const { method, judge, code } = definition;
     expect([
       ...['parallelism', 'squareness-to-axis', 'squareness', 'two-collar'],
-      ...['straightness', 'straightness-from-angles', 'straightness-reversal'],
+      ...['straightness', 'straightness-from-angles', 'straightness-reversal', 'diameter-consistency'],
     ]).toContain(method);
     expect(judge).not.toBe('range');
-    expect(rule.by).toBe('all');
+    expect(['all', 'size-class']).toContain(rule.by);
     expect(rule.perLength.minimumUm).toBe(code === 'ISO 1708' ? '10' : '5');
     expect(Fraction.from(rule.perLength.baseLengthMm).sign()).toBe(1);
-    expect(Fraction.from(rule.perLength.minimumUm).compare(Fraction.from(rule.allUm!))).toBeLessThanOrEqual(0);
+    for (const figure of figuresOf(rule))
+      expect(Fraction.from(rule.perLength.minimumUm).compare(Fraction.from(figure))).toBeLessThanOrEqual(0);
   });
 
   it('has a local part only where the method gives a local figure, and one that is not wider', () => {

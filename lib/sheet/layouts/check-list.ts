@@ -40,7 +40,7 @@ function fields(layout: CheckList): SheetFields {
         })),
       },
     ],
-    order: layout.items.map(answerAt),
+    order: layout.items.flatMap((item) => (hasLimits(item) ? [answerAt(item), valueAt(item)] : [answerAt(item)])),
   };
 }
 
@@ -52,8 +52,11 @@ const plainField = (pointer: string, label: string): Field => ({
   optional: true,
 });
 
-const valueField = (item: CheckItem): Field =>
-  plainField(valueAt(item), `${item.value!.label}, ${item.value!.unit}: ${item.question}`);
+/** A figure that has limits is asked for like a reading; one without is noted where it is known. */
+const valueField = (item: CheckItem): Field => {
+  const field = plainField(valueAt(item), `${item.value!.label}, ${item.value!.unit}: ${item.question}`);
+  return hasLimits(item) ? { ...field, role: 'reading', optional: false } : field;
+};
 
 /**
  * What the answers come to. `value` is the figure as it can be read; one that is outside its limits puts a “yes” out of order. Not
