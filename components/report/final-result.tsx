@@ -4,6 +4,7 @@ import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { TestBlock } from '@/lib/reporting/report-model';
 import { sentence } from '@/lib/reporting/report-text';
 import {
+  becauseOf,
   furtherFigures,
   judgedFigureText,
   limitText,
@@ -17,13 +18,13 @@ import { finalPass } from './final-pass';
 /** The limit rule of the final result over the whole width, the verdict in words below it. */
 export function FinalResult({ block }: { block: TestBlock }) {
   const pass = finalPass(block);
-  // A function check has no limit that a rule could show; its verdict stands below its items.
-  if (!pass?.judgement || pass.resultMm === null || block.check) return null;
+  if (!pass?.judgement || pass.resultMm === null) return null;
   const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
   // A figure without a sign never has words for its direction, and is never below zero.
   const signed = block.passes.some((each) => each.judgement?.signed);
   const words = REPORT_WORDS.block;
   const beside = [
+    becauseOf(pass.judgement),
     pass.resultWords ?? '',
     marginUm === null ? '' : `${judgedFigureText(marginUm, pass)} ${words.margin}`,
     local
@@ -50,7 +51,10 @@ export function FinalResult({ block }: { block: TestBlock }) {
         <VerdictMark verdict={verdict} words={`${sentence(pass.kindWords)} ${passResultText(pass)}`} />
         <span className="text-ink2">{beside.join(' · ')}</span>
       </p>
-      <FurtherLimits limits={furtherFigures(pass.judgement)} name={`${block.title}, ${words.further}`} />
+      <FurtherLimits
+        limits={furtherFigures(pass.judgement, { text: pass.resultMm, unit: pass.resultUnit })}
+        name={`${block.title}, ${words.further}`}
+      />
     </div>
   );
 }

@@ -21,7 +21,8 @@ export function SummaryTable({ rows, caption, linkOf }: SummaryProps) {
   const words = REPORT_WORDS.summary;
   const notes = [
     rows.some((row) => row.linked) ? words.linkedNote : '',
-    rows.some(wasNotFine) ? words.asFoundOut : '',
+    rows.some((row) => wasNotFine(row) && row.unit !== 'items') ? words.asFoundOut : '',
+    rows.some((row) => wasNotFine(row) && row.unit === 'items') ? words.asFoundOutOfOrder : '',
   ].filter((note) => note !== '');
   return (
     <>

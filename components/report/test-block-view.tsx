@@ -24,7 +24,13 @@ export function TestBlockView({ block, photosAt }: { block: TestBlock; photosAt:
           </p>
         }
       >
-        {block.leftOut ? <LeftOut leftOut={block.leftOut} /> : <Measured block={block} />}
+        {block.leftOut ? (
+          <LeftOut leftOut={block.leftOut} />
+        ) : block.check ? (
+          <PassReadings passes={block.passes} of={block.title} />
+        ) : (
+          <Measured block={block} />
+        )}
         <TestPhotos photos={block.photos} at={photosAt} />
         {block.remark && (
           <p className="mt-3">

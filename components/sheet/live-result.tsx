@@ -64,7 +64,12 @@ export function LiveResult(props: { rules: SheetRules; signed: boolean; shownIn:
           {withUnit(toleranceShown(local.toleranceUm, unit), unit)}, {VERDICT_WORDS[local.verdict]}
         </p>
       )}
-      {judged && <FurtherLimits limits={furtherFigures(judged.judgement)} name="Further limits" />}
+      {judged && (
+        <FurtherLimits
+          limits={furtherFigures(judged.judgement, { text: judged.displayed.textMm, unit })}
+          name="Further limits"
+        />
+      )}
       {judged?.judgement.toleranceArithmetic && (
         <p className="text-sm text-ink2">
           T, µm: <span className="font-mono">{judged.judgement.toleranceArithmetic}</span>

@@ -1,6 +1,6 @@
 import { decimalsOf } from '@/components/plots/number';
 import type { MarkKind } from '@/components/plots/verdict-ink';
-import { verdictText } from '@/lib/reporting/result-text';
+import { becauseOf, verdictText } from '@/lib/reporting/result-text';
 import { VERDICT_WORDS } from '@/lib/reporting/words';
 import { shownUnit, toleranceShown, withUnit } from '@/lib/sheet/shown-unit';
 import type { SheetOutcome } from '@/lib/sheet/types';
@@ -33,7 +33,7 @@ export function resultWords(outcome: SheetOutcome, unit: ShownIn = 'mm'): Result
   return {
     mark: judgement.verdict,
     verdict: basedOn ? `${verdict}, ${basedOn}` : verdict,
-    beside: [outcome.directionWords, distanceWords(outcome)].filter(Boolean).join(', '),
+    beside: [becauseOf(judgement), outcome.directionWords, distanceWords(outcome)].filter(Boolean).join(', '),
   };
 }
 

@@ -37,7 +37,7 @@ export function passBlock(pass: StoredPass, context: PassContext): PassBlock {
       ? []
       : fields.setUp
           .filter((field) => shown(field) !== '')
-          .map((field) => ({ label: field.label, value: field.unit ? `${shown(field)} ${field.unit}` : shown(field) })),
+          .map((field) => ({ label: setUpLabel(field), value: withFieldUnit(shown(field), field) })),
     tables:
       pass.linkedTo || definition.layout.kind === 'check-list'
         ? []
@@ -63,6 +63,12 @@ export function passBlock(pass: StoredPass, context: PassContext): PassBlock {
     corrections: pass.linkedTo ? [] : corrections(pass, fieldLabels(fields), context),
   };
 }
+
+/** What an empty field would mean is for the person who fills it in. */
+const setUpLabel = ({ label }: Field) => label.replace(/ \(left empty: [^)]*\)/, '');
+
+const withFieldUnit = (text: string, { unit }: Field) =>
+  unit === null ? text : unit === '°' ? `${text}°` : `${text} ${unit}`;
 
 function unitOf(definition: TestDefinition, outcome: JudgedOutcome | null): { resultUnit?: ShownIn } {
   if (definition.layout.kind === 'check-list') return { resultUnit: 'items' };

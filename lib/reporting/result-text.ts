@@ -3,6 +3,7 @@ import type { Judgement, Verdict } from '@/lib/sheet/types';
 import { convert } from '@/lib/units/convert';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
+import { displayRounded } from '@/lib/units/round';
 import type { DecimalText, ShownIn } from '@/standards/types';
 import type { PassBlock, SummaryRow } from './report-model';
 import { CHECK_VERDICT_WORDS, REPORT_WORDS, SHORT_VERDICT_WORDS, VERDICT_WORDS } from './words';
@@ -52,15 +53,42 @@ export interface FurtherFigure {
   words: string;
 }
 
-/** Further figures of the same readings with their own limits, rounded where they were judged, each in the unit of the result. */
-export function furtherFigures(judgement: Judgement | null): FurtherFigure[] {
-  return (judgement?.also ?? []).map(({ label, deviationUm, toleranceUm, verdict, textMm, unit = 'mm' }) => ({
-    label,
-    value: withUnit(formatDecimal(textMm ?? toleranceShown(deviationUm, unit)), unit),
-    limit: withUnit(formatDecimal(toleranceShown(toleranceUm, unit)), unit),
-    verdict,
-    words: verdictText(verdict),
-  }));
+/**
+ * Further figures of the same readings with their own limits, in the unit of the result and as finely as the result; with more digits
+ * where it takes them to show that a limit is passed.
+ * @param shown the result as it is shown, and its unit
+ */
+export function furtherFigures(
+  judgement: Judgement | null,
+  shown: { text: string | null; unit?: ShownIn },
+): FurtherFigure[] {
+  const { unit = 'mm' } = shown;
+  const places = decimalsIn(shown.text ?? '');
+  const resolution = places === 0 ? '1' : `0.${'0'.repeat(places - 1)}1`;
+  return (judgement?.also ?? []).map(({ label, deviationUm, toleranceUm, verdict }) => {
+    const limit = toleranceShown(toleranceUm, unit);
+    const { text } = displayRounded({
+      value: unit === '″' ? convert(deviationUm, 'µm/m', 'arcsec') : toleranceShown(deviationUm, unit),
+      resolution,
+      limit,
+    });
+    return {
+      label,
+      value: withUnit(formatDecimal(text), unit),
+      limit: withUnit(formatDecimal(limit), unit),
+      verdict,
+      words: verdictText(verdict),
+    };
+  });
+}
+
+/** Which other limit decides, where the result itself is within its own: `because of R`; '' otherwise. */
+export function becauseOf(judgement: Judgement): string {
+  const { verdict, marginUm, local, also = [] } = judgement;
+  if (verdict !== 'out-of-tolerance' || marginUm === null || marginUm.startsWith('-')) return '';
+  const labels = also.filter((each) => each.verdict === verdict).map(({ label }) => label);
+  if (local?.verdict === verdict) labels.unshift(`the local limit over ${local.lengthMm} mm`);
+  return labels.length ? `because of ${labels.join(', ')}` : '';
 }
 
 /**

@@ -199,6 +199,7 @@ export const REPORT_WORDS = {
     linkedSign: '=',
     linkedNote: '= : as left is as found; nothing was done.',
     asFoundOut: 'A mark before a figure as found: it was not within tolerance.',
+    asFoundOutOfOrder: 'A mark alone as found: the check was not in order.',
   },
   counts: {
     heading: 'Counts',

@@ -15,7 +15,7 @@ export function checkItems(kit: Kit, pass: PassBlock, widthPt: number): FlowItem
   const hasValue = items.some(({ value }) => value !== null);
   const hasRemark = items.some(({ remark }) => remark !== null);
   const question: Column = { head: words.items, widthPt: 0 };
-  const answer: Column = { head: words.answer, widthPt: 96 };
+  const answer: Column = { head: words.answer, widthPt: 116 };
   const columns = [
     question,
     answer,

@@ -8,7 +8,7 @@ import { TYPE } from '@/templates/report/theme';
 
 /** Further figures of the same readings with limits of their own: what it is, what it came to, what it may be, the verdict. */
 export function furtherLimits(kit: Kit, pass: PassBlock): FlowItem[] {
-  const figures = furtherFigures(pass.judgement);
+  const figures = furtherFigures(pass.judgement, { text: pass.resultMm, unit: pass.resultUnit });
   if (!figures.length) return [];
   const words = REPORT_WORDS.block;
   const columns: Column[] = [

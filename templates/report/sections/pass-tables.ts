@@ -108,7 +108,11 @@ function columnsOf(kit: Kit, readings: ReadingTable): Column[] {
     return {
       head,
       widthPt: naturalWidth(kit.type, { head, style }, cells),
-      align: index ? 'decimal' : 'left',
+      // Names of stations are words: they stand at the left, as the places do.
+      align:
+        index && cells.every((cell) => cell === '' || /\d/.test(cell.charAt(0)) || /^[−+]/.test(cell))
+          ? 'decimal'
+          : 'left',
       gapPt: 2,
       style,
     };

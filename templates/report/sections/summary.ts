@@ -35,13 +35,15 @@ export function summary(kit: Kit, model: ReportModel): FlowItem[] {
   ]);
   const notes = [
     model.summary.some((row) => row.linked) ? words.linkedNote : '',
-    model.summary.some((row) => row.asFoundVerdict && !FINE.includes(row.asFoundVerdict)) ? words.asFoundOut : '',
+    model.summary.some((row) => wasNotFine(row) && row.unit !== 'items') ? words.asFoundOut : '',
+    model.summary.some((row) => wasNotFine(row) && row.unit === 'items') ? words.asFoundOutOfOrder : '',
   ].filter((note) => note !== '');
   const note = notes.length ? [space(5), slabItem(kit.type.paragraph(notes.join(' '), TYPE.small, kit.widthPt))] : [];
   return [...heading(kit, words.heading), table(kit.type, columns, rows), ...note];
 }
 
 const FINE: readonly MarkKind[] = ['within-tolerance', 'for-information'];
+const wasNotFine = ({ asFoundVerdict }: SummaryRow) => asFoundVerdict !== null && !FINE.includes(asFoundVerdict);
 
 /** A figure as found, with the mark before it where it was not within tolerance. */
 function asFoundCell(kit: Kit, row: SummaryRow, column: Column, decimals: number): TableCell {

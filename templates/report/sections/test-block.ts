@@ -1,7 +1,7 @@
 import { limitRule } from '@/components/plots/limit-rule-geometry';
 import type { PassBlock, TestBlock } from '@/lib/reporting/report-model';
 import { longDate, sentence } from '@/lib/reporting/report-text';
-import { judgedFigureText, limitText, passResultText, ruleDeviation } from '@/lib/reporting/result-text';
+import { becauseOf, judgedFigureText, limitText, passResultText, ruleDeviation } from '@/lib/reporting/result-text';
 import { REPORT_WORDS, VERDICT_WORDS } from '@/lib/reporting/words';
 import { drawingSlab } from '@/templates/report/flow/drawing-slab';
 import {
@@ -36,7 +36,7 @@ export function testBlock(kit: Kit, block: TestBlock): FlowItem[] {
   const head = heading(kit, `${block.order} · ${block.title}`, { after: componentOf(block), right: block.reference });
   const items: FlowItem[] = [space(2)];
   if (block.leftOut) items.push(...leftOut(kit, block.leftOut));
-  else items.push(...measured(kit, block));
+  else items.push(...(block.check ? checked(kit, block) : measured(kit, block)));
   items.push(...testPhotos(kit, block.photos));
   if (block.remark) items.push(space(4), flowingText(kit, `${REPORT_WORDS.block.remark}: ${block.remark}`));
   const [gap, titled] = head as [FlowItem, FlowItem];
@@ -50,12 +50,17 @@ function componentOf({ title, component, componentWords }: TestBlock): string {
   return ids.length && ids.every((id) => title.includes(id)) ? '' : componentWords;
 }
 
+/** A function check: its items, over the whole width; nothing is set up, drawn or held against a limit. */
+function checked(kit: Kit, block: TestBlock): FlowItem[] {
+  return passReadings(kit, block.passes);
+}
+
 function measured(kit: Kit, block: TestBlock): FlowItem[] {
   const side: Kit = { ...kit, widthPt: SIDE_PT };
   const main: Kit = { ...kit, widthPt: kit.widthPt - SIDE_PT - GUTTER_PT };
   const plots = plotsSlab(main, block);
   const readings = passReadings(main, block.passes);
-  const narrow = !block.check && heightOf(readings) <= READINGS_BESIDE_PT;
+  const narrow = heightOf(readings) <= READINGS_BESIDE_PT;
   const pictured = (left: readonly Slab[], right: readonly Slab[]) =>
     beside([
       { slab: stack(left, 4), x: 0 },
@@ -92,8 +97,6 @@ function finalPass(block: TestBlock): PassBlock | null {
 function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
   const pass = finalPass(block);
   if (!pass?.judgement || pass.resultMm === null) return [];
-  // A function check has no limit that a rule could show; its verdict stands below its items.
-  if (block.check) return [];
   const { verdict, toleranceUm, limitUm, marginUm, direction, local } = pass.judgement;
   // A figure without a sign never has words for its direction, and is never below zero.
   const signed = block.passes.some((each) => each.judgement?.signed);
@@ -111,6 +114,7 @@ function finalResult(kit: Kit, block: TestBlock): FlowItem[] {
   const words = REPORT_WORDS.block;
   const parts = [
     `${sentence(pass.kindWords)} ${passResultText(pass)}`,
+    becauseOf(pass.judgement),
     pass.resultWords ?? '',
     marginUm === null ? '' : `${judgedFigureText(marginUm, pass)} ${words.margin}`,
     local
