@@ -1,4 +1,4 @@
-import type { CellPointer, Field } from '@/lib/sheet/types';
+import type { CellPointer, Field, SheetOutcome } from '@/lib/sheet/types';
 import type { Evaluated } from './sheet-session';
 
 export const notReadYet = 'Not read yet.';
@@ -17,8 +17,15 @@ export function problemAt(
   if (problem?.severity === 'cannot-read') return `!${problem.message}`;
   if (problem && !options.confirmed.has(pointer)) return `?${problem.message}`;
   const missing = options.checked && options.text.trim() === '' && fields.order.includes(pointer);
-  if (!missing || outcome.filled >= outcome.total) return '';
+  if (!missing || outcome.filled >= outcome.total || isAnsweredWithout(outcome, pointer)) return '';
   return `-${isAnswer(pointer) ? notAnsweredYet : notReadYet}`;
+}
+
+/** The figure of an item that needs none: answered “no”, or not fitted. */
+function isAnsweredWithout(outcome: SheetOutcome, pointer: CellPointer): boolean {
+  const id = pointer.match(/^\/items\/([^/]+)\/value$/)?.[1];
+  const result = 'result' in outcome ? outcome.result : null;
+  return result?.method === 'function-check' && result.items.some((item) => item.id === id);
 }
 
 /** A field that holds the answer to an item of a function check. */

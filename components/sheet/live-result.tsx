@@ -30,16 +30,16 @@ export function LivePlot({ heightPx }: { heightPx: number }) {
 }
 
 /** Limit rule, verdict in words and the distance to the limit. */
-export function LiveResult(props: { rules: SheetRules; signed: boolean; shownIn: ShownIn }) {
-  const { rules, signed, shownIn } = props;
+export function LiveResult(props: { rules: SheetRules; signed: boolean; shownIn: ShownIn; items?: number }) {
+  const { rules, signed, shownIn, items } = props;
   const { session, passId } = useOpenPass();
   const outcome = useEvaluated(session, passId, (evaluated) => evaluated.outcome);
   const judged = isJudged(outcome) ? outcome : null;
-  const words = resultWords(outcome, shownIn);
+  const words = resultWords(outcome, items);
   const local = judged?.judgement.local;
   const unit = judged ? shownUnit(judged.displayed) : shownIn;
   const { box, widthPx } = useWidth(600);
-  const check = shownIn === 'items';
+  const check = items !== undefined;
   return (
     <div ref={box} className="grid gap-1">
       {!check && (

@@ -60,7 +60,8 @@ export function PassPanel(props: {
         <LiveResult
           rules={data.rules}
           signed={isSigned(data.definition)}
-          shownIn={layout.kind === 'check-list' ? 'items' : (data.definition.shownIn ?? 'mm')}
+          shownIn={data.definition.shownIn ?? 'mm'}
+          items={layout.kind === 'check-list' ? layout.items.length : undefined}
         />
       </div>
     </div>

@@ -6,7 +6,6 @@ import { shownUnit, toleranceShown, withUnit } from '@/lib/sheet/shown-unit';
 import type { SheetOutcome } from '@/lib/sheet/types';
 import { Dec } from '@/lib/units/decimal';
 import { formatDecimal } from '@/lib/units/format';
-import type { ShownIn } from '@/standards/types';
 
 export type Judged = Extract<SheetOutcome, { state: 'partial' | 'complete' }>;
 
@@ -21,9 +20,9 @@ export interface ResultWords {
   beside: string;
 }
 
-/** @param unit in which the test shows its results; `items`: a function check */
-export function resultWords(outcome: SheetOutcome, unit: ShownIn = 'mm'): ResultWords {
-  if (unit === 'items') return checkWords(outcome);
+/** @param items how many items a function check has; absent: a measured test */
+export function resultWords(outcome: SheetOutcome, items?: number): ResultWords {
+  if (items !== undefined) return checkWords(outcome, items);
   if (outcome.state === 'empty') return { mark: 'not-measured', verdict: 'not measured', beside: 'No reading yet.' };
   if (!isJudged(outcome)) {
     return { mark: 'not-measured', verdict: `${outcome.filled} of ${outcome.total} readings`, beside: outcome.reason };
@@ -38,15 +37,15 @@ export function resultWords(outcome: SheetOutcome, unit: ShownIn = 'mm'): Result
 }
 
 /** `6 of 8 answered, all in order`; `8 of 8 answered, 2 not in order`. */
-function checkWords(outcome: SheetOutcome): ResultWords {
+function checkWords(outcome: SheetOutcome, items: number): ResultWords {
   if (outcome.state === 'empty')
     return { mark: 'not-measured', verdict: verdictText('not-measured', 'items'), beside: 'No item is answered yet.' };
   if (!isJudged(outcome))
-    return { mark: 'not-measured', verdict: answered(outcome.filled, outcome.total), beside: outcome.reason };
+    return { mark: 'not-measured', verdict: verdictText('not-measured', 'items'), beside: outcome.reason };
   const { result, judgement, displayed } = outcome;
-  const done = result.method === 'function-check' ? result.items.length : outcome.filled;
+  const done = result.method === 'function-check' ? result.items.length : 0;
   const order = displayed.textMm === '0' ? 'all in order' : `${displayed.textMm} not in order`;
-  return { mark: judgement.verdict, verdict: `${answered(done, outcome.total)}, ${order}`, beside: '' };
+  return { mark: judgement.verdict, verdict: `${answered(done, items)}, ${order}`, beside: '' };
 }
 
 const answered = (done: number, total: number) => `${done} of ${total} answered`;

@@ -5,7 +5,7 @@ import { LinkButton } from '@/components/ui/button';
 import { DataCell, HeadCell, Row, RowHead, Table, TableHead } from '@/components/ui/table';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import { toleranceShown } from '@/lib/sheet/shown-unit';
-import type { ShownIn } from '@/standards/types';
+import type { ShownIn, TestDefinition } from '@/standards/types';
 import { isJudged, resultWords } from './result-words';
 import { useEvaluated, useOpenPass } from './sheet-context';
 import { passWords, type SheetData, type SheetPass } from './sheet-data';
@@ -56,7 +56,7 @@ export function SheetCheck(props: {
       <Findings findings={missing} ink="border-oxide" />
       {look.length > 0 && <p className="mt-2 font-medium text-brass">To be looked at</p>}
       <Findings findings={look} ink="border-brass" />
-      <PassResults session={session} passes={passes} shownIn={shownIn(data)} />
+      <PassResults session={session} passes={passes} definition={data.definition} />
       {missing.length === 0 && <GoOn data={data} />}
     </section>
   );
@@ -106,11 +106,12 @@ function Findings({ findings, ink }: { findings: SheetFinding[]; ink: string }) 
 }
 
 const isCheck = ({ definition }: SheetData) => definition.layout.kind === 'check-list';
-const shownIn = (data: SheetData): ShownIn => (isCheck(data) ? 'items' : (data.definition.shownIn ?? 'mm'));
 
-function PassResults(props: { session: SheetSession; passes: SheetPass[]; shownIn: ShownIn }) {
-  const { session, passes, shownIn: unit } = props;
-  const check = unit === 'items';
+function PassResults(props: { session: SheetSession; passes: SheetPass[]; definition: TestDefinition }) {
+  const { session, passes, definition } = props;
+  const { layout, shownIn: unit = 'mm' } = definition;
+  const items = layout.kind === 'check-list' ? layout.items.length : undefined;
+  const check = items !== undefined;
   return (
     <div className="mt-4">
       <Table caption="What every set of readings comes to">
@@ -118,12 +119,12 @@ function PassResults(props: { session: SheetSession; passes: SheetPass[]; shownI
           <HeadCell>Set of readings</HeadCell>
           {!check && <HeadCell figure>result, {unit}</HeadCell>}
           {!check && <HeadCell figure>T, {unit}</HeadCell>}
-          <HeadCell figure>{check ? 'answered' : 'readings'}</HeadCell>
+          {!check && <HeadCell figure>readings</HeadCell>}
           <HeadCell>verdict</HeadCell>
         </TableHead>
         <tbody>
           {passes.map((pass) => (
-            <PassResult key={pass.id} session={session} pass={pass} unit={unit} />
+            <PassResult key={pass.id} session={session} pass={pass} unit={unit} items={items} />
           ))}
         </tbody>
       </Table>
@@ -131,11 +132,12 @@ function PassResults(props: { session: SheetSession; passes: SheetPass[]; shownI
   );
 }
 
-function PassResult({ session, pass, unit }: { session: SheetSession; pass: SheetPass; unit: ShownIn }) {
+function PassResult(props: { session: SheetSession; pass: SheetPass; unit: ShownIn; items?: number }) {
+  const { session, pass, unit, items } = props;
   const outcome = useEvaluated(session, pass.linkedTo ?? pass.id, (evaluated) => evaluated.outcome);
   const judged = isJudged(outcome) ? outcome : null;
-  const words = resultWords(outcome, unit);
-  const check = unit === 'items';
+  const words = resultWords(outcome, items);
+  const check = items !== undefined;
   return (
     <Row>
       <RowHead>{pass.linkedTo ? `${passWords(pass)} = as found` : passWords(pass)}</RowHead>
@@ -145,9 +147,11 @@ function PassResult({ session, pass, unit }: { session: SheetSession; pass: Shee
           {judged?.judgement.toleranceUm ? toleranceShown(judged.judgement.toleranceUm, unit) : '–'}
         </DataCell>
       )}
-      <DataCell figure>
-        {outcome.filled} of {outcome.total}
-      </DataCell>
+      {!check && (
+        <DataCell figure>
+          {outcome.filled} of {outcome.total}
+        </DataCell>
+      )}
       <DataCell>
         <VerdictMark verdict={words.mark} words={words.verdict} />
         {words.beside && <span className="block text-sm text-ink2">{words.beside}</span>}
