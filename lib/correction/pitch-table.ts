@@ -74,9 +74,20 @@ function pointsOf({ start, end, interval }: z.output<typeof pitchTableInput>): F
 type Knot = { x: Fraction; mean: Fraction };
 
 function meanAt(knots: readonly Knot[], x: Fraction): Fraction {
-  const above = knots.findIndex((knot) => knot.x.compare(x) >= 0);
+  const above = firstAtOrAbove(knots, x);
   if (above === 0) return knots[0]!.mean;
-  if (above < 0) return knots[knots.length - 1]!.mean;
+  if (above === knots.length) return knots[knots.length - 1]!.mean;
   const [a, b] = [knots[above - 1]!, knots[above]!];
   return a.mean.plus(b.mean.minus(a.mean).times(x.minus(a.x)).dividedBy(b.x.minus(a.x)));
+}
+
+/** Place of the first knot at or above x, by halving; their number where there is none. */
+function firstAtOrAbove(knots: readonly Knot[], x: Fraction): number {
+  let [from, to] = [0, knots.length];
+  while (from < to) {
+    const middle = (from + to) >> 1;
+    if (knots[middle]!.x.compare(x) >= 0) to = middle;
+    else from = middle + 1;
+  }
+  return from;
 }

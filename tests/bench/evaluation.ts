@@ -174,6 +174,14 @@ function longProfiles(): BenchLine[] {
     ['straightness', { method: 'straightness', reference: 'minimum-zone', points }],
     ['flatness', { method: 'flatness', reference: 'minimum-zone', points: surface }],
     ['roundness', { method: 'roundness', points: circle }],
+    [
+      'circular test by true geometry',
+      {
+        method: 'circular',
+        nominalRadius: '100',
+        clockwise: circle.map(({ angle, reading }) => ({ angle, radius: reading })),
+      },
+    ],
   ];
   return inputs.map(([name, input]) => {
     const time = timeOf(() => evaluateUnknown(input));
