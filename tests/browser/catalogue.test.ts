@@ -16,7 +16,7 @@ describe('the composer', () => {
     const { page, faults, context } = await administrator();
     await page.goto('/catalogue/own/new');
     await page.getByRole('button', { name: 'Keep this test' }).click();
-    await expect.poll(() => page.getByText('The title is missing.').isVisible()).toBe(true);
+    await page.getByText('The title is missing.').waitFor();
     await page.getByLabel('Own number').fill('own-21');
     await page.getByLabel('What is measured').selectOption({ label: 'Squareness of two motions, square turned over' });
     await page.getByLabel('Title', { exact: true }).fill('Y to X by our own square');
@@ -27,16 +27,16 @@ describe('the composer', () => {
     await page.getByLabel('Tolerance, µm', tolerance).fill('12');
     await page.getByLabel('Exactly', { exact: true }).fill('our drawing 7, sheet 1');
     await page.getByRole('button', { name: 'Keep this test' }).click();
-    await expect.poll(() => page.getByText('say what a positive figure means').isVisible()).toBe(true);
+    await page.getByText('say what a positive figure means').waitFor();
     await page.getByLabel('A positive figure means').fill('more than 90°');
     await page.getByLabel('A negative figure means').fill('less than 90°');
 
     // The sheet beside it is the one that an inspector will have: it judges what is tried.
     const sheet = page.locator('#try-out');
-    await expect.poll(() => sheet.locator('input[data-role=reading]').count()).toBe(12);
+    await expect.poll(() => sheet.locator('input[data-role=reading]').count(), { timeout: 10_000 }).toBe(12);
     const readings = await sheet.locator('input[data-role=reading]').all();
     for (const [index, reading] of readings.entries()) await reading.fill(String(index % 3));
-    await expect.poll(() => sheet.getByText('within tolerance').first().isVisible()).toBe(true);
+    await sheet.getByText('within tolerance').first().waitFor();
 
     await page.getByRole('button', { name: 'Keep this test' }).click();
     await page.waitForURL('**/catalogue/own/OWN-21');
@@ -45,12 +45,12 @@ describe('the composer', () => {
     await page.getByLabel('Tolerance, µm', tolerance).fill('11');
     await page.getByRole('button', { name: 'Keep as version 2' }).click();
     await page.waitForURL('**/catalogue/own/OWN-21');
-    await expect.poll(() => page.getByText('0.011').first().isVisible()).toBe(true);
+    await page.getByText('0.011').first().waitFor();
     await page.getByRole('link', { name: '1', exact: true }).click();
-    await expect.poll(() => page.getByText('An older version').isVisible()).toBe(true);
+    await page.getByText('An older version').waitFor();
     await page.getByRole('button', { name: 'Withdraw' }).click();
     await page.getByRole('button', { name: 'Withdraw it' }).click();
-    await expect.poll(() => page.getByText('withdrew it on').isVisible()).toBe(true);
+    await page.getByText('withdrew it on').waitFor();
     expect(faults).toEqual([]);
     await context.close();
   });
@@ -68,26 +68,22 @@ describe('the values of a tolerance', () => {
     await page.getByText('Confirm, replace or withdraw').click();
     await page.getByLabel('replaced by our own figure').check();
     await page.getByRole('button', { name: 'Write it down' }).click();
-    await expect.poll(() => page.getByText('Page or clause is missing.').isVisible()).toBe(true);
+    await page.getByText('Page or clause is missing.').waitFor();
     await page.getByLabel('all sizes, µm').fill('26');
     await page.getByLabel('Edition of your copy').fill('2020, copy no. 3');
     await page.getByLabel('Page or clause').fill('p. 40');
     await page.getByRole('button', { name: 'Write it down' }).click();
     await page.getByText('Written down').waitFor();
-    await expect.poll(() => page.getByText('Somebody else has to look it up too.').isVisible()).toBe(true);
+    await page.getByText('Somebody else has to look it up too.').waitFor();
 
     const second = await visitor(browser, 'reviewer@quillmere.example');
     await second.page.goto('/catalogue?show=waiting');
     await second.page.getByRole('rowheader').getByRole('link').first().click();
     await second.page.getByRole('button', { name: /I have looked it up too/ }).click();
-    await expect
-      .poll(() =>
-        second.page
-          .getByText(/replaced by .* and .* on/)
-          .first()
-          .isVisible(),
-      )
-      .toBe(true);
+    await second.page
+      .getByText(/replaced by .* and .* on/)
+      .first()
+      .waitFor();
 
     const table = await (await page.request.get('/api/catalogue/values.csv')).text();
     const confirmed = table.replace(
@@ -96,7 +92,7 @@ describe('the values of a tolerance', () => {
     );
     expect(confirmed).not.toBe(table);
     await page.goto('/catalogue/values');
-    const file = page.getByLabel('The file');
+    const file = page.getByLabel('The file', { exact: true });
     const upload = (text: string) =>
       file.setInputFiles({ name: 'values.csv', mimeType: 'text/csv', buffer: Buffer.from(text) });
     await upload(`${confirmed}x,y\r\n`);
