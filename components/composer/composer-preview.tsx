@@ -23,7 +23,7 @@ export function ComposerPreview({ api, machines }: { api: ComposerForm; machines
       </h2>
       <p className="mb-3 text-sm text-ink2">As the inspector will find it. Try readings; nothing of it is kept.</p>
       {'data' in shown ? (
-        <TryOutSheet key={settled} data={shown.data} />
+        <TryOutSheet key={whatJudges(shown.data)} data={shown.data} />
       ) : (
         <Notice tone="brass" title="Not to be drawn yet">
           <ul>
@@ -35,6 +35,12 @@ export function ComposerPreview({ api, machines }: { api: ComposerForm; machines
       )}
     </section>
   );
+}
+
+/** What is tried stays while only words change; another layout or tolerance begins anew. */
+function whatJudges({ definition, rules, sheet }: SheetData): string {
+  const { layout, method, judge, resolution, positiveMeans, negativeMeans } = definition;
+  return JSON.stringify([layout, method, judge, resolution, positiveMeans, negativeMeans, rules, sheet.component]);
 }
 
 /** Texts that are not written yet do not keep the sheet from being drawn. */
