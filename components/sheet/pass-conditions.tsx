@@ -32,6 +32,8 @@ export function PassConditions(props: {
   const save = (instruments: UsedInstrument[]) =>
     change.mutate({ pass, body: { instruments } }, { onSuccess: () => setPicking(false) });
   const proposed = proposal(data, earlier, measuredOn);
+  if (data.definition.layout.kind === 'check-list' && data.definition.instruments.length === 0)
+    return <TakenBy pass={pass} timeZone={data.timeZone} what="answer" />;
   return (
     <section aria-labelledby="taken-with" className="grid gap-2">
       <h2 id="taken-with" className="font-semibold">
@@ -85,11 +87,7 @@ export function PassConditions(props: {
         </div>
       )}
       <Temperature data={data} pass={pass} readOnly={readOnly} again={again} />
-      <p className="text-sm text-ink2">
-        {pass.takenAt
-          ? `First reading ${formatTime(new Date(pass.takenAt), data.timeZone)}${pass.takenBy ? `, ${pass.takenBy}` : ''}`
-          : 'The first reading notes time and name.'}
-      </p>
+      <TakenBy pass={pass} timeZone={data.timeZone} what="reading" />
       {picking && (
         <InstrumentPicker
           instruments={data.instruments}
@@ -104,6 +102,16 @@ export function PassConditions(props: {
         />
       )}
     </section>
+  );
+}
+
+function TakenBy({ pass, timeZone, what }: { pass: SheetPass; timeZone: string; what: 'reading' | 'answer' }) {
+  return (
+    <p className="text-sm text-ink2">
+      {pass.takenAt
+        ? `First ${what} ${formatTime(new Date(pass.takenAt), timeZone)}${pass.takenBy ? `, ${pass.takenBy}` : ''}`
+        : `The first ${what} notes time and name.`}
+    </p>
   );
 }
 

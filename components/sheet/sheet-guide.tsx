@@ -2,7 +2,10 @@
 
 import Link from 'next/link';
 import { SetUpSketch } from '@/components/sketches/set-up-sketch';
+import { isSettled } from '@/lib/planning/is-settled';
 import { provenanceWords } from '@/lib/reporting/record-words';
+import { sentence } from '@/lib/reporting/report-text';
+import { toleranceSource } from '@/lib/reporting/tolerance-source';
 import type { SheetData } from './sheet-data';
 import { toleranceWords } from './tolerance-words';
 
@@ -41,6 +44,7 @@ export function SheetHead({ data }: { data: SheetData }) {
 export function SheetBackground({ data }: { data: SheetData }) {
   const { definition, rules, codeTitle } = data;
   const { tolerance } = rules;
+  const check = definition.layout.kind === 'check-list';
   return (
     <div className="grid gap-3">
       <details className="border-y border-line">
@@ -48,7 +52,7 @@ export function SheetBackground({ data }: { data: SheetData }) {
           <span className="mr-2" aria-hidden="true">
             ▸
           </span>
-          How it is measured, {definition.procedure.length} steps
+          {check ? 'How it is checked' : 'How it is measured'}, {definition.procedure.length} steps
         </summary>
         <ol className="mb-3 grid list-decimal gap-1.5 pl-6 text-[15px] leading-snug marker:text-ink2">
           {definition.procedure.map((step) => (
@@ -58,15 +62,15 @@ export function SheetBackground({ data }: { data: SheetData }) {
       </details>
       <section aria-labelledby="tolerance" className="text-[15px] leading-snug text-ink2">
         <h2 id="tolerance" className="text-base font-semibold text-ink">
-          {toleranceWords(tolerance, rules.direction)}
+          {toleranceWords(tolerance, rules.direction, check ? 'items' : definition.shownIn)}
         </h2>
         {tolerance && (
-          <p>
-            {tolerance.foundBy} ·{' '}
-            <span className={tolerance.provenance.kind === 'from-memory' ? 'font-medium text-brass' : ''}>
-              {provenanceWords[tolerance.provenance.kind]}
-            </span>
-            : {tolerance.provenance.text}
+          <p
+            className={
+              tolerance.provenance.kind === 'from-memory' && !isSettled(tolerance) ? 'font-medium text-brass' : ''
+            }
+          >
+            {sentence(toleranceSource(tolerance, definition.code))}
           </p>
         )}
         <p className="mt-1.5">Judged: {definition.judgedFigure}.</p>

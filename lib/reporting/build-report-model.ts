@@ -12,6 +12,7 @@ import type { CellChangeText } from './corrected-readings';
 import { countChecks, countVerdicts } from './count-verdicts';
 import { formatDay, formatTime } from './format-time';
 import {
+  checkCountWords,
   conditionLabels,
   criterionWords,
   headlineWords,
@@ -95,7 +96,7 @@ export function buildReportModel(input: ReportInput): ReportModel {
     },
     conditions: conditions(stored, organisation.timeZone),
     instruments: usedInstruments(stored, organisation.timeZone),
-    headline: headlineWords(counts.asLeft, outRemarked),
+    headline: measured.length === 0 && checks ? checkCountWords(checks) : headlineWords(counts.asLeft, outRemarked),
     counts,
     ...(checks ? { checks } : {}),
     toleranceSources: countToleranceSources(

@@ -21,7 +21,7 @@ const states = { accept: 'signed', 'accept-with-remarks': 'signed-with-remarks',
 export function withSignature(model: ReportModel, signature: CustomerSignature): ReportModel {
   const remarkNo = (order: number) => signature.remarks.find((remark) => remark.sheetOrder === order)?.no ?? null;
   const accepted = model.summary.filter(
-    (row) => row.asLeftVerdict === 'out-of-tolerance' && remarkNo(row.order) !== null,
+    (row) => row.unit !== 'items' && row.asLeftVerdict === 'out-of-tolerance' && remarkNo(row.order) !== null,
   ).length;
   return {
     ...model,

@@ -166,3 +166,25 @@ describe('limit rule', () => {
     );
   });
 });
+
+describe('limit rule of angles', () => {
+  const texts = (change: Partial<LimitRuleInput>) => words(limitRule(input(change)).items).map(({ text }) => text);
+
+  it('writes its limit in the unit of the result', () => {
+    expect(texts({ toleranceUm: '60', deviationUm: '18', shown: '0.018', unit: 'mm/m' })).toContain('T 0.060');
+    // Five seconds of arc are kept as µm/m to 30 digits.
+    const seconds = { toleranceUm: '24.2406840554768022', deviationUm: '12.12', shown: '2.5', unit: '″' as const };
+    expect(texts(seconds)).toContain('T 5.0');
+    expect(limitRule(input(seconds)).description).toContain('Deviation 2.5″, tolerance 5″');
+    expect(texts({ ...seconds, signed: true })).toEqual(expect.arrayContaining(['T +5.0', 'T −5.0']));
+  });
+
+  it('stands where half the limit is, whatever the unit', () => {
+    const mm = scribeX({ toleranceUm: '10', deviationUm: '5' });
+    expect(scribeX({ toleranceUm: '24.2406840554768022', deviationUm: '12.1203420277384011', unit: '″' })).toBe(mm);
+  });
+
+  it('says mm where no other unit is named', () => {
+    expect(limitRule(input({})).description).toContain('Deviation 0.0042 mm, tolerance 15 µm');
+  });
+});

@@ -3,6 +3,7 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { ReportPage } from '@/components/report/report-page';
 import { checkFindings } from '@/lib/reporting/check-findings';
 import type { ReportModel } from '@/lib/reporting/report-model';
+import { withSignature } from '@/lib/reporting/with-signature';
 import { type Fonts, loadFonts } from '@/templates/report/fonts';
 import { renderReportPdf } from '@/templates/report/render';
 import { reportPages } from '@/templates/report/report-pages';
@@ -144,6 +145,32 @@ describe('function checks in the report', () => {
     const said = words(only).replace(/Counts .*? Function checks/, '');
     expect(said).toContain('not in order');
     expect(said).not.toMatch(/(within|out of) tolerance/);
+  });
+
+  it('are the headline of a job that measures nothing', () => {
+    const model = reportOf(storedJob([storedSheet(functionCheck(), 1, inOrder)]));
+    expect(model.headline).toBe('Function checks: 1 of 1 in order.');
+    expect(model.counts.asLeft.planned).toBe(0);
+  });
+
+  it('are not counted as accepted out of tolerance when the customer remarks on them', () => {
+    const model = reportOf(
+      storedJob([storedSheet(functionCheck(), 1, notInOrder), storedSheet(oneOfEachLayout()[0]!, 2)]),
+    );
+    const remark = { no: 1, sheetOrder: 1, text: 'The lamp comes next week.', owner: null, due: null, closed: null };
+    const signed = withSignature(model, {
+      ...{ outcome: 'accept-with-remarks', name: 'C. Vale', functionTitle: null, company: null, reason: null },
+      ...{
+        signedAt: '2026-03-12T11:30:00Z',
+        typed: 'C. Vale',
+        strokes: null,
+        evidence: 'on the tablet',
+        remarks: [remark],
+      },
+    });
+    expect(signed.headline).toBe(model.headline);
+    expect(signed.summary[0]!.remarkNo).toBe(1);
+    expect(words(signed)).toContain('not in order, remark 1');
   });
 
   it('stop the report while an item is not answered, and name what is not in order', () => {
