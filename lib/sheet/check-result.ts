@@ -12,6 +12,7 @@ export interface CheckResult {
     answer: 'yes' | 'no' | 'not-fitted';
     /** The figure beside the answer, where the item has one and it was written. */
     value: DecimalText | null;
+    /** null: no figure, or one without limits. */
     withinLimits: boolean | null;
     /** null: not fitted. */
     inOrder: boolean | null;

@@ -1,6 +1,6 @@
 import type { MakeUp } from '@/lib/schemas/make-up';
 import type { BoundComponent, CellDefault, TestDefinition } from '@/standards/types';
-import { cell, circleCells, foundCells, gridCells, listed, stationCells, targetCells } from './default-rows';
+import { cell, circleCells, foundCells, gridCells, listed, stationCells, stepCells, targetCells } from './default-rows';
 
 type SetUp = Record<string, CellDefault>;
 
@@ -47,7 +47,7 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
     case 'two-collars':
       return { '/distance': cell(within(['0', layout.distanceMm], travel(component.axis)).at(-1)!, 'mm') };
     case 'angle-steps':
-      return { '/stepLength': cell(layout.stepLengthMm, 'mm') };
+      return stepCells(layout, travel(component.axis));
     case 'two-runs':
       return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
     case 'angular-runs':

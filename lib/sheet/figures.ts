@@ -81,7 +81,7 @@ function figuresOf(result: MeasuredResult, judgement: Judgement, input: unknown)
       return [{ label: 'slope of the plane', value: `x ${slope(result.b)}, y ${slope(result.c)}` }];
     case 'angular-deviation':
       return result.hysteresis === undefined
-        ? []
+        ? [{ label: 'largest less smallest', value: slope(result.deviation) }]
         : [
             {
               label: 'largest difference out and back',

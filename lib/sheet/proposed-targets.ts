@@ -13,12 +13,22 @@ export function proposedTargets(travelMm: string, seed: string): string[] {
   const room = Math.max(step, Math.floor((travel * 0.02) / step) * step);
   const pitch = (travel - 2 * room) / (count - 1);
   let state = [...seed].reduce((sum, sign) => (sum * 31 + sign.charCodeAt(0)) % 997, 7);
+  const offsets = new Set<number>();
   return Array.from({ length: count }, (_, i) => {
+    const base = room + i * pitch;
+    const least = i === 0 ? 0 : -0.3 * pitch;
+    const most = i === count - 1 ? 0 : 0.3 * pitch;
+    // The end targets move inward only; the figure that is proposed must itself keep within 0.3·p.
+    const [first, last] = [Math.ceil((base + least) / step), Math.floor((base + most) / step)];
     state = (state * 57 + 29) % 997;
-    const share = state / 997 - 0.5;
-    // The end targets move inward only.
-    const inward = i === 0 ? Math.abs(share) : i === count - 1 ? -Math.abs(share) : share;
-    const place = room + i * pitch + inward * 0.6 * pitch;
-    return (Math.round(place / step) * step).toFixed(step < 1 ? 1 : 0);
+    const wanted = first + Math.floor((state / 997) * (last - first + 1));
+    const choices = Array.from(
+      { length: last - first + 1 },
+      (_, k) => first + ((wanted - first + k) % (last - first + 1)),
+    );
+    const offset = (place: number) => Math.round((place * step - base) * 1000);
+    const place = choices.find((choice) => !offsets.has(offset(choice))) ?? wanted;
+    offsets.add(offset(place));
+    return (place * step).toFixed(step < 1 ? 1 : 0);
   });
 }

@@ -6,7 +6,7 @@ import type { SheetResult } from './check-result';
 /**
  * A sheet's fields are addressed by the JSON pointer of the place that they fill in the evaluation's input
  * (`/readings/180/3`). The same pointer names the field on the screen, in the operation log, in the database and in the report.
- * One exception: `/form` of a tool hole's sheet says which of its forms was taken; it goes into no input. A row that is left out
+ * Two exceptions go into no input: `/form` of a tool hole's sheet says which of its forms was taken, `/steps` how many steps a travel holds. A row that is left out
  * (gap, incomplete) closes up in the input, so rows after it stand one place earlier there.
  */
 export type CellPointer = string;

@@ -1,9 +1,29 @@
 import type { TestDefinition } from '../types';
 import { workingSteps } from '../working-order';
+import { castingHeight, castingInYz, castingInZx, holderParallel, stationHeight } from './castings-and-gangs';
+import { changerPosition, crossDrill, swivelPositions } from './changers-and-swivels';
+import { bushCoaxiality, bushRunOut, strokeInYz, strokeInZx } from './guide-bush';
+import { levelAcross, levelAlong, mandrelTrueness, softFoot } from './level-and-mandrel';
+import { crossReference, longitudinalReference, transferPosition, verticalReference } from './reference-points';
 import { code, edition, source } from './source';
 import { lostMotion } from './tolerances';
 
 export const definitions: TestDefinition[] = [
+  softFoot,
+  levelAlong,
+  levelAcross,
+  mandrelTrueness,
+  castingInZx,
+  castingInYz,
+  castingHeight,
+  stationHeight,
+  holderParallel,
+  bushCoaxiality,
+  bushRunOut,
+  strokeInZx,
+  strokeInYz,
+  swivelPositions,
+  crossDrill,
   {
     id: 'PO-B',
     code,
@@ -52,4 +72,9 @@ export const definitions: TestDefinition[] = [
     minutes: 20,
     source,
   },
+  crossReference,
+  longitudinalReference,
+  verticalReference,
+  transferPosition,
+  changerPosition,
 ];

@@ -2,7 +2,8 @@ import type { EvaluationResult } from '@/lib/evaluation';
 import type { Cells, PlotSeries, SheetFields } from '@/lib/sheet/types';
 import { Fraction } from '@/lib/units/fraction';
 import type { Assembled, LayoutEngine, LayoutOf, SheetValues } from './layout-engine';
-import { isFilled, readingField, setUpField } from './parts';
+import { countField, isFilled, readingField, setUpField } from './parts';
+import { wholeCount } from './whole-count';
 
 type AngleSteps = LayoutOf<'angle-steps'>;
 
@@ -11,18 +12,25 @@ const out = (step: number) => `/angles/${step}`;
 const back = (step: number) => `/returnAngles/${step}`;
 const indices = (length: number) => Array.from({ length }, (_, step) => step);
 
-/** As many steps as the definition names, and one more than are filled. */
-function stepCount(layout: AngleSteps, filled: (pointer: string) => boolean): number {
+/** Steps that the travel holds, where a person wrote their number; goes into no input. */
+const wantedSteps = (layout: AngleSteps, text: string | undefined): number =>
+  wholeCount(text, { least: 2, most: MAX_STEPS }) ?? layout.steps;
+
+/** As many steps as are wanted, and one more than are filled. */
+function stepCount(wanted: number, filled: (pointer: string) => boolean): number {
   const last = indices(MAX_STEPS).findLast((step) => filled(out(step)) || filled(back(step))) ?? -1;
-  return Math.min(Math.max(layout.steps, last + 2), MAX_STEPS);
+  return Math.min(Math.max(wanted, last + 2), MAX_STEPS);
 }
 
 function fields(layout: AngleSteps, cells: Cells): SheetFields {
-  const steps = indices(stepCount(layout, (pointer) => isFilled(cells, pointer)));
-  const taken = layout.steps;
-  const expected = steps.filter((step) => step < taken || isFilled(cells, out(step)));
+  const wanted = wantedSteps(layout, cells['/steps']?.text);
+  const steps = indices(stepCount(wanted, (pointer) => isFilled(cells, pointer)));
+  const expected = steps.filter((step) => step < wanted || isFilled(cells, out(step)));
   return {
-    setUp: [setUpField('/stepLength', 'step, the same as the foot of the instrument', 'mm')],
+    setUp: [
+      setUpField('/stepLength', 'step, the same as the foot of the instrument', 'mm'),
+      countField('/steps', `number of steps (left empty: ${layout.steps})`),
+    ],
     tables: [
       {
         title: null,
@@ -51,12 +59,16 @@ function readSteps(layout: AngleSteps, values: SheetValues) {
   };
   const [taken, returned] = [upTo(out), layout.returnRun ? upTo(back) : 0];
   const any = indices(MAX_STEPS).filter((step) => values.has(out(step)) || values.has(back(step))).length;
-  return { taken, withReturn: returned > 0 && returned >= taken, wanted: Math.max(any, layout.steps) };
+  const wanted = Math.max(any, wantedSteps(layout, values.get('/steps')));
+  return { taken, withReturn: returned > 0 && returned >= taken, wanted };
 }
 
 function assemble(layout: AngleSteps, values: SheetValues): Assembled {
   const stepLength = values.get('/stepLength');
   if (stepLength === undefined) return { input: null, reason: 'The length of a step is needed.' };
+  const count = values.get('/steps');
+  if (count !== undefined && wholeCount(count, { least: 2, most: MAX_STEPS }) === null)
+    return { input: null, reason: `The number of steps is a whole number from 2 to ${MAX_STEPS}.` };
   const { taken, withReturn, wanted } = readSteps(layout, values);
   if (taken < 2)
     return { input: null, reason: `Two steps one after another are needed from the first on; ${taken} so far.` };

@@ -18,7 +18,7 @@ const answers = [
   { value: 'not-fitted', label: 'not fitted' },
 ];
 
-function fields(layout: CheckList): SheetFields {
+function fields(layout: CheckList, cells: Cells): SheetFields {
   const withValues = layout.items.some(({ value }) => value);
   return {
     setUp: [],
@@ -40,7 +40,9 @@ function fields(layout: CheckList): SheetFields {
         })),
       },
     ],
-    order: layout.items.flatMap((item) => (hasLimits(item) ? [answerAt(item), valueAt(item)] : [answerAt(item)])),
+    order: layout.items.flatMap((item) =>
+      asksFigure(item, cells) ? [answerAt(item), valueAt(item)] : [answerAt(item)],
+    ),
   };
 }
 
@@ -69,7 +71,7 @@ export function checkResult(layout: CheckList, values: SheetValues): CheckResult
     const value = figureOf(item, values);
     // A figure that has limits is part of the answer.
     if (answer === 'yes' && value === null && hasLimits(item)) return [];
-    const withinLimits = value === null ? null : within(value, item.value!);
+    const withinLimits = value === null || !hasLimits(item) ? null : within(value, item.value!);
     const inOrder = answer === 'not-fitted' ? null : answer === 'yes' && withinLimits !== false;
     return [{ id: item.id, answer, value, withinLimits, inOrder }];
   });
@@ -82,6 +84,10 @@ export function checkResult(layout: CheckList, values: SheetValues): CheckResult
     notFitted: items.filter(({ answer }) => answer === 'not-fitted').length,
   };
 }
+
+/** What is not fitted, or not in order without it, needs no figure. */
+const asksFigure = (item: CheckItem, cells: Cells): boolean =>
+  hasLimits(item) && !['no', 'not-fitted'].includes(cells[answerAt(item)]?.text.trim() ?? '');
 
 const hasLimits = ({ value }: CheckItem) => value?.lower !== undefined || value?.upper !== undefined;
 

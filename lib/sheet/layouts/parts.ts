@@ -13,6 +13,11 @@ export function setUpField(pointer: string, label: string, unit: Unit, optional 
   return { pointer, role: 'set-up', unit, label, ...(optional ? { optional } : {}) };
 }
 
+/** A count that is no measured figure: it has no unit and goes into no input. */
+export function countField(pointer: string, label: string): Field {
+  return { pointer, role: 'set-up', unit: null, label, optional: true };
+}
+
 export function choiceField(pointer: string, label: string, options: { value: string; label: string }[]): Field {
   return { pointer, role: 'choice', unit: null, label, options };
 }

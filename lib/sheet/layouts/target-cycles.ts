@@ -113,11 +113,14 @@ function assemble(layout: TargetCycles, values: SheetValues, { definition }: Ass
   const targets = used.map((row) => values.get(target(row))!);
   const celsius = values.get('/temperature/celsius');
   const alpha = values.get('/temperature/alpha');
-  if (celsius !== undefined && alpha === undefined) {
-    return { input: null, reason: 'The temperature is written, its expansion is not: both are needed, or neither.' };
-  }
   const zero = values.get('/temperature/zero');
+  if ((celsius === undefined) !== (alpha === undefined) || (zero !== undefined && celsius === undefined)) {
+    const reason = 'The temperature of the scale and its expansion belong together: both are needed, or neither.';
+    return { input: null, reason };
+  }
   const corrected = layout.quantity === 'linear' && celsius !== undefined;
+  const judge = judgedOf(definition.judge, cycles, backward > 0);
+  if (judge === null) return { input: null, reason: `${definition.judge} needs readings in the − direction too.` };
   return {
     input: {
       method: 'positioning',
@@ -125,7 +128,7 @@ function assemble(layout: TargetCycles, values: SheetValues, { definition }: Ass
       targets,
       forward: list('forward'),
       ...(backward > 0 ? { backward: list('backward') } : {}),
-      ...judged(definition.judge, cycles, backward > 0),
+      ...(judge === undefined ? {} : { judge }),
       ...(corrected ? { temperature: { celsius, alpha, ...(zero === undefined ? {} : { zero }) } } : {}),
     },
     basedOn:
@@ -137,11 +140,15 @@ function assemble(layout: TargetCycles, values: SheetValues, { definition }: Ass
   };
 }
 
-/** The figure that is judged, as far as the runs give it: one run knows no A and no R, one direction only those with an arrow. */
-function judged(judge: string | undefined, cycles: number, both: boolean): { judge?: string } {
-  if (judge === undefined) return {};
-  const wanted = cycles === 1 && /^[AR]/.test(judge) ? judge.replace(/^[AR]/, 'E') : judge;
-  return { judge: both || wanted.endsWith('forward') ? wanted : `${wanted.charAt(0)}forward` };
+/**
+ * The figure that is judged, as far as the runs give it: one run knows no A and no R, one direction only those of that direction.
+ * @returns null where the other direction is needed
+ */
+function judgedOf(judge: string | undefined, cycles: number, both: boolean): string | null | undefined {
+  if (judge === undefined) return undefined;
+  const wanted = cycles === 1 ? judge.replace(/^[AR]/, 'E') : judge;
+  if (both || wanted.endsWith('forward')) return wanted;
+  return ['A', 'E', 'R'].includes(wanted) ? `${wanted}forward` : null;
 }
 
 function plot(layout: TargetCycles, values: SheetValues, result: EvaluationResult | null): PlotSeries | null {

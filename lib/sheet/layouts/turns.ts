@@ -61,6 +61,16 @@ function assemble(layout: Turns, values: SheetValues, options: AssembleOptions):
     const present = angles.filter((a) => values.has(at(k, a)));
     return { k, angles: present.map((a) => layout.anglesDeg[a]!), readings: present.map((a) => values.get(at(k, a))!) };
   });
+  // Two places of a turn have no first harmonic: the angles say nothing to the method then.
+  if (needed.length < 3) {
+    const plain = insertions.map(({ readings }) => ({ readings }));
+    return {
+      input: { method: 'run-out', ...judged, insertions: plain },
+      basedOn: counted(complete.length, layout.insertions, `${layout.insertionLabel}s`),
+      lengthMm: null,
+      notes: [],
+    };
+  }
   const whole = insertions.every(({ readings }) => readings.length === angles.length);
   const closingMissing = whole ? null : 'without the closing reading';
   return {
