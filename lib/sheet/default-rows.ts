@@ -31,7 +31,7 @@ export function gridCells(layout: LayoutOf<'grid'>): SetUp {
 /** The foot keeps its length; a travel that does not hold all steps gets fewer, two at least. */
 export function stepCells(layout: LayoutOf<'angle-steps'>, travelMm: string | null): SetUp {
   const held = travelMm === null ? layout.steps : Math.floor(Number(travelMm) / Number(layout.stepLengthMm));
-  const fewer = held < layout.steps ? { '/steps': cell(String(Math.max(held, 2))) } : {};
+  const fewer: SetUp = held < layout.steps ? { '/steps': cell(String(Math.max(held, 2))) } : {};
   return { '/stepLength': cell(layout.stepLengthMm, 'mm'), ...fewer };
 }
 

@@ -3,6 +3,7 @@ import { convert } from '@/lib/units/convert';
 import { placesToText, splitDecimal } from '@/lib/units/fraction';
 import { displayRounded } from '@/lib/units/round';
 import type { DecimalText, TestDefinition } from '@/standards/types';
+import { atLimit } from './at-limit';
 import type { ScaledTolerance } from './scale-tolerance';
 import type { DisplayedResult, FurtherJudgement, Judgement, SheetRules, Verdict } from './types';
 
@@ -51,7 +52,7 @@ function verdictOn(rules: SheetRules, deviation: DecimalText, signed: boolean, t
   if (rules.decisionRule === 'guarded' && u === undefined)
     return { verdict: 'undecided' as const, limit: null, margin: null };
   return judge({
-    deviation,
+    deviation: atLimit(deviation, tolerance),
     signed,
     tolerance,
     direction: signed ? rules.direction : 'either',
@@ -82,7 +83,9 @@ export function displayResult(
 ): DisplayedResult {
   const { valueUm, byForm } = definition.resolution;
   const bounds = boundsOf(result.signed, judgement);
-  return displayFigure(definition, result.deviation, (form && byForm?.[form]) || valueUm, bounds);
+  const { toleranceUm } = judgement;
+  const figure = toleranceUm === null ? result.deviation : atLimit(result.deviation, toleranceUm);
+  return displayFigure(definition, figure, (form && byForm?.[form]) || valueUm, bounds);
 }
 
 interface Bounds {
