@@ -64,7 +64,9 @@ function WideTable({ rows, caption, linkOf }: SummaryProps) {
             <DataCell figure className="whitespace-nowrap">
               {asLeftWords(row)}
             </DataCell>
-            <DataCell figure>{summaryTolerance(row)}</DataCell>
+            <DataCell figure className="whitespace-nowrap">
+              {summaryTolerance(row)}
+            </DataCell>
             <DataCell className={row.leftOut ? 'min-w-40 align-top' : 'whitespace-nowrap align-top'}>
               <VerdictMark verdict={finalVerdict(row)} words={verdictWords(row)} className="leading-6" />
             </DataCell>

@@ -217,7 +217,7 @@ export const REPORT_WORDS = {
     photos: 'Photos',
     photo: 'Photo',
     setUp: 'Set-up',
-    result: 'Result',
+    result: 'result',
     judged: 'Judged',
     tolerance: 'Tolerance',
     source: 'Source',
