@@ -1,6 +1,7 @@
 import type { Unit } from '@/lib/units/unit';
 import type { BoundComponent, DependsOn, Direction } from '@/standards/types';
 import data from './worked-job.json';
+import further from './worked-job-further.json';
 
 export interface WorkedPass {
   kind: string;
@@ -34,3 +35,12 @@ export interface WorkedSheet {
 
 /** The sheets of the worked job that belong to the first ten tests, in the order of its plan. */
 export const workedSheets = data.sheets as unknown as WorkedSheet[];
+
+/** A sheet without a limit has neither tolerance nor conformity. */
+export type FurtherSheet = Omit<WorkedSheet, 'tolerance' | 'passes'> & {
+  tolerance: WorkedSheet['tolerance'] | null;
+  passes: (Omit<WorkedPass, 'conformity'> & { conformity: WorkedPass['conformity'] | null })[];
+};
+
+/** The sheets that came later: turret, reference point, positioning, drift. */
+export const furtherSheets = further.sheets as unknown as FurtherSheet[];
