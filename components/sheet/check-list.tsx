@@ -3,6 +3,7 @@
 import { type KeyboardEvent, useCallback, useRef, useSyncExternalStore } from 'react';
 import { limitWords } from '@/lib/reporting/checked-items';
 import { CHECK_ANSWERS } from '@/lib/reporting/words';
+import { longestReading, longestRemark } from '@/lib/schemas/text-lengths';
 import { answerAt, remarkAt, valueAt } from '@/lib/sheet/layouts/check-list';
 import type { CellPointer } from '@/lib/sheet/types';
 import type { CheckItem } from '@/standards/types';
@@ -153,6 +154,7 @@ function PlainField({ pointer, label, figure }: { pointer: CellPointer; label: s
         ref={register}
         type="text"
         autoComplete="off"
+        maxLength={figure ? longestReading : longestRemark}
         aria-label={label}
         aria-describedby={problem ? problemId(passId, pointer) : undefined}
         aria-invalid={problem.startsWith('!') || undefined}

@@ -6,6 +6,7 @@ import { OpenPassContext } from '@/components/sheet/sheet-context';
 import { sheetFindings } from '@/components/sheet/sheet-findings';
 import { SheetSession } from '@/components/sheet/sheet-session';
 import { ApiProblem } from '@/lib/http/api-client';
+import { readingOperation } from '@/lib/schemas/operation';
 import { functionCheck } from '../helpers/every-layout';
 
 const definition = functionCheck();
@@ -100,6 +101,18 @@ describe('entry of a function check', () => {
     expect(session.textOf(passId, '/items/stop/answer')).toBe('no');
     expect(session.undoLast()).toEqual({ passId, pointer: '/items/stop/answer' });
     expect(session.textOf(passId, '/items/stop/answer')).toBe('yes');
+  });
+
+  it('takes a remark of a few sentences, and no reading as long as that', () => {
+    const operation = (cellId: string, text: string) => ({
+      ...{ opId: passId, passId, cellId, baseVersion: 0, text, unit: null, source: 'typed', seq: 1 },
+      deviceTime: '2026-03-10T08:00:00Z',
+    });
+    const remark = 'The tube is broken, a new one is ordered and comes next week. '.repeat(4);
+    expect(readingOperation.safeParse(operation('/items/lamp/remark', remark)).success).toBe(true);
+    expect(readingOperation.safeParse(operation('/items/lamp/answer', remark)).success).toBe(false);
+    expect(readingOperation.safeParse(operation('/readings/0', remark)).success).toBe(false);
+    expect(readingOperation.safeParse(operation('/items/lamp/remark', remark.repeat(2))).success).toBe(false);
   });
 
   it('needs neither an instrument nor a temperature, only every item', () => {
