@@ -1,9 +1,10 @@
 import type { Knex } from 'knex';
 import { insertTemperature, updateConditions } from '@/db/queries/jobs';
 import { listPasses, replacePassInstruments } from '@/db/queries/passes';
-import { listSheets } from '@/db/queries/sheets';
+import { listSheets, type SheetRow, updateSheet } from '@/db/queries/sheets';
 import type { Viewer } from '@/lib/auth/viewer';
 import { definitionOf } from '@/lib/planning/definition-of';
+import type { LeftOutReason } from '@/lib/schemas/job';
 import { intentTexts } from '@/lib/schemas/signature';
 import { handIn } from '@/lib/services/hand-in';
 import { issueReport } from '@/lib/services/issue-report';
@@ -28,7 +29,15 @@ interface WorkedPass {
   readings?: { at: string; text: string; unit: Unit; history?: { text: string; at: string; reason?: string }[] }[];
 }
 
-const passesOf = (sheet: (typeof worked)['sheets'][number]) => sheet.passes as unknown as WorkedPass[];
+interface WorkedSheet {
+  id: string;
+  key: string;
+  contract: { toleranceUm: string; source: string } | null;
+  leftOut?: { reason: LeftOutReason; text: string };
+  passes: WorkedPass[];
+}
+
+const workedSheets = worked.sheets as unknown as WorkedSheet[];
 
 const origin = { ip: 'not recorded', userAgent: 'demo scenario' };
 
@@ -74,10 +83,14 @@ export async function addWorkedJob(
   await planWorkedJob(trx, jobId, machine);
   const sheets = new Map((await listSheets(trx, jobId)).map((sheet) => [sheet.key, sheet]));
   const passIds = new Map<string, string>();
-  for (const source of worked.sheets) {
+  for (const source of workedSheets) {
     const sheet = sheets.get(source.key);
     if (!sheet) throw new Error(`the plan has no ${source.key}`);
-    for (const pass of passesOf(source)) {
+    if (source.leftOut) {
+      await updateSheet(trx, sheet.id, 1, { leftOut: source.leftOut, by: inspector.name });
+      continue;
+    }
+    for (const pass of source.passes) {
       const passId = await beginPass(trx, sheet.id, pass, passIds, inspector);
       passIds.set(pass.id, passId);
       if (pass.linkTo) continue;
@@ -89,7 +102,7 @@ export async function addWorkedJob(
 }
 
 async function planWorkedJob(trx: Knex.Transaction, jobId: string, machine: RegisteredMachine): Promise<void> {
-  const include = worked.sheets.map((sheet) => sheet.key);
+  const include = workedSheets.map((sheet) => sheet.key);
   const proposals = proposalsFor({
     makeUp: machine.makeUp,
     codes: (await trx('jobs').where({ id: jobId }).first('codes')).codes,
@@ -99,7 +112,7 @@ async function planWorkedJob(trx: Knex.Transaction, jobId: string, machine: Regi
     exclusions: proposals
       .filter((proposal) => !include.includes(proposal.key))
       .map((proposal) => ({ key: proposal.key, reason: 'not-touched', text: null })),
-    contractTolerances: worked.sheets.flatMap(({ key, contract }) =>
+    contractTolerances: workedSheets.flatMap(({ key, contract }) =>
       contract ? [{ key, toleranceUm: contract.toleranceUm, source: contract.source }] : [],
     ),
   });
@@ -121,8 +134,10 @@ async function beginPass(
   return startPass(trx, sheetId, { kind: pass.kind, linkTo }, inspector);
 }
 
+const isPlace = /^\/(positions|points|targets|sections)\//;
+
 /** Set-up as it was, then the readings in the order in which they were taken; a slip stands before what put it right. */
-function typedCells(sheet: { definition: Parameters<typeof definitionOf>[0] }, pass: WorkedPass) {
+function typedCells(sheet: Pick<SheetRow, 'definition' | 'setUp'>, pass: WorkedPass) {
   const setUp = pass.setUp ?? {};
   const cells: Cells = Object.fromEntries(
     Object.entries(setUp).map(([pointer, text]) => [pointer, { text, unit: null }]),
@@ -149,7 +164,13 @@ function typedCells(sheet: { definition: Parameters<typeof definitionOf>[0] }, p
         }))
       : [{ pointer: at, text, unit, at: pass.takenAt }],
   );
-  return [...set, ...readings];
+  // Rows that the plan proposed and nobody used: their place is emptied, so that nothing is expected there.
+  const unused =
+    pass.kind === 'as-found'
+      ? Object.keys(sheet.setUp).filter((pointer) => isPlace.test(pointer) && !(pointer in setUp))
+      : [];
+  const emptied = unused.map((pointer) => ({ pointer, text: '', unit: null, at: pass.takenAt }));
+  return [...set, ...emptied, ...readings];
 }
 
 async function nameInstruments(

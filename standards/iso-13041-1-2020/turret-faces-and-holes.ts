@@ -25,7 +25,7 @@ export const turretFaceToX: TestDefinition = {
     'Index the turret by half a turn and read the same positions again. The mean of both drops the run-out of the disc; what is left is the place of the turret itself.',
     'The result is the least-squares slope of the means times the measuring length. A rising reading means that the face comes nearer to the headstock going in + of X.',
   ],
-  appliesTo: { kind: 'turret-and-axis', role: 'cross', types: ['turret'] },
+  appliesTo: { kind: 'turret-and-axis', role: 'cross', plane: 'ZX', types: ['turret'] },
   layout: {
     kind: 'angles-by-position',
     anglesDeg: ['0', '180'],

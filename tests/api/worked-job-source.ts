@@ -22,7 +22,8 @@ export interface SourcePass {
   }[];
   request: EvaluationInput;
   expected: { deviation: string };
-  conformity: { expected: { limit: string; margin: string } };
+  /** Absent where there is no tolerance. */
+  conformity?: { expected: { limit: string; margin: string } };
   verdict: string;
   display: { value: string; extraDigits?: number };
 }
@@ -32,29 +33,30 @@ export interface SourceSheet {
   key: string;
   component: object;
   dependsOn: object;
-  tolerance: { value: string; provenance: { sourceKind: 'shop' | 'contract'; text: string } };
-  direction: string;
+  tolerance: { value: string; provenance: { sourceKind: 'shop' | 'contract'; text: string } } | null;
+  direction: string | null;
+  leftOut?: { reason: string; text: string };
   passes: SourcePass[];
 }
 
 export interface SourceRow {
   sheet: string;
-  asFound: { pass: string; verdict: string };
-  asLeft: { pass: string; linked: boolean; verdict: string };
-  tolerance: string;
+  asFound: { pass: string; verdict: string } | null;
+  asLeft: { pass: string; linked: boolean; verdict: string } | null;
+  tolerance: string | null;
 }
 
-/** The tests that the program has by now, in the job's working order, under the keys of our plan. */
+/** The job's tests in its own order, under the keys of our plan. */
 export const sourceSheets = seed.sheets.map(({ id, key }) => {
   const planned = job.plan.find((sheet) => sheet.id === id);
   if (!planned) throw new Error(`the job has no ${id}`);
-  return { ...planned, key } as unknown as SourceSheet;
+  return { ...planned, passes: planned.passes ?? [], key } as unknown as SourceSheet;
 });
 
 export const sourceRows = sourceSheets.map(({ id }) => {
   const row = job.final.rows.find(({ sheet }) => sheet === id);
   if (!row) throw new Error(`the job's outcome has no ${id}`);
-  return row as unknown as SourceRow;
+  return { asFound: null, asLeft: null, tolerance: null, ...row } as unknown as SourceRow;
 });
 
 export const sourceOrder = job.plan.map(({ id }) => id);

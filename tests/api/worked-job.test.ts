@@ -116,19 +116,19 @@ describe('machine and plan', () => {
   });
 
   it('the plan in the job’s working order, each test with what it rests on', () => {
-    const order = sourceSheets.map(({ id }) => sourceOrder.indexOf(id));
-    expect([...order].sort((a, b) => a - b)).toEqual(order);
-    expect(board.sheets.map(({ position, key }) => [position, key])).toEqual(
-      sourceSheets.map(({ key }, index) => [index + 1, key]),
-    );
-    expect(board.sheets).toHaveLength(17);
+    expect(sourceSheets.map(({ id }) => id)).toEqual(sourceOrder);
+    expect(board.sheets.map(({ position }) => position)).toEqual(sourceSheets.map((_, index) => index + 1));
+    expect(new Set(board.sheets.map(({ key }) => key))).toEqual(new Set(sourceSheets.map(({ key }) => key)));
+    // At a turret, what is set up together is measured together; the circular test that is left out keeps its place before the cutting.
+    const free = (key: string) => /^(TU-[123]b?|CI-1):/.test(key);
+    const fixed = (keys: string[]) => keys.filter((key) => !free(key));
+    expect(fixed(board.sheets.map(({ key }) => key))).toEqual(fixed(sourceSheets.map(({ key }) => key)));
+    expect(board.sheets).toHaveLength(23);
     for (const source of sourceSheets) {
       const { component, dependsOn, direction } = sheetOf(source.key);
-      expect({ component, dependsOn, direction }, source.id).toEqual({
-        component: source.component,
-        dependsOn: source.dependsOn,
-        direction: source.direction,
-      });
+      expect(component, source.id).toMatchObject(source.component);
+      expect(dependsOn, source.id).toEqual(source.dependsOn);
+      if (source.direction !== null) expect(direction, source.id).toBe(source.direction);
     }
     // What the make-up also proposes is not forgotten: it stands there with its reason.
     expect(board.exclusions.length).toBeGreaterThan(0);
@@ -137,7 +137,10 @@ describe('machine and plan', () => {
 
   it('contract tolerances name their item; our own never pass for a published figure', () => {
     for (const source of sourceSheets) {
-      const { provenance } = sheetOf(source.key).tolerance!;
+      const planned = sheetOf(source.key).tolerance;
+      expect(planned === null, source.id).toBe(source.tolerance === null);
+      if (!planned || !source.tolerance) continue;
+      const { provenance } = planned;
       const { sourceKind, text } = source.tolerance.provenance;
       const kinds = sourceKind === 'contract' ? ['contract'] : ['from-memory', 'derived'];
       expect(kinds, source.id).toContain(provenance.kind);
@@ -155,9 +158,11 @@ describe('machine and plan', () => {
 describe('sets of readings', () => {
   it('are those of the job, in its order', () => {
     for (const source of sourceSheets) {
-      expect(sheetOf(source.key).passes.map(({ kind }) => kind)).toEqual(source.passes.map(({ kind }) => kind));
+      // A sheet that is left out keeps the empty set with which it began.
+      const kinds = source.leftOut ? ['as-found'] : source.passes.map(({ kind }) => kind);
+      expect(sheetOf(source.key).passes.map(({ kind }) => kind)).toEqual(kinds);
     }
-    expect([typed.length, linked.length]).toEqual([25, 13]);
+    expect([typed.length, linked.length]).toEqual([35, 16]);
   });
 
   it.each(typed)('$name: readings as typed, their exact figures, time, person, instruments', async (pair) => {
@@ -174,7 +179,8 @@ describe('sets of readings', () => {
       const asked = parts.reduce<unknown>((value, part) => (value as Record<string, unknown>)[part], source.request);
       const columns = typeof asked === 'string' ? asked : null;
       expect(columns, at).not.toBeNull();
-      const column = pair.sheet.key.startsWith('WP-1') ? 'mm' : 'µm';
+      const lengths = /^(WP-1|TU-3x):/.test(pair.sheet.key) ? 'mm' : 'µm';
+      const column = unit === '°C' ? unit : lengths;
       expect(new Dec(convert(row!.value, unit, column)).eq(columns!), `${at}: ${row!.value} ${unit}`).toBe(true);
     }
     expect(pass.takenBy).toBe(source.by);
@@ -238,9 +244,11 @@ describe('results', () => {
     expect(row.state).toBe('complete');
     sameFigure(row.deviation_um, source.expected.deviation);
     expect(row.verdict).toBe(source.verdict);
-    sameFigure(row.tolerance_um, sheet.tolerance.value);
-    sameFigure(row.limit_um, source.conformity.expected.limit);
-    sameFigure(row.margin_um, source.conformity.expected.margin);
+    if (sheet.tolerance && source.conformity) {
+      sameFigure(row.tolerance_um, sheet.tolerance.value);
+      sameFigure(row.limit_um, source.conformity.expected.limit);
+      sameFigure(row.margin_um, source.conformity.expected.margin);
+    } else expect([row.tolerance_um, row.limit_um, row.margin_um]).toEqual([null, null, null]);
     expect(row.displayed_um).toBe(source.display.value);
     expect(new Dec(row.displayed_mm).times(1000).eq(row.displayed_um)).toBe(true);
     expect(row.outcome.displayed.extraDigits).toBe(Number(source.display.extraDigits ?? 0));
@@ -250,8 +258,9 @@ describe('results', () => {
 
   it('the sheet’s interface gives the same', async () => {
     for (const row of sourceRows) {
+      if (!row.asLeft) continue;
       const source = sourceSheets.find(({ id }) => id === row.sheet)!;
-      const final = source.passes.find(({ id }) => id === row.asLeft.pass)!;
+      const final = source.passes.find(({ id }) => id === row.asLeft!.pass)!;
       const original = source.passes.find(({ id }) => id === (final.linkTo ?? final.id))!;
       const { body } = await workshop.call(getSheet, { method: 'GET', params: { id: sheetOf(source.key).id } });
       expect([body.state, body.result.verdict], row.sheet).toEqual(['left', row.asLeft.verdict]);
@@ -284,21 +293,14 @@ describe('the check', () => {
 });
 
 describe('the report', () => {
-  /** The job has 23 tests; the counts of those that the program has by now follow from its own rows. */
-  const counted = (which: 'asFound' | 'asLeft') => {
-    const count = (verdict: string) => sourceRows.filter((row) => row[which].verdict === verdict).length;
-    const [within, out, undecided] = [count('within-tolerance'), count('out-of-tolerance'), count('undecided')];
-    return {
-      ...{ planned: sourceRows.length, within, out, undecided, judged: within + out + undecided },
-      ...{ forInformation: count('for-information'), leftOut: 0, notMeasured: 0 },
-    };
-  };
-
   it('counts as found and as left', () => {
-    expect(report.model.counts).toEqual({ asFound: counted('asFound'), asLeft: counted('asLeft') });
-    expect(report.model.counts).toMatchObject({
-      asFound: { planned: 17, within: 13, out: 4 },
-      asLeft: { planned: 17, within: 16, out: 1, judged: 17 },
+    const counted = ({ outAcceptedWithRemark: _, ...counts }: Record<string, number>) => ({
+      ...counts,
+      notMeasured: 0,
+    });
+    expect(report.model.counts).toEqual({
+      asFound: counted(sourceJob.final.counts.asFound),
+      asLeft: counted(sourceJob.final.counts.asLeft),
     });
   });
 
@@ -309,11 +311,17 @@ describe('the report', () => {
       const decimals = (value.split('.')[1] ?? '').length + 3;
       return formatDecimal(convert(value, 'µm', 'mm'), { decimals });
     };
-    expect(report.model.summary).toHaveLength(17);
-    for (const [index, row] of sourceRows.entries()) {
-      const mm = new Dec(row.tolerance).div(1000).toDecimalPlaces(4, Dec.ROUND_DOWN).toFixed();
-      expect(report.model.summary[index], row.sheet).toMatchObject({
-        order: index + 1,
+    expect(report.model.summary).toHaveLength(23);
+    for (const row of sourceRows) {
+      const { key, leftOut } = sourceSheets.find(({ id }) => id === row.sheet)!;
+      const shownRow = report.model.summary.find((one) => one.key === key)!;
+      if (!row.asFound || !row.asLeft) {
+        expect(leftOut?.reason).toBe('not-agreed');
+        expect(shownRow).toMatchObject({ asFound: null, asLeft: null, leftOut: 'not agreed' });
+        continue;
+      }
+      const mm = row.tolerance && new Dec(row.tolerance).div(1000).toDecimalPlaces(4, Dec.ROUND_DOWN).toFixed();
+      expect(shownRow, row.sheet).toMatchObject({
         asFound: shown(row.asFound.pass),
         asFoundVerdict: row.asFound.verdict,
         asLeft: shown(row.asLeft.pass),
@@ -365,7 +373,7 @@ describe('the report', () => {
     );
     expect(createHash('sha256').update(text.model).digest('hex')).toBe(report.modelSha256);
     expect(headers.get('x-content-sha256')).toBe(report.modelSha256);
-    const forged = JSON.stringify({ ...report.model, headline: '17 of 17 judged tests within tolerance.' });
+    const forged = JSON.stringify({ ...report.model, headline: '21 of 21 judged tests within tolerance.' });
     await expect(
       workshop.as('reviewer', (trx) => trx('reports').where({ id: report.id }).update({ model: forged })),
     ).rejects.toMatchObject({ code: 'WM001' });
@@ -405,7 +413,7 @@ describe('the customer’s answer', () => {
       },
     ]);
     expect(remarks.filter(({ closedAt }) => closedAt === null)).toHaveLength(sourceJob.final.pointsListOpen);
-    expect(model.headline).toBe('16 of 17 judged tests within tolerance; 1 out of tolerance, accepted with remark.');
+    expect(model.headline).toMatch(/^20 of 21 judged tests within tolerance; 1 out of tolerance, accepted with remark/);
     expect(model.summary.filter(({ remarkNo }) => remarkNo !== null)).toMatchObject([{ order: 8, remarkNo: 1 }]);
     // The figures are those that were shown before the signature.
     const strip = (rows: typeof model.summary) => rows.map(({ remarkNo: _, ...rest }) => rest);
