@@ -1,9 +1,10 @@
 import type { Knex } from 'knex';
-import { insertTemperature, updateConditions } from '@/db/queries/jobs';
+import { insertTemperature, updateComponentConditions, updateConditions } from '@/db/queries/jobs';
 import { listPasses, replacePassInstruments } from '@/db/queries/passes';
 import { listSheets, type SheetRow, updateSheet } from '@/db/queries/sheets';
 import type { Viewer } from '@/lib/auth/viewer';
 import { definitionOf } from '@/lib/planning/definition-of';
+import type { ComponentConditions } from '@/lib/schemas/component-conditions';
 import type { LeftOutReason } from '@/lib/schemas/job';
 import { intentTexts } from '@/lib/schemas/signature';
 import { handIn } from '@/lib/services/hand-in';
@@ -80,6 +81,7 @@ export async function addWorkedJob(
     const figure = (text: string) => ({ value: text, text });
     await insertTemperature(trx, { jobId, measuredAt: row.at, air: figure(row.air), machine: figure(row.machine) });
   }
+  await updateComponentConditions(trx, jobId, 2, worked.opened as ComponentConditions);
   await planWorkedJob(trx, jobId, machine);
   const sheets = new Map((await listSheets(trx, jobId)).map((sheet) => [sheet.key, sheet]));
   const passIds = new Map<string, string>();

@@ -10,6 +10,7 @@ import { type JobBoard, jobBoard } from '@/db/read-models/job-board';
 import { addWorkedJob } from '@/db/seeds/worked-job';
 import { newId } from '@/lib/id';
 import { checkFindings } from '@/lib/reporting/check-findings';
+import { partConditions } from '@/lib/schemas/component-conditions';
 import { signedModel } from '@/lib/services/signed-model';
 import { convert } from '@/lib/units/convert';
 import { Dec } from '@/lib/units/decimal';
@@ -113,6 +114,22 @@ describe('machine and plan', () => {
         .map(({ id, type, channel }) => [id, type, channel]),
     );
     expect(makeUp.sizeClass).toEqual({ criterion: 'bar-diameter', valueMm: sourceJob.machine.sizeClass.value });
+  });
+
+  it('what was opened, component by component, on the job and in its report', () => {
+    const said = [...sourceJob.machine.components, ...sourceJob.machine.axes].map(({ id, condition }) => [
+      id,
+      condition,
+    ]);
+    const ours = Object.entries(board.job.componentConditions).map(([id, { condition, text }]) => [
+      id,
+      [text, partConditions[condition]].filter(Boolean).join(' '),
+    ]);
+    expect(Object.fromEntries(ours)).toEqual(Object.fromEntries(said));
+    const printed = report.model.machine.components.flatMap(({ id, condition }) =>
+      condition ? [[id, condition]] : [],
+    );
+    expect(printed.length).toBe(said.length);
   });
 
   it('the plan in the job’s working order, each test with what it rests on', () => {
