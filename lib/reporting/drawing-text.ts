@@ -73,6 +73,10 @@ export function limitRuleWords(rule: {
 /** Unit at the end of an axis's name: `deviation, ″`. */
 export const axisUnit = (label: string): string => label.match(/, ([^,]+)$/)?.[1]?.trim() ?? 'µm';
 
+/** `20 traces, turn 1 to turn 20`. */
+export const seriesWords = (count: number, first: string, last: string): string =>
+  `${count} traces, ${first} to ${last}`;
+
 /** What a plot shows, for somebody who cannot see it. */
 export function plotWords(series: PlotSeries, toleranceUm: string | null): string {
   const names = [...new Set(series.points.flatMap((point) => (point.series ? [point.series] : [])))];

@@ -222,4 +222,16 @@ describe('plots of new kinds of readings', () => {
     expect(slopes.description).toContain('tolerance 0.04 mm/m');
     expect(slopes.items.some((item) => item.kind === 'text' && item.text === 'T 0.04')).toBe(true);
   });
+
+  it('says how many traces there are where they are too many to be named', () => {
+    const points = Array.from({ length: 20 }, (_, k) =>
+      round(angles(8), (deg) => `${(deg + k) % 7}`, `turn ${k + 1}`),
+    ).flat();
+    const drawing = plotDrawing(polar(points), { widthPx: 300, heightPx: 216, toleranceUm: null });
+    const texts = drawing.items.flatMap((item) => (item.kind === 'text' ? [item.text] : []));
+    expect(texts).toContain('20 traces, turn 1 to turn 20');
+    expect(drawing.heightPx).toBe(216);
+    expect(outside(drawing)).toEqual([]);
+    expect(collisions({ ...drawing, items: drawing.items.filter((item) => item.kind === 'text') })).toEqual([]);
+  });
 });

@@ -163,9 +163,9 @@ export function widestLayouts(): TestDefinition[] {
       sketch: { scene: 'circular-gauge' },
     },
     {
-      title: 'Axis of rotation, twelve turns',
+      title: 'Axis of rotation, twenty turns',
       method: 'axis-of-rotation',
-      layout: { kind: 'rotation-turns', turns: 12, anglesDeg: angles(12), direction: 'radial' },
+      layout: { kind: 'rotation-turns', turns: 20, anglesDeg: angles(12), direction: 'radial' },
       sketch: { scene: 'spindle-sensors' },
     },
     {

@@ -15,7 +15,7 @@ import {
   storedSheet,
   widestLayouts,
 } from '../helpers/every-layout';
-import { misplacedWords } from '../helpers/page-boxes';
+import { boxesOf, misplacedWords } from '../helpers/page-boxes';
 import { flat, pdfText } from '../helpers/pdf-text';
 import { sampleReportModel } from '../helpers/sample-report-model';
 
@@ -77,6 +77,14 @@ describe.each(['catalogue', 'widest'] as const)('a report with every layout (%s)
       for (const pass of block.passes) expect(pass.resultMm, block.title).not.toBeNull();
     expect(markup(models[name])).not.toMatch(/NaN|undefined|\[object/);
   });
+});
+
+it('repeats the places where a table is cut between its columns', () => {
+  const block = models.widest.blocks.find(({ title }) => title.includes('twenty turns'))!;
+  const made = reportPages({ ...models.widest, blocks: [block] }, fonts);
+  const heads = made.pages.flatMap((page) => boxesOf(made, page.ops)).filter(({ what }) => what === 'angle,');
+  // As found and as left, each in two parts at least.
+  expect(heads.length).toBeGreaterThanOrEqual(4);
 });
 
 describe('function checks in the report', () => {

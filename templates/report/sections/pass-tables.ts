@@ -125,17 +125,23 @@ function headsOf(readings: ReadingTable): string[] {
   return readings.columns.length > cells ? readings.columns : ['', ...readings.columns];
 }
 
-/** A table too wide is cut between columns; each part has the column of places again. */
+/**
+ * A table too wide is cut between columns; each part has the column of places again. Where rows are only counted, the place is the
+ * first column (a target, an angle), and that one is repeated too.
+ */
 function cutToWidth(kit: Kit, readings: ReadingTable, widthPt: number): ReadingTable[] {
   const columns = columnsOf(kit, readings);
-  if (tableWidth(columns) <= widthPt || columns.length <= 2) return [readings];
-  let count = 1;
-  while (count < columns.length - 1 && tableWidth(columns.slice(0, count + 2)) <= widthPt) count += 1;
+  const repeated = readings.rows.every(({ label }, index) => label === String(index + 1)) ? 1 : 0;
+  const cellCount = columns.length - 1;
+  if (tableWidth(columns) <= widthPt || cellCount <= repeated + 1) return [readings];
+  let count = repeated + 1;
+  while (count < cellCount && tableWidth(columns.slice(0, count + 2)) <= widthPt) count += 1;
   const heads = headsOf(readings);
-  const part = (from: number, to?: number): ReadingTable => ({
+  const part = (chosen: (index: number) => boolean): ReadingTable => ({
     title: null,
-    columns: [heads[0] ?? '', ...heads.slice(from + 1, to === undefined ? undefined : to + 1)],
-    rows: readings.rows.map((row) => ({ label: row.label, cells: row.cells.slice(from, to) })),
+    columns: [heads[0] ?? '', ...heads.slice(1).filter((_, index) => chosen(index))],
+    rows: readings.rows.map((row) => ({ label: row.label, cells: row.cells.filter((_, index) => chosen(index)) })),
   });
-  return [part(0, count), ...cutToWidth(kit, part(count), widthPt)];
+  const rest = part((index) => index < repeated || index >= count);
+  return [part((index) => index < count), ...cutToWidth(kit, rest, widthPt)];
 }
