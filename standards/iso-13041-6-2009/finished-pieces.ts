@@ -100,11 +100,11 @@ export const turnedPieces: TestDefinition[] = [
       cut,
       'Face a disc to the middle in one cut. Leave it in the chuck.',
       'Fix the indicator to the bed or a plate, not to the slide that cut the face: that slide would show its own path as flat. Or take the disc to a plate or measuring machine. Plunger toward the headstock.',
-      'Read from near the middle outward along a radius. Pushing the plunger in counts positive; readings that fall going outward mean that the middle stands proud.',
+      'Read from near the middle outward along a radius. Pushing the plunger in counts positive: readings that rise going outward mean that the rim stands proud and the middle is deeper, which is allowed.',
       'Positions are distances from the middle. Back at the first the reading must return within a tenth of the tolerance.',
-      'Write the readings as the surface lies toward you, so that a deeper middle gives a positive result: only concave is allowed.',
+      'The result is the rise from the middle to the rim by the least-squares slope. A middle that stands proud is not allowed.',
     ],
-    method: 'squareness-to-axis',
+    method: 'parallelism',
     layout: {
       kind: 'angles-by-position',
       anglesDeg: ['0'],
@@ -117,7 +117,7 @@ export const turnedPieces: TestDefinition[] = [
     resolution: { valueUm: '0.5', rule: 'half-even' },
     instruments: ['indicator', 'indicator stand', 'surface plate'],
     sketch: { scene: 'test-piece-face', plane: 'ZX', positiveMeans: '+ concave' },
-    judgedFigure: 'rise of the face over the measured radius, by the least-squares slope',
+    judgedFigure: 'rise of the face from the middle to the rim, by the least-squares slope',
     positiveMeans: 'concave',
     negativeMeans: 'convex',
     usualMistakes: [
