@@ -1,6 +1,7 @@
 import type { MakeUp } from '@/lib/schemas/make-up';
 import type { Unit } from '@/lib/units/unit';
 import type { BoundComponent, CellDefault, Layout } from '@/standards/types';
+import { within } from './fit-positions';
 import { proposedTargets } from './proposed-targets';
 
 type SetUp = Record<string, CellDefault>;
@@ -41,8 +42,8 @@ export function targetCells(
   travelMm: string | null,
 ): SetUp {
   if (layout.quantity === 'rotary') return listed(layout.targets, '°', (row) => `/targets/${row}`);
-  const targets =
-    travelMm === null || layout.targets.length > 0 ? layout.targets : proposedTargets(travelMm, component.axis ?? '');
+  const proposed = travelMm !== null && layout.targets.length === 0;
+  const targets = proposed ? proposedTargets(travelMm, component.axis ?? '') : within(layout.targets, travelMm);
   return listed(targets, 'mm', (row) => `/targets/${row}`);
 }
 

@@ -1,24 +1,27 @@
 import type { MakeUp } from '@/lib/schemas/make-up';
 import type { BoundComponent, CellDefault, TestDefinition } from '@/standards/types';
 import { cell, circleCells, foundCells, gridCells, listed, stationCells, stepCells, targetCells } from './default-rows';
+import { alongTravel, shortest, within } from './fit-positions';
 
 type SetUp = Record<string, CellDefault>;
-
-/** Steps at which a travel is read, mm; the smallest that needs no more than so many positions. */
-const STEPS_MM = [5, 10, 20, 25, 50, 100, 200, 250, 500];
-const MOST_STEPS = 12;
 
 /** What a person would set up first on this machine: positions within the travel, the usual choices. All of it can be changed. */
 export function defaultSetUp(definition: TestDefinition, component: BoundComponent, makeUp: MakeUp): SetUp {
   const { layout } = definition;
   const travel = (id: string | undefined) => makeUp.linearAxes.find((axis) => axis.id === id)?.travelMm ?? null;
+  const reach = reachOf(component, makeUp, travel);
+  // A piece, a mandrel or a casting keeps its own positions; only a slide alone is read over all of its travel.
+  const along = (positions: string[]) =>
+    component.turret || component.reference || component.tailstock
+      ? within(positions, reach)
+      : alongTravel(positions, reach);
   switch (layout.kind) {
     case 'turns':
       return {};
     case 'angles-by-position':
-      return positionCells(within(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
+      return positionCells(within(layout.positionsMm, reach), (row) => `/positions/${row}`);
     case 'profile':
-      return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/points/${row}/position`);
+      return positionCells(along(layout.positionsMm), (row) => `/points/${row}/position`);
     case 'square-reversed':
       return {
         ...positionCells(
@@ -49,9 +52,9 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
     case 'angle-steps':
       return stepCells(layout, travel(component.axis));
     case 'two-runs':
-      return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
+      return positionCells(along(layout.positionsMm), (row) => `/positions/${row}`);
     case 'angular-runs':
-      return positionCells(alongTravel(layout.positionsMm, travel(component.axis)), (row) => `/positions/${row}`);
+      return positionCells(along(layout.positionsMm), (row) => `/positions/${row}`);
     case 'grid':
       return gridCells(layout);
     case 'target-cycles':
@@ -63,7 +66,7 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
     case 'stations':
       return stationCells(layout, component, makeUp);
     case 'diameters':
-      return positionCells(within(layout.positionsMm, travel(component.axis)), (row) => `/sections/${row}/position`);
+      return positionCells(within(layout.positionsMm, reach), (row) => `/sections/${row}/position`);
     case 'round-trace':
       return { '/surface': cell(layout.surface), ...listed(layout.anglesDeg, '°', (row) => `/points/${row}/angle`) };
     case 'time-series':
@@ -79,23 +82,11 @@ export function defaultSetUp(definition: TestDefinition, component: BoundCompone
 const positionCells = (positions: string[], pointer: (row: number) => string): SetUp =>
   listed(positions, 'mm', pointer);
 
-/** The positions as they stand where the travel reaches; otherwise as many, evenly, over what it reaches. */
-function within(positions: string[], travelMm: string | null): string[] {
-  const first = Number(positions[0]);
-  const reach = travelMm === null ? Number.POSITIVE_INFINITY : Number(travelMm);
-  if (Number(positions.at(-1)) - first <= reach) return positions;
-  const step = reach / (positions.length - 1);
-  const rounded = step >= 10 ? Math.floor(step / 5) * 5 : Math.floor(step * 10) / 10;
-  return positions.map((_, row) => String(Math.round((first + row * rounded) * 10) / 10));
-}
-
-function alongTravel(positionsMm: string[], travelMm: string | null): string[] {
-  if (travelMm === null) return positionsMm;
-  const travel = Number(travelMm);
-  const step = STEPS_MM.find((candidate) => travel / candidate <= MOST_STEPS) ?? STEPS_MM.at(-1)!;
-  const count = Math.floor(travel / step);
-  const positions = Array.from({ length: count + 1 }, (_, row) => String(row * step));
-  return count * step < travel ? [...positions, travelMm] : positions;
+/** What the axis reaches; between centres no more than the machine takes there, along an interpolated line what both axes do. */
+function reachOf(component: BoundComponent, makeUp: MakeUp, travel: (id?: string) => string | null): string | null {
+  const centres = component.tailstock ? makeUp.distanceBetweenCentresMm : null;
+  const other = component.turret && component.reference ? travel(component.reference) : null;
+  return shortest([travel(component.axis), centres, other]);
 }
 
 /** The largest radius that matters is that of the thickest bar. */
