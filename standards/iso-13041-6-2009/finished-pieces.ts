@@ -1,7 +1,7 @@
 import type { CautionId, Provenance, TestDefinition } from '../types';
 import { workingSteps } from '../working-order';
 import { code, edition } from './source';
-import { contour, diameters, facedFlatness, roundness, threadLead, transferPart } from './tolerances';
+import { contour, diameters, facedFlatness, faceOverGrid, roundness, threadLead, transferPart } from './tolerances';
 
 const source: Provenance = {
   kind: 'from-memory',
@@ -126,6 +126,38 @@ export const turnedPieces: TestDefinition[] = [
     ],
     setUpTogether: 'faced disc in {spindle}',
     minutes: 25,
+  },
+  {
+    ...turned,
+    id: 'WP-2b',
+    insteadOf: 'WP-2',
+    title: 'Faced disc: flatness over the whole face',
+    boundTitle: 'Faced disc, {turret} on {spindle}: flatness over the whole face',
+    procedure: [
+      cut,
+      'Face a disc to the middle in one cut. Take it to a surface plate or a measuring machine and let it come to temperature.',
+      'Read at the points of a grid over the face; x and y count from the middle. Rows can be added where the disc is larger. Pushing the plunger in counts positive.',
+      'Read the first point again at the end: it must return within a tenth of the tolerance.',
+      'The result is the distance of the two parallel planes of least separation that hold all points. It does not tell concave from convex: look at the plot.',
+    ],
+    method: 'flatness',
+    layout: {
+      kind: 'grid',
+      xMm: ['-100', '-50', '0', '50', '100'],
+      yMm: ['-100', '-50', '0', '50', '100'],
+      reference: 'minimum-zone',
+    },
+    tolerance: faceOverGrid,
+    resolution: { valueUm: '0.5', rule: 'half-even' },
+    instruments: ['indicator', 'indicator stand', 'surface plate'],
+    sketch: { scene: 'test-piece-face', plane: 'ZX' },
+    judgedFigure: 'distance of the two parallel planes of least separation',
+    usualMistakes: [
+      'Reading corners of the grid that lie beyond the rim: leave such points out.',
+      'Pressing the disc on the plate, which bends it flat.',
+    ],
+    setUpTogether: 'faced disc in {spindle}',
+    minutes: 40,
   },
   {
     ...turned,

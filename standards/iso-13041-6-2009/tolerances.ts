@@ -42,6 +42,13 @@ export const facedFlatness: ToleranceRule = {
   provenance: remembered('.025 on 300, scaled'),
 };
 
+/** A distance of planes is not worked out for another size: the figure is that of a disc of 300 mm. */
+export const faceOverGrid: ToleranceRule = {
+  by: 'all',
+  allUm: '25',
+  provenance: remembered('.025 on 300; a smaller disc needs a figure of its own'),
+};
+
 export const threadLead: ToleranceRule = {
   by: 'all',
   allUm: '25',
