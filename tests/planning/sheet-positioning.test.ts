@@ -76,7 +76,7 @@ describe('runs over targets, up and down', () => {
     ]);
     const shown = figures(outcome);
     expect(shown).toHaveLength(13);
-    expect(shown.find(({ label }) => label.startsWith('B,'))?.value).toBe('2.1 µm, at 0');
+    expect(shown.find(({ label }) => label.startsWith('B,'))?.value).toBe('2.1 µm, at 0 mm');
     expect(new Set(outcome.plot?.points.map(({ series }) => series))).toHaveProperty('size', 2);
   });
 
@@ -189,6 +189,7 @@ describe('rotary axes', () => {
     const outcome = judged(outcomeOf(rotary, { ...at, ...arcsec(['0', '2', '4,8']) }, limit(five!)));
     expect(outcome.displayed).toEqual({ textUm: '4.8', textMm: '4.8', unit: '″', extraDigits: 0 });
     expect(outcome.judgement.verdict).toBe('within-tolerance');
+    expect(figures(outcome)[0]).toEqual({ label: 'E in the + direction', value: '4.8″, between 0° and 180°' });
   });
 
   it.each(['0', '2.3', '-7', '0.1'])('is within a limit that it reaches exactly, counted from %s', (from) => {

@@ -100,9 +100,7 @@ describe('sheets of the worked job, from the readings as typed', () => {
 
   it.each(furtherSheets)('$key: component and what it rests on', (sheet) => {
     const { component, dependsOn } = plan.find(({ key }) => key === sheet.key)!;
-    // The face of a turret names no plane in its own right: the cross axis says it.
-    const wanted = { ...sheet.component, plane: component.plane };
-    expect({ component, dependsOn }).toEqual({ component: wanted, dependsOn: sheet.dependsOn });
+    expect({ component, dependsOn }).toEqual({ component: sheet.component, dependsOn: sheet.dependsOn });
   });
 
   it('judges the other limits of positioning from the same runs', () => {

@@ -1,9 +1,11 @@
 import type { ResultOf } from '@/lib/evaluation';
-import { slope, um } from './figure-text';
-import type { Figure } from './figures';
+import { Fraction } from '@/lib/units/fraction';
+import { type Figure, seconds, slope, um } from './figure-text';
 
-/** ISO 230-2: every parameter that was evaluated, with the place where it occurs. */
-export function positioningFigures(result: ResultOf<'positioning'>): Figure[] {
+/** ISO 230-2: every parameter that was evaluated, with the place where it occurs. Rotary axes are read in seconds of arc. */
+export function positioningFigures(result: ResultOf<'positioning'>, rotary: boolean): Figure[] {
+  const amount = rotary ? seconds : (value: string) => um(value);
+  const unit = rotary ? '°' : ' mm';
   const names: [key: keyof typeof result & string, label: string][] = [
     ['A', 'A, bidirectional accuracy'],
     ['Aforward', 'A in the + direction'],
@@ -22,11 +24,11 @@ export function positioningFigures(result: ResultOf<'positioning'>): Figure[] {
   const place = (key: string): string => {
     const where = at[key];
     if (where === undefined) return '';
-    return typeof where === 'string' ? `, at ${where}` : `, between ${where.min} and ${where.max}`;
+    return typeof where === 'string' ? `, at ${where}${unit}` : `, between ${where.min}${unit} and ${where.max}${unit}`;
   };
   const figures = names.flatMap(([key, label]) => {
     const value = result[key];
-    return typeof value === 'string' ? [{ label, value: `${um(value)}${place(key)}` }] : [];
+    return typeof value === 'string' ? [{ label, value: `${amount(value)}${place(key)}` }] : [];
   });
   return [...figures, { label: 'runs in each direction', value: String(result.cycles) }];
 }
@@ -55,28 +57,28 @@ export function circularFigures(result: ResultOf<'circular'>): Figure[] {
   ];
 }
 
-export function rotationFigures(result: ResultOf<'axis-of-rotation'>, tilt: boolean): Figure[] {
-  const text = (value: string) => (tilt ? slope(value) : um(value, '0.01'));
-  const names: [label: string, value: string | undefined][] = [
-    ['total', result.total],
-    ['synchronous', result.synchronous],
-    ['asynchronous', result.asynchronous],
-    ['once per turn', 'fundamental' in result ? result.fundamental : undefined],
-    ['synchronous without once per turn', 'residualSynchronous' in result ? result.residualSynchronous : undefined],
-    ['eccentricity, taken out', 'eccentricity' in result ? result.eccentricity : undefined],
-  ];
-  return names.flatMap(([label, value]) => (value === undefined ? [] : [{ label, value: text(value) }]));
+export function lostMotionFigures(result: ResultOf<'lost-motion'>): Figure[] {
+  const feeds = [
+    ['cutting feed', result.cuttingFeed],
+    ['rapid', result.rapid],
+  ] as const;
+  const summary = feeds.flatMap(([label, feed]) =>
+    feed ? [{ label: `lost motion, ${label}`, value: lostMotionWords(feed.lostMotion) }] : [],
+  );
+  const places = result.places.map(({ feed, place, mean, spread }) => ({
+    label: `${feed === 'rapid' ? 'rapid' : 'cutting feed'}, ${place ?? ''}`,
+    value: `mean difference ${um(mean)}, spread ${um(spread)}`,
+  }));
+  return [...summary, ...places];
 }
 
-export function indexingFigures(result: ResultOf<'indexing'>, names: string[]): Figure[] {
-  const stations = result.ranges.map((range, k) => ({
-    label: `station ${names[k]}`,
-    value: `range ${um(range)}, departure ${um(result.departures[k]!)}`,
-  }));
-  const angle = (value: string | undefined) => (value === undefined ? '' : `, ${slope(value)}`);
-  return [
-    { label: 'largest range', value: `${um(result.worst)} at ${result.worstStation}${angle(result.worstAngle)}` },
-    { label: 'largest departure', value: `${um(result.largestDeparture)}${angle(result.largestDepartureAngle)}` },
-    ...stations,
-  ];
+function lostMotionWords(lostMotion: string): string {
+  const amount = um(lostMotion);
+  if (!/[1-9]/.test(amount)) return amount;
+  return `${amount}, ${Fraction.from(lostMotion).sign() > 0 ? 'play not compensated' : 'compensated too much'}`;
 }
+
+export const referenceShiftFigures = (result: ResultOf<'reference-shift'>): Figure[] => [
+  { label: 'way that the slide lacks in +', value: um(result.shift) },
+  { label: 'shift as the control counts it', value: um(result.controlShift) },
+];
