@@ -4,7 +4,10 @@ import type { Simulation } from './simulated-readings';
 interface Measured {
   /** Deviation that the readings are to come to, µm or µm/m. */
   size: number;
-  limit: number;
+  /** Figure that is judged. */
+  judge: string | undefined;
+  /** Stations that are set up. */
+  stations: number;
   phase: number;
   number(pointer: string, otherwise?: number): number;
   from: number;
@@ -15,27 +18,35 @@ const radians = (deg: number) => (deg * Math.PI) / 180;
 
 /** What an indicator, a level or a laser would have shown in one field, in the unit of its column; for the demo scenario only. */
 export function furtherReading(layout: Layout, parts: string[], measured: Measured): number {
-  const { size, phase, number, from, span } = measured;
+  const { size, judge, stations, phase, number, from, span } = measured;
   const along = (pointer: string) => (number(pointer) - from) / span;
   switch (layout.kind) {
     case 'angle-steps': {
+      const steps = number('/steps', layout.steps);
+      const arch = (step: number) => 4 * size * (step / steps) * (1 - step / steps);
       const step = Number(parts[1]);
-      return (size / (Number(layout.stepLengthMm) / 1000)) * 0.12 * Math.cos(step * 0.9 + phase);
+      return ((arch(step + 1) - arch(step)) / number('/stepLength')) * 1000;
     }
     case 'two-runs': {
       const x = along(`/positions/${parts[1]}`);
       const slide = 4 * size * x * (1 - x);
       return (parts[0] === 'second' ? slide : -slide) + 1.4 * x;
     }
-    case 'grid':
-      return (
-        (size / 2) * Math.cos(number(`/points/${parts[1]}/x`) / 60 + phase) + number(`/points/${parts[1]}/y`) * 0.01
-      );
+    case 'grid': {
+      const middle = (figures: string[]) => (Number(figures[0]) + Number(figures.at(-1))) / 2;
+      const away = (x: number, y: number) => (x - middle(layout.xMm)) ** 2 + (y - middle(layout.yMm)) ** 2;
+      const all = layout.yMm.flatMap((y) => layout.xMm.map((x) => away(Number(x), Number(y))));
+      const [near, far] = [Math.min(...all), Math.max(...all)];
+      const [x, y] = [number(`/points/${parts[1]}/x`), number(`/points/${parts[1]}/y`)];
+      return (size * (away(x, y) - near)) / (far - near) + y * 0.01;
+    }
     case 'angular-runs':
       return size * (along(`/positions/${parts[1]}`) - 0.5) + (parts[0] === 'backward' ? size * 0.08 : 0);
     case 'target-cycles': {
       const x = along(`/targets/${parts[1]}`);
-      return size * 0.55 * x + 0.8 * Math.sin(x * 9 + phase) - (parts[0] === 'backward' ? size * 0.12 : 0);
+      // Of several runs A counts their scatter too.
+      const share = layout.cycles > 1 ? 0.55 : 0.95;
+      return size * share * x + 0.8 * Math.sin(x * 9 + phase) - (parts[0] === 'backward' ? size * 0.12 : 0);
     }
     case 'circle-trace': {
       const theta = radians(number(`/${parts[0]}/${parts[1]}/angle`));
@@ -49,11 +60,18 @@ export function furtherReading(layout: Layout, parts: string[], measured: Measur
       );
     }
     case 'stations': {
-      const station = Number(parts[1]);
-      return size * 0.35 * Math.sin(station * 1.3 + phase) + size * 0.3 * Math.sin(Number(parts[3]) * 2.1 + station);
+      const [station, repeat] = [Number(parts[1]), Number(parts[3])];
+      const round = Math.cos((2 * Math.PI * station) / stations);
+      const again = repeat % 2 === 0 ? 0.5 : -0.5;
+      return judge === 'accuracy'
+        ? size * (round + again * 0.1)
+        : size * (round * 0.3 + again * (station === 0 ? 1 : 0.6));
     }
     case 'circles': {
-      const theta = radians(Number(layout.anglesDeg[Number(parts[3])] ?? '0'));
+      const k = Number(parts[3]);
+      // What swings through less than half a turn leans; it has no whole wave.
+      if (Number(layout.anglesDeg.at(-1)) < 180) return (size * k) / (layout.anglesDeg.length - 1);
+      const theta = radians(Number(layout.anglesDeg[k] ?? '0'));
       return (size / 2) * Math.cos(theta + phase) * (parts[1] === '0' ? 1 : 0.9);
     }
     case 'diameters':

@@ -49,6 +49,14 @@ export function simulatedReadings(simulation: Simulation): Record<string, string
   return Object.fromEntries(order.map((pointer) => [pointer, step(model.at(pointer))]));
 }
 
+/** Limit over a length: the local one where it is the narrower for all of it. */
+function limitOver({ tolerance }: Simulation, lengthMm: number): number {
+  if (!tolerance) return 5;
+  const whole = Number(scaleTolerance(tolerance, String(lengthMm)).toleranceUm);
+  const { local } = tolerance;
+  return local && lengthMm <= Number(local.lengthMm) ? Math.min(whole, Number(local.toleranceUm)) : whole;
+}
+
 function readingModel(simulation: Simulation, random: () => number) {
   const { definition, setUp, tolerance, share } = simulation;
   const number = (pointer: string, otherwise = 0) => Number(setUp[pointer]?.text.replace(',', '.') || otherwise);
@@ -65,8 +73,10 @@ function readingModel(simulation: Simulation, random: () => number) {
   ];
   const [from, to] = along.length > 1 ? [Math.min(...along), Math.max(...along)] : [0, 1];
   const span = to - from;
-  const limit = tolerance ? Number(scaleTolerance(tolerance, String(span)).toleranceUm) : 5;
-  const size = limit * share;
+  const stations = Object.keys(setUp).filter((pointer) => /^\/stations\/\d+\/name$/.test(pointer)).length;
+  const { layout } = definition;
+  const stepped = layout.kind === 'angle-steps' ? number('/stepLength') * number('/steps', layout.steps) : null;
+  const size = limitOver(simulation, stepped ?? span) * share;
   const phase = random() * 6;
   const angleOf = (text: string) => (Number(text) * Math.PI) / 180;
 
@@ -109,7 +119,15 @@ function readingModel(simulation: Simulation, random: () => number) {
       case 'two-collars':
         return 0;
       default:
-        return furtherReading(definition.layout, parts, { size, phase, limit, number, from, span });
+        return furtherReading(definition.layout, parts, {
+          size,
+          judge: definition.judge,
+          stations,
+          phase,
+          number,
+          from,
+          span,
+        });
     }
   };
 

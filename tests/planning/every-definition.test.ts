@@ -57,6 +57,18 @@ describe.each(
     if (definition.method !== 'function-check') expect(outcome.result.method).toBe(definition.method);
   });
 
+  it('comes out within and out of its tolerance where invented readings are meant to', () => {
+    if (!measured(definition, 0.4).rules.tolerance && definition.method !== 'function-check') return;
+    for (const [share, verdict] of [
+      [0.4, 'within-tolerance'],
+      [0.7, 'within-tolerance'],
+      [1.6, 'out-of-tolerance'],
+    ] as const) {
+      const { rules, cells } = measured(definition, share);
+      expect(judgeSheet(rules, definition, cells)).toMatchObject({ judgement: { verdict } });
+    }
+  });
+
   it('has fields with names of their own, and takes readings in an order that goes through all of them', () => {
     const { setUp } = measured(definition, 0.4);
     const fields = sheetFields(definition, setUp);
