@@ -6,8 +6,8 @@ import type { DecimalText, ShownIn } from '@/standards/types';
 export const shownUnit = (displayed: { unit?: ShownIn } | null | undefined): ShownIn => displayed?.unit ?? 'mm';
 
 /**
- * A figure of a tolerance or a judgement in the unit in which its result is shown. Lengths are kept in µm, angles in µm/m. Nothing is lost,
- * except of seconds of arc, which are kept to 30 digits: what is beyond a thousandth of a second was never in the rule.
+ * A figure of a tolerance or a judgement in the unit in which its result is shown. Lengths are kept in µm, angles in µm/m. Nothing is
+ * lost, except of seconds of arc: what a plan keeps of them is a rounded conversion, so they are given to a thousandth of a second.
  * @returns plain decimal string
  */
 export function toleranceShown(toleranceUm: DecimalText, unit: ShownIn): DecimalText {

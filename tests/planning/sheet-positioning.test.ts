@@ -160,6 +160,14 @@ describe('runs over targets, up and down', () => {
       expect(reasonOf(outcomeOf(definition, { ...whole, ...warm, [missing]: '' }))).toMatch(/belong together/);
   });
 
+  it('asks about one reading among fifty that was slipped, and about none of the others', () => {
+    const at = (outcome: ReturnType<typeof outcomeOf>) => outcome.problems.map(({ pointer }) => pointer);
+    expect(at(outcomeOf(definition, whole, limit('7')))).toEqual([]);
+    const slipped = outcomeOf(definition, { ...whole, '/backward/2/3': '700' }, limit('7'));
+    expect(at(slipped)).toEqual(['/backward/2/3']);
+    expect(slipped.problems[0]).toMatchObject({ severity: 'unusual', message: expect.stringContaining('20 times') });
+  });
+
   it('runs within a keystroke', () => {
     const cells = cellsOf(whole);
     const rules = { definition, tolerance: limit('7'), direction: 'either' as const, decisionRule: 'simple' as const };

@@ -19,7 +19,7 @@ const temperature = [
     label: 'temperature of the scale, where the instrument did not bring it to 20 °C',
     unit: '°C',
   },
-  { pointer: '/temperature/alpha', label: 'its expansion', unit: 'µm/m' },
+  { pointer: '/temperature/alpha', label: 'its expansion per kelvin', unit: 'µm/m' },
   { pointer: '/temperature/zero', label: 'position of the measuring zero', unit: 'mm' },
 ] as const;
 
