@@ -29,6 +29,15 @@ export function LivePlot({ heightPx }: { heightPx: number }) {
   );
 }
 
+/** Further figures of the same readings, below what stays in view: their table is higher than a tablet has room for. */
+export function LiveFurtherLimits() {
+  const { session, passId } = useOpenPass();
+  const outcome = useEvaluated(session, passId, (evaluated) => evaluated.outcome);
+  if (!isJudged(outcome)) return null;
+  const shown = { text: outcome.displayed.textMm, unit: shownUnit(outcome.displayed) };
+  return <FurtherLimits limits={furtherFigures(outcome.judgement, shown)} name="Further limits" />;
+}
+
 /** Limit rule, verdict in words and the distance to the limit. */
 export function LiveResult(props: { rules: SheetRules; signed: boolean; shownIn: ShownIn; items?: number }) {
   const { rules, signed, shownIn, items } = props;
@@ -63,12 +72,6 @@ export function LiveResult(props: { rules: SheetRules; signed: boolean; shownIn:
           Over any {local.lengthMm} mm: {withUnit(toleranceShown(local.deviationUm, unit), unit)} of{' '}
           {withUnit(toleranceShown(local.toleranceUm, unit), unit)}, {VERDICT_WORDS[local.verdict]}
         </p>
-      )}
-      {judged && (
-        <FurtherLimits
-          limits={furtherFigures(judged.judgement, { text: judged.displayed.textMm, unit })}
-          name="Further limits"
-        />
       )}
       {judged?.judgement.toleranceArithmetic && (
         <p className="text-sm text-ink2">

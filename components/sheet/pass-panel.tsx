@@ -4,7 +4,7 @@ import type { SheetFields } from '@/lib/sheet/types';
 import type { TestDefinition } from '@/standards/types';
 import { CheckList } from './check-list';
 import { FieldTables, SetUpFields } from './field-tables';
-import { LivePlot, LiveResult } from './live-result';
+import { LiveFurtherLimits, LivePlot, LiveResult } from './live-result';
 import { useEvaluated, useOpenPass } from './sheet-context';
 import type { SheetData } from './sheet-data';
 import { TextImportButton } from './text-import/text-import-button';
@@ -64,6 +64,7 @@ export function PassPanel(props: {
           items={layout.kind === 'check-list' ? layout.items.length : undefined}
         />
       </div>
+      <LiveFurtherLimits />
     </div>
   );
 }

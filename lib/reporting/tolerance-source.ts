@@ -10,18 +10,26 @@ interface Figure {
 
 /**
  * Where a tolerance comes from: who confirmed or replaced it, when and against what; else the contract or the catalogue's own source,
- * where a memory says that it is one. Further limits of the same readings follow where theirs is another.
+ * where a memory says that it is one. Further limits of the same readings follow where they stand otherwise; the catalogue has each
+ * one's own source.
  * @param code test code of the definition, for editions that are only a year
  */
 export function toleranceSource(tolerance: PlannedTolerance | null, code: string): string {
   if (!tolerance) return '';
-  const own = sourceOf(tolerance, code);
-  const further = (tolerance.also ?? []).flatMap(({ label, ...figure }) => {
-    const source = sourceOf({ ...figure, foundBy: '' }, code);
-    return source === sourceOf({ ...tolerance, foundBy: '' }, code) ? [] : [`${label}: ${source}`];
-  });
-  return [own, ...further].join('; ');
+  const also = tolerance.also ?? [];
+  const others = also.filter((figure) => standing(figure, code) !== standing(tolerance, code));
+  const likewise =
+    also.length > others.length ? [others.length > 0 ? 'other limits likewise' : 'further limits likewise'] : [];
+  return [
+    sourceOf(tolerance, code),
+    ...others.map(({ label, ...figure }) => `${label}: ${sourceOf({ ...figure, foundBy: '' }, code)}`),
+    ...likewise,
+  ].join('; ');
 }
+
+/** What a figure rests on, in short: who confirmed it, or of which kind its source is. */
+const standing = ({ provenance, confirmation }: Figure, code: string): string =>
+  confirmation ? confirmed(confirmation, code) : provenanceWords[provenance.kind];
 
 function sourceOf({ provenance, confirmation, foundBy }: Figure, code: string): string {
   const found = foundBy && foundBy !== 'contract' ? ` (${foundBy})` : '';
