@@ -20,6 +20,8 @@ const level = {
   edition,
   version: 1,
   source,
+  // Engine lathes have levelling tests of their own code.
+  machineKinds: { not: ['engine-lathe'] },
   appliesTo: { kind: 'machine' as const },
   method: 'angular-deviation',
   tolerance: { by: 'all' as const, unit: 'µm/m' as const, allUm: '40', provenance: levelLimit },

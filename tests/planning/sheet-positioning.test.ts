@@ -1,19 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { figures } from '@/lib/sheet/figures';
-import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import { proposedTargets } from '@/lib/sheet/proposed-targets';
 import type { Layout } from '@/standards/types';
-import {
-  cellsOf,
-  judged,
-  limit,
-  list,
-  orderOf,
-  outcomeOf,
-  ownDefinition,
-  reasonOf,
-  type Typed,
-} from './data/own-sheet';
+import { judged, limit, list, orderOf, outcomeOf, ownDefinition, reasonOf, type Typed } from './data/own-sheet';
 
 type TargetCycles = Extract<Layout, { kind: 'target-cycles' }>;
 const layout: TargetCycles = { kind: 'target-cycles', quantity: 'linear', cycles: 5, targets: [] };
