@@ -1,10 +1,8 @@
 import type { Db } from '@/db/client';
+import { ruleSet } from '@/lib/evaluation';
 import { newId } from '@/lib/id';
 import type { SheetOutcome, Verdict } from '@/lib/sheet/types';
 import { own } from './jobs';
-
-/** Names the rules that made a stored result; raised when a formula or the engine changes a figure. */
-export const ruleSet = 'witnessmark-1';
 
 export type JudgedOutcome = Extract<SheetOutcome, { state: 'partial' | 'complete' }>;
 

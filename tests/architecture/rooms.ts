@@ -36,6 +36,11 @@ export const rooms: Room[] = [
     uses: ['lib/units', 'lib/evaluation/index.ts', 'lib/sheet', 'lib/planning', 'lib/schemas', 'standards'],
     packages: none,
   },
+  {
+    path: 'lib/explaining',
+    uses: ['lib/units', 'lib/evaluation/index.ts', 'lib/sheet', 'lib/reporting', 'standards'],
+    packages: none,
+  },
   { path: 'lib/schemas', uses: ['lib/units', 'lib/auth/permissions.ts', 'lib/dates.ts'], packages: /^zod$/ },
   { path: 'lib/services', uses: ['db', 'lib', 'standards', 'templates/email'], packages: /^(knex|zod|sharp|node:.*)$/ },
   { path: 'lib/auth', uses: ['db', ...leaves], packages: /^(next|next-auth|react|@node-rs\/argon2|node:crypto)(\/|$)/ },

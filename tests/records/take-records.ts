@@ -1,7 +1,7 @@
 import { existsSync, mkdirSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import createKnex, { type Knex } from 'knex';
-import { ruleSet } from '@/db/queries/results';
+import { ruleSet } from '@/lib/evaluation';
 import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import type { Cells, SheetOutcome, SheetRules } from '@/lib/sheet/types';
 import { findDefinition } from '@/standards/registry';
