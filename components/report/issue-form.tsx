@@ -20,8 +20,9 @@ export function IssueForm({ jobId, blocking, toConfirm }: { jobId: string; block
       confirmed: z
         .boolean()
         .refine((confirmed) => confirmed || toConfirm === 0, 'Say that you have seen what is to be confirmed.'),
+      annex: z.boolean(),
     }),
-    defaultValues: { confirmed: false },
+    defaultValues: { confirmed: false, annex: false },
     send: async (body, idempotencyKey) => {
       try {
         return (await api<{ id: string }>(`/api/jobs/${jobId}/reports`, { method: 'POST', body, idempotencyKey })).data;
@@ -51,6 +52,11 @@ export function IssueForm({ jobId, blocking, toConfirm }: { jobId: string; block
           {errorAt('confirmed') && <FieldErrorLine>{errorAt('confirmed')}</FieldErrorLine>}
         </div>
       )}
+      <Checkbox
+        label="With the annex of calculations"
+        hint="How every figure came about, after the signatures; it makes the report longer"
+        {...form.register('annex')}
+      />
       {problem && (
         <Notice tone="oxide" title={problem.title} live>
           {problem.errors.length > 1 ? (

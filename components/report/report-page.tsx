@@ -1,5 +1,6 @@
 import type { ReportModel } from '@/lib/reporting/report-model';
 import { REPORT_WORDS } from '@/lib/reporting/words';
+import { AnnexSection } from './annex-section';
 import { ConditionsSection } from './conditions-section';
 import { InstrumentsSection } from './instruments-section';
 import { Headline, Letterhead } from './letterhead';
@@ -66,6 +67,7 @@ export function ReportPage(props: { model: ReportModel; photosAt: string }) {
           {REPORT_WORDS.program} {model.document.programVersion}
         </p>
       </ReportSection>
+      {model.annex && model.annex.length > 0 && <AnnexSection entries={model.annex} />}
     </article>
   );
 }

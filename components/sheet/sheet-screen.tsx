@@ -6,6 +6,7 @@ import { flushSync } from 'react-dom';
 import { Notice } from '@/components/ui/notice';
 import { allFields } from '@/lib/sheet/sheet-fields';
 import type { CellPointer } from '@/lib/sheet/types';
+import { HowItCameAbout } from './how-it-came-about';
 import { PassConditions } from './pass-conditions';
 import { PassPanel } from './pass-panel';
 import { PassTabs } from './pass-tabs';
@@ -159,6 +160,7 @@ export function SheetScreen({ data }: { data: SheetData }) {
               say={setSaid}
             />
             <div className="mt-5 max-w-2xl">
+              <HowItCameAbout data={data} />
               <SheetHistory key={`history ${live.version}`} sheetId={sheet.id} timeZone={data.timeZone} />
               <SheetPhotos sheetId={sheet.id} layout={data.definition.layout} readOnly={readOnly} />
               <Remark sheetId={sheet.id} live={live} readOnly={readOnly} again={again} />

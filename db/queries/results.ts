@@ -1,5 +1,5 @@
 import type { Db } from '@/db/client';
-import { ruleSet } from '@/lib/evaluation';
+import { ruleSet } from '@/lib/evaluation/rule-set';
 import { newId } from '@/lib/id';
 import type { SheetOutcome, Verdict } from '@/lib/sheet/types';
 import { own } from './jobs';

@@ -76,7 +76,14 @@ export async function addDemoJob(
   );
   await handIn(trx, inspector, jobId, at(demo.startsOn, 14, 45));
   if (demo.progress === 'in-check') return;
-  const report = await issueReport(trx, reviewer, jobId, true, origin, at(demo.startsOn, 15, 30));
+  const report = await issueReport(
+    trx,
+    reviewer,
+    jobId,
+    { confirmed: true, annex: false },
+    origin,
+    at(demo.startsOn, 15, 30),
+  );
   if (demo.progress === 'issued') return;
   const outcome = demo.progress;
   await signReport(

@@ -200,7 +200,14 @@ async function issueAndSign(
   { reviewer, customer, inspector }: People,
 ): Promise<void> {
   await handIn(trx, inspector, jobId, new Date('2026-03-12T11:00:00+01:00'));
-  const report = await issueReport(trx, reviewer, jobId, true, origin, new Date('2026-03-12T11:30:00+01:00'));
+  const report = await issueReport(
+    trx,
+    reviewer,
+    jobId,
+    { confirmed: true, annex: false },
+    origin,
+    new Date('2026-03-12T11:30:00+01:00'),
+  );
   await signReport(
     trx,
     inspector,

@@ -1,3 +1,4 @@
+import type { SheetExplanation } from '@/lib/explaining/explain-outcome';
 import type { Judgement, PlotSeries, Verdict } from '@/lib/sheet/types';
 import type { BoundComponent, ShownIn, SketchSpec } from '@/standards/types';
 
@@ -79,6 +80,8 @@ export interface ReportModel {
   }[];
   signatures: SignatureBlock[];
   statement: string;
+  /** On demand: how every result came about. Absent: the report was made without it. */
+  annex?: AnnexEntry[];
 }
 
 export interface Counts {
@@ -145,6 +148,13 @@ export interface TestBlock {
   check?: true;
   /** Absent in reports from before photographs could be added. */
   photos?: PhotoBlock[];
+}
+
+export interface AnnexEntry {
+  sheetOrder: number;
+  title: string;
+  passWords: string;
+  explanation: SheetExplanation;
 }
 
 export interface PhotoBlock {

@@ -133,6 +133,16 @@ export const STATE_WORDS: Record<ReportModel['document']['state'], string> = {
 };
 
 export const REPORT_WORDS = {
+  annex: {
+    heading: 'Annex: how each figure came about',
+    note: 'Formulas with the figures put in, from what was typed to the verdict. Figures with … go on; nothing was rounded on the way.',
+    step: 'step',
+    formula: 'formula',
+    numbers: 'with figures',
+    value: 'gives',
+    readings: 'Entries as typed',
+    ruleSet: 'rule set',
+  },
   title: 'Acceptance report',
   revision: 'revision',
   revisionShort: 'r',

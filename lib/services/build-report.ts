@@ -1,4 +1,5 @@
 import type { ReportSource } from '@/db/read-models/report-source';
+import { annex } from '@/lib/explaining/annex';
 import { buildReportModel } from '@/lib/reporting/build-report-model';
 import { formatTime } from '@/lib/reporting/format-time';
 import type { ReportModel } from '@/lib/reporting/report-model';
@@ -12,12 +13,12 @@ interface Issuing {
 }
 
 /** The report of a job as it stands: a draft to look at, or the document that is being issued. */
-export function buildReport(source: ReportSource, issuing: Issuing | null): ReportModel {
+export function buildReport(source: ReportSource, issuing: Issuing | null, withAnnex = false): ReportModel {
   const { board, organisation } = source;
   const at = issuing && formatTime(issuing.at, organisation.timeZone);
   const { handedIn } = source;
   const named = board.people.find((person) => person.role === 'inspector');
-  return buildReportModel({
+  const model = buildReportModel({
     stored: board,
     changes: source.changes,
     machine: {
@@ -53,4 +54,5 @@ export function buildReport(source: ReportSource, issuing: Issuing | null): Repo
       closed: remark.closedAt && formatTime(remark.closedAt, organisation.timeZone),
     })),
   });
+  return withAnnex ? { ...model, annex: annex(board) } : model;
 }

@@ -21,13 +21,14 @@ import { buildReport } from './build-report';
 
 /**
  * Checks the job once more and issues its report: the document is frozen, numbered, and handed to the worker for its PDF.
+ * `annex`: with the way to every figure.
  * @throws DomainError 422 when something blocks the report or was not confirmed; 409 when it is out already
  */
 export async function issueReport(
   trx: Knex.Transaction,
   viewer: Viewer,
   jobId: string,
-  confirmed: boolean,
+  { confirmed, annex }: { confirmed: boolean; annex: boolean },
   origin: RequestOrigin,
   issuedAt: Date = new Date(),
 ): Promise<{ id: string; number: string; revision: number }> {
@@ -52,7 +53,7 @@ export async function issueReport(
   const earlier = await latestReport(trx, jobId);
   const number = earlier?.number ?? (await nextReportNumber(trx, source.organisation.code, issuedAt.getUTCFullYear()));
   const revision = (earlier?.revision ?? 0) + 1;
-  const model = buildReport(source, { number, revision, at: issuedAt, by: viewer });
+  const model = buildReport(source, { number, revision, at: issuedAt, by: viewer }, annex);
   const modelText = JSON.stringify(model);
   const modelSha256 = createHash('sha256').update(modelText).digest('hex');
   const id = newId();

@@ -5,6 +5,7 @@ import { paginate } from '@/templates/report/flow/pager';
 import type { Kit } from '@/templates/report/flow/parts';
 import { Typesetter } from '@/templates/report/flow/typesetter';
 import type { Fonts } from '@/templates/report/fonts';
+import { annex } from '@/templates/report/sections/annex';
 import { conditions } from '@/templates/report/sections/conditions';
 import { headline } from '@/templates/report/sections/headline';
 import { instruments } from '@/templates/report/sections/instruments';
@@ -63,5 +64,6 @@ function sections(kit: Kit, model: ReportModel): FlowItem[] {
     ...remarks(kit, model),
     ...signatures(kit, model),
     ...statement(kit, model),
+    ...annex(kit, model),
   ];
 }

@@ -15,7 +15,9 @@ import { jobBoard } from '@/db/read-models/job-board';
 import { newId } from '@/lib/id';
 import { sheetState } from '@/lib/reporting/sheet-state';
 import { formatDecimal } from '@/lib/units/format';
+import { renderReportPdf } from '@/templates/report/render';
 import { ifMatch } from '@/tests/helpers/call-route';
+import { flat, pdfText } from '@/tests/helpers/pdf-text';
 import { answer, ashdowns, indicator, issue, issuedReport, measuredJob, millbrooks, sign } from './measured-job';
 import { Workshop } from './workshop';
 
@@ -63,6 +65,28 @@ describe('the check', () => {
     const hand = () => workshop.call(handIn, { method: 'POST', params: { id: jobId } });
     expect((await hand()).body).toEqual({ state: 'in-check' });
     expect((await hand()).status).toBe(409);
+  });
+
+  it('takes the annex of calculations in only on demand, and freezes it', async () => {
+    const made = async (annex: boolean | undefined) => {
+      const { jobId } = await measuredJob(workshop, ashdowns, {
+        ...{ 'SP-1a:S1': 0.4, 'AX-1a:Z1:S1': 0.4, 'PO-A:Z1': 0.4, 'CI-1:T1:X1:Z1': 0.4, 'LV-3': 0.4 },
+      });
+      const body = annex === undefined ? { confirmed: true } : { confirmed: true, annex };
+      const { body: issued } = await issue(workshop, jobId, true, { body });
+      return (await reportOf(issued.id))!.model;
+    };
+    expect((await made(undefined)).annex).toBeUndefined();
+    expect((await made(false)).annex).toBeUndefined();
+    const model = await made(true);
+    expect(model.annex!.map(({ sheetOrder }) => sheetOrder)).toEqual([1, 2, 3, 4, 5]);
+    const mandrel = model.annex!.find(({ title }) => title.startsWith('Z1 motion parallel'))!;
+    const steps = mandrel.explanation.steps.map(({ withNumbers, value }) => `${withNumbers} = ${value}`);
+    const pdf = flat((await pdfText(await renderReportPdf(model))).text);
+    expect(pdf).toContain('Annex: how each figure came about');
+    expect(pdf.replace(/ /g, '')).toContain(flat(steps[0]!.split(' = ')[0]!).replace(/ /g, ''));
+    const { text } = await pdfText(await renderReportPdf({ ...model, annex: undefined }));
+    expect(text).not.toContain('Annex: how each');
   });
 
   it('prints as done only what somebody did', async () => {

@@ -9,7 +9,10 @@ export interface Room {
   packages: RegExp;
 }
 
-const domain = ['lib/units', 'lib/evaluation/index.ts', 'lib/sheet', 'lib/planning', 'lib/reporting', 'lib/schemas'];
+const domain = [
+  ...['lib/units', 'lib/evaluation/index.ts', 'lib/explaining', 'lib/sheet'],
+  ...['lib/planning', 'lib/reporting', 'lib/schemas'],
+];
 const leaves = ['lib/errors.ts', 'lib/env.ts', 'lib/id.ts', 'lib/dates.ts', 'lib/version.ts', 'lib/time-zones.ts'];
 const calculators = ['lib/evaluation', 'lib/conformity', 'lib/uncertainty', 'lib/correction'];
 const none = /^$/;
@@ -34,11 +37,12 @@ export const rooms: Room[] = [
   {
     path: 'lib/reporting',
     uses: ['lib/units', 'lib/evaluation/index.ts', 'lib/sheet', 'lib/planning', 'lib/schemas', 'standards'],
+    types: ['lib/explaining'],
     packages: none,
   },
   {
     path: 'lib/explaining',
-    uses: ['lib/units', 'lib/evaluation/index.ts', 'lib/sheet', 'lib/reporting', 'standards'],
+    uses: ['lib/units', 'lib/evaluation/index.ts', 'lib/sheet', 'lib/planning', 'lib/reporting', 'standards'],
     packages: none,
   },
   { path: 'lib/schemas', uses: ['lib/units', 'lib/auth/permissions.ts', 'lib/dates.ts'], packages: /^zod$/ },
@@ -122,7 +126,10 @@ export const rooms: Room[] = [
   { path: 'db/server', uses: ['db', 'knexfile.ts'], packages: any },
   {
     path: 'db',
-    uses: ['lib/errors.ts', 'lib/env.ts', 'lib/id.ts', 'lib/dates.ts', 'lib/schemas', 'lib/units'],
+    uses: [
+      ...['lib/errors.ts', 'lib/env.ts', 'lib/id.ts', 'lib/dates.ts', 'lib/schemas', 'lib/units'],
+      'lib/evaluation/rule-set.ts',
+    ],
     types: ['lib/auth', 'lib/reporting', 'lib/sheet', 'lib/planning', 'lib/evaluation', 'standards'],
     packages: /^(knex|pg|node:crypto)$/,
   },

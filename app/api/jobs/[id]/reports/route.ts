@@ -19,9 +19,9 @@ export const GET = route({
 export const POST = route({
   action: 'report.issue',
   params: idParams,
-  body: z.object({ confirmed: z.boolean() }),
+  body: z.object({ confirmed: z.boolean(), annex: z.boolean().default(false) }),
   async handle({ trx, viewer, params, body, request }) {
-    const issued = await issueReport(trx, viewer, params.id, body.confirmed, requestOrigin(request));
+    const issued = await issueReport(trx, viewer, params.id, body, requestOrigin(request));
     return { status: 201, body: issued, headers: { location: `/api/reports/${issued.id}` } };
   },
 });
