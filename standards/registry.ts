@@ -1,5 +1,7 @@
 import { definitions as commonPractice } from './common-practice/definitions';
 import * as commonPracticeSource from './common-practice/source';
+import { definitions as functionChecks } from './function-checks/definitions';
+import * as functionChecksSource from './function-checks/source';
 import { definitions as rotation } from './iso-230-7-2015/definitions';
 import * as rotationSource from './iso-230-7-2015/source';
 import { definitions as engineLathes } from './iso-1708-1989/definitions';
@@ -34,6 +36,7 @@ const books = [
   { ...geometric2004Source, definitions: geometric2004 },
   { ...engineLathesSource, definitions: engineLathes },
   { ...commonPracticeSource, definitions: commonPractice },
+  { ...functionChecksSource, definitions: functionChecks },
   { ...positioningSource, definitions: positioning },
   { ...feedsAndSpeedsSource, definitions: feedsAndSpeeds },
   { ...testPieceSource, definitions: testPiece },

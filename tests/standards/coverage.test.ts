@@ -26,6 +26,7 @@ const wanted: Record<string, string[]> = {
     ...['LV-1', 'LV-2', 'LV-3', 'MT-1', 'PO-B', 'TU-3x', 'RP-Z', 'RP-Y', 'RP-S', 'TC-1a', 'TC-1b', 'TC-2'],
     ...['GT-1', 'GT-2', 'GB-1', 'GB-2', 'GB-3a', 'GB-3b', 'GX-1', 'TCH-1', 'SW-1'],
   ],
+  'function checks': Array.from({ length: 16 }, (_, k) => `FC-${String(k + 1).padStart(2, '0')}`),
 };
 
 const titled = (code: string, edition: string) => (edition ? `${code}:${edition}` : code);
