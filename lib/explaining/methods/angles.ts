@@ -71,13 +71,13 @@ export const angleGuides: MethodGuide[] = [
       { ...positions, words: 'distance from the axis along the slide, with its sign; two or more' },
       turned,
       measuringLength,
+      maybe('sag', 'µm', 'fall of the disc or mandrel at each position along the reading direction'),
     ],
     outputs: [
       means,
       fitSlope,
       given('e', 'µm', 'the figure that is judged'),
       given('direction', '', 'concave, convex or none'),
-      reversed,
     ],
     sign: 'Positive: concave, a faced surface is deeper in the middle. Negative: convex.',
     sensitiveTo: [
