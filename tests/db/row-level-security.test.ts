@@ -28,7 +28,7 @@ beforeAll(async () => {
   );
   const outside = new Set<string>(globalTables.map((table) => table.name));
   tables = rows.map((row: { relname: string }) => row.relname).filter((name: string) => !outside.has(name));
-  // The two tables that the demo scenario leaves empty.
+  // Tables that the demo scenario leaves empty.
   await as(staff(ours), async (trx) => {
     await trx('invitations').insert({
       organisation_id: ours,
@@ -56,15 +56,35 @@ beforeAll(async () => {
       html_body: 'h',
       message_id: 'm',
     });
+    const fileId = newId();
     await trx('files').insert({
       organisation_id: ours,
-      id: newId(),
+      id: fileId,
       key: 'k',
       kind: 'photo',
       name: 'n',
       content_type: 'image/png',
       byte_length: 1,
       sha256: 'x',
+    });
+    const { id: sheetId } = await trx('sheets').first('id');
+    await trx('sheet_photos').insert({
+      organisation_id: ours,
+      id: newId(),
+      sheet_id: sheetId,
+      file_id: fileId,
+      width_px: 4,
+      height_px: 3,
+      added_by: 'A',
+    });
+    await trx('plan_templates').insert({
+      organisation_id: ours,
+      id: newId(),
+      manufacturer: 'M',
+      model: 'm',
+      name: 'whole',
+      choices: '{}',
+      account_name: 'A',
     });
   });
 });
