@@ -370,6 +370,8 @@ export interface TestDefinition {
    * same words are done one after another.
    */
   setUpTogether?: string;
+  /** Stands first among what is set up together, because the others rest on it. */
+  leads?: true;
   /** Minutes for setting up and measuring once, until the organisation's own past says better (common practice, our estimate). */
   minutes?: number;
   cautions: CautionId[];

@@ -47,7 +47,7 @@ export const workingStepWords: Record<WorkingStepName, string> = {
   'guide-bush': 'Gang slide and guide bush',
   'live-tools': 'Driven tools',
   'rotary-axes': 'Rotary axes',
-  'sub-spindle-run-out': 'Sub-spindle run-outs',
+  'sub-spindle-run-out': 'Sub-spindle by itself: run-outs and its own motion',
   'sub-spindle-coaxiality': 'Main spindle to sub-spindle',
   'axes-to-sub-spindle': 'Axes and turrets to the sub-spindle',
   'lost-motion': 'Lost motion',

@@ -9,10 +9,13 @@ export interface ContractTolerance {
   local?: { toleranceUm: DecimalText; lengthMm: DecimalText };
 }
 
-/** The planned sheet with the tolerance that the contract gives instead of the catalogue's. */
+/**
+ * The planned sheet with the tolerance that the contract gives instead of the catalogue's. Further figures of the same readings keep
+ * their own limits: the contract speaks of the judged figure.
+ */
 export function withContractTolerance(planned: PlannedSheet, contract: ContractTolerance): PlannedSheet {
   const provenance = { kind: 'contract' as const, text: contract.text };
-  const basis = planned.tolerance?.basis;
+  const { basis, also } = planned.tolerance ?? {};
   return {
     ...planned,
     tolerance: {
@@ -20,6 +23,7 @@ export function withContractTolerance(planned: PlannedSheet, contract: ContractT
       ...(contract.perLength ? { perLength: contract.perLength } : {}),
       ...(contract.local ? { local: { ...contract.local, provenance } } : {}),
       ...(basis ? { basis } : {}),
+      ...(also ? { also } : {}),
       foundBy: 'contract',
       provenance,
     },

@@ -33,14 +33,17 @@ export function planSheets(
     )
     .map((entry) => ({ entry, rank: rank(entry, makeUp) }))
     .sort((a, b) => compare(a.rank, b.rank))
-    .map(({ entry: { definition, component } }) => planSheet(definition, component, makeUp, values));
-  return distinct(
-    keepTogether(
-      sorted,
-      ({ workingStep }) => workingStep,
-      ({ setUpTogether }) => setUpTogether,
-    ),
+    .map(({ entry: { definition, component } }) => ({
+      sheet: planSheet(definition, component, makeUp, values),
+      leads: definition.leads === true,
+    }));
+  const together = keepTogether(
+    sorted,
+    ({ sheet }) => sheet.workingStep,
+    ({ sheet }) => sheet.setUpTogether,
+    ({ leads }) => leads,
   );
+  return distinct(together.map(({ sheet }) => sheet));
 }
 
 function planSheet(
@@ -97,7 +100,9 @@ function distinct(sheets: PlannedSheet[]): PlannedSheet[] {
 function plannedStep(definition: TestDefinition, component: BoundComponent, makeUp: MakeUp): number {
   const isSub = (id: string | undefined) => makeUp.spindles.some((one) => one.id === id && one.type === 'sub');
   const isTool = makeUp.spindles.some(({ id, type }) => id === component.spindle && type === 'tool');
-  const relation = component.axis !== undefined || component.turret !== undefined;
+  // The sub-spindle against the axis that carries it belongs to the sub-spindle itself: first its angle, then its offset.
+  const own = definition.appliesTo.kind === 'sub-spindle-and-its-axis';
+  const relation = !own && (component.axis !== undefined || component.turret !== undefined);
   const against = (relation && isSub(component.spindle)) || (isTool && isSub(component.reference));
   return against ? Math.max(definition.workingStep, workingSteps['axes-to-sub-spindle']) : definition.workingStep;
 }

@@ -150,5 +150,6 @@ export const mandrelTrueness: TestDefinition = {
     'Drawing it in with another force than in the tests that follow.',
   ],
   setUpTogether: 'test mandrel in {spindle}',
+  leads: true,
   minutes: 5,
 };

@@ -169,7 +169,7 @@ export const turretIndexing: TestDefinition = {
     'Trying only the stations that carry tools.',
     'Adjusting a sensor until the alarm goes, when it is the clamp that does not close.',
   ],
-  setUpTogether: 'machine running without tools',
+  setUpTogether: '{turret} indexing by itself',
   minutes: 15,
 };
 

@@ -44,7 +44,7 @@ function subSpindleParallel(plane: Extract<Plane, 'ZX' | 'YZ'>): TestDefinition 
       positiveMeans: zx ? '+ free end leans toward +X' : '+ free end rises',
     },
     dependsOn: { components: ['spindle'], moved: ['axis'], positioned: [] },
-    workingStep: workingSteps['sub-spindle-coaxiality'],
+    workingStep: workingSteps['sub-spindle-run-out'],
     judgedFigure: `least-squares slope over the measuring length${zx ? '' : ', mandrel sag added'}`,
     positiveMeans: zx ? 'free end leans toward +X' : 'free end rises',
     negativeMeans: zx ? 'free end leans toward −X' : 'free end falls',
