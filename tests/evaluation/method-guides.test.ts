@@ -6,16 +6,17 @@ import { methodGuides } from '@/lib/explaining/methods/method-guides';
 import { exampleInputs } from './example-inputs';
 
 type Shape = Record<string, z.ZodType>;
+type Schema = { shape: Shape } | { options: { shape: Shape }[] };
 
 /** The fields of a method's schema, whether it stands alone or is one kind of several. */
 function shapeOf(method: string, kind: string | undefined): Shape {
-  const all = evaluationInput.options.flatMap((option) => ('options' in option ? option.options : [option]));
-  const found = all.find(({ shape }) => {
-    const { method: own, kind: ownKind } = shape as unknown as Record<string, z.ZodLiteral<string> | undefined>;
-    return own?.value === method && (method !== 'correction' || ownKind?.value === kind);
-  });
+  const all = (evaluationInput.options as unknown as Schema[]).flatMap((one) =>
+    'options' in one ? one.options : [one],
+  );
+  const is = (schema: z.ZodType | undefined, value: string) => schema?.safeParse(value).success === true;
+  const found = all.find(({ shape }) => is(shape.method, method) && (kind === undefined || is(shape.kind, kind)));
   if (!found) throw new Error(`no schema of ${method} ${kind ?? ''}`);
-  return found.shape as unknown as Shape;
+  return found.shape;
 }
 
 const kindOf = (input: object) => ('kind' in input ? String(input.kind) : undefined);
