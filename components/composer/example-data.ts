@@ -1,6 +1,7 @@
 import type { SheetData } from '@/components/sheet/sheet-data';
 import { componentWords } from '@/lib/planning/component-words';
 import type { exampleSheet } from '@/lib/planning/example-sheet';
+import { wordsOnSheet } from '@/lib/planning/words-on-sheet';
 import { cautionText } from '@/standards/cautions';
 import { codeTitle } from '@/standards/registry';
 import type { TestDefinition } from '@/standards/types';
@@ -25,6 +26,7 @@ export function exampleData(
     place: componentWords(sheet.component, machine.makeUp),
     definition,
     cautions: definition.cautions.map(cautionText),
+    words: wordsOnSheet(definition),
     rules: {
       definition: sheet.definition,
       tolerance: sheet.tolerance,

@@ -1,5 +1,6 @@
 import type { LeftOutReason } from '@/lib/schemas/job';
 import type { CellPointer, SheetRules, Verdict } from '@/lib/sheet/types';
+import type { GlossaryTerm } from '@/standards/glossary';
 import type { BoundComponent, TestDefinition } from '@/standards/types';
 import type { KnownCell } from './operation-log';
 
@@ -12,6 +13,8 @@ export interface SheetData {
   place: string;
   definition: TestDefinition;
   cautions: string[];
+  /** Trade words that occur on the sheet. */
+  words: GlossaryTerm[];
   rules: SheetRules;
   /** `ISO 13041-1:2020`. */
   codeTitle: string;

@@ -1,6 +1,8 @@
 'use client';
 
 import Link from 'next/link';
+import type { ReactNode } from 'react';
+import { TermList } from '@/components/help/term-list';
 import { SetUpSketch } from '@/components/sketches/set-up-sketch';
 import { isSettled } from '@/lib/planning/is-settled';
 import { provenanceWords } from '@/lib/reporting/record-words';
@@ -40,6 +42,21 @@ export function SheetHead({ data }: { data: SheetData }) {
   );
 }
 
+/** Help in place: it comes with the sheet, so that it is there without network. */
+function Fold({ title, children }: { title: string; children: ReactNode }) {
+  return (
+    <details className="-mt-px border-y border-line">
+      <summary className="flex min-h-12 items-center font-semibold">
+        <span className="mr-2" aria-hidden="true">
+          ▸
+        </span>
+        {title}
+      </summary>
+      {children}
+    </details>
+  );
+}
+
 /** How it is done, how large the deviation may be, and where both come from. */
 export function SheetBackground({ data }: { data: SheetData }) {
   const { definition, rules, codeTitle } = data;
@@ -47,19 +64,29 @@ export function SheetBackground({ data }: { data: SheetData }) {
   const check = definition.layout.kind === 'check-list';
   return (
     <div className="grid gap-3">
-      <details className="border-y border-line">
-        <summary className="flex min-h-12 items-center font-semibold">
-          <span className="mr-2" aria-hidden="true">
-            ▸
-          </span>
-          {check ? 'How it is checked' : 'How it is measured'}, {definition.procedure.length} steps
-        </summary>
-        <ol className="mb-3 grid list-decimal gap-1.5 pl-6 text-[15px] leading-snug marker:text-ink2">
-          {definition.procedure.map((step) => (
-            <li key={step}>{step}</li>
-          ))}
-        </ol>
-      </details>
+      <div>
+        <Fold title={`${check ? 'How it is checked' : 'How it is measured'}, ${definition.procedure.length} steps`}>
+          <ol className="mb-3 grid list-decimal gap-1.5 pl-6 text-[15px] leading-snug marker:text-ink2">
+            {definition.procedure.map((step) => (
+              <li key={step}>{step}</li>
+            ))}
+          </ol>
+        </Fold>
+        {definition.usualMistakes && definition.usualMistakes.length > 0 && (
+          <Fold title="Usual mistakes">
+            <ul className="mb-3 grid list-disc gap-1.5 pl-6 text-[15px] leading-snug marker:text-ink2">
+              {definition.usualMistakes.map((mistake) => (
+                <li key={mistake}>{mistake}</li>
+              ))}
+            </ul>
+          </Fold>
+        )}
+        {data.words.length > 0 && (
+          <Fold title="Words on this sheet">
+            <TermList terms={data.words} className="mb-3 text-[15px] leading-snug" />
+          </Fold>
+        )}
+      </div>
       <section aria-labelledby="tolerance" className="text-[15px] leading-snug text-ink2">
         <h2 id="tolerance" className="text-base font-semibold text-ink">
           {toleranceWords(tolerance, rules.direction, check ? 'items' : definition.shownIn)}

@@ -51,6 +51,7 @@ export default async function CataloguePage({ searchParams }: { searchParams: Pr
         note="Every test that a plan can be made of, in working order"
         action={
           <div className="flex flex-wrap gap-3">
+            <LinkButton href="/catalogue/glossary">Words of the trade</LinkButton>
             <LinkButton href="/catalogue/values">Values as a table</LinkButton>
             {can(viewer.roles, 'catalogue.compose') && (
               <LinkButton href="/catalogue/own/new">Compose an own test</LinkButton>
@@ -70,6 +71,13 @@ export default async function CataloguePage({ searchParams }: { searchParams: Pr
           >
             {label}
           </Link>
+        ))}
+      </nav>
+      <nav aria-label="Codes" className="mt-2 flex flex-wrap gap-x-5">
+        {codes.map(({ code }) => (
+          <a key={code.slug} href={`#${code.slug}`} className="inline-flex min-h-11 items-center text-blue underline">
+            {code.title}
+          </a>
         ))}
       </nav>
       {codes.map(({ code, lines }) => {

@@ -11,6 +11,7 @@ import { requireViewer, scopeOf } from '@/lib/auth/session';
 import type { Viewer } from '@/lib/auth/viewer';
 import { componentWords } from '@/lib/planning/component-words';
 import { definitionOf } from '@/lib/planning/definition-of';
+import { wordsOnSheet } from '@/lib/planning/words-on-sheet';
 import { id as isId } from '@/lib/schemas/common';
 import { closedBecause, rulesOf } from '@/lib/services/keep-readings';
 import { cautionText } from '@/standards/cautions';
@@ -61,6 +62,7 @@ function sheetData(viewer: Viewer, view: SheetView, around: SheetSurroundings): 
     place: componentWords(sheet.component, job.makeUp),
     definition,
     cautions: definition.cautions.map(cautionText),
+    words: wordsOnSheet(definition),
     rules: rulesOf(sheet, job.decisionRule),
     codeTitle: codeTitle(code, edition),
     passes: view.passes.map(({ takenAt, result, ...pass }) => ({
