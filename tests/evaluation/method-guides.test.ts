@@ -1,68 +1,72 @@
 import { describe, expect, it } from 'vitest';
-import type { z } from 'zod';
 import { evaluateUnknown, evaluationInput } from '@/lib/evaluation';
 import { explain } from '@/lib/explaining/explain';
-import { methodGuides } from '@/lib/explaining/methods/method-guides';
-import { exampleInputs } from './example-inputs';
+import { allGuides } from '@/lib/explaining/methods/all-guides';
 
-type Shape = Record<string, z.ZodType>;
-type Schema = { shape: Shape } | { options: { shape: Shape }[] };
-
-/** The fields of a method's schema, whether it stands alone or is one kind of several. */
-function shapeOf(method: string, kind: string | undefined): Shape {
-  const all = (evaluationInput.options as unknown as Schema[]).flatMap((one) =>
-    'options' in one ? one.options : [one],
-  );
-  const is = (schema: z.ZodType | undefined, value: string) => schema?.safeParse(value).success === true;
-  const found = all.find(({ shape }) => is(shape.method, method) && (kind === undefined || is(shape.kind, kind)));
-  if (!found) throw new Error(`no schema of ${method} ${kind ?? ''}`);
-  return found.shape;
+interface ObjectSchema {
+  shape: Record<string, { safeParse(value: unknown): { success: boolean }; value?: unknown }>;
 }
 
-const kindOf = (input: object) => ('kind' in input ? String(input.kind) : undefined);
-const common = new Set(['method', 'deviation', 'judgedBy', 'signed']);
-
-it('there is a guide for every method and every kind of correction, each at its own address', () => {
-  const wanted = new Set(
-    exampleInputs.map((input) => (input.method === 'correction' ? `correction-${input.kind}` : input.method)),
+/** Schema of the kind of input that an example is. */
+function schemaOf(input: { method: string; kind?: string }): ObjectSchema {
+  const schemas = (evaluationInput.options as readonly unknown[]).flatMap((option) =>
+    'options' in (option as object) ? (option as { options: ObjectSchema[] }).options : [option as ObjectSchema],
   );
-  expect(methodGuides.map(({ slug }) => slug).sort()).toEqual([...wanted].sort());
-  expect(wanted.size).toBe(35);
-});
+  const takes = (schema: ObjectSchema, field: string, value: unknown) =>
+    schema.shape[field]?.safeParse(value).success === true;
+  return schemas.find(
+    (schema) =>
+      takes(schema, 'method', input.method) && (input.method !== 'correction' || takes(schema, 'kind', input.kind)),
+  )!;
+}
 
-describe.each(methodGuides.map((guide) => ({ slug: guide.slug, guide })))('$slug', ({ guide }) => {
-  const { method, example, inputs, outputs } = guide;
-  const kind = method === 'correction' ? kindOf(example.input) : undefined;
-  const result = evaluateUnknown(example.input) as Record<string, unknown>;
+const judged = ['method', 'deviation', 'judgedBy', 'signed'];
+const name = (field: { name: string }) => field.name;
 
-  it('names the fields of its input as the interface has them, and which may stay out', () => {
-    const shape = Object.entries(shapeOf(method, kind)).filter(
-      ([name]) => name !== 'method' && (name !== 'kind' || method !== 'correction'),
+describe('guides of the methods', () => {
+  it('there is one for every method and every correction', () => {
+    const methods = evaluationInput.options.flatMap((option) =>
+      'options' in option
+        ? option.options.map((one) => `correction ${one.shape.kind.value}`)
+        : [option.shape.method.value],
     );
-    const listed = (fields: { name: string; optional: boolean }[]) =>
-      fields.map(({ name, optional }) => `${name}${optional ? '?' : ''}`).sort();
-    expect(listed(inputs.map(({ name, optional }) => ({ name, optional: optional === true })))).toEqual(
-      listed(shape.map(([name, schema]) => ({ name, optional: schema.isOptional() }))),
+    const described = allGuides.map(({ method, example }) =>
+      method === 'correction' && example.input.method === 'correction' ? `correction ${example.input.kind}` : method,
     );
+    expect([...described].sort()).toEqual([...methods].sort());
+    expect(new Set(allGuides.map(({ slug }) => slug)).size).toBe(allGuides.length);
+    expect(allGuides.filter(({ group }) => !['helpers', 'corrections'].includes(group))).toHaveLength(22);
   });
 
-  it('names every field of the result that inputs of this method give', () => {
-    const own = exampleInputs.filter((input) => input.method === method && (!kind || kindOf(input) === kind));
-    const results = [example.input, ...own].map((input) => evaluateUnknown(input));
-    const seen = new Set(results.flatMap((one) => Object.keys(one)).filter((name) => !common.has(name)));
-    if (method === 'correction') seen.delete('kind');
-    const names = outputs.map(({ name }) => name);
-    expect([...seen].filter((name) => !names.includes(name))).toEqual([]);
-    const always = outputs.filter(({ optional }) => !optional).map(({ name }) => name);
-    expect(always.filter((name) => results.some((one) => !(name in one)))).toEqual([]);
+  it.each(allGuides.map((guide) => [guide.slug, guide] as const))('%s lists the fields of its input', (_, guide) => {
+    const { shape } = schemaOf(guide.example.input);
+    const told = guide.method === 'correction' ? ['method', 'kind'] : ['method'];
+    expect(guide.inputs.map(name).sort()).toEqual(
+      Object.keys(shape)
+        .filter((field) => !told.includes(field))
+        .sort(),
+    );
+    for (const { name: field, optional = false } of guide.inputs) {
+      expect(shape[field]!.safeParse(undefined).success, `${guide.slug} ${field} may be left out`).toBe(optional);
+    }
   });
 
-  it('has an example that is evaluated and explained, and sentences that are whole', () => {
-    expect(result.method).toBe(method);
-    const text = JSON.stringify(explain(example.input, evaluateUnknown(example.input)));
-    expect(text).not.toMatch(/undefined|NaN|null/);
-    for (const sentence of [guide.sentence, guide.purpose, example.words, ...guide.sensitiveTo])
-      expect(sentence).toMatch(/^\S.*[.]$/s);
-    expect(guide.source.text.length).toBeGreaterThan(10);
-  });
+  it.each(allGuides.map((guide) => [guide.slug, guide] as const))(
+    '%s: its example is evaluated, explained, and gives the fields that are listed',
+    (_, guide) => {
+      const result = evaluateUnknown(guide.example.input);
+      const own = Object.keys(result).filter(
+        (field) => ![...judged, 'kind'].includes(field) && result[field as never] !== undefined,
+      );
+      expect(own.filter((field) => !guide.outputs.some((output) => output.name === field))).toEqual([]);
+      expect(guide.outputs.filter(({ optional }) => !optional).map(name)).toEqual(
+        guide.outputs.filter((output) => !output.optional && own.includes(output.name)).map(name),
+      );
+      const { steps } = explain(guide.example.input, result);
+      expect(steps.length).toBeGreaterThan(0);
+      expect(guide.title.length).toBeGreaterThan(5);
+      expect(guide.sentence).toMatch(/\.$/);
+      expect(guide.source.text.length).toBeGreaterThan(10);
+    },
+  );
 });

@@ -1,86 +1,73 @@
 import type { EvaluationInput } from '@/lib/evaluation';
+import { shiftInputs, shiftOutputs } from './axes';
 import { type GuideField, type GuideSource, given, type MethodGuide, maybe } from './method-guide';
 
-type CorrectionInput = Extract<EvaluationInput, { method: 'correction' }>;
-type Own = Pick<MethodGuide, 'title' | 'sentence' | 'purpose' | 'formulas' | 'inputs' | 'sign' | 'sensitiveTo'> & {
-  outputs: GuideField[];
-  source: GuideSource;
-  example: { words: string; input: CorrectionInput };
-};
-
-const common = [given('formula', '', 'the formula in words'), given('verify', '', 'how to make sure afterwards')];
-const practice: GuideSource = {
-  kind: 'common-practice',
-  text: 'workshop practice; signs are verified by measuring again',
-};
+const practice = (text: string): GuideSource => ({ kind: 'common-practice', text });
 const derived = (text: string): GuideSource => ({ kind: 'derived', text });
+const advice = [given('formula', '', 'that the amounts come from'), given('verify', '', 'what to do afterwards')];
 
-const correction = (own: Own): MethodGuide => ({
-  ...own,
-  slug: `correction-${own.example.input.kind}`,
-  method: 'correction',
-  group: 'corrections',
-  outputs: [...own.outputs, ...common],
-});
+/** What all corrections share; each is told apart by its kind. */
+function guide(
+  own: Omit<MethodGuide, 'method' | 'group' | 'outputs' | 'example'> & {
+    outputs: GuideField[];
+    example: { words: string; input: Extract<EvaluationInput, { method: 'correction' }> };
+  },
+): MethodGuide {
+  return { ...own, method: 'correction', group: 'corrections', outputs: [...own.outputs, ...advice] };
+}
 
-const feed = 'present value in counts, lost motion found in µm at the slide';
-const newValues = 'change and new value in counts, not rounded, and the new whole count';
+const D1 = given('D1', 'mm', 'diameter near the headstock');
+const D2 = given('D2', 'mm', 'diameter of the far collar');
 
 export const correctionGuides: MethodGuide[] = [
-  correction({
-    title: 'New value for lost motion',
-    sentence: 'What to enter in the control after lost motion was measured.',
+  guide({
+    slug: 'correct-lost-motion',
+    title: 'New value for lost motion in the control',
+    source: practice('play that is found is added to the value that the control has'),
+    sentence: 'The control’s compensation after lost motion was measured, for cutting feed and rapid apart.',
     purpose:
-      'For the compensation values at cutting feed and at rapid. It adds what was found to what stands there, doubled where the control counts diameters, and warns where the mechanics should be looked at first.',
+      'For a control that keeps a value for lost motion. What is still found is added to what it has, counted as the control counts. Above a limit of your own the mechanics come first.',
     formulas: ['new = present + lost motion · (2 on diameter) / unit'],
     inputs: [
-      given('unit', 'µm', 'one count of the control'),
+      given('unit', 'µm', 'what one count of the control is worth'),
       given('basis', '', 'radius or diameter: what the control’s value counts in'),
-      maybe('cuttingFeed', 'counts, µm', feed),
-      maybe('rapid', 'counts, µm', feed),
-      maybe('limit', 'µm', 'above it the mechanics come first'),
+      maybe('cuttingFeed', 'counts, µm', 'present value and lost motion found; this or rapid is needed'),
+      maybe('rapid', 'counts, µm', 'the same at rapid'),
+      maybe('limit', 'µm', 'above it the mechanics are looked at first'),
     ],
     outputs: [
-      maybe('cuttingFeed', 'counts', newValues),
-      maybe('rapid', 'counts', newValues),
-      maybe('mechanicsFirst', '', 'whether a figure lies above the limit'),
+      maybe('cuttingFeed', 'counts', 'change, new value, and the whole count to enter'),
+      maybe('rapid', 'counts', 'the same at rapid'),
+      maybe('mechanicsFirst', '', 'whether the limit is passed'),
     ],
-    sign: 'Lost motion positive: play that is not compensated.',
-    sensitiveTo: ['The sign that a control uses: enter, measure again, and turn it round where it has grown.'],
-    source: practice,
+    sign: 'Lost motion positive: play that is not compensated yet.',
+    sensitiveTo: ['The sign of the control: if the play has grown after the change, it is the other one.'],
     example: {
-      words: 'A control that counts in µm on the diameter.',
+      words: '19 counts of 1 µm on diameter, too much by 8 µm at the slide.',
       input: {
         method: 'correction',
         kind: 'lost-motion',
         unit: '1',
         basis: 'diameter',
         cuttingFeed: { present: '19', lostMotion: '-8' },
-        rapid: { present: '22', lostMotion: '3' },
         limit: '20',
       },
     },
   }),
-  correction({
-    title: 'Amount of a reference shift',
-    sentence: 'What to enter for an axis that stands beside its reference.',
-    purpose: 'The figures of the reference shift with what to do about them: a small trial first, then all of it.',
-    formulas: ['shift = 1000 · (target − found), half of it on diameter', 'in the control: shift · factor'],
-    inputs: [
-      given('target', 'mm', 'what the control should show'),
-      given('found', 'mm', 'what it shows'),
-      given('basis', '', 'radius or diameter'),
-      maybe('controlFactor', '', '1 (else) or 2'),
-    ],
-    outputs: [
-      given('shift', 'µm', 'way that the slide lacks in +'),
-      given('controlShift', 'µm', 'as the control counts it'),
-    ],
-    sign: 'Shift positive: the slide lacks way in +.',
-    sensitiveTo: ['Software limits and change positions move with it.'],
-    source: practice,
+  guide({
+    slug: 'correct-reference',
+    title: 'Shift of a reference point',
+    source: practice('target less found, half of it on diameter'),
+    sentence: 'How far to shift a reference, and what to enter in a control that counts on diameter.',
+    purpose:
+      'After a reference point was found off. The shift is given as the way of the slide and as the control counts it. Begin with a small amount and see which way it goes.',
+    formulas: ['shift = 1000·(target − found), half of it on diameter', 'shift in the control = shift · factor'],
+    inputs: shiftInputs,
+    outputs: shiftOutputs,
+    sign: 'Positive: the slide lacks this way in the plus direction.',
+    sensitiveTo: ['Software limits and change positions move with the reference: check them again.'],
     example: {
-      words: 'An X that shows diameters and shifts them.',
+      words: 'A diameter found 0.060 mm too large.',
       input: {
         method: 'correction',
         kind: 'reference-shift',
@@ -91,114 +78,120 @@ export const correctionGuides: MethodGuide[] = [
       },
     },
   }),
-  correction({
-    title: 'Pitch table',
-    sentence: 'Compensation values along an axis from its mean deviations.',
+  guide({
+    slug: 'correct-pitch',
+    title: 'Pitch compensation table',
+    source: practice('mean bidirectional deviation at equal intervals, linear between the targets'),
+    sentence: 'From the means of a positioning test to the table that a control takes.',
     purpose:
-      'After a positioning test. The mean of both directions is taken between the targets in a straight line and turned round; differences of rounded values are used, so that nothing adds up over the travel.',
+      'For an axis whose systematic deviation is compensated point by point. Values are rounded so that incremental ones add up to the absolute ones and nothing drifts.',
     formulas: [
-      'absolute = −(mean at the point − mean at the reference) / unit',
-      'incremental = difference of neighbouring absolute values',
+      'absolute(k) = round(−(mean(p) − mean(reference))/unit)',
+      'incremental(k) = absolute(k) − absolute(k − 1)',
     ],
     inputs: [
-      given('positions', 'mm', 'targets of the positioning test, two or more'),
-      given('means', 'µm', 'mean of both directions at each'),
-      given('referencePosition', 'mm', 'where the axis is referenced'),
+      given('positions', 'mm', 'targets, two or more, none twice'),
+      given('means', 'µm', 'mean bidirectional deviation at each'),
+      given('referencePosition', 'mm', 'where the table is zero'),
       given('start', 'mm', 'first point of the table'),
-      given('end', 'mm', 'its end'),
+      given('end', 'mm', 'last point, above the first'),
       given('interval', 'mm', 'distance of the points'),
-      given('unit', 'µm', 'one count of the control'),
+      given('unit', 'µm', 'what one count of the control is worth'),
       given('form', '', 'incremental or absolute'),
     ],
-    outputs: [given('points', 'mm', 'points of the table'), given('values', 'counts', 'value at each')],
-    sign: 'A value turns the deviation round.',
+    outputs: [given('points', 'mm', 'places of the table'), given('values', 'counts', 'one a point')],
+    sign: 'A deviation above zero needs a value below zero, unless the control counts the other way.',
     sensitiveTo: [
-      'A table that is entered at the wrong end.',
-      'Temperature during the test: it is compensated for ever.',
+      'Reversal is no part of it: compensate the lost motion first.',
+      'Targets too far apart hide the screw’s periodic error.',
     ],
-    source: practice,
     example: {
-      words: 'Three targets, a point each 50 mm.',
+      words: 'Two means over 100 mm, a point every 50 mm.',
       input: {
         method: 'correction',
         kind: 'pitch-table',
-        positions: ['0', '100', '200'],
-        means: ['0', '10', '6'],
+        positions: ['0', '100'],
+        means: ['0', '10'],
         referencePosition: '0',
         start: '0',
-        end: '200',
+        end: '100',
         interval: '50',
         unit: '1',
         form: 'absolute',
       },
     },
   }),
-  correction({
-    title: 'Two jack points',
-    sentence: 'How much to raise one of two points to change a slope.',
-    purpose: 'For bases, tailstocks and turret castings that stand on two points.',
+  guide({
+    slug: 'correct-jacks',
+    title: 'Raising one of two jack points',
+    source: practice('slope times the distance of the points'),
+    sentence: 'Which of two jack points to raise against the other, and by how much.',
+    purpose: 'For a base on jacks or wedges whose slope has to change by a known amount.',
     formulas: ['raise = |slope change| · span / 1000'],
     inputs: [
-      given('slopeChange', 'µm/m', 'wanted; positive: point B must rise against A'),
+      given('slopeChange', 'µm/m', 'change that is wanted; positive: B must rise against A'),
       given('span', 'mm', 'distance of the points'),
     ],
-    outputs: [given('raise', 'µm', 'amount'), given('point', '', 'A, B or none')],
-    sign: 'Slope change positive: B rises.',
-    sensitiveTo: ['Clamping moves it again by some microns.'],
-    source: derived('the slope over the distance of the points'),
+    outputs: [given('raise', 'µm', 'how far to raise it'), given('point', '', 'B, A or none')],
+    sign: 'Positive change: raise B. Negative: raise A.',
+    sensitiveTo: ['Other jacks must carry nothing meanwhile, and all must carry afterwards.'],
     example: {
-      words: 'Points 400 mm apart.',
+      words: '50 µm/m over 400 mm.',
       input: { method: 'correction', kind: 'two-jack-points', slopeChange: '50', span: '400' },
     },
   }),
-  correction({
-    title: 'Pivot and push screw',
-    sentence: 'How far to move at the screw to turn a slope back.',
-    purpose: 'For headstocks and slides that turn about a dowel and are pushed at the other end.',
+  guide({
+    slug: 'correct-pivot',
+    title: 'Turning about a pivot with a push screw',
+    source: practice('slope times the distance from the pivot'),
+    sentence: 'How far to push at a screw to turn a slope out about a pivot.',
+    purpose: 'For a headstock, a turret or a slide that swings about a pin and is held by a push screw.',
     formulas: ['movement = −slope · distance / 1000'],
-    inputs: [given('slope', 'µm/m', 'the error'), given('distance', 'mm', 'from the pivot to the screw')],
-    outputs: [given('movement', 'µm', 'at the screw'), given('direction', '', 'plus, minus or none')],
+    inputs: [given('slope', 'µm/m', 'the error'), given('distance', 'mm', 'from pivot to screw')],
+    outputs: [
+      given('movement', 'µm', 'at the screw, positive in the direction of a positive slope'),
+      given('direction', '', 'plus, minus or none'),
+    ],
     sign: 'Movement positive: in the direction of a positive slope.',
-    sensitiveTo: ['Watch it on an indicator at the screw while you tighten.'],
-    source: derived('the slope over the lever'),
+    sensitiveTo: ['Tightening moves it again: read it at final torque.'],
     example: {
-      words: 'A screw 500 mm from the dowel.',
+      words: '40 µm/m, screw 500 mm from the pivot.',
       input: { method: 'correction', kind: 'pivot-and-push-screw', slope: '40', distance: '500' },
     },
   }),
-  correction({
+  guide({
+    slug: 'correct-shim',
     title: 'Shim under a base',
-    sentence: 'What to add or take away for an error of height.',
-    purpose: 'For bases that stand on a shim over their whole seat.',
+    source: practice('the error of height with the opposite sign'),
+    sentence: 'Thickness to add or to remove under a base that stands too low or too high.',
+    purpose: 'For a turret, a tool post or a tailstock whose height is off and is set by shims.',
     formulas: ['thickness = −height error'],
     inputs: [given('heightError', 'µm', 'positive: too high')],
-    outputs: [given('thickness', 'µm', 'positive: add'), given('action', '', 'add, remove or none')],
+    outputs: [given('thickness', 'µm', 'positive: add; negative: remove'), given('action', '', 'add, remove or none')],
     sign: 'Thickness positive: add.',
-    sensitiveTo: ['Several thin shims are a spring: one piece, free of burrs.'],
-    source: derived('the height error turned round'),
-    example: {
-      words: 'A tailstock that stands low.',
-      input: { method: 'correction', kind: 'shim', heightError: '-22.5' },
-    },
+    sensitiveTo: ['Several thin shims spring: take one piece, free of burrs.'],
+    example: { words: '22.5 µm too low.', input: { method: 'correction', kind: 'shim', heightError: '-22.5' } },
   }),
-  correction({
-    title: 'Turret parallel and on centre at once',
-    sentence: 'Both jack amounts so that one setting does not spoil the other.',
-    purpose: 'For a turret casting on two jack points that is both out of parallel and off centre.',
+  guide({
+    slug: 'correct-turret',
+    title: 'Turret parallel and on centre in one setting',
+    source: derived('straight line through both errors'),
+    sentence: 'Both amounts at the jack points that take slope and height out together.',
+    purpose:
+      'For a turret that leans and stands off centre. Setting one after the other spoils the first; both amounts at once do not.',
     formulas: ['raise = −height + slope · (height position − jack position) / 1000'],
     inputs: [
-      given('slope', 'µm/m', 'the error, rising with the position'),
-      given('height', 'µm', 'the error at the height position'),
+      given('slope', 'µm/m', 'the error, positive where it rises with z'),
+      given('height', 'µm', 'error of height at the height position'),
       given('heightPosition', 'mm', 'where the height was read'),
-      given('jackA', 'mm', 'place of the first jack point'),
-      given('jackB', 'mm', 'place of the second, another one'),
+      given('jackA', 'mm', 'place of one jack point'),
+      given('jackB', 'mm', 'place of the other, elsewhere'),
     ],
-    outputs: [given('raiseA', 'µm', 'at A'), given('raiseB', 'µm', 'at B')],
-    sign: 'Positive: raise.',
-    sensitiveTo: ['All positions must be counted from the same end.'],
-    source: derived('a straight line through both errors'),
+    outputs: [given('raiseA', 'µm', 'amount at A, negative: lower'), given('raiseB', 'µm', 'amount at B')],
+    sign: 'Positive: raise. Negative: lower.',
+    sensitiveTo: ['All positions are counted from one zero along z.'],
     example: {
-      words: 'A casting that hangs and stands low.',
+      words: 'Falls by 245 µm/m and stands 52 µm low.',
       input: {
         method: 'correction',
         kind: 'turret-parallel-and-centre',
@@ -210,27 +203,24 @@ export const correctionGuides: MethodGuide[] = [
       },
     },
   }),
-  correction({
-    title: 'Headstock for a taper',
-    sentence: 'How to turn a headstock so that two collars come out alike.',
-    purpose: 'After the two-collar test, where the headstock turns about a pivot and is moved by a screw.',
-    formulas: ['slope = 1000000 · (D1 − D2) / (2 · length)', 'movement = −slope · distance / 1000'],
-    inputs: [
-      given('D1', 'mm', 'collar near the headstock'),
-      given('D2', 'mm', 'far collar'),
-      given('length', 'mm', 'from collar to collar'),
-      given('distance', 'mm', 'from the pivot to the screw'),
-    ],
+  guide({
+    slug: 'correct-taper',
+    title: 'Headstock turned for a taper',
+    source: practice('half the difference of the diameters over their distance'),
+    sentence: 'From two turned collars to the movement at the headstock’s screw.',
+    purpose:
+      'For a headstock that swings about a pin. Two collars give the slope; the distance to the screw gives the amount.',
+    formulas: ['slope = 10⁶·(D1 − D2)/(2·length)', 'movement = −slope · distance / 1000'],
+    inputs: [D1, D2, given('length', 'mm', 'from collar to collar'), given('distance', 'mm', 'from pivot to screw')],
     outputs: [
-      given('slope', 'µm/m', 'the error'),
+      given('slope', 'µm/m', 'that has to go'),
       given('movement', 'µm', 'at the screw'),
-      given('direction', '', 'where the free end must go'),
+      given('direction', '', 'where the free end must go: away-from-tool, toward-tool or none'),
     ],
-    sign: 'Slope positive: the free end leans toward the tool and must go away from it.',
-    sensitiveTo: ['Never by the wear offset of the tool: that moves the diameter, not the taper.'],
-    source: derived('the taper over the length, times the lever'),
+    sign: 'Slope positive: the free end leans toward the tool.',
+    sensitiveTo: ['Cut deflection looks like a taper: try it with another depth of cut first.'],
     example: {
-      words: 'Collars 100 mm apart, screw 400 mm from the pivot.',
+      words: 'Two collars 100 mm apart, screw 400 mm from the pivot.',
       input: {
         method: 'correction',
         kind: 'headstock-for-taper',
@@ -241,25 +231,25 @@ export const correctionGuides: MethodGuide[] = [
       },
     },
   }),
-  correction({
-    title: 'Sag of a mandrel',
-    sentence: 'How far a solid round mandrel hangs down by its own weight.',
-    purpose:
-      'Before a vertical parallelism is believed. For a hollow or stepped mandrel turn it by half a turn instead.',
-    formulas: ['sag = 2ρg / (3·E·d²) · (x⁴ − 4·L·x³ + 6·L²·x²)'],
+  guide({
+    slug: 'mandrel-sag',
+    title: 'Sag of a test mandrel',
+    source: { kind: 'published', text: 'beam clamped at one end under its own weight (Euler–Bernoulli, any textbook)' },
+    sentence: 'How far a solid round mandrel bends by its own weight, at its end or at any place.',
+    purpose: 'For readings in the vertical plane along a mandrel: what it sags is taken out of them.',
+    formulas: ['sag = 2ρg/(3·E·d²) · (x⁴ − 4·L·x³ + 6·L²·x²)'],
     inputs: [
-      given('length', 'mm', 'free length'),
-      given('diameter', 'mm', 'of the solid bar'),
-      maybe('density', 'kg/m³', 'else 7850'),
-      maybe('modulus', 'GPa', 'else 206'),
-      maybe('at', 'mm', 'where it is wanted; else at the end'),
+      given('length', 'mm', 'L, free length'),
+      given('diameter', 'mm', 'd'),
+      maybe('density', 'kg/m³', 'ρ; else 7850 (steel)'),
+      maybe('modulus', 'GPa', 'E; else 206 (steel)'),
+      maybe('at', 'mm', 'x; else the end'),
     ],
-    outputs: [given('sag', 'µm', 'downwards')],
+    outputs: [given('sag', 'µm', 'how far it hangs down there')],
     sign: null,
-    sensitiveTo: ['It grows with the fourth power of the length.'],
-    source: { kind: 'derived', text: 'textbook: beam clamped at one end under its own weight' },
+    sensitiveTo: ['A hollow or stepped mandrel sags otherwise: turn it by half a turn and compare.'],
     example: {
-      words: 'Steel, 40 mm thick, 300 mm long.',
+      words: 'Solid steel, 40 mm thick, 300 mm free.',
       input: { method: 'correction', kind: 'mandrel-sag', length: '300', diameter: '40' },
     },
   }),
