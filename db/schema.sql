@@ -696,6 +696,7 @@ CREATE TABLE public.sheets (
     set_up_together text,
     minutes integer,
     working_step integer,
+    rule_set text DEFAULT 'witnessmark-1'::text NOT NULL,
     CONSTRAINT sheets_left_out_reason_check CHECK ((left_out_reason = ANY (ARRAY['not-applicable'::text, 'not-agreed'::text, 'not-possible'::text, 'not-touched'::text]))),
     CONSTRAINT sheets_minutes_check CHECK ((minutes > 0))
 );

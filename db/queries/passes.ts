@@ -51,45 +51,55 @@ export function figureOf(
     : { value: null, unit, resolution: null };
 }
 
-export async function insertPass(
-  db: Db,
-  pass: {
-    sheetId: string;
-    kind: PassKind;
-    number: number;
-    linkedTo: string | null;
-    setUp: Record<string, CellDefault>;
-    takenAt?: Date | null;
-    takenBy?: string | null;
-  },
-): Promise<string> {
-  const id = newId();
-  await db('passes').insert({
+interface NewPass {
+  sheetId: string;
+  kind: PassKind;
+  number: number;
+  linkedTo: string | null;
+  setUp: Record<string, CellDefault>;
+  takenAt?: Date | null;
+  takenBy?: string | null;
+}
+
+/** Rows in portions that one statement holds: a statement takes 65,535 values at most. */
+export function batches<T>(rows: readonly T[], size = 1000): T[][] {
+  const count = Math.ceil(rows.length / size);
+  return Array.from({ length: count }, (_, k) => rows.slice(k * size, (k + 1) * size));
+}
+
+/** Sets of readings with their proposed set-up, in few statements. @returns their ids, in order */
+export async function insertPasses(db: Db, passes: readonly NewPass[]): Promise<string[]> {
+  const ids = passes.map(() => newId());
+  const rows = passes.map((pass, index) => ({
     organisation_id: own(db),
-    id,
+    id: ids[index],
     sheet_id: pass.sheetId,
     kind: pass.kind,
     number: pass.number,
     linked_to: pass.linkedTo,
     taken_at: pass.takenAt ?? null,
     taken_by: pass.takenBy ?? null,
-  });
-  const cells = Object.entries(pass.setUp);
-  if (cells.length > 0) {
-    await db('readings').insert(
-      cells.map(([pointer, cell]) => ({
-        organisation_id: own(db),
-        id: newId(),
-        pass_id: id,
-        pointer,
-        text: cell.text,
-        ...figureOf(cell.text, cell.unit),
-        source: 'planned',
-        version: 1,
-      })),
-    );
-  }
-  return id;
+  }));
+  for (const batch of batches(rows)) await db('passes').insert(batch);
+  const cells = passes.flatMap(({ setUp }, index) =>
+    Object.entries(setUp).map(([pointer, cell]) => ({
+      organisation_id: own(db),
+      id: newId(),
+      pass_id: ids[index],
+      pointer,
+      text: cell.text,
+      ...figureOf(cell.text, cell.unit),
+      source: 'planned',
+      version: 1,
+    })),
+  );
+  for (const batch of batches(cells)) await db('readings').insert(batch);
+  return ids;
+}
+
+export async function insertPass(db: Db, pass: NewPass): Promise<string> {
+  const [id] = await insertPasses(db, [pass]);
+  return id!;
 }
 
 export interface ReadingRow {

@@ -1,9 +1,10 @@
 import type { Db } from '@/db/client';
+import { ruleSet } from '@/lib/evaluation/rule-set';
 import { newId } from '@/lib/id';
 import type { LeftOutReason } from '@/lib/schemas/job';
 import type { PlannedSheet } from '@/standards/types';
 import { own } from './jobs';
-import { insertPass } from './passes';
+import { batches, insertPasses } from './passes';
 
 export interface Exclusion {
   key: string;
@@ -22,28 +23,36 @@ export async function insertPlan(
   sheets: PlannedSheet[],
   exclusions: Exclusion[],
 ): Promise<void> {
-  for (const [index, sheet] of sheets.entries()) {
-    const id = newId();
-    await db('sheets').insert({
-      organisation_id: own(db),
-      id,
-      job_id: jobId,
-      position: index + 1,
-      key: sheet.key,
-      definition: JSON.stringify(sheet.definition),
-      title: sheet.title,
-      component: JSON.stringify(sheet.component),
-      depends_on: JSON.stringify(sheet.dependsOn),
-      tolerance: sheet.tolerance && JSON.stringify(sheet.tolerance),
-      direction: sheet.direction,
-      set_up: JSON.stringify(sheet.setUp),
-      own_definition: sheet.ownDefinition && JSON.stringify(sheet.ownDefinition),
-      set_up_together: sheet.setUpTogether,
-      minutes: sheet.minutes,
-      working_step: sheet.workingStep,
-    });
-    await insertPass(db, { sheetId: id, kind: 'as-found', number: 1, linkedTo: null, setUp: sheet.setUp });
-  }
+  const rows = sheets.map((sheet, index) => ({
+    organisation_id: own(db),
+    id: newId(),
+    job_id: jobId,
+    position: index + 1,
+    key: sheet.key,
+    definition: JSON.stringify(sheet.definition),
+    title: sheet.title,
+    component: JSON.stringify(sheet.component),
+    depends_on: JSON.stringify(sheet.dependsOn),
+    tolerance: sheet.tolerance && JSON.stringify(sheet.tolerance),
+    direction: sheet.direction,
+    set_up: JSON.stringify(sheet.setUp),
+    own_definition: sheet.ownDefinition && JSON.stringify(sheet.ownDefinition),
+    set_up_together: sheet.setUpTogether,
+    minutes: sheet.minutes,
+    working_step: sheet.workingStep,
+    rule_set: ruleSet,
+  }));
+  for (const batch of batches(rows)) await db('sheets').insert(batch);
+  await insertPasses(
+    db,
+    sheets.map(({ setUp }, index) => ({
+      sheetId: rows[index]!.id,
+      kind: 'as-found' as const,
+      number: 1,
+      linkedTo: null,
+      setUp,
+    })),
+  );
   if (exclusions.length > 0) {
     await db('job_exclusions').insert(
       exclusions.map((exclusion) => ({

@@ -1,5 +1,4 @@
 import type { Db } from '@/db/client';
-import { ruleSet } from '@/lib/evaluation/rule-set';
 import { newId } from '@/lib/id';
 import type { SheetOutcome, Verdict } from '@/lib/sheet/types';
 import { own } from './jobs';
@@ -32,7 +31,7 @@ export const listResults = (db: Db, passIds: string[]): Promise<ResultRow[]> =>
   });
 
 /** Keeps what a pass comes to now; nothing, while it cannot be evaluated. */
-export async function keepResult(db: Db, passId: string, outcome: SheetOutcome): Promise<void> {
+export async function keepResult(db: Db, passId: string, ruleSet: string, outcome: SheetOutcome): Promise<void> {
   if (outcome.state !== 'partial' && outcome.state !== 'complete') {
     await db('pass_results').where({ pass_id: passId }).delete();
     return;

@@ -23,6 +23,8 @@ export interface SheetRow {
   setUp: Record<string, CellDefault>;
   /** The organisation's own definition, whole; null: one of the catalogue. */
   ownDefinition: TestDefinition | null;
+  /** Rules by which it was begun. */
+  ruleSet: string;
   setUpTogether: string | null;
   /** null, as the step: planned before these were kept. */
   minutes: number | null;
@@ -51,6 +53,7 @@ export const sheetColumns = {
   setUpTogether: 'sheets.set_up_together',
   minutes: 'sheets.minutes',
   workingStep: 'sheets.working_step',
+  ruleSet: 'sheets.rule_set',
   leftOutReason: 'sheets.left_out_reason',
   leftOutText: 'sheets.left_out_text',
   leftOutBy: 'sheets.left_out_by',

@@ -37,7 +37,7 @@ export {
   type Verdict,
 } from '@/lib/conformity/judge';
 export { EvaluationError, type EvaluationIssue } from './evaluation-error';
-export { ruleSet } from './rule-set';
+export { assertKnownRuleSet, ruleSet } from './rule-set';
 
 /** Input of every method, told apart by `method` (corrections also by `kind`); unknown fields are refused. */
 export const evaluationInput = z.discriminatedUnion('method', [

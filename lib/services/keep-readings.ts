@@ -16,7 +16,8 @@ export interface KeptReadings {
 }
 
 export function rulesOf(sheet: SheetRow, decisionRule: SheetRules['decisionRule']): SheetRules {
-  return { definition: sheet.definition, tolerance: sheet.tolerance, direction: sheet.direction, decisionRule };
+  const { definition, tolerance, direction, ruleSet } = sheet;
+  return { definition, tolerance, direction, ruleSet, decisionRule };
 }
 
 export const closedBecause = (state: string): string | null =>
@@ -34,7 +35,7 @@ export async function judgePass(
   const readings = await listReadings(db, [passId]);
   const cells: Cells = Object.fromEntries(readings.map((row) => [row.pointer, { text: row.text, unit: row.unit }]));
   const outcome = judgeSheet(rulesOf(sheet, decisionRule), definitionOf(sheet.definition, sheet.ownDefinition), cells);
-  await keepResult(db, passId, outcome);
+  await keepResult(db, passId, sheet.ruleSet, outcome);
   return outcome;
 }
 

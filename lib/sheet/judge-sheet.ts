@@ -1,4 +1,11 @@
-import { EvaluationError, type EvaluationInput, evaluateUnknown, type MeasuredResult } from '@/lib/evaluation';
+import {
+  assertKnownRuleSet,
+  EvaluationError,
+  type EvaluationInput,
+  evaluateUnknown,
+  type MeasuredResult,
+  ruleSet,
+} from '@/lib/evaluation';
 import type { TestDefinition } from '@/standards/types';
 import { directionWords, displayResult, judgeResult } from './judge-result';
 import { checkResult, unreadableValues } from './layouts/check-list';
@@ -15,6 +22,7 @@ import type { CellProblem, Cells, Judgement, SheetFields, SheetOutcome, SheetRul
  * server. Stations that are not complete are left out and said so; what is missing is never read as 0.
  */
 export function judgeSheet(rules: SheetRules, definition: TestDefinition, cells: Cells): SheetOutcome {
+  assertKnownRuleSet(rules.ruleSet ?? ruleSet);
   const fields = sheetFields(definition, cells);
   const engine = engineOf(definition.layout);
   const toleranceUm = rules.tolerance?.baseUm ?? null;

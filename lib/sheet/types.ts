@@ -138,6 +138,8 @@ export interface SheetRules {
   definition: { id: string; code: string; edition: string; version: number };
   tolerance: PlannedTolerance | null;
   direction: Direction;
+  /** Rules by which the sheet was begun; absent: the newest. */
+  ruleSet?: string;
   decisionRule: 'simple' | 'guarded';
   /** Standard uncertainty of the result, µm. Guarded without it: nothing can be accepted or refused, the verdict is `undecided`. */
   standardUncertaintyUm?: DecimalText | null;

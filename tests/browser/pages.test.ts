@@ -46,6 +46,7 @@ async function addresses(page: Page): Promise<string[]> {
     '/catalogue?show=unconfirmed',
     '/catalogue/iso-13041-1-2020/SP-2b',
     '/catalogue/values',
+    '/catalogue/glossary',
     '/catalogue/own/OWN-1',
     '/archive',
     '/archive?q=LK32',
