@@ -2,6 +2,9 @@ import { describe, expect, it } from 'vitest';
 import { evaluateUnknown, evaluationInput } from '@/lib/evaluation';
 import { explain } from '@/lib/explaining/explain';
 import { allGuides } from '@/lib/explaining/methods/all-guides';
+import { exampleCells, startingCells } from '@/lib/explaining/methods/example-cells';
+import { layoutOfMethod, methodDefinition } from '@/lib/explaining/methods/method-definition';
+import { judgeSheet } from '@/lib/sheet/judge-sheet';
 
 interface ObjectSchema {
   shape: Record<string, { safeParse(value: unknown): { success: boolean }; value?: unknown }>;
@@ -69,4 +72,32 @@ describe('guides of the methods', () => {
       expect(guide.source.text.length).toBeGreaterThan(10);
     },
   );
+});
+
+describe('the calculator’s fields', () => {
+  const measured = allGuides.flatMap((guide) => {
+    const own = layoutOfMethod(guide);
+    return own ? [[guide.slug, guide, own] as const] : [];
+  });
+
+  it('every measuring method has a layout', () => expect(measured).toHaveLength(22));
+
+  it.each(measured)('%s: its example, typed into its fields, comes to the same result', (_, guide, own) => {
+    const definition = methodDefinition(guide, own, own.layout, own.judges?.[0]?.value);
+    const rules = {
+      definition: { id: guide.slug, code: 'calculator', edition: '', version: 1 },
+      tolerance: null,
+      direction: 'either' as const,
+      decisionRule: 'simple' as const,
+    };
+    const start = startingCells(guide, definition, own);
+    expect(judgeSheet(rules, definition, start).state).not.toBe('complete');
+    const outcome = judgeSheet(rules, definition, exampleCells(guide, definition, own));
+    expect(outcome.problems.filter(({ severity }) => severity === 'cannot-read')).toEqual([]);
+    expect(outcome.state, 'reason' in outcome ? outcome.reason : '').toBe('complete');
+    expect('result' in outcome && outcome.result).toEqual(evaluateUnknown(guide.example.input));
+    expect('directionWords' in outcome && outcome.directionWords === null).toBe(
+      'judgement' in outcome && !outcome.judgement.signed,
+    );
+  });
 });
