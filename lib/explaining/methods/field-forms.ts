@@ -38,7 +38,7 @@ const feedFields = (at: string, name: string) => [
 ];
 const collars = [figure('/D1', 'D1, near the headstock', 'mm'), figure('/D2', 'D2, far collar', 'mm')];
 
-export const fieldForms: Record<string, FieldForm> = {
+const fieldForms: Record<string, FieldForm> = {
   uncertainty: {
     setUp: [words('/coverage', 'Coverage', { '0.95': '95 %', '0.99': '99 %' })],
     rows: {
@@ -192,6 +192,12 @@ export const fieldForms: Record<string, FieldForm> = {
     begin: {},
   },
 };
+
+/** The form of a helper or correction, by what its input says of itself; null: the method is taken on a sheet. */
+export function fieldFormOf(input: { method: string; kind?: unknown }): FieldForm | null {
+  const key = input.method === 'correction' ? `correction-${String(input.kind)}` : input.method;
+  return fieldForms[key] ?? null;
+}
 
 /** The fields as they are drawn: rows that hold something, and one more. */
 export function formFields({ setUp, rows }: FieldForm, filled: (pointer: string) => boolean): SheetFields {
