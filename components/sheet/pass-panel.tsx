@@ -25,7 +25,7 @@ const places = {
 
 /** The fields of one set of readings and what they come to. */
 export function PassPanel(props: {
-  data: SheetData;
+  data: Pick<SheetData, 'definition' | 'rules'>;
   panelId: string;
   tabId: string;
   linked: boolean;

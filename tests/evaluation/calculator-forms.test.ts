@@ -1,11 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { evaluateUnknown } from '@/lib/evaluation';
 import { explain } from '@/lib/explaining/explain';
+import { allGuides } from '@/lib/explaining/methods/all-guides';
 import { chosenOr } from '@/lib/explaining/methods/calculator-form';
-import { fieldForms, formFields } from '@/lib/explaining/methods/field-forms';
+import { fieldFormOf, formFields } from '@/lib/explaining/methods/field-forms';
 import { evaluateFields } from '@/lib/explaining/methods/field-input';
 import { cellsOfInput, chosenFor, formDefinition, leavesOf } from '@/lib/explaining/methods/form-definition';
-import { methodGuides } from '@/lib/explaining/methods/method-guides';
 import { sheetForms } from '@/lib/explaining/methods/sheet-forms';
 import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import { allFields, sheetFields } from '@/lib/sheet/sheet-fields';
@@ -17,13 +17,11 @@ const rules: SheetRules = {
   direction: 'either',
   decisionRule: 'simple',
 };
-const onSheets = methodGuides.filter(({ method }) => sheetForms[method]);
-const onFields = methodGuides.filter(({ slug }) => fieldForms[slug]);
+const onSheets = allGuides.filter(({ method }) => sheetForms[method]);
+const onFields = allGuides.filter(({ example }) => fieldFormOf(example.input));
 
 it('every method has one form', () => {
-  expect([...onSheets, ...onFields].map(({ slug }) => slug).sort()).toEqual(
-    methodGuides.map(({ slug }) => slug).sort(),
-  );
+  expect([...onSheets, ...onFields].map(({ slug }) => slug).sort()).toEqual(allGuides.map(({ slug }) => slug).sort());
   expect(onSheets).toHaveLength(22);
 });
 
@@ -63,7 +61,7 @@ describe.each(onSheets.map((guide) => ({ slug: guide.slug, guide })))('form of $
 });
 
 describe.each(onFields.map((guide) => ({ slug: guide.slug, guide })))('form of $slug', ({ guide }) => {
-  const form = fieldForms[guide.slug]!;
+  const form = fieldFormOf(guide.example.input)!;
   const { input } = guide.example;
   const base = { method: input.method, ...('kind' in input ? { kind: input.kind as string } : {}) };
   const texts = Object.fromEntries(leavesOf(input));
@@ -95,7 +93,7 @@ describe.each(onFields.map((guide) => ({ slug: guide.slug, guide })))('form of $
 it('takes the shape that a row of an uncertainty budget shows while none was chosen', () => {
   const base = { method: 'uncertainty' as const };
   const texts = { '/coverage': '0.95', '/components/0/name': 'resolution', '/components/0/value': '2' };
-  expect(evaluateFields(fieldForms.uncertainty!, base, texts).input).toEqual({
+  expect(evaluateFields(fieldFormOf(base)!, base, texts).input).toEqual({
     method: 'uncertainty',
     coverage: '0.95',
     components: [{ name: 'resolution', value: '2', distribution: 'normal' }],
