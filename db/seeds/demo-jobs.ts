@@ -1,7 +1,8 @@
 import type { Knex } from 'knex';
-import { insertTemperature, updateConditions } from '@/db/queries/jobs';
+import { insertTemperature, updateComponentConditions, updateConditions } from '@/db/queries/jobs';
 import { listSheets } from '@/db/queries/sheets';
 import type { Viewer } from '@/lib/auth/viewer';
+import type { ComponentConditions } from '@/lib/schemas/component-conditions';
 import type { Purpose } from '@/lib/schemas/job';
 import { intentTexts, type Outcome } from '@/lib/schemas/signature';
 import { handIn } from '@/lib/services/hand-in';
@@ -24,6 +25,8 @@ export interface DemoJob {
   startsOn: string;
   /** Only these definitions; absent: every proposal. */
   only?: string[];
+  /** What the work did to components of the machine. */
+  opened?: ComponentConditions;
   /** How large the deviations are, as a part of the tolerance; keyed by definition, `*` for all others. */
   shares: Record<string, number>;
   /** Out of tolerance as found and put right: share as left. */
@@ -139,6 +142,7 @@ async function openDemoJob(trx: Knex.Transaction, demo: DemoJob, { inspector, re
     coolant: 'off',
     notes: null,
   });
+  if (demo.opened) await updateComponentConditions(trx, jobId, 2, demo.opened);
   const random = noise(demo.reference);
   for (const hour of [7, 10, 13]) {
     const figure = (value: number) => ({ value: value.toFixed(1), text: value.toFixed(1) });

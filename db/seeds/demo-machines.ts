@@ -120,6 +120,16 @@ export const demoMachines: DemoMachine[] = [
     makeUp: from('turning-centre'),
   },
   {
+    manufacturer: 'Corrand',
+    model: 'Triad 52',
+    serialNumber: 'CT52-3Q0G-17',
+    year: 2023,
+    control: 'Orrin 31 T',
+    site: 'Tolland Medical, hall 3',
+    customer: 'Tolland Medical Fittings',
+    makeUp: from('multi-channel-turning-centre'),
+  },
+  {
     manufacturer: 'Stennick',
     model: 'Swift 20',
     serialNumber: 'SW20Z-27Z0',

@@ -31,6 +31,14 @@ const brackwater: DemoOrganisation = {
   members: brackwaterMembers,
 };
 
+/** What a whole acceptance takes of a machine with several channels; the long thermal runs are not agreed. */
+const acceptance = [
+  ...['FC-01', 'FC-02', 'FC-04', 'FC-10', 'FC-11', 'FC-12', 'FC-13', 'LV-1', 'LV-2', 'MT-1'],
+  ...['SP-1a', 'SP-1b', 'SP-1c', 'SP-2a', 'SP-2b', 'AX-5', 'AX-5x', 'AX-1a', 'AX-1b', 'AX-2', 'AX-3', 'AX-4'],
+  ...['TU-1', 'TU-2a', 'TU-2b', 'TU-3', 'TU-4', 'SS-1', 'SS-2a', 'SS-2b', 'SS-3a', 'SS-3b', 'SS-3c', 'GT-1'],
+  ...['PO-B', 'TU-3x', 'PO-A', 'C-1', 'CI-1', 'WP-1', 'WP-1b', 'WP-7'],
+];
+
 /** Organisations are founded by the owner's role; everything after that goes through the application's own. */
 async function foundOrganisations(): Promise<boolean> {
   const owner = createKnex({ client: 'pg', connection: env.OWNER_DATABASE_URL });
@@ -166,7 +174,15 @@ async function fillQuillmere(viewers: Map<string, Viewer>, customers: Map<string
         order: '7790',
         engineer: 'C. Vale',
         startsOn: daysAgo(8),
-        only: ['SP-1a', 'SP-2a', 'AX-5', 'AX-1a', 'AX-1b', 'AX-2', 'AX-4', 'TU-3', 'WP-1'],
+        only: [
+          ...['FC-01', 'SP-1a', 'SP-2a', 'AX-5', 'AX-1a', 'AX-1b', 'AX-2', 'AX-4', 'TU-3', 'TU-4'],
+          ...['PO-A', 'CI-1', 'WP-1', 'TH-1', 'FC-10', 'FC-13'],
+        ],
+        opened: {
+          T1: { condition: 'refitted', text: null },
+          bed: { condition: 'repaired', text: 'guideways scraped' },
+          S1: { condition: 'untouched', text: null },
+        },
         shares: { '*': 0.4, 'TU-3': 1.5 },
         putRight: { 'TU-3': 0.2 },
         progress: 'issued',
@@ -180,6 +196,18 @@ async function fillQuillmere(viewers: Map<string, Viewer>, customers: Map<string
         engineer: 'P. Ostrander',
         startsOn: daysAgo(1),
         shares: { '*': 0.4 },
+        progress: 'half',
+      },
+      {
+        machine: machine('CT52-3Q0G-17'),
+        reference: 'QMF-2090',
+        purpose: 'new-machine',
+        scope: 'acceptance of a machine with three channels',
+        order: '70-140',
+        engineer: 'A. Lindqvist',
+        startsOn: daysAgo(2),
+        only: acceptance,
+        shares: { '*': 0.45, 'AX-3': 1.2 },
         progress: 'half',
       },
       {

@@ -116,7 +116,7 @@ describe('machines', () => {
       trx('machines').select('manufacturer', 'serial_number', 'serial_folded', 'kind'),
     );
     expect(machines.length).toBeGreaterThanOrEqual(8);
-    expect(new Set(machines.map(({ kind }) => kind)).size).toBe(4);
+    expect(new Set(machines.map(({ kind }) => kind)).size).toBe(5);
     for (const { serial_number, serial_folded } of machines) expect(serial_folded).toBe(foldSerial(serial_number));
     const mixed = machines.filter(
       ({ serial_number }) => /[OIBSZ]/.test(serial_number) && /[01582]/.test(serial_number),
@@ -130,6 +130,22 @@ describe('machines', () => {
 });
 
 describe('jobs', () => {
+  it('of the machine with three channels: 60 sheets and more, function checks among them, measured in part', async () => {
+    const sheets = await here((trx) =>
+      trx('sheets')
+        .join('jobs', 'jobs.id', 'sheets.job_id')
+        .where('jobs.reference', 'QMF-2090')
+        .orderBy('position')
+        .select({ key: 'key', component: 'component', step: 'working_step' }),
+    );
+    expect(sheets.length).toBeGreaterThanOrEqual(60);
+    const channels = new Set(sheets.map(({ component }) => component.channel).filter(Boolean));
+    expect(channels).toEqual(new Set([1, 2, 3]));
+    expect(sheets.filter(({ key }) => key.startsWith('FC-')).length).toBeGreaterThan(10);
+    const steps = sheets.map(({ step }) => step);
+    expect([...steps].sort((a, b) => a - b)).toEqual(steps);
+  });
+
   it('stand in every state: no plan, half measured, in check, issued, signed, signed with remarks, refused', async () => {
     const jobs = await here((trx) =>
       trx('jobs')
