@@ -70,6 +70,13 @@ export function TestView(props: {
               )}
               .
             </p>
+            {test.method !== 'function-check' && (
+              <p className="mt-1">
+                <Link href={`/catalogue/methods/${test.method}`} className="text-blue underline">
+                  How readings become this figure
+                </Link>
+              </p>
+            )}
             {test.positiveMeans && <p className="mt-1">A positive figure means: {test.positiveMeans}.</p>}
             {test.negativeMeans && <p>A negative one: {test.negativeMeans}.</p>}
             {test.usualMistakes && test.usualMistakes.length > 0 && (

@@ -1,10 +1,18 @@
+import Link from 'next/link';
 import { ProvenanceLine } from '@/components/catalogue/tolerance-table';
 import type { ReadingUsed } from '@/lib/explaining/explain-outcome';
 import type { Explanation } from '@/lib/explaining/explanation';
 
-/** Step by step: what is done, its formula, the same with the figures put in, what it gives. */
-export function ExplanationTable({ explanation }: { explanation: Explanation & { readings?: ReadingUsed[] } }) {
-  const { steps, ruleSet, source, readings } = explanation;
+/**
+ * Step by step: what is done, its formula, the same with the figures put in, what it gives. `methodsAt`: where the pages of the methods
+ * stand, to lead there.
+ */
+export function ExplanationTable(props: {
+  explanation: Explanation & { readings?: ReadingUsed[] };
+  methodsAt?: string;
+}) {
+  const { explanation, methodsAt } = props;
+  const { method, title, steps, ruleSet, source, readings } = explanation;
   return (
     <div className="grid gap-3">
       <ol className="grid gap-2">
@@ -38,6 +46,16 @@ export function ExplanationTable({ explanation }: { explanation: Explanation & {
         <p>
           Rule set <span className="font-mono">{ruleSet}</span>
         </p>
+        {methodsAt && method !== 'function-check' && (
+          <p>
+            <Link
+              href={`${methodsAt}/${method}`}
+              className="inline-flex min-h-11 items-center text-[15px] text-blue underline"
+            >
+              The method: {title}
+            </Link>
+          </p>
+        )}
       </div>
     </div>
   );

@@ -14,7 +14,7 @@ export function SheetExplanation({ data }: { data: SheetData }) {
   const explanation = explainOutcome(outcome, data.rules, data.definition, session.cellsOf(passId));
   return (
     <div className="pb-4">
-      <ExplanationTable explanation={explanation} />
+      <ExplanationTable explanation={explanation} methodsAt="/catalogue/methods" />
     </div>
   );
 }

@@ -48,6 +48,8 @@ async function addresses(page: Page): Promise<string[]> {
     '/catalogue/values',
     '/catalogue/glossary',
     '/catalogue/own/OWN-1',
+    '/catalogue/methods',
+    '/catalogue/methods/positioning',
     '/archive',
     '/archive?q=LK32',
   ];
@@ -104,7 +106,10 @@ describe('every page', () => {
     expect(visit.faults).toEqual([]);
     await visit.context.close();
     const nobody = await visitor(browser, null);
-    for (const address of ['/sign-in', '/invitation/no-such-token', '/no-such-page']) {
+    const calculators = ['', '/parallelism', '/circular', '/conformity', '/uncertainty'].map(
+      (method) => `/calculator${method}`,
+    );
+    for (const address of ['/sign-in', '/invitation/no-such-token', '/no-such-page', ...calculators]) {
       await nobody.page.goto(address);
       await expectRoom(nobody.page, address);
       await expectAccessible(nobody.page, address);

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { redirect } from 'next/navigation';
 import { SignInForm } from '@/components/people/sign-in-form';
 import { PageTitle } from '@/components/ui/page-title';
@@ -18,6 +19,13 @@ export default async function SignInPage() {
     <>
       <PageTitle>Sign in</PageTitle>
       <SignInForm demo={isDemo ? { accounts: demoAccounts, password: demoPassword } : null} />
+      <p className="mt-8">
+        Without an account: the{' '}
+        <Link href="/calculator" className="inline-flex min-h-11 items-center text-blue underline">
+          calculator
+        </Link>{' '}
+        evaluates readings and shows every step.
+      </p>
     </>
   );
 }

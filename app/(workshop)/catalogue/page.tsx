@@ -52,6 +52,7 @@ export default async function CataloguePage({ searchParams }: { searchParams: Pr
         action={
           <div className="flex flex-wrap gap-3">
             <LinkButton href="/catalogue/glossary">Words of the trade</LinkButton>
+            <LinkButton href="/catalogue/methods">Methods</LinkButton>
             <LinkButton href="/catalogue/values">Values as a table</LinkButton>
             {can(viewer.roles, 'catalogue.compose') && (
               <LinkButton href="/catalogue/own/new">Compose an own test</LinkButton>
