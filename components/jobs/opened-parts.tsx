@@ -35,11 +35,23 @@ export function OpenedParts(props: OpenedPartsData) {
         <p className="text-ink2">Nothing is said yet.</p>
       ) : (
         <ul className="text-[15px]">
-          {said.map(({ id, words, condition, text }) => (
-            <li key={id}>
-              {words} <span className="text-ink2">{[partConditions[condition], text].filter(Boolean).join(', ')}</span>
+          {said
+            .filter((part) => !isPlain(part))
+            .map(({ id, words, condition, text }) => (
+              <li key={id}>
+                {words}{' '}
+                <span className="text-ink2">{[partConditions[condition], text].filter(Boolean).join(', ')}</span>
+              </li>
+            ))}
+          {said.some(isPlain) && (
+            <li>
+              <span className="text-ink2">{partConditions.untouched}: </span>
+              {said
+                .filter(isPlain)
+                .map(({ words }) => words)
+                .join(', ')}
             </li>
-          ))}
+          )}
         </ul>
       )}
       {mayChange && (
@@ -51,6 +63,10 @@ export function OpenedParts(props: OpenedPartsData) {
     </section>
   );
 }
+
+/** Untouched, with nothing to add: of a large machine that is most of it, so these share a line. */
+const isPlain = ({ condition, text }: { condition: PartCondition; text: string | null }) =>
+  condition === 'untouched' && !text;
 
 /** Fields of the dialog; a component without a condition is one of which nothing is said. */
 const rowsForm = z.object({

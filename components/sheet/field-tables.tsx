@@ -27,8 +27,10 @@ const sameShape = (before: Shaped, after: Shaped) => before.shape === after.shap
 
 const ShapedTables = memo(function ShapedTables({ fields }: Shaped) {
   const several = fields.tables.length > 1;
+  // Beside each other only where both can be seen whole: five runs at a target take the width for themselves.
+  const narrow = fields.tables.every(({ columns }) => columns.length <= 4);
   return (
-    <div className={several ? 'grid gap-x-8 gap-y-5 sm:grid-cols-2' : ''}>
+    <div className={several ? `grid gap-x-8 gap-y-5 ${narrow ? 'sm:grid-cols-2' : 'grid-cols-[minmax(0,1fr)]'}` : ''}>
       {fields.tables.map((table, index) => (
         <OneTable key={table.title ?? index} table={table} index={index} order={fields.order} />
       ))}
