@@ -1,6 +1,6 @@
 'use client';
 
-import { type ReactNode, type RefObject, useEffect, useState } from 'react';
+import { type ReactNode, type RefObject, useEffect, useMemo, useState } from 'react';
 import { TryOutLog } from '@/components/composer/try-out-log';
 import { ExplanationTable } from '@/components/explain/explanation';
 import { PassPanel } from '@/components/sheet/pass-panel';
@@ -17,7 +17,10 @@ import { ResultTable } from './result-table';
 
 const passId = 'calculator';
 
-/** The fields of one definition, and what they come to. Made anew where the definition or the rules change. */
+/**
+ * The fields of one definition, and what they come to. Another definition or other rules begin a session with what stands in the
+ * fields; the page stays as it is drawn, so that whoever types a tolerance goes on typing.
+ */
 export function OpenForm(props: {
   definition: TestDefinition;
   rules: SheetRules;
@@ -27,8 +30,8 @@ export function OpenForm(props: {
   say: (words: string) => void;
   children: ReactNode;
 }) {
-  const { definition, rules, outputs, onCells, say, children } = props;
-  const [session] = useState(() => openSession(definition, rules, props.cells.current));
+  const { definition, rules, cells, outputs, onCells, say, children } = props;
+  const session = useMemo(() => openSession(definition, rules, cells.current), [definition, rules, cells]);
   const [confirmed, setConfirmed] = useState<ReadonlySet<CellPointer>>(new Set());
   useEffect(() => {
     const leave = session.subscribe(() => onCells(session.cellsOf(passId)));

@@ -74,7 +74,6 @@ export function SheetCalculator(props: {
     keep(slug, null);
     setSaid('Cleared.');
   };
-  const key = JSON.stringify([begin.round, definition.layout, definition.judge, rules]);
   return (
     <section aria-label="Form">
       <FormActions onExample={fill} onClear={clear} said={said} />
@@ -88,7 +87,7 @@ export function SheetCalculator(props: {
         }}
       />
       <OpenForm
-        key={key}
+        key={begin.round}
         definition={definition}
         rules={rules}
         cells={cells}
