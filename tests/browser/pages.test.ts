@@ -18,6 +18,7 @@ async function addresses(page: Page): Promise<string[]> {
   const reports = await get(`/api/jobs/${worked.id}/reports`);
   const issued = await get(`/api/jobs/${job('QMF-2083').id}/reports`);
   const instruments = await get('/api/instruments');
+  const customers = await get('/api/customers');
   const kinds = ['SP-2a', 'AX-5', 'AX-1b', 'AX-4', 'TU-3', 'SS-1', 'PO-B', 'WP-1'];
   return [
     '/',
@@ -34,6 +35,7 @@ async function addresses(page: Page): Promise<string[]> {
     `/reports/${reports.items[0].id}`,
     `/reports/${issued.items[0].id}`,
     `/reports/${issued.items[0].id}/sign-here`,
+    `/reports/${reports.items[0].id}/answered`,
     '/machines',
     '/machines/new',
     `/machines/${worked.machineId}`,
@@ -42,6 +44,8 @@ async function addresses(page: Page): Promise<string[]> {
     '/instruments/new',
     `/instruments/${instruments.items[0].id}`,
     '/customers',
+    '/customers/new',
+    `/customers/${customers.items[0].id}`,
     '/catalogue',
     '/catalogue?show=unconfirmed',
     '/catalogue/iso-13041-1-2020/SP-2b',
