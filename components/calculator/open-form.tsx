@@ -11,6 +11,8 @@ import { explainOutcome } from '@/lib/explaining/explain-outcome';
 import type { GuideField } from '@/lib/explaining/methods/method-guide';
 import { figures } from '@/lib/sheet/figures';
 import type { CellPointer, Cells, SheetRules } from '@/lib/sheet/types';
+import { parseNumber } from '@/lib/units/parse-number';
+import type { Unit } from '@/lib/units/unit';
 import type { TestDefinition } from '@/standards/types';
 import { RequestPanel } from './request-panel';
 import { ResultTable } from './result-table';
@@ -65,8 +67,16 @@ export function OpenForm(props: {
 
 function openSession(definition: TestDefinition, rules: SheetRules, cells: Cells): SheetSession {
   const place = { sheetId: 'calculator', jobId: 'calculator', sheetTitle: definition.title };
-  const known = Object.fromEntries(Object.entries(cells).map(([pointer, cell]) => [pointer, { ...cell, version: 0 }]));
+  const known = Object.fromEntries(
+    Object.entries(cells).map(([pointer, { text }]) => [pointer, { text, unit: typedUnit(text), version: 0 }]),
+  );
   return new SheetSession(place, rules, definition, [{ id: passId, cells: known }], new TryOutLog());
+}
+
+/** The unit behind a figure; where none was typed, that of the column holds, also when another axis is chosen meanwhile. */
+function typedUnit(text: string): Unit | null {
+  const parsed = parseNumber(text);
+  return parsed.ok ? parsed.unit : null;
 }
 
 const judged: GuideField = { name: 'deviation', unit: '', words: 'the figure that is judged' };
