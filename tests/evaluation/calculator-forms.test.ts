@@ -99,3 +99,8 @@ it('takes the shape that a row of an uncertainty budget shows while none was cho
     components: [{ name: 'resolution', value: '2', distribution: 'normal' }],
   });
 });
+
+it('begins with the spindle turned by half a turn', () => {
+  const { options } = sheetForms.parallelism!;
+  expect(chosenOr(options, {})).toMatchObject({ angles: '0 180', judge: 'slope' });
+});

@@ -21,11 +21,17 @@ const roundAngles = choice('angles', 'Angles in a turn', {
   '8': 'each 45°',
   '12': 'each 30°',
 });
-const half = choice('angles', 'The spindle stands at', {
-  '0 180': '0° and 180°',
-  '0 90 180 270': '0°, 90°, 180° and 270°',
-  '0': 'one angle, nothing is turned',
-});
+/** As a list, because a key that is a whole number would come first. */
+const half: FormOption = {
+  kind: 'choice',
+  name: 'angles',
+  label: 'The spindle stands at',
+  choices: [
+    { value: '0 180', label: '0° and 180°' },
+    { value: '0 90 180 270', label: '0°, 90°, 180° and 270°' },
+    { value: '0', label: 'one angle, nothing is turned' },
+  ],
+};
 const yesNo = (name: string, label: string) => choice(name, label, { no: 'no', yes: 'yes' });
 const sag = yesNo('sag', 'The mandrel’s sag is stated');
 
