@@ -128,6 +128,14 @@ export async function updateComponentConditions(
   return changed === 1;
 }
 
+/** Answers false when somebody else changed the job meanwhile. */
+export async function updateRefusal(db: Db, id: string, version: number, refuseUnconfirmed: boolean): Promise<boolean> {
+  const changed = await db('jobs')
+    .where({ id, version })
+    .update({ refuse_unconfirmed: refuseUnconfirmed, version: version + 1 });
+  return changed === 1;
+}
+
 export async function setJobState(db: Db, id: string, state: JobRow['state']): Promise<void> {
   await db('jobs')
     .where({ id })

@@ -61,6 +61,12 @@ export const jobForm = z
   });
 export type JobForm = z.output<typeof jobForm>;
 
+/** What may be changed of a job before its plan is made. */
+export const jobChange = z.strictObject({
+  /** Only tolerances that are confirmed or given by the contract. */
+  refuseUnconfirmed: z.boolean(),
+});
+
 /** What stood around the measurement; every line prints. */
 export const conditionsForm = z.object({
   warmUp: optionalText('Warm-up', 400),

@@ -16,6 +16,7 @@ import * as instrument from '@/app/api/instruments/[id]/route';
 import * as instruments from '@/app/api/instruments/route';
 import * as invitation from '@/app/api/invitations/[id]/route';
 import * as invitations from '@/app/api/invitations/route';
+import * as job from '@/app/api/jobs/[id]/route';
 import * as jobs from '@/app/api/jobs/route';
 import * as history from '@/app/api/machines/[id]/history/route';
 import * as owners from '@/app/api/machines/[id]/owners/route';
@@ -112,6 +113,7 @@ const routes: [string, unknown, Action, { method: string; path?: string; body?: 
   ['DELETE /api/invitations/{id}', invitation.DELETE, 'member.manage', { method: 'DELETE', params }],
   ['GET /api/jobs', jobs.GET, 'job.read', { method: 'GET' }],
   ['POST /api/jobs', jobs.POST, 'job.manage', { method: 'POST', body: {} }],
+  ['PATCH /api/jobs/{id}', job.PATCH, 'job.manage', { method: 'PATCH', params, body: {} }],
   ['GET /api/machines', machines.GET, 'machine.read', { method: 'GET' }],
   ['POST /api/machines', machines.POST, 'machine.manage', { method: 'POST', body: {} }],
   ['GET /api/machines/{id}', machine.GET, 'machine.read', { method: 'GET', params }],

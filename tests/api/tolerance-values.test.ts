@@ -4,6 +4,7 @@ import { POST as postAgreement } from '@/app/api/catalogue/values/[id]/agreement
 import { POST as postImport } from '@/app/api/catalogue/values/import/route';
 import { GET as getCsv } from '@/app/api/catalogue/values.csv/route';
 import { GET as getPlan, POST as postPlan } from '@/app/api/jobs/[id]/plan/route';
+import { PATCH as patchJob } from '@/app/api/jobs/[id]/route';
 import { POST as postJob } from '@/app/api/jobs/route';
 import { PATCH as changeOrganisation, GET as getOrganisation } from '@/app/api/organisation/route';
 import { readCsv } from '@/lib/csv/read-csv';
@@ -252,6 +253,28 @@ describe('a job that takes confirmed tolerances only', () => {
     expect((await plan(await job(true), [nose])).status).toBe(201);
     for (const { cell } of (await read('AX-1b')).cells) expect((await confirm('AX-1b', cell)).status).toBe(201);
     expect((await plan(await job(true), [nose, 'AX-1b:Z1:S1'])).status).toBe(201);
+  });
+
+  it('can become one, or stop being one, until its plan is made', async () => {
+    const jobId = await job(false);
+    const change = (version: number, refuseUnconfirmed: boolean, as: Member = 'inspector') =>
+      workshop.call(patchJob, {
+        as,
+        method: 'PATCH',
+        params: { id: jobId },
+        headers: ifMatch(version),
+        body: { refuseUnconfirmed },
+      });
+    const unconfirmed = (await proposalsOf(jobId)).find(({ key }) => key.startsWith('SS-1'))!.key;
+    expect((await change(1, true, 'customer')).status).toBe(403);
+    expect((await change(1, true)).body).toEqual({ version: 2 });
+    expect((await change(1, false)).status).toBe(412);
+    expect((await plan(jobId, [unconfirmed])).status).toBe(422);
+    expect((await change(2, false)).status).toBe(200);
+    expect((await plan(jobId, [unconfirmed])).status).toBe(201);
+    expect((await change(4, true)).status).toBe(409);
+    const kept = await workshop.as('inspector', (trx) => trx('jobs').where({ id: jobId }).first('refuse_unconfirmed'));
+    expect(kept).toEqual({ refuse_unconfirmed: false });
   });
 
   it('is what the organisation wants of a new job, unless the job says otherwise', async () => {

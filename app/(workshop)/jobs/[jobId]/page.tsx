@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import Link from 'next/link';
 import { notFound } from 'next/navigation';
 import { cache } from 'react';
+import { ConfirmedOnly } from '@/components/jobs/confirmed-only';
 import { JobConditions } from '@/components/jobs/job-conditions';
 import { JobPeople, JobReports, NotInPlan } from '@/components/jobs/job-side';
 import { KeepTemplate } from '@/components/jobs/keep-template';
@@ -116,6 +117,12 @@ export default async function JobPage({ params }: Params) {
             />
             <JobPeople people={board.people} />
             <JobFacts board={board} />
+            <ConfirmedOnly
+              jobId={job.id}
+              version={job.version}
+              refuseUnconfirmed={job.refuseUnconfirmed}
+              mayChange={may.manage && open && job.planMadeAt === null}
+            />
             {may.manage && job.planMadeAt !== null && (
               <KeepTemplate jobId={job.id} model={`${machine.manufacturer} ${machine.model}`} />
             )}
