@@ -66,6 +66,7 @@ function Measured({ block }: { block: TestBlock }) {
               [words.source, block.toleranceSource],
               [words.direction, block.directionWords],
               [words.instruments, block.instruments.join(' · ')],
+              [words.ruleSet, block.ruleSet ?? null],
             ])}
           />
         </div>

@@ -104,6 +104,12 @@ export function SheetBackground({ data }: { data: SheetData }) {
         <p className="mt-1.5">
           {codeTitle}, own id <span className="font-mono">{definition.id}</span> ·{' '}
           {provenanceWords[definition.source.kind]}: {definition.source.text}
+          {rules.ruleSet && (
+            <>
+              {' '}
+              · rule set <span className="font-mono">{rules.ruleSet}</span>
+            </>
+          )}
         </p>
       </section>
     </div>

@@ -35,9 +35,15 @@ export function explainOutcome(
   cells: Cells,
 ): SheetExplanation {
   const readings = readingsUsed(definition, cells);
-  if (outcome.result.method === 'function-check' || outcome.input === null) return { ...checks(outcome), readings };
+  if (outcome.result.method === 'function-check' || outcome.input === null)
+    return { ...checks(outcome, rules), readings };
   const own = explain(outcome.input, outcome.result as EvaluationResult);
-  return { ...own, readings, steps: [...own.steps, ...judging(outcome, rules, definition)] };
+  return {
+    ...own,
+    ruleSet: rules.ruleSet ?? ruleSet,
+    readings,
+    steps: [...own.steps, ...judging(outcome, rules, definition)],
+  };
 }
 
 function readingsUsed(definition: TestDefinition, cells: Cells): ReadingUsed[] {
@@ -102,13 +108,13 @@ function judging(outcome: Judged, rules: SheetRules, definition: TestDefinition)
   ];
 }
 
-function checks({ result, judgement }: Judged): Explanation {
+function checks({ result, judgement }: Judged, rules: SheetRules): Explanation {
   const items = result.method === 'function-check' ? result.items : [];
   const out = items.filter(({ inOrder }) => inOrder === false);
   return {
     method: 'function-check',
     title: 'Function check',
-    ruleSet,
+    ruleSet: rules.ruleSet ?? ruleSet,
     source: {
       kind: 'derived',
       text: 'an item is in order when it is answered yes and its figure lies within its limits',

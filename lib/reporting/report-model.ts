@@ -140,6 +140,8 @@ export interface TestBlock {
   directionWords: string | null;
   judgedFigure: string;
   instruments: string[];
+  /** Rules by which it was begun and computed; absent in reports from before it was kept with each sheet. */
+  ruleSet?: string;
   cautions: string[];
   passes: PassBlock[];
   leftOut: { reason: string; text: string | null } | null;

@@ -39,6 +39,7 @@ export interface StoredSheet {
   key: string;
   definition: { id: string; code: string; edition: string; version: number };
   ownDefinition?: TestDefinition | null;
+  ruleSet?: string;
   title: string;
   component: BoundComponent;
   tolerance: PlannedTolerance | null;

@@ -53,6 +53,7 @@ export function testBlock(
     instruments: stored.instruments
       .filter((entry) => used.has(entry.id))
       .map((entry) => `${entry.number} ${entry.name}`),
+    ...(sheet.ruleSet ? { ruleSet: sheet.ruleSet } : {}),
     cautions: definition.cautions.map((caution) => cautionText(caution)),
     passes: sheet.leftOutReason
       ? []

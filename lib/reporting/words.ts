@@ -233,6 +233,7 @@ export const REPORT_WORDS = {
     source: 'Source',
     direction: 'Direction',
     instruments: 'Instruments',
+    ruleSet: 'Rule set',
     figures: 'Figures',
     local: 'Local',
     limit: 'limit',

@@ -354,6 +354,8 @@ describe('the report', () => {
 
   it('prints every reading as a figure of its column, and the slip with what it was', () => {
     const block = report.model.blocks.find(({ order }) => order === 5)!;
+    // Every test says by which rules it was begun; they are those of its results.
+    expect([...new Set(report.model.blocks.map(({ ruleSet }) => ruleSet))]).toEqual(['witnessmark-1']);
     expect(block.passes[0]!.corrections).toEqual([
       {
         field: expect.stringMatching(/180/),

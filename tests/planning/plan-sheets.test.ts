@@ -139,6 +139,34 @@ describe.each(startingMakeUps)('plan of a $kind', ({ kind, makeUp }) => {
   });
 });
 
+describe('working order', () => {
+  const place = (key: string) => plan.findIndex((sheet) => sheet.key === key);
+  const keysOf = (id: string) => plan.filter(({ definition }) => definition.id === id).map(({ key }) => key);
+
+  it('sets the angle of the sub-spindle before its offset', () => {
+    const angles = [...keysOf('SS-2a'), ...keysOf('SS-2b')];
+    expect(angles.length).toBeGreaterThan(1);
+    for (const key of [...angles, ...keysOf('SS-3a')]) {
+      expect(place(key), key).toBeGreaterThanOrEqual(0);
+      expect(place(key), key).toBeLessThan(place('SS-1:S2:S1'));
+    }
+    for (const key of keysOf('AX-2').filter((one) => one.endsWith(':S2')))
+      expect(place(key), key).toBeGreaterThan(place('SS-1:S2:S1'));
+  });
+
+  it('looks at the mandrel before whatever uses it in the same spindle', () => {
+    const mandrels = plan.filter(({ definition }) => definition.id === 'MT-1');
+    expect(mandrels.length).toBeGreaterThan(0);
+    for (const mandrel of mandrels) {
+      const together = plan.filter(
+        ({ setUpTogether, workingStep }) =>
+          setUpTogether === mandrel.setUpTogether && workingStep === mandrel.workingStep,
+      );
+      expect(together[0]?.key, mandrel.key).toBe(mandrel.key);
+    }
+  });
+});
+
 describe('choosing', () => {
   it('keeps every proposal under the headings of the working order', () => {
     expect(groupProposals(plan).flatMap(({ sheets }) => sheets)).toEqual(plan);
@@ -162,5 +190,11 @@ describe('choosing', () => {
     expect(withContractTolerance(byKey('SS-1:S2:S1'), { baseUm: '10', text: 'item 3' }).tolerance?.basis).toBe(
       'offset',
     );
+  });
+
+  it('keeps the limits of further figures beside a tolerance of the contract', () => {
+    const proposed = plan.find(({ tolerance }) => (tolerance?.also ?? []).length > 0)!;
+    const { tolerance } = withContractTolerance(proposed, { baseUm: '9', text: 'item 4' });
+    expect(tolerance).toMatchObject({ baseUm: '9', foundBy: 'contract', also: proposed.tolerance!.also });
   });
 });

@@ -147,6 +147,7 @@ function details(block: TestBlock): { label: string; value: string }[] {
     [words.source, block.toleranceSource],
     [words.direction, block.directionWords],
     [words.instruments, block.instruments.join(' · ')],
+    [words.ruleSet, block.ruleSet ?? null],
   ];
   return entries.flatMap(([label, value]) => (value ? [{ label, value }] : []));
 }
