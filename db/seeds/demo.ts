@@ -195,6 +195,7 @@ async function fillQuillmere(viewers: Map<string, Viewer>, customers: Map<string
         order: 'M-440',
         engineer: 'P. Ostrander',
         startsOn: daysAgo(1),
+        only: ['SP-1a', 'SP-2a', 'SP-2b', 'AX-5', 'AX-1a', 'AX-1b', 'AX-2', 'TU-3', 'PO-B', 'WP-1'],
         shares: { '*': 0.4 },
         progress: 'half',
       },

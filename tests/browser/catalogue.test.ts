@@ -91,7 +91,8 @@ describe('the values of a tolerance', () => {
       '$1,confirmed,,,2020,p. 3,,\r',
     );
     expect(confirmed).not.toBe(table);
-    await page.goto('/catalogue/values');
+    // A file chosen before the page listens would go unseen.
+    await page.goto('/catalogue/values', { waitUntil: 'networkidle' });
     const file = page.getByLabel('The file', { exact: true });
     const upload = (text: string) =>
       file.setInputFiles({ name: 'values.csv', mimeType: 'text/csv', buffer: Buffer.from(text) });

@@ -64,7 +64,7 @@ it('readings of a straightness from a text: looked at, explained, taken over, ta
   await expect.poll(() => fields.count()).toBe(4);
   await allOnServer(page);
 
-  await page.reload();
+  await page.reload({ waitUntil: 'networkidle' });
   await expect.poll(() => readingFields(page).nth(1).inputValue()).toBe('0,0015 mm');
   await readingFields(page).first().focus();
   await page.keyboard.press('Control+z');

@@ -69,7 +69,7 @@ describe('what waits', () => {
     // Half of the plan is measured; the last of that half is only begun.
     const planned = await plannedSheets('QMF-2087');
     const begun = Math.ceil(planned / 2);
-    expect(planned).toBeGreaterThan(40);
+    expect(planned).toBe(12);
     expect(half).toMatchObject({ planMade: true, measured: begun - 1, planned, next: { position: begun } });
     expect(home.toMeasure.find(({ reference }) => reference === 'QMF-2088')).toMatchObject({
       planMade: false,
