@@ -85,6 +85,23 @@ describe('the calculator, for somebody without an account', () => {
     await context.close();
   });
 
+  it('lets a tolerance be typed key by key, and reads what was typed in the unit of the axis chosen last', async () => {
+    const { page, faults, context } = await visitor(browser, null);
+    await opened(page, 'positioning');
+    await page.getByRole('button', { name: 'Fill in the example' }).click();
+    await page.getByText('for information').first().waitFor();
+    await page.getByLabel('Tolerance, mm').focus();
+    await page.keyboard.type('0,0065', { delay: 60 });
+    expect(await page.getByLabel('Tolerance, mm').inputValue()).toBe('0,0065');
+    await page.getByText('out of tolerance').first().waitFor();
+    await page.getByLabel('Axis').selectOption('rotary');
+    await page.getByLabel('Tolerance, ″').waitFor();
+    await page.locator('[data-at-foot]').getByText('1.4', { exact: true }).first().waitFor();
+    expect(await page.getByText('does not fit here').count()).toBe(0);
+    expect(faults).toEqual([]);
+    await context.close();
+  });
+
   it('says at a field what cannot be read, and goes on when it is put right', async () => {
     const { page, context } = await visitor(browser, null);
     await opened(page, 'tolerance');
