@@ -58,8 +58,9 @@ export function PlanPath({ jobId, sheets }: { jobId: string; sheets: PathSheet[]
               <span className="text-sm font-normal text-ink2">{countWords(runs.flatMap((run) => run.sheets))}</span>
             </h2>
           )}
-          {runs.map(({ setUp, sheets: members }) => (
-            <div key={members[0]?.id}>
+          {runs.map(({ setUp, sheets: members }, index) => (
+            // Without a heading of its own a run would read as a part of the group above it.
+            <div key={members[0]?.id} className={index > 0 && (setUp === null || members.length === 1) ? 'mt-3' : ''}>
               {setUp !== null && members.length > 1 && (
                 <h3 className="mt-2 border-l-4 border-line pl-3 text-[15px] font-medium">
                   Set up together: {setUp} <span className="text-sm font-normal text-ink2">{countWords(members)}</span>
@@ -89,7 +90,7 @@ function PathLine({ jobId, sheet }: { jobId: string; sheet: PathSheet }) {
       >
         <span className="pl-1 font-mono text-[15px] text-ink2">{sheet.position}</span>
         <span aria-hidden="true" className={`ml-1 h-0.5 w-3.5 ${sheet.isNext ? 'bg-brass' : 'bg-ink'}`} />
-        <span>
+        <span className="pr-3">
           {sheet.title} <span className="text-[15px] text-ink2">{sheet.component}</span>
           {sheet.isNext && <span className="sr-only">, next to measure</span>}
         </span>

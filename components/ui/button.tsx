@@ -14,7 +14,7 @@ const looks: Record<ButtonVariant, string> = {
 /** `small` is for rows of a table in the office; on the shop floor everything is 48 px high. */
 export const buttonClass = (variant: ButtonVariant = 'plain', small = false, className = '') =>
   `inline-flex items-center justify-center rounded border-[1.5px] text-center font-medium disabled:cursor-not-allowed disabled:opacity-55 ${
-    small ? 'min-h-9 px-3 text-sm' : 'min-h-12 px-5'
+    small ? 'min-h-9 px-3 text-sm' : 'min-h-12 px-5 py-1'
   } ${looks[variant]} ${className}`;
 
 interface Look {

@@ -96,7 +96,7 @@ function distinct(sheets: PlannedSheet[]): PlannedSheet[] {
   });
 }
 
-/** Whatever is measured against a sub-spindle waits until the sub-spindle itself is right. */
+/** What is measured on a sub-spindle alone stands together; whatever is measured against it waits until it is right itself. */
 function plannedStep(definition: TestDefinition, component: BoundComponent, makeUp: MakeUp): number {
   const isSub = (id: string | undefined) => makeUp.spindles.some((one) => one.id === id && one.type === 'sub');
   const isTool = makeUp.spindles.some(({ id, type }) => id === component.spindle && type === 'tool');
@@ -104,7 +104,10 @@ function plannedStep(definition: TestDefinition, component: BoundComponent, make
   const own = definition.appliesTo.kind === 'sub-spindle-and-its-axis';
   const relation = !own && (component.axis !== undefined || component.turret !== undefined);
   const against = (relation && isSub(component.spindle)) || (isTool && isSub(component.reference));
-  return against ? Math.max(definition.workingStep, workingSteps['axes-to-sub-spindle']) : definition.workingStep;
+  if (against) return Math.max(definition.workingStep, workingSteps['axes-to-sub-spindle']);
+  // What is looked at on the sub-spindle alone, its mandrel too, waits until somebody works there.
+  const alone = !relation && isSub(component.spindle) && definition.workingStep === workingSteps['spindle-run-out'];
+  return alone ? workingSteps['sub-spindle-run-out'] : definition.workingStep;
 }
 
 function rank(

@@ -163,6 +163,7 @@ describe('working order', () => {
           setUpTogether === mandrel.setUpTogether && workingStep === mandrel.workingStep,
       );
       expect(together[0]?.key, mandrel.key).toBe(mandrel.key);
+      expect(together.length, mandrel.key).toBeGreaterThan(1);
     }
   });
 });
