@@ -1,22 +1,22 @@
 import type { EvaluationInput, EvaluationMethod, EvaluationResult, ResultOf } from '@/lib/evaluation';
 import { ruleSet } from '@/lib/evaluation';
+import { lostMotionSteps, referenceShiftSteps } from './axes';
+import { circularSteps, roundnessSteps } from './circles';
+import { correctionSteps } from './corrections';
 import type { ExplainedStep, Explanation } from './explanation';
-import { conformitySteps, correctionSteps, roundingSteps, toleranceSteps, uncertaintySteps } from './helpers';
-import {
-  circularSteps,
-  diameterSteps,
-  driftSteps,
-  lostMotionSteps,
-  positioningSteps,
-  referenceShiftSteps,
-  roundnessSteps,
-} from './positions';
-import { angularSteps, parallelismSteps, squarenessSteps, squarenessToAxisSteps, twoCollarSteps } from './slopes';
+import { conformitySteps, roundingSteps, toleranceSteps, uncertaintySteps } from './helpers';
+import { angularSteps, diameterSteps, driftSteps, twoCollarSteps } from './pieces';
+import { flatnessSteps, reversalSteps } from './planes-and-reversals';
+import { positioningSteps } from './positioning';
+import { indexingSteps, rotationSteps } from './rotation-and-indexing';
+import { axialSteps, runOutSteps } from './run-outs';
+import { parallelismSteps, squarenessSteps, squarenessToAxisSteps } from './slopes';
 import { sources } from './sources';
-import { flatnessSteps, fromAnglesSteps, reversalSteps, straightnessSteps } from './straight-lines';
-import { axialSteps, centreHeightSteps, coaxialitySteps, indexingSteps, rotationSteps, runOutSteps } from './turning';
+import { fromAnglesSteps, straightnessSteps } from './straight-lines';
+import { centreHeightSteps, coaxialitySteps } from './sweeps';
 
-type Explainers = { [M in EvaluationMethod]: (input: never, result: ResultOf<M>) => ExplainedStep[] };
+type InputOf<M extends EvaluationMethod> = Extract<EvaluationInput, { method: M }>;
+type Explainers = { [M in EvaluationMethod]: (input: InputOf<M>, result: ResultOf<M>) => ExplainedStep[] };
 
 const explainers: Explainers = {
   straightness: straightnessSteps,
@@ -45,7 +45,7 @@ const explainers: Explainers = {
   conformity: conformitySteps,
   rounding: roundingSteps,
   tolerance: toleranceSteps,
-  correction: correctionSteps as never,
+  correction: correctionSteps,
 };
 
 /**

@@ -1,35 +1,52 @@
-import type { ResultOf } from '@/lib/evaluation';
+import { directionSign, type PermissibleDirection, type ResultOf } from '@/lib/evaluation';
+import { Dec, plain } from '@/lib/units/decimal';
+import { Fraction } from '@/lib/units/fraction';
 import type { ExplainedStep } from './explanation';
-import { fig, listed, negative } from './figures';
+import { alike, fig, negative } from './figures';
 
-const divisors: Record<string, string> = { normal: '1', rectangular: '√3', triangular: '√6', 'u-shaped': '√2' };
+interface Component {
+  name: string;
+  value: string;
+  distribution: string;
+  divisor?: string;
+  sensitivity?: string;
+}
+
+const MOST_COMPONENTS = 12;
+const divisors: Record<string, { text: string; square: number }> = {
+  normal: { text: '1', square: 1 },
+  rectangular: { text: '√3', square: 3 },
+  triangular: { text: '√6', square: 6 },
+  'u-shaped': { text: '√2', square: 2 },
+};
 
 export function uncertaintySteps(
-  input: {
-    coverage: number | string;
-    components: { name: string; value: string; distribution: string; divisor?: string; sensitivity?: string }[];
-  },
+  input: { coverage: number | string; components: Component[] },
   result: ResultOf<'uncertainty'>,
 ): ExplainedStep[] {
-  const parts = input.components.slice(0, 8).map(({ name, value, distribution, divisor, sensitivity = '1' }) => ({
-    what: `${name}, ${distribution}`,
-    formula: 'c · a / divisor',
-    withNumbers: `${fig(sensitivity)} · ${fig(value)} / ${divisor === undefined ? divisors[distribution] : fig(divisor)}`,
-    value: 'its standard uncertainty',
-  }));
+  const parts = input.components.map(contribution);
+  const shown = input.components.slice(0, MOST_COMPONENTS);
   return [
-    ...parts,
+    ...shown.map((component, k) => ({
+      what: `${component.name}, ${component.distribution}: its standard uncertainty in the result`,
+      formula: 'c · u = c · a / divisor',
+      withNumbers: `${fig(component.sensitivity ?? '1')} · ${fig(component.value)} / ${divisorText(component)}`,
+      value: fig(parts[k]!),
+    })),
+    ...alike(input.components.length - shown.length),
     {
       what: 'Combined standard uncertainty',
-      formula: 'u = √Σ(c·u)²',
-      withNumbers: `${input.components.length} components`,
+      formula: 'u = √Σ(c · u)²',
+      withNumbers:
+        parts.length <= MOST_COMPONENTS
+          ? `√(${parts.map((part) => `${negative(part)}²`).join(' + ')})`
+          : `${parts.length} components`,
       value: fig(result.standard),
     },
     {
-      what: 'Coverage factor, two-sided Student t',
-      formula: 'k = t(ν)',
-      withNumbers:
-        result.degreesOfFreedom === undefined ? 'ν infinite' : `ν = ${fig(result.degreesOfFreedom)}, cut down`,
+      what: `Coverage factor for ${fig(new Dec(String(input.coverage)).times(100).toFixed())} %, two-sided Student t`,
+      formula: 'k = t(ν), ν = u⁴ / Σ((c · u)⁴ / ν of each), cut down to a whole number',
+      withNumbers: result.degreesOfFreedom === undefined ? 'ν is infinite' : `ν = ${fig(result.degreesOfFreedom)}`,
       value: fig(result.coverageFactor),
     },
     {
@@ -41,50 +58,85 @@ export function uncertaintySteps(
   ];
 }
 
+const divisorText = ({ divisor, distribution }: Component) =>
+  divisor === undefined ? (divisors[distribution]?.text ?? '1') : fig(divisor);
+
+function contribution({ value, sensitivity = '1', divisor, distribution }: Component): string {
+  const by = divisor === undefined ? new Dec(divisors[distribution]?.square ?? 1).sqrt() : new Dec(divisor);
+  return plain(new Dec(value).times(sensitivity).div(by));
+}
+
 export function conformitySteps(
   input: {
     deviation: string;
+    signed: boolean;
     tolerance: string;
-    direction: string;
+    direction: PermissibleDirection;
     rule: string;
     guard?: string;
     standardUncertainty?: string;
   },
   result: ResultOf<'conformity'>,
 ): ExplainedStep[] {
+  const { deviation: e, tolerance: T, standardUncertainty: u = '0' } = input;
   const guarded = input.rule === 'guarded';
+  const factor = input.guard === 'U' ? '2' : '1.65';
+  const side = directionSign(input.direction);
+  const y = side === 0 ? Fraction.from(e).abs() : side > 0 ? Fraction.from(e) : Fraction.from(e).negated();
+  const compared = side === 0 ? `|${fig(e)}|` : side > 0 ? fig(e) : `−${negative(e)}`;
   return [
     {
-      what: guarded ? 'Limit, tolerance less guard band' : 'Limit, the tolerance itself',
-      formula: guarded ? `T − g, g = ${input.guard === 'U' ? '2·u' : '1.65·u'}` : 'T',
-      withNumbers: guarded
-        ? `${fig(input.tolerance)} − ${input.guard === 'U' ? '2' : '1.65'} · ${fig(input.standardUncertainty ?? '0')}`
-        : fig(input.tolerance),
+      what: guarded ? 'Limit: tolerance less the guard band' : 'Limit: the tolerance itself',
+      formula: guarded ? `T − ${factor} · u` : 'T',
+      withNumbers: guarded ? `${fig(T)} − ${factor} · ${fig(u)}` : fig(T),
       value: fig(result.limit),
     },
     {
-      what: `Distance to the limit, direction ${input.direction}`,
-      formula: input.direction === 'either' ? 'limit − |e|' : 'the smaller of limit − s·e and s·e',
-      withNumbers: `e = ${fig(input.deviation)}`,
+      what: `Figure that is compared, permitted: ${input.direction.replaceAll('-', ' ')}`,
+      formula: side === 0 ? 'y = |e|' : side > 0 ? 'y = e' : 'y = −e',
+      withNumbers: compared,
+      value: fig(y.toText()),
+    },
+    {
+      what: 'Distance to the limit',
+      formula: side === 0 ? 'limit − y' : 'the smaller of limit − y and y',
+      withNumbers:
+        side === 0
+          ? `${fig(result.limit)} − ${negative(y.toText())}`
+          : `min(${fig(result.limit)} − ${negative(y.toText())}; ${fig(y.toText())})`,
       value: fig(result.margin),
     },
-    ...(result.probability === undefined
-      ? []
-      : [
-          {
-            what: 'Probability that the true value conforms',
-            formula: 'Φ((T − y)/u)',
-            withNumbers: `u = ${fig(input.standardUncertainty ?? '0')}`,
-            value: fig(result.probability),
-          },
-        ]),
+    ...(result.probability === undefined ? [] : [probability(input.signed, side, e, T, y.toText(), u, result)]),
     {
-      what: 'Verdict',
-      formula: 'margin ≥ 0',
-      withNumbers: fig(result.margin),
+      what: 'Verdict, on the unrounded figure',
+      formula: guarded ? 'within: y ≤ T − g; out: y > T + g; between: undecided' : 'within: y ≤ T; out: y > T',
+      withNumbers: side === 0 ? '' : 'on the side that is not permitted: out',
       value: result.verdict.replaceAll('-', ' '),
     },
   ];
+}
+
+function probability(
+  signed: boolean,
+  side: number,
+  e: string,
+  T: string,
+  y: string,
+  u: string,
+  result: ResultOf<'conformity'>,
+): ExplainedStep {
+  const upper = `Φ((${fig(T)} − ${negative(side === 0 && signed ? e : y)}) / ${fig(u)})`;
+  const other = !signed
+    ? ''
+    : side === 0
+      ? ` − Φ((−${fig(T)} − ${negative(e)}) / ${fig(u)})`
+      : ` − Φ(−${negative(y)} / ${fig(u)})`;
+  return {
+    what: 'Probability that the true value conforms',
+    formula: !signed ? 'Φ((T − y)/u)' : side === 0 ? 'Φ((T − e)/u) − Φ((−T − e)/u)' : 'Φ((T − y)/u) − Φ(−y/u)',
+    withNumbers: `${upper}${other}`,
+    value: fig(result.probability ?? '0'),
+  };
 }
 
 export function roundingSteps(
@@ -93,9 +145,16 @@ export function roundingSteps(
 ): ExplainedStep[] {
   return [
     {
-      what: 'Nearest multiple of the resolution',
-      formula: input.rule === 'half-away-from-zero' ? 'a tie goes away from zero' : 'a tie goes to the even multiple',
-      withNumbers: `${fig(input.value)} in steps of ${fig(input.resolution)}`,
+      what: 'Steps that the figure holds',
+      formula: 'value / resolution',
+      withNumbers: `${fig(input.value)} / ${fig(input.resolution)}`,
+      value: fig(Fraction.from(input.value).dividedBy(Fraction.from(input.resolution)).toText()),
+    },
+    {
+      what: 'Nearest whole number of steps',
+      formula:
+        input.rule === 'half-away-from-zero' ? 'a tie goes away from zero' : 'a tie goes to the even number of steps',
+      withNumbers: '',
       value: result.rounded.replace('-', '−'),
     },
   ];
@@ -105,52 +164,21 @@ export function toleranceSteps(
   input: { base: string; baseLength: string; length: string; minimum?: string; maximum?: string },
   result: ResultOf<'tolerance'>,
 ): ExplainedStep[] {
-  const floor = fig(input.minimum ?? '0');
-  const cap = input.maximum === undefined ? '' : `, at most ${fig(input.maximum)}`;
+  const { base, baseLength, length, minimum, maximum } = input;
+  const scaled = `${fig(base)} · ${fig(length)} / ${fig(baseLength)}`;
+  const raised = minimum === undefined ? scaled : `max(${scaled}; ${fig(minimum)})`;
   return [
     {
-      what: 'In proportion to the length, never below the floor',
-      formula: 'T = min(max(T0 · L/L0, Tmin), Tmax)',
-      withNumbers: `${fig(input.base)} · ${fig(input.length)} / ${fig(input.baseLength)}, at least ${floor}${cap}`,
-      value: fig(result.tolerance),
+      what: 'In proportion to the length',
+      formula: 'T0 · L / L0',
+      withNumbers: scaled,
+      value: `${fig(Fraction.from(base).times(Fraction.from(length)).dividedBy(Fraction.from(baseLength)).toText())} µm`,
+    },
+    {
+      what: 'Never below the floor, never above the cap',
+      formula: 'T = min(max(T0 · L/L0; Tmin); Tmax)',
+      withNumbers: maximum === undefined ? raised : `min(${raised}; ${fig(maximum)})`,
+      value: `${fig(result.tolerance)} µm`,
     },
   ];
 }
-
-/** The advice says its own formula; the figures that went in and the amounts that came out stand beside it. */
-export function correctionSteps(input: Record<string, unknown>, result: Record<string, unknown>): ExplainedStep[] {
-  const given = Object.entries(input).flatMap(([name, value]) => {
-    if (name === 'method' || name === 'kind') return [];
-    if (typeof value === 'string' || typeof value === 'number') return [`${name} = ${numeric(String(value))}`];
-    if (Array.isArray(value)) return [`${name}: ${listed(value.map(String))}`];
-    if (typeof value !== 'object' || value === null) return [];
-    return [
-      `${name}: ${Object.entries(value)
-        .map(([key, part]) => `${key} ${numeric(String(part))}`)
-        .join(', ')}`,
-    ];
-  });
-  const amounts = Object.entries(result).flatMap(([name, value]) => {
-    if (['method', 'kind', 'formula', 'verify', 'judgedBy', 'signed', 'deviation'].includes(name)) return [];
-    if (Array.isArray(value)) return [`${name}: ${listed(value.map(String))}`];
-    if (typeof value === 'string' || typeof value === 'boolean') return [`${name} ${numeric(String(value))}`];
-    if (typeof value !== 'object' || value === null) return [];
-    return [
-      `${name}: ${Object.entries(value)
-        .map(([key, part]) => `${key} ${numeric(String(part))}`)
-        .join(', ')}`,
-    ];
-  });
-  return [
-    {
-      what: 'Amount to set',
-      formula: String(result.formula ?? ''),
-      withNumbers: given.join('; '),
-      value: amounts.join('; '),
-    },
-    { what: 'Then', formula: 'measure again', withNumbers: '', value: String(result.verify ?? '') },
-  ];
-}
-
-const numeric = (text: string): string =>
-  /^[+-]?\d*\.?\d+$/.test(text) ? negative(text).replace(/^\((.*)\)$/, '$1') : text;

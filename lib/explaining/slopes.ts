@@ -1,6 +1,8 @@
 import type { ResultOf } from '@/lib/evaluation';
 import type { ExplainedStep } from './explanation';
-import { fig, listed, negative, rangeOf, um, umPerM } from './figures';
+import { alike, fig, meanText, negative, rangeOf, rising, spanOf, um, umPerM } from './figures';
+import { leastSquaresStep } from './least-squares';
+import { type ArmSlopes, armSlopes, type Setting } from './square-arms';
 
 interface Turned {
   positions: string[];
@@ -8,47 +10,51 @@ interface Turned {
   measuringLength?: string;
   judge?: string;
   sag?: string[];
+  localLength?: string;
 }
 
 /** Means over the angles at which the mandrel or disc stood. */
 function meanSteps(input: Turned, means: readonly string[]): ExplainedStep[] {
-  const angles = Object.keys(input.readings).sort((a, b) => Number(a) - Number(b));
-  const sum = angles.map((angle, k) =>
-    k === 0 ? fig(input.readings[angle]![0]!) : negative(input.readings[angle]![0]!),
-  );
-  const sag = input.sag ? ` + ${negative(input.sag[0]!)}` : '';
-  return [
-    {
-      what: `Mean at ${fig(input.positions[0]!)} mm over ${angles.map((angle) => `${fig(angle)}°`).join(', ')}${input.sag ? ', sag of the mandrel added' : ''}`,
-      formula: `m = (${angles.map((angle) => `r${fig(angle)}`).join(' + ')})/${angles.length}${input.sag ? ' + sag' : ''}`,
-      withNumbers: `(${sum.join(' + ')}) / ${angles.length}${sag}`,
-      value: um(means[0]!),
-      readings: angles.map((angle) => `/readings/${angle}/0`),
-    },
-    {
-      what: 'All means',
-      formula: 'm(z)',
-      withNumbers: `at ${listed(input.positions)} mm`,
-      value: `${listed(means)} µm`,
-    },
-  ];
+  const { positions, readings, sag } = input;
+  const order = rising(Object.keys(readings));
+  const angles = order.map((k) => Object.keys(readings)[k]!);
+  const step = (k: number): ExplainedStep => ({
+    what: `Mean at ${fig(positions[k]!)} mm${sag ? ', sag of the mandrel added' : ''}`,
+    formula: `m = (${angles.map((angle) => `r${fig(angle)}`).join(' + ')}) / ${angles.length}${sag ? ' + sag' : ''}`,
+    withNumbers: `${meanText(angles.map((angle) => readings[angle]![k]!))}${sag ? ` + ${negative(sag[k]!)}` : ''}`,
+    value: um(means[k]!),
+    readings: angles.map((angle) => `/readings/${angle}/${k}`),
+  });
+  const count = positions.length;
+  if (count <= 4) return positions.map((_, k) => step(k));
+  return [step(0), step(1), step(2), ...alike(count - 4), step(count - 1)];
 }
 
-const length = (input: Turned): string => {
-  if (input.measuringLength !== undefined) return input.measuringLength;
-  const numbers = input.positions.map(Number);
-  return String(Math.max(...numbers) - Math.min(...numbers));
-};
+const fitStep = (input: Turned, means: readonly string[], slope: string): ExplainedStep =>
+  leastSquaresStep({
+    what: 'Slope of the least-squares line through the means',
+    x: input.positions,
+    y: means,
+    names: ['z', 'm'],
+    factor: '1000',
+    value: umPerM(slope),
+  });
 
-const fitStep = (slope: string): ExplainedStep => ({
-  what: 'Slope of the least-squares line through the means',
-  formula: 'b = Σ(z − z̄)(m − m̄)/Σ(z − z̄)²',
-  withNumbers: 'z in m, m in µm',
-  value: umPerM(slope),
-});
+const lengthOf = (input: Turned): string => input.measuringLength ?? spanOf(input.positions);
 
 export function parallelismSteps(input: Turned, result: ResultOf<'parallelism'>): ExplainedStep[] {
   const means = meanSteps(input, result.means);
+  const local: ExplainedStep[] =
+    result.local === undefined
+      ? []
+      : [
+          {
+            what: `Largest range of the means over any ${fig(input.localLength ?? '0')} mm, for the local limit`,
+            formula: 'max over windows of (max m − min m)',
+            withNumbers: `over ${result.means.length} means`,
+            value: um(result.local),
+          },
+        ];
   if (input.judge === 'range') {
     const range = {
       what: 'Range of the means',
@@ -56,15 +62,16 @@ export function parallelismSteps(input: Turned, result: ResultOf<'parallelism'>)
       withNumbers: rangeOf(result.means),
       value: um(result.deviation),
     };
-    return [...means, range];
+    return [...means, ...local, range];
   }
   return [
     ...means,
-    fitStep(result.fitSlope),
+    ...local,
+    fitStep(input, result.means, result.fitSlope),
     {
       what: 'Over the measuring length',
       formula: 'e = b · L / 1000',
-      withNumbers: `${fig(result.fitSlope)} · ${fig(length(input))} / 1000`,
+      withNumbers: `${fig(result.fitSlope)} · ${fig(lengthOf(input))} / 1000`,
       value: um(result.deviation),
     },
   ];
@@ -73,18 +80,48 @@ export function parallelismSteps(input: Turned, result: ResultOf<'parallelism'>)
 export function squarenessToAxisSteps(input: Turned, result: ResultOf<'squareness-to-axis'>): ExplainedStep[] {
   return [
     ...meanSteps(input, result.means),
-    fitStep(result.fitSlope),
+    fitStep(input, result.means, result.fitSlope),
     {
-      what: 'Over the measuring length; falling readings are positive: concave',
+      what: 'Over the measuring length; readings that fall outwards are positive: concave',
       formula: 'e = −b · L / 1000',
-      withNumbers: `−${negative(result.fitSlope)} · ${fig(length(input))} / 1000`,
+      withNumbers: `−${negative(result.fitSlope)} · ${fig(lengthOf(input))} / 1000`,
       value: um(result.deviation),
     },
   ];
 }
 
+const armWords = { referenceArm: 'reference arm', measuredArm: 'measured arm' } as const;
+
+/** Slopes of both arms of one setting, and their sum. */
+function settingSteps(setting: Setting, name: 's1' | 's2', sum: string, slopes: ArmSlopes): ExplainedStep[] {
+  const where = name === 's1' ? 'square as first set up' : 'square turned over';
+  const arms = (['referenceArm', 'measuredArm'] as const).flatMap((arm) => {
+    const points = setting[arm]?.points;
+    if (!points) return [];
+    return [
+      leastSquaresStep({
+        what: `Slope of the ${armWords[arm]}, ${where}`,
+        x: points.map(({ position }) => position),
+        y: points.map(({ reading }) => reading),
+        names: ['x', 'r'],
+        factor: '1000',
+        value: umPerM(slopes[arm]),
+      }),
+    ];
+  });
+  return [
+    ...arms,
+    {
+      what: `Both arms together, ${where}`,
+      formula: `${name} = slope of the reference arm + slope of the measured arm`,
+      withNumbers: `${fig(slopes.referenceArm)} + ${negative(slopes.measuredArm)}`,
+      value: umPerM(sum),
+    },
+  ];
+}
+
 export function squarenessSteps(
-  input: { measuringLength: string; squareError?: string },
+  input: { first: Setting; second?: Setting; measuringLength: string; squareError?: string },
   result: ResultOf<'squareness'>,
 ): ExplainedStep[] {
   const machine: ExplainedStep =
@@ -96,67 +133,21 @@ export function squarenessSteps(
           value: umPerM(result.squareness),
         }
       : {
-          what: 'Squareness, mean of the square and the square turned over',
-          formula: '(s1 + s2)/2',
+          what: 'Squareness: mean of the square and the square turned over',
+          formula: '(s1 + s2) / 2',
           withNumbers: `(${fig(result.s1)} + ${negative(result.s2)}) / 2`,
           value: umPerM(result.squareness),
         };
   return [
-    {
-      what: 'Slopes of both arms together, square as first set up',
-      formula: 's1 = slope of the reference arm + slope of the measured arm',
-      withNumbers: 'least-squares lines through the readings of each arm',
-      value: umPerM(result.s1),
-    },
-    ...(result.s2 === undefined
-      ? []
-      : [
-          {
-            what: 'The same with the square turned over',
-            formula: 's2 = slope of the reference arm + slope of the measured arm',
-            withNumbers: 'least-squares lines through the readings of each arm',
-            value: umPerM(result.s2),
-          },
-        ]),
+    ...settingSteps(input.first, 's1', result.s1, armSlopes(input.first)),
+    ...(input.second && result.s2 !== undefined
+      ? settingSteps(input.second, 's2', result.s2, armSlopes(input.second))
+      : []),
     machine,
     {
       what: 'Over the measuring length; positive: more than 90°',
       formula: 'squareness · L / 1000',
       withNumbers: `${fig(result.squareness)} · ${fig(input.measuringLength)} / 1000`,
-      value: um(result.deviation),
-    },
-  ];
-}
-
-export function angularSteps(
-  input: { positions: string[]; forward: string[]; backward?: string[] },
-  result: ResultOf<'angular-deviation'>,
-): ExplainedStep[] {
-  return [
-    {
-      what: `Largest less smallest reading${input.backward ? ', both directions together' : ''}`,
-      formula: 'max − min',
-      withNumbers: rangeOf([...input.forward, ...(input.backward ?? [])]),
-      value: umPerM(result.deviation),
-    },
-  ];
-}
-
-export function twoCollarSteps(
-  input: { D1: string; D2: string; distance: string },
-  result: ResultOf<'two-collar'>,
-): ExplainedStep[] {
-  return [
-    {
-      what: 'Slope of the spindle axis in the plane of the tool; positive: the free end leans toward the tool',
-      formula: '1000000 · (D1 − D2)/(2·L)',
-      withNumbers: `1000000 · (${fig(input.D1)} − ${fig(input.D2)}) / (2 · ${fig(input.distance)})`,
-      value: umPerM(result.slope),
-    },
-    {
-      what: 'Half the difference of the diameters, over the distance',
-      formula: '1000 · (D1 − D2)/2',
-      withNumbers: `1000 · (${fig(input.D1)} − ${fig(input.D2)}) / 2`,
       value: um(result.deviation),
     },
   ];

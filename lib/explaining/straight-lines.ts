@@ -1,48 +1,42 @@
 import type { ResultOf } from '@/lib/evaluation';
+import { Fraction } from '@/lib/units/fraction';
 import type { ExplainedStep } from './explanation';
-import { extremes, fig, listed, negative, rangeOf, um, umPerM } from './figures';
+import { alike, extremes, fig, meanOf, negative, rangeOf, rising, um, umPerM } from './figures';
+import { leastSquaresStep } from './least-squares';
 
-const lineWords: Record<string, string> = {
+export const lineWords: Record<string, string> = {
   'end-points': 'line through the end points',
   'least-squares': 'least-squares line',
-  'minimum-zone': 'line of the minimum zone: its slope is that of an edge of the convex hull',
-};
-const slopeFormula: Record<string, string> = {
-  'end-points': 'b = (z last − z first)/(x last − x first)',
-  'least-squares': 'b = Σ(x − x̄)(z − z̄)/Σ(x − x̄)²',
-  'minimum-zone': 'b: that slope for which max(z − b·x) − min(z − b·x) is least',
+  'minimum-zone': 'line in the middle of the narrowest strip',
 };
 
-interface Line {
+export interface Line {
   slope: string;
   intercept: string;
   residuals: readonly string[];
   deviation: string;
 }
 
-/** Reference line, residuals at the two places that decide, width. */
+/** Reference line, distances at the two places that decide, width. */
 export function lineSteps(
   line: Line,
   reference: string,
-  positions: readonly string[],
-  readings: readonly string[],
+  x: readonly string[],
+  z: readonly string[],
+  name = 'z',
 ): ExplainedStep[] {
   const { atLargest, atSmallest } = extremes(line.residuals);
-  const residual = (at: number): ExplainedStep => ({
-    what: `Distance from the line at ${fig(positions[at]!)} mm, ${at === atLargest ? 'the largest' : 'the smallest'}`,
-    formula: 'd = z − (a + b·x/1000)',
-    withNumbers: `${fig(readings[at]!)} − (${fig(line.intercept)} + ${negative(line.slope)} · ${negative(positions[at]!)} / 1000)`,
+  const distance = (at: number): ExplainedStep => ({
+    what: `Distance from the line at ${fig(x[at]!)} mm, ${at === atLargest ? 'the largest' : 'the smallest'}`,
+    formula: `d = ${name} − (a + b · x / 1000)`,
+    withNumbers: `${fig(z[at]!)} − (${fig(line.intercept)} + ${negative(line.slope)} · ${negative(x[at]!)} / 1000)`,
     value: um(line.residuals[at]!),
   });
   return [
-    {
-      what: `Reference: ${lineWords[reference] ?? reference}`,
-      formula: slopeFormula[reference] ?? 'b',
-      withNumbers: `x: ${listed(positions)} mm; z: ${listed(readings)} µm`,
-      value: `b = ${umPerM(line.slope)}, a = ${um(line.intercept)}`,
-    },
-    residual(atLargest),
-    ...(atSmallest === atLargest ? [] : [residual(atSmallest)]),
+    slopeStep(line, reference, x, z, name),
+    interceptStep(line, reference, x, z, name),
+    distance(atLargest),
+    ...(atSmallest === atLargest ? [] : [distance(atSmallest)]),
     {
       what: 'Width about the line',
       formula: 'S = max d − min d',
@@ -52,10 +46,80 @@ export function lineSteps(
   ];
 }
 
-type Points = { position: string; reading: string }[];
+function slopeStep(line: Line, reference: string, x: readonly string[], z: readonly string[], name: string) {
+  const what = `Slope of the ${lineWords[reference] ?? reference}`;
+  if (reference === 'least-squares') {
+    return leastSquaresStep({ what, x, y: z, names: ['x', name], factor: '1000', value: umPerM(line.slope) });
+  }
+  const through = reference === 'end-points' ? ends(x) : edge(line.residuals, x);
+  if (!through) {
+    return {
+      what,
+      formula: 'b: that slope for which max d − min d is least',
+      withNumbers: `over ${x.length} points`,
+      value: umPerM(line.slope),
+    };
+  }
+  const [first, last] = through;
+  const where = `${fig(x[first]!)} and ${fig(x[last]!)} mm`;
+  return {
+    what:
+      reference === 'end-points'
+        ? `${what}, at ${where}`
+        : `${what}; its edge touches the readings at ${where}, so it has their slope`,
+    formula: `b = (${name}2 − ${name}1) / (x2 − x1) · 1000`,
+    withNumbers: `(${fig(z[last]!)} − ${negative(z[first]!)}) / (${fig(x[last]!)} − ${negative(x[first]!)}) · 1000`,
+    value: umPerM(line.slope),
+  };
+}
+
+function interceptStep(line: Line, reference: string, x: readonly string[], z: readonly string[], name: string) {
+  const slope = negative(line.slope);
+  const value = um(line.intercept);
+  if (reference === 'least-squares') {
+    return {
+      what: 'Height of the line at x = 0',
+      formula: `a = ${name}̄ − b · x̄ / 1000`,
+      withNumbers: `${fig(meanOf(z))} − ${slope} · ${negative(meanOf(x))} / 1000`,
+      value,
+    };
+  }
+  if (reference === 'end-points') {
+    const [first] = ends(x);
+    return {
+      what: 'Height of the line at x = 0',
+      formula: `a = ${name}1 − b · x1 / 1000`,
+      withNumbers: `${fig(z[first]!)} − ${slope} · ${negative(x[first]!)} / 1000`,
+      value,
+    };
+  }
+  const { atLargest, atSmallest } = extremes(line.residuals);
+  const part = (at: number) => `${fig(z[at]!)} − ${slope} · ${negative(x[at]!)} / 1000`;
+  return {
+    what: 'Height of the line at x = 0: half-way between both edges of the strip',
+    formula: `a = ((${name}u − b · xu / 1000) + (${name}l − b · xl / 1000)) / 2`,
+    withNumbers: `((${part(atLargest)}) + (${part(atSmallest)})) / 2`,
+    value,
+  };
+}
+
+function ends(x: readonly string[]): [number, number] {
+  const order = rising(x);
+  return [order[0]!, order.at(-1)!];
+}
+
+/** Two readings on the same edge of the strip, the furthest apart; null where rounding of the last digit hides them. */
+function edge(residuals: readonly string[], x: readonly string[]): [number, number] | null {
+  const { largest, smallest } = extremes(residuals);
+  for (const side of [largest, smallest]) {
+    const touching = rising(x).filter((k) => residuals[k] === side);
+    if (touching.length > 1) return [touching[0]!, touching.at(-1)!];
+  }
+  return null;
+}
 
 export function straightnessSteps(
-  input: { reference: string; points: Points },
+  input: { reference: string; points: { position: string; reading: string }[]; localLength?: string },
   result: ResultOf<'straightness'>,
 ): ExplainedStep[] {
   const steps = lineSteps(
@@ -66,89 +130,48 @@ export function straightnessSteps(
   );
   if (result.local === undefined) return steps;
   const local: ExplainedStep = {
-    what: 'Largest width over any window of the local length, a line of the same kind fitted anew in each',
+    what: `Largest width over any ${fig(input.localLength ?? '0')} mm, a line of the same kind fitted anew in each window`,
     formula: 'S local = max over windows of (max d − min d)',
     withNumbers:
       result.localAt === undefined ? 'no window holds three points' : `worst window from ${fig(result.localAt)} mm on`,
     value: um(result.local),
   };
-  return [...steps.slice(0, -1), local, steps.at(-1)!];
+  return [local, ...steps];
 }
 
 export function fromAnglesSteps(
   input: { reference: string; stepLength: string; angles: string[]; returnAngles?: string[] },
   result: ResultOf<'straightness-from-angles'>,
 ): ExplainedStep[] {
-  const [first, second] = result.heights;
-  const angle = input.returnAngles
-    ? `(${fig(input.angles[0]!)} + ${negative(input.returnAngles[0]!)}) / 2`
-    : fig(input.angles[0]!);
-  const positions = result.heights.map((_, k) => String(Number(input.stepLength) * k));
+  const back = input.returnAngles;
+  const { heights } = result;
+  const step = Fraction.from(input.stepLength);
+  const x = heights.map((_, k) => step.times(Fraction.of(k)).toText());
+  const angle = (k: number) =>
+    back ? `(${fig(input.angles[k]!)} + ${negative(back[k]!)}) / 2` : negative(input.angles[k]!);
+  const height = (k: number): ExplainedStep => ({
+    what: `Height after step ${k + 1}${back ? ', out and back averaged' : ''}`,
+    formula: `h(${k + 1}) = h(${k}) + step · angle / 1000`,
+    withNumbers: `${fig(heights[k]!)} + ${fig(input.stepLength)} · ${angle(k)} / 1000`,
+    value: um(heights[k + 1]!),
+    readings: [`/angles/${k}`, ...(back ? [`/returnAngles/${k}`] : [])],
+  });
+  const count = input.angles.length;
+  const shown = count <= 5 ? input.angles.map((_, k) => height(k)) : [0, 1, 2].map(height);
   return [
-    {
-      what: `Height of each foot over the last${input.returnAngles ? ', out and back averaged' : ''}`,
-      formula: 'h(k) = h(k−1) + step · angle / 1000',
-      withNumbers: `first step: ${fig(first!)} + ${fig(input.stepLength)} · ${angle} / 1000`,
-      value: um(second!),
-    },
-    ...(result.closure === undefined
-      ? []
-      : [
-          {
-            what: 'Closure of both runs',
-            formula: 'h(n) out − h(n) back',
-            withNumbers: 'each run alone',
-            value: um(result.closure),
-          },
-        ]),
-    ...lineSteps(result, input.reference, positions, result.heights),
+    ...shown,
+    ...(count <= 5 ? [] : [...alike(count - 4), height(count - 1)]),
+    ...(back && result.closure !== undefined ? [closure(input.stepLength, input.angles, back, result.closure)] : []),
+    ...lineSteps(result, input.reference, x, heights, 'h'),
   ];
 }
 
-export function reversalSteps(
-  input: { positions: string[]; first: string[]; second: string[]; reference?: string },
-  result: ResultOf<'straightness-reversal'>,
-): ExplainedStep[] {
-  return [
-    {
-      what: `Profile of the motion, at ${fig(input.positions[0]!)} mm`,
-      formula: 's = (second − first)/2',
-      withNumbers: `(${fig(input.second[0]!)} − ${negative(input.first[0]!)}) / 2`,
-      value: um(result.machine[0]!),
-    },
-    {
-      what: 'The straightedge’s own profile, at the same place',
-      formula: 'e = (first + second)/2',
-      withNumbers: `(${fig(input.first[0]!)} + ${negative(input.second[0]!)}) / 2`,
-      value: um(result.straightedge[0]!),
-    },
-    {
-      what: `Straightness of the motion about the ${lineWords[input.reference ?? 'minimum-zone']}`,
-      formula: 'S = max d − min d',
-      withNumbers: `s: ${listed(result.machine)} µm`,
-      value: um(result.deviation),
-    },
-  ];
-}
-
-export function flatnessSteps(
-  input: { reference: string; points: { x: string; y: string; reading: string }[] },
-  result: ResultOf<'flatness'>,
-): ExplainedStep[] {
-  const { atLargest, atSmallest } = extremes(result.residuals);
-  const at = (k: number) => `x ${fig(input.points[k]!.x)}, y ${fig(input.points[k]!.y)}`;
-  return [
-    {
-      what: `Reference plane: ${input.reference === 'least-squares' ? 'least squares' : input.reference === 'minimum-zone' ? 'middle of the two parallel planes of least separation' : 'through three points'}`,
-      formula: 'z = a + b·x/1000 + c·y/1000',
-      withNumbers: `${input.points.length} points`,
-      value: `a = ${um(result.a)}, b = ${umPerM(result.b)}, c = ${umPerM(result.c)}`,
-    },
-    {
-      what: `Distance of the planes: largest at ${at(atLargest)}, smallest at ${at(atSmallest)}`,
-      formula: 'max d − min d',
-      withNumbers: rangeOf(result.residuals),
-      value: um(result.deviation),
-    },
-  ];
+function closure(step: string, out: string[], back: string[], value: string): ExplainedStep {
+  const sum = (angles: string[]) => Fraction.sum(angles.map((text) => Fraction.from(text))).toText();
+  return {
+    what: 'Closure: end height by the way out less that by the way back, for information',
+    formula: 'step · (Σ out − Σ back) / 1000',
+    withNumbers: `${fig(step)} · (${fig(sum(out))} − ${negative(sum(back))}) / 1000`,
+    value: um(value),
+  };
 }

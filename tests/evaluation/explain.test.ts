@@ -11,27 +11,9 @@ import { defaultSetUp } from '@/lib/sheet/default-set-up';
 import { judgeSheet } from '@/lib/sheet/judge-sheet';
 import { allFields, sheetFields } from '@/lib/sheet/sheet-fields';
 import type { Cells } from '@/lib/sheet/types';
-import { Dec } from '@/lib/units/decimal';
 import { allDefinitions } from '@/standards/registry';
+import { checkArithmetic } from './check-arithmetic';
 import job from './data/worked-job.json';
-import { calculate } from './read-arithmetic';
-
-/** Every step that is plain arithmetic is worked out again by a reader of its own. */
-function checkArithmetic(steps: { what: string; withNumbers: string; value: string }[]): number {
-  let checked = 0;
-  for (const { what, withNumbers, value } of steps) {
-    const result = calculate(withNumbers);
-    const shown = /^−?\d+(\.\d+)?/.exec(value)?.[0];
-    if (result === null || shown === undefined) continue;
-    checked += 1;
-    const wanted = new Dec(shown.replace('−', '-'));
-    // A figure that was cut in the formula is good to about its last shown place.
-    const slack =
-      withNumbers.includes('…') || value.includes('…') ? wanted.abs().times('1e-4').plus('0.00001') : new Dec('1e-9');
-    expect(result.minus(wanted).abs().lte(slack), `${what}: ${withNumbers} gives ${result}, said ${value}`).toBe(true);
-  }
-  return checked;
-}
 
 describe('the worked job', () => {
   const passes = job.plan.flatMap((sheet) =>
@@ -92,5 +74,5 @@ it('works out again a fair part of all steps', () => {
     const outcome = judgeSheet(rules, definition, cells);
     return outcome.state === 'complete' ? checkArithmetic(explainOutcome(outcome, rules, definition, cells).steps) : 0;
   });
-  expect(counts.reduce((sum, count) => sum + count, 0)).toBeGreaterThan(sheets.length);
+  expect(counts.reduce((sum, count) => sum + count, 0)).toBeGreaterThan(3 * sheets.length);
 });

@@ -41,7 +41,6 @@ export const angleGuides: MethodGuide[] = [
       given('range', 'µm', 'largest less smallest mean'),
       reversed,
       maybe('local', 'µm', 'largest range over any window of the local length'),
-      maybe('localAt', 'mm', 'where that window begins'),
     ],
     sign: 'Positive: the readings rise along the positions. What that means for the machine depends on where the plunger stands.',
     sensitiveTo: [
