@@ -2,13 +2,15 @@ import type { EvaluationInput, EvaluationMethod, EvaluationResult, ResultOf } fr
 import { ruleSet } from '@/lib/evaluation';
 import { lostMotionSteps, referenceShiftSteps } from './axes';
 import { circularSteps, roundnessSteps } from './circles';
+import { conformitySteps } from './conformity';
 import { correctionSteps } from './corrections';
 import type { ExplainedStep, Explanation } from './explanation';
-import { conformitySteps, roundingSteps, toleranceSteps, uncertaintySteps } from './helpers';
+import { roundingSteps, toleranceSteps, uncertaintySteps } from './helpers';
+import { indexingSteps } from './indexing';
 import { angularSteps, diameterSteps, driftSteps, twoCollarSteps } from './pieces';
 import { flatnessSteps, reversalSteps } from './planes-and-reversals';
 import { positioningSteps } from './positioning';
-import { indexingSteps, rotationSteps } from './rotation-and-indexing';
+import { rotationSteps } from './rotation';
 import { axialSteps, runOutSteps } from './run-outs';
 import { parallelismSteps, squarenessSteps, squarenessToAxisSteps } from './slopes';
 import { sources } from './sources';

@@ -1,7 +1,7 @@
 import { evaluate, type ResultOf } from '@/lib/evaluation';
 import type { ExplainedStep } from './explanation';
 import { alike, extremes, fig, negative, rangeOf, um, umPerM } from './figures';
-import { lineSteps } from './straight-lines';
+import { lineSteps } from './line-steps';
 
 type LineType = 'end-points' | 'least-squares' | 'minimum-zone';
 

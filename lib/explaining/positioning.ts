@@ -1,25 +1,10 @@
-import type { ResultOf } from '@/lib/evaluation';
 import { Dec } from '@/lib/units/decimal';
-import { Fraction } from '@/lib/units/fraction';
 import type { ExplainedStep } from './explanation';
-import { fig, meanText, negative, um, umPerM } from './figures';
-
-type Result = ResultOf<'positioning'>;
-type Position = Result['positions'][number];
-type Way = 'forward' | 'backward';
-interface Input {
-  kind: string;
-  judge?: string;
-  targets: string[];
-  forward: string[][];
-  backward?: string[][];
-  temperature?: { celsius: string; alpha: string; zero?: string };
-}
-
-const arrows: Record<Way, string> = { forward: '↑', backward: '↓' };
+import { fig, meanText, negative } from './figures';
+import { AtTargets, arrows, type PositioningInput, type Result, type Way } from './positioning-targets';
 
 /** A, E, R, B or M, from the readings at the targets that decide. */
-export function positioningSteps(input: Input, result: Result): ExplainedStep[] {
+export function positioningSteps(input: PositioningInput, result: Result): ExplainedStep[] {
   const figure = judgedFigure(input, result);
   const steps = new Steps(input, result);
   const ways: Way[] = figure.endsWith('forward')
@@ -43,22 +28,13 @@ export function positioningSteps(input: Input, result: Result): ExplainedStep[] 
   }
 }
 
-const both = ({ backward }: Input): Way[] => (backward ? ['forward', 'backward'] : ['forward']);
+const both = ({ backward }: PositioningInput): Way[] => (backward ? ['forward', 'backward'] : ['forward']);
 
-function judgedFigure({ judge, backward }: Input, { cycles }: Result): string {
+function judgedFigure({ judge, backward }: PositioningInput, { cycles }: Result): string {
   return judge ?? `${cycles === '1' ? 'E' : 'A'}${backward ? '' : 'forward'}`;
 }
 
-class Steps {
-  private readonly unit: (text: string) => string;
-
-  constructor(
-    private readonly input: Input,
-    private readonly result: Result,
-  ) {
-    this.unit = input.kind === 'rotary' ? umPerM : um;
-  }
-
+class Steps extends AtTargets {
   /** A: upper edge at one target less lower edge at another. */
   band(figure: string, ways: Way[]): ExplainedStep[] {
     const { max, min } = this.places(figure);
@@ -161,63 +137,6 @@ class Steps {
     return { steps, value: edgeOf(way) };
   }
 
-  private reversalAt(target: string): ExplainedStep[] {
-    return [
-      ...this.corrected(target),
-      this.meanStep(target, 'forward'),
-      this.meanStep(target, 'backward'),
-      this.reversalStep(target),
-    ];
-  }
-
-  private reversalStep(target: string): ExplainedStep {
-    return {
-      what: `Reversal at ${this.place(target)}`,
-      formula: 'B = x̄↑ − x̄↓',
-      withNumbers: `${fig(this.mean(target, 'forward'))} − ${negative(this.mean(target, 'backward'))}`,
-      value: this.unit(this.at(target).B ?? '0'),
-    };
-  }
-
-  private meanStep(target: string, way: Way): ExplainedStep {
-    const row = this.row(target);
-    return {
-      what: `Mean at ${this.place(target)}, ${way === 'forward' ? '+' : '−'} direction${this.input.temperature ? ', corrected to 20 °C' : ''}`,
-      formula: `x̄${arrows[way]} = Σx / n`,
-      withNumbers: meanText(this.readings(target, way)),
-      value: this.unit(this.mean(target, way)),
-      readings: this.readings(target, way).map((_, cycle) => `/${way}/${row}/${cycle}`),
-    };
-  }
-
-  private deviationStep(target: string, way: Way): ExplainedStep {
-    const mean = this.mean(target, way);
-    const readings = this.readings(target, way);
-    const squares = readings.map((value) => `(${fig(value)} − ${negative(mean)})²`).join(' + ');
-    return {
-      what: `Standard deviation there, ${way === 'forward' ? '+' : '−'} direction`,
-      formula: `s${arrows[way]} = √(Σ(x − x̄)² / (n − 1))`,
-      withNumbers: readings.length <= 8 ? `√((${squares}) / ${readings.length - 1})` : `n = ${readings.length}`,
-      value: this.unit(this.s(target, way)),
-    };
-  }
-
-  /** The correction of one reading; every other one is corrected alike. */
-  private corrected(target: string): ExplainedStep[] {
-    const { temperature, forward } = this.input;
-    if (!temperature) return [];
-    const { celsius, alpha, zero = '0' } = temperature;
-    const raw = forward[this.row(target)]![0]!;
-    return [
-      {
-        what: `To 20 °C first, here the first reading at ${this.place(target)}`,
-        formula: 'x20 = x − (P − zero) · α · (T − 20) / 1000',
-        withNumbers: `${fig(raw)} − (${fig(target)} − ${negative(zero)}) · ${negative(alpha)} · (${fig(celsius)} − 20) / 1000`,
-        value: this.unit(this.readings(target, 'forward')[0]!),
-      },
-    ];
-  }
-
   private last(figure: string, formula: string, withNumbers: string): ExplainedStep {
     const words = figure === 'meanB' ? 'B̄' : figure.replace('forward', '↑').replace('backward', '↓');
     return {
@@ -226,47 +145,6 @@ class Steps {
       withNumbers,
       value: this.unit(this.result.deviation),
     };
-  }
-
-  private row(target: string): number {
-    return this.result.positions.findIndex((position) => position.target === target);
-  }
-
-  private at(target: string): Position {
-    return this.result.positions[this.row(target)]!;
-  }
-
-  private mean(target: string, way: Way): string {
-    const { meanForward, meanBackward = '0' } = this.at(target);
-    return way === 'forward' ? meanForward : meanBackward;
-  }
-
-  private s(target: string, way: Way): string {
-    const { sForward = '0', sBackward = '0' } = this.at(target);
-    return way === 'forward' ? sForward : sBackward;
-  }
-
-  private places(figure: string): { max: string; min: string } {
-    const found = (this.result.at as Record<string, { max: string; min: string } | undefined>)[figure];
-    return found ?? { max: this.result.positions[0]!.target, min: this.result.positions[0]!.target };
-  }
-
-  private place(target: string): string {
-    return `${fig(target)}${this.input.kind === 'rotary' ? '°' : ' mm'}`;
-  }
-
-  /** Readings at a target, brought to 20 °C where the input asks for it. */
-  private readings(target: string, way: Way): string[] {
-    const raw = this.input[way]?.[this.row(target)] ?? [];
-    const { temperature } = this.input;
-    if (!temperature) return raw;
-    const { celsius, alpha, zero = '0' } = temperature;
-    const growth = Fraction.from(target)
-      .minus(Fraction.from(zero))
-      .times(Fraction.from(alpha))
-      .times(Fraction.from(celsius).minus(Fraction.of(20)))
-      .dividedBy(Fraction.of(1000));
-    return raw.map((text) => Fraction.from(text).minus(growth).toText());
   }
 }
 
