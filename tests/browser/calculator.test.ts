@@ -112,9 +112,9 @@ describe('the calculator, for somebody without an account', () => {
     await page.getByText('does not fit here').first().waitFor();
     expect(await page.getByLabel('Tolerance as given').inputValue()).toBe('15');
     await page.getByLabel('Measured length').fill('240');
-    await page.getByText('15 · 240 / 300').waitFor();
+    await page.getByText('15 · 240 / 300').first().waitFor();
     await page.reload();
-    await page.getByText('15 · 240 / 300').waitFor();
+    await page.getByText('15 · 240 / 300').first().waitFor();
     await context.close();
   });
 
