@@ -31,8 +31,11 @@ function said(model: ReportModel): string[] {
     ...model.instruments.map(({ number }) => number),
     ...model.summary.flatMap((row) => [row.title, row.asFound, row.asLeft, row.toleranceMm]),
     ...model.blocks.flatMap(({ passes }) => passes.flatMap(({ resultMm, kindWords }) => [resultMm, kindWords])),
+    // Sets taken while adjusting print what they came to; their readings stay in the data.
     ...model.blocks.flatMap(({ passes }) =>
-      passes.flatMap(({ tables }) => tables.flatMap(({ rows }) => rows.flatMap(({ cells }) => cells))),
+      passes.flatMap(({ tables, kind }) =>
+        kind === 'adjusting' ? [] : tables.flatMap(({ rows }) => rows.flatMap(({ cells }) => cells)),
+      ),
     ),
   ].flatMap((text) => (text ? [squeezed(text)] : []));
 }
