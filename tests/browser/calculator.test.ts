@@ -17,10 +17,13 @@ async function opened(page: Page, method: string): Promise<void> {
   await page.goto(`/calculator/${method}`);
   // A key that comes before its script has been loaded is nobody's.
   await expect
-    .poll(async () => {
-      await page.getByRole('button', { name: 'Clear' }).click();
-      return page.getByText('Cleared.').isVisible();
-    })
+    .poll(
+      async () => {
+        await page.getByRole('button', { name: 'Clear' }).click();
+        return page.getByText('Cleared.').isVisible();
+      },
+      { timeout: 15_000 },
+    )
     .toBe(true);
 }
 
@@ -74,11 +77,14 @@ describe('the calculator, for somebody without an account', () => {
     ).toBe('0,012 mm');
     // A browser fills fields in again by itself; a choice counts from when the page listens.
     await expect
-      .poll(async () => {
-        await page.getByLabel('What is judged').selectOption('slope');
-        await page.getByLabel('What is judged').selectOption('range');
-        return page.locator('ol').getByText('Range of the means').isVisible();
-      })
+      .poll(
+        async () => {
+          await page.getByLabel('What is judged').selectOption('slope');
+          await page.getByLabel('What is judged').selectOption('range');
+          return page.locator('ol').getByText('Range of the means').isVisible();
+        },
+        { timeout: 15_000 },
+      )
       .toBe(true);
     expect(
       await page
